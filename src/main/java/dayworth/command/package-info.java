@@ -1,0 +1,2 @@
+/** The command line: parse, call one thing, print. */
+package dayworth.command;

@@ -1,0 +1,59 @@
+package dayworth.decision;
+
+import dayworth.engine.Curve;
+import dayworth.network.Timing;
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * What the finish costs, for every finish: the answer of {@code dayworth curve}.
+ *
+ * @param of the case
+ * @param curve the exact curve of direct cost
+ * @param asPlanned every activity its normal way; may be longer or dearer than the first row
+ * @param rows the finishes of curve.csv, longest first
+ * @param least the rows with the least total, longest first; never empty
+ * @param steps one for each piece of the curve
+ * @param atContract the cheapest way to finish by the contract finish; empty where there is none or
+ *     it cannot be met
+ * @param crashEverything every activity at its shortest; its direct cost is rarely worth it
+ * @param asked the plan asked for: the longest of the least total, or another
+ * @param provedRows how many rows the checker proved; all of them, or there is no answer
+ * @param crossCheck the linear programme's agreement
+ */
+public record CurveAnswer(
+    Case of,
+    Curve curve,
+    Finish asPlanned,
+    List<Finish> rows,
+    List<Finish> least,
+    List<StepFacts> steps,
+    Optional<Finish> atContract,
+    Finish crashEverything,
+    AskedPlan asked,
+    int provedRows,
+    CrossCheck crossCheck) {
+
+  public CurveAnswer {
+    rows = List.copyOf(rows);
+    least = List.copyOf(least);
+    steps = List.copyOf(steps);
+  }
+
+  /** The longest of the finishes with the least total. */
+  public Finish leastTotal() {
+    return least.get(0);
+  }
+
+  public Finish shortest() {
+    return rows.get(rows.size() - 1);
+  }
+
+  /**
+   * A plan with its times.
+   *
+   * @param finish what it costs
+   * @param timing its durations and times
+   */
+  public record AskedPlan(Finish finish, Timing timing) {}
+}

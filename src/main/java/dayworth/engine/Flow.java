@@ -1,0 +1,55 @@
+package dayworth.engine;
+
+import dayworth.value.SlopeScale;
+import java.util.EnumMap;
+import java.util.Map;
+
+/**
+ * The dual side of a point of the curve: how much money per tick runs over each constraint, in
+ * units of a slope scale. It carries no lengths and no limits: a checker takes those from the
+ * activities and links themselves.
+ */
+public final class Flow {
+
+  /** What a unit of flow runs over; all are indexed by activity but {@link #LINK}. */
+  public enum Over {
+    /** Start to finish, over the normal duration; at most the activity's cost slope. */
+    SLOPE,
+    /** Start to finish, over the crash duration: it cannot be shorter. */
+    CRASH,
+    /** Finish to start: it cannot be longer than normal. */
+    BACK_OVER_NORMAL,
+    /** Finish to start, where crashing is cheaper: each tick above crash costs the slope. */
+    BACK_OVER_CRASH,
+    /** Project start to the activity's start, over its not-before time. */
+    FROM_PROJECT,
+    /** The activity's finish to the project finish. */
+    TO_PROJECT,
+    /** A link, by its index. */
+    LINK
+  }
+
+  private final SlopeScale scale;
+  private final Map<Over, long[]> amounts = new EnumMap<>(Over.class);
+
+  /** No flow at all: the bound that nothing is cheaper than the cheapest way of each activity. */
+  public Flow(SlopeScale scale, int activities, int links) {
+    this.scale = scale;
+    for (Over over : Over.values()) {
+      amounts.put(over, new long[over == Over.LINK ? links : activities]);
+    }
+  }
+
+  /** What one unit of flow is worth. */
+  public SlopeScale scale() {
+    return scale;
+  }
+
+  public long get(Over over, int index) {
+    return amounts.get(over)[index];
+  }
+
+  public void set(Over over, int index, long amount) {
+    amounts.get(over)[index] = amount;
+  }
+}

@@ -1,0 +1,69 @@
+package dayworth.network;
+
+import dayworth.value.Money;
+
+/**
+ * A piece of contiguous work that can be done in its normal duration, or faster for other money
+ * along a straight line.
+ *
+ * @param id unique in its network
+ * @param name for people; may be empty
+ * @param group trade, area or crew; may be empty
+ * @param normal normal duration in ticks, at least 0
+ * @param crash shortest duration in ticks, 0 to {@code normal}; {@code normal} if it cannot be
+ *     compressed
+ * @param normalCost direct cost at the normal duration
+ * @param crashCost direct cost at the crash duration; {@code normalCost} if it cannot be compressed
+ * @param notBefore earliest start in ticks after the project start; 0 for none
+ */
+public record Activity(
+    String id,
+    String name,
+    String group,
+    long normal,
+    long crash,
+    Money normalCost,
+    Money crashCost,
+    long notBefore) {
+
+  public Activity {
+    if (crash < 0 || normal < crash || notBefore < 0) {
+      throw new IllegalArgumentException(
+          "activity " + id + ": 0 <= crash <= normal and not before >= 0 must hold");
+    }
+    if (crash == normal && !normalCost.equals(crashCost)) {
+      throw new IllegalArgumentException(
+          "activity " + id + ": a duration has one cost, so equal durations cost the same");
+    }
+  }
+
+  /** An activity that takes what it takes. */
+  public static Activity fixed(String id, long duration, Money cost) {
+    return new Activity(id, "", "", duration, duration, cost, cost, 0);
+  }
+
+  /** An activity that can be compressed along a straight line from normal to crash. */
+  public static Activity compressible(
+      String id, long normal, Money normalCost, long crash, Money crashCost) {
+    return new Activity(id, "", "", normal, crash, normalCost, crashCost, 0);
+  }
+
+  public boolean isCompressible() {
+    return crash < normal;
+  }
+
+  /** The most ticks that can be taken out. */
+  public long mostShortening() {
+    return normal - crash;
+  }
+
+  /** What all of the compression costs; negative where crashing is cheaper. */
+  public Money crashExtra() {
+    return crashCost.minus(normalCost);
+  }
+
+  /** The cost slope: money for each tick of compression; zero if it cannot be compressed. */
+  public Money slope() {
+    return isCompressible() ? crashExtra().dividedBy(mostShortening()) : Money.ZERO;
+  }
+}

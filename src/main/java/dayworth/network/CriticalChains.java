@@ -1,0 +1,101 @@
+package dayworth.network;
+
+import java.math.BigInteger;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.Collections;
+import java.util.List;
+
+/**
+ * The chains of critical activities from one that waits for nothing to one that nothing waits for.
+ *
+ * <p>Two critical activities are neighbours on a chain if a link between them has no slack. The
+ * links make no loop, so chains are counted exactly from the end backwards, the count of an
+ * activity being the sum over its neighbours; nothing is listed to be counted, and the count may be
+ * astronomically large. O(activities + links) additions.
+ */
+public final class CriticalChains {
+
+  private final Network network;
+  private final Timing timing;
+  private final BigInteger[] chainsFrom;
+  private final List<Integer> starts = new ArrayList<>();
+
+  private CriticalChains(Network network, Timing timing) {
+    this.network = network;
+    this.timing = timing;
+    this.chainsFrom = new BigInteger[network.size()];
+    Arrays.fill(chainsFrom, BigInteger.ZERO);
+    boolean[] waits = new boolean[network.size()];
+    for (int position = network.size() - 1; position >= 0; position--) {
+      int activity = network.inOrder(position);
+      if (timing.isCritical(activity)) {
+        countFrom(activity, waits);
+      }
+    }
+    for (int i = 0; i < network.size(); i++) {
+      if (timing.isCritical(i) && !waits[i]) {
+        starts.add(i);
+      }
+    }
+  }
+
+  public static CriticalChains of(Network network, Timing timing) {
+    return new CriticalChains(network, timing);
+  }
+
+  public BigInteger count() {
+    return starts.stream().map(i -> chainsFrom[i]).reduce(BigInteger.ZERO, BigInteger::add);
+  }
+
+  /** The first few chains in file order, each as activity indices. */
+  public List<List<Integer>> first(int most) {
+    List<List<Integer>> found = new ArrayList<>();
+    List<List<Integer>> open = new ArrayList<>();
+    for (int i = starts.size() - 1; i >= 0; i--) {
+      open.add(List.of(starts.get(i)));
+    }
+    while (!open.isEmpty() && found.size() < most) {
+      List<Integer> chain = open.remove(open.size() - 1);
+      List<Integer> next = neighbours(chain.get(chain.size() - 1));
+      if (next.isEmpty()) {
+        found.add(chain);
+      }
+      Collections.reverse(next);
+      for (int activity : next) {
+        List<Integer> longer = new ArrayList<>(chain);
+        longer.add(activity);
+        open.add(longer);
+      }
+    }
+    return found;
+  }
+
+  private void countFrom(int activity, boolean[] waits) {
+    List<Integer> next = neighbours(activity);
+    BigInteger count = next.isEmpty() ? BigInteger.ONE : BigInteger.ZERO;
+    for (int neighbour : next) {
+      waits[neighbour] = true;
+      count = count.add(chainsFrom[neighbour]);
+    }
+    chainsFrom[activity] = count;
+  }
+
+  /** Critical successors without slack, each once, in file order. */
+  private List<Integer> neighbours(int activity) {
+    List<Integer> next = new ArrayList<>();
+    for (int k = 0; k < network.linksOutOf(activity); k++) {
+      Link link = network.link(network.linkOutOf(activity, k));
+      if (timing.isCritical(link.successor()) && timing.slack(link) == 0) {
+        next.add(link.successor());
+      }
+    }
+    next.sort(null);
+    for (int i = next.size() - 1; i > 0; i--) {
+      if (next.get(i).equals(next.get(i - 1))) {
+        next.remove(i);
+      }
+    }
+    return next;
+  }
+}
