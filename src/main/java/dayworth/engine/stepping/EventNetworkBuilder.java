@@ -1,0 +1,208 @@
+package dayworth.engine.stepping;
+
+import static dayworth.engine.stepping.ArcNetwork.UNLIMITED;
+
+import dayworth.engine.Flow.Over;
+import dayworth.network.Activity;
+import dayworth.network.Link;
+import dayworth.network.Network;
+import dayworth.value.SlopeScale;
+import java.util.Arrays;
+
+/** Chooses the events and arcs of an {@link EventNetwork}, leaving out what cannot matter. */
+final class EventNetworkBuilder {
+
+  private static final int NONE = -1;
+
+  final Network network;
+  final SlopeScale scale;
+  final int[] startEvent;
+  final int[] finishEvent;
+  final int[] slopeArc;
+  final int[] crashArc;
+  final int[] stretchArc;
+  final int[] cheaperArc;
+
+  private final ArcNetwork.Builder arcs = new ArcNetwork.Builder();
+  private final long[] slope;
+  private final Reach normal;
+
+  /** Chains shorter than this never carry flow. */
+  private final long least;
+
+  private Over[] overs = new Over[64];
+  private int[] indices = new int[64];
+  private int arcCount;
+  private int events = 2;
+
+  EventNetworkBuilder(Network network, SlopeScale scale) {
+    this.network = network;
+    this.scale = scale;
+    int size = network.size();
+    slope = new long[size];
+    Arrays.setAll(slope, i -> EventNetwork.scaledSlope(network.activity(i), scale));
+    normal = new Reach(network, cheapestDurations());
+    least = Arrays.stream(slope).anyMatch(s -> s < 0) ? Long.MIN_VALUE : shortest();
+    startEvent = none(size);
+    finishEvent = none(size);
+    slopeArc = none(size);
+    crashArc = none(size);
+    stretchArc = none(size);
+    cheaperArc = none(size);
+  }
+
+  private static int[] none(int size) {
+    int[] none = new int[size];
+    Arrays.fill(none, NONE);
+    return none;
+  }
+
+  /** How long each activity takes while nothing is paid for: crash where that is not dearer. */
+  private long[] cheapestDurations() {
+    long[] durations = new long[network.size()];
+    Arrays.setAll(
+        durations, i -> slope[i] > 0 ? network.activity(i).normal() : network.activity(i).crash());
+    return durations;
+  }
+
+  private long shortest() {
+    return new Reach(network, network.activities().stream().mapToLong(Activity::crash).toArray())
+        .longest();
+  }
+
+  ArcNetwork build() {
+    for (int position = 0; position < network.size(); position++) {
+      addActivity(network.inOrder(position));
+    }
+    for (int j = 0; j < network.links().size(); j++) {
+      addLink(j);
+    }
+    for (int i = 0; i < network.size(); i++) {
+      if (startEvent[i] != NONE) {
+        addEnds(i);
+      }
+    }
+    return arcs.build(events);
+  }
+
+  Over[] arcOver() {
+    return Arrays.copyOf(overs, arcCount);
+  }
+
+  int[] arcIndex() {
+    return Arrays.copyOf(indices, arcCount);
+  }
+
+  long[] lateTimes() {
+    long[] times = new long[events];
+    times[EventNetwork.END] = normal.longest();
+    for (int i = 0; i < network.size(); i++) {
+      if (startEvent[i] != NONE) {
+        times[finishEvent[i]] = normal.longest() - normal.finishToEnd(i);
+        times[startEvent[i]] = normal.longest() - normal.startToEnd(i);
+      }
+    }
+    return times;
+  }
+
+  private int arc(Over over, int index, int tail, int head, long length, long capacity) {
+    if (arcCount == overs.length) {
+      overs = Arrays.copyOf(overs, 2 * arcCount);
+      indices = Arrays.copyOf(indices, 2 * arcCount);
+    }
+    overs[arcCount] = over;
+    indices[arcCount++] = index;
+    return arcs.add(tail, head, length, capacity);
+  }
+
+  private void addActivity(int i) {
+    boolean startMatters = normal.startFromBegin(i) + normal.startToEnd(i) >= least;
+    boolean finishMatters = normal.finishFromBegin(i) + normal.finishToEnd(i) >= least;
+    if (!startMatters && !finishMatters) {
+      return;
+    }
+    Activity activity = network.activity(i);
+    startEvent[i] = events++;
+    if (!activity.isCompressible()) {
+      finishEvent[i] = startEvent[i];
+      return;
+    }
+    finishEvent[i] = events++;
+    addDuration(i, activity);
+  }
+
+  private void addDuration(int i, Activity activity) {
+    int start = startEvent[i];
+    int finish = finishEvent[i];
+    if (slope[i] > 0) {
+      slopeArc[i] = arc(Over.SLOPE, i, start, finish, activity.normal(), slope[i]);
+    }
+    crashArc[i] = arc(Over.CRASH, i, start, finish, activity.crash(), UNLIMITED);
+    stretchArc[i] = arc(Over.BACK_OVER_NORMAL, i, finish, start, -activity.normal(), UNLIMITED);
+    if (slope[i] < 0) {
+      cheaperArc[i] = arc(Over.BACK_OVER_CRASH, i, finish, start, -activity.crash(), 0);
+    }
+  }
+
+  private void addLink(int j) {
+    Link link = network.link(j);
+    int from = link.predecessor();
+    int to = link.successor();
+    if (startEvent[from] == NONE || startEvent[to] == NONE || normal.over(link) < least) {
+      return;
+    }
+    int tail = link.relation().fromStart() ? startEvent[from] : finishEvent[from];
+    int head = link.relation().toStart() ? startEvent[to] : finishEvent[to];
+    long length = link.lag();
+    if (!link.relation().fromStart() && finishEvent[from] == startEvent[from]) {
+      length += network.activity(from).normal();
+    }
+    if (!link.relation().toStart() && finishEvent[to] == startEvent[to]) {
+      length -= network.activity(to).normal();
+    }
+    arc(Over.LINK, j, tail, head, length, UNLIMITED);
+  }
+
+  private void addEnds(int i) {
+    Activity activity = network.activity(i);
+    long earliest = activity.notBefore();
+    if (earliest + normal.startToEnd(i) >= least && !startFollows(i)) {
+      arc(Over.FROM_PROJECT, i, EventNetwork.BEGIN, startEvent[i], earliest, UNLIMITED);
+    }
+    if (normal.finishFromBegin(i) >= least && !finishFollows(i)) {
+      long length = finishEvent[i] == startEvent[i] ? activity.normal() : 0;
+      arc(Over.TO_PROJECT, i, finishEvent[i], EventNetwork.END, length, UNLIMITED);
+    }
+  }
+
+  /** Whether another activity's start already keeps this one from starting before the project. */
+  private boolean startFollows(int i) {
+    if (network.activity(i).notBefore() > 0) {
+      return false;
+    }
+    for (int k = 0; k < network.linksInto(i); k++) {
+      Link link = network.link(network.linkInto(i, k));
+      if (link.relation().toStart()
+          && link.lag() >= 0
+          && startEvent[link.predecessor()] != NONE
+          && normal.over(link) >= least) {
+        return true;
+      }
+    }
+    return false;
+  }
+
+  /** Whether another activity's finish already keeps this one from finishing after the project. */
+  private boolean finishFollows(int i) {
+    for (int k = 0; k < network.linksOutOf(i); k++) {
+      Link link = network.link(network.linkOutOf(i, k));
+      if (!link.relation().fromStart()
+          && link.lag() >= 0
+          && startEvent[link.successor()] != NONE
+          && normal.over(link) >= least) {
+        return true;
+      }
+    }
+    return false;
+  }
+}
