@@ -6,7 +6,6 @@ import java.io.UncheckedIOException;
 import java.util.List;
 import java.util.regex.Pattern;
 import org.apache.commons.csv.CSVFormat;
-import org.apache.commons.csv.CSVPrinter;
 
 /** CSV text: commas, point decimals, line feeds, and no cell that a spreadsheet would run. */
 final class CsvText {
@@ -20,16 +19,10 @@ final class CsvText {
   private static final String RUN_BY_A_SPREADSHEET = "=+-@\t\r\n";
 
   private final StringBuilder text = new StringBuilder();
-  private final CSVPrinter printer;
   private final int columns;
 
   CsvText(String... header) {
     columns = header.length;
-    try {
-      printer = new CSVPrinter(text, FORMAT);
-    } catch (IOException impossible) {
-      throw new UncheckedIOException(impossible);
-    }
     row(header);
   }
 
@@ -40,7 +33,7 @@ final class CsvText {
           "a row of " + cells.length + " cells under " + columns + " columns");
     }
     try {
-      printer.printRecord(List.of(cells).stream().map(CsvText::asText).toList());
+      FORMAT.printRecord(text, List.of(cells).stream().map(CsvText::asText).toArray());
     } catch (IOException impossible) {
       throw new UncheckedIOException(impossible);
     }
