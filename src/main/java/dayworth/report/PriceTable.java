@@ -23,7 +23,9 @@ final class PriceTable {
 
   private final CurveAnswer answer;
   private final List<Part> parts = new ArrayList<>();
-  private int stop;
+
+  /** How many parts come before the least total. */
+  private final int stop;
 
   PriceTable(CurveAnswer answer) {
     this.answer = answer;
@@ -33,12 +35,9 @@ final class PriceTable {
       if (inside) {
         parts.add(new Part(step, step.from(), least));
       }
-      stop = step.to() < least ? Math.min(stop, parts.size()) : parts.size() + 1;
-      if (inside) {
-        stop = parts.size();
-      }
       parts.add(new Part(step, inside ? least : step.from(), step.to()));
     }
+    stop = (int) parts.stream().filter(part -> part.to() >= least).count();
   }
 
   List<String> lines(int width) {
