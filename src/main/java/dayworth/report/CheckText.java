@@ -97,7 +97,7 @@ public final class CheckText {
     answer.firstChains().forEach(chain -> list(lines, "  ", chain));
     BigInteger more = answer.chainCount().subtract(BigInteger.valueOf(answer.firstChains().size()));
     if (more.signum() > 0 && !answer.firstChains().isEmpty()) {
-      add(lines, "  and " + Wording.grouped(new BigDecimal(more)) + " more");
+      lines.add("    and " + Wording.grouped(new BigDecimal(more)) + " more");
     }
   }
 

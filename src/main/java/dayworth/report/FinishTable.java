@@ -45,11 +45,11 @@ final class FinishTable {
       // The header is line 0, as planned is 1, the least total 2.
       lines.add(lines.size() == 2 ? style.bold("> " + line) : Wording.INDENT + line);
     }
+    waste().ifPresent(wasted -> lines.addAll(Wording.wrap(wasted, "    ", width)));
     if (!columns.dropped().isEmpty()) {
       String names = String.join(", ", columns.dropped());
       lines.addAll(Wording.wrap("No room for: " + names, "  ", width));
     }
-    waste().ifPresent(wasted -> lines.addAll(Wording.wrap(wasted, "    ", width)));
     cannotBeMet().ifPresent(line -> lines.addAll(Wording.wrap(line, "  ", width)));
     if (sameForAll().signum() != 0) {
       lines.addAll(Wording.wrap(leftOut(), "  ", width));

@@ -133,10 +133,11 @@ final class PriceTable {
   }
 
   private String stopLine(int width) {
-    String words = "-------- least total: no other finish is cheaper ";
-    if (answer.least().size() > 1) {
-      words = "-------- least total: no finish is cheaper ";
+    String other = answer.least().size() > 1 ? "no finish" : "no other finish";
+    String words = "-------- least total: " + other + " is cheaper ";
+    if (INDENT.length() + words.length() > width) {
+      words = "-------- least total ";
     }
-    return INDENT + words + "-".repeat(Math.max(3, width - 14 - words.length()));
+    return INDENT + words + "-".repeat(Math.max(0, width - 14 - words.length()));
   }
 }

@@ -3,7 +3,10 @@ package dayworth.report;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dayworth.decision.CurveAnswer;
 import dayworth.decision.Notice;
+import dayworth.engine.Curve;
+import dayworth.engine.Obstacle;
 import java.util.List;
 import java.util.Map;
 import org.junit.jupiter.api.Test;
@@ -28,10 +31,10 @@ class CurveTextTest {
           160 of direct cost as planned is the same in every row and is left out.
 
           What the next days cost, and what they are worth
-            days      price     worth   shortened
-            10 to 8      20  25 to 35   A
+            days     price     worth   shortened
+            10 to 8     20  25 to 35   A
             -------- least total: no other finish is cheaper -------------------------------
-            8 to 7       30        25   =B
+            8 to 7      30        25   =B
 
           7 days is the shortest: every activity of A =B is at its shortest.
 
@@ -41,11 +44,53 @@ class CurveTextTest {
         String.join("\n", CurveText.lines(SeriesAnswer.answer(), Style.PLAIN, 200)) + "\n");
   }
 
+  /** 2 + 16 + 2 + 4 + 2 + 12 = 38 columns; 2 + 12 more for time-related make 52, above 50. */
   @Test
   void aNarrowTerminalLosesTheLastColumnsAndTheirNamesAreSaid() {
     List<String> lines = CurveText.lines(SeriesAnswer.answer(), Style.PLAIN, 50);
-    assertTrue(lines.contains("  No room for: damages, total"), lines.toString());
+    assertTrue(lines.contains("  No room for: time-related, damages, total"), lines.toString());
     assertTrue(lines.stream().skip(1).allMatch(line -> line.length() <= 50), lines.toString());
+  }
+
+  /** By hand: 3 + 4 - 3 + 3 = 7. */
+  @Test
+  void aChainThatRunsBackwardsIsShownAsItsSum() {
+    CurveAnswer plain = SeriesAnswer.answer();
+    Curve curve =
+        new Curve(
+            plain.curve().network(),
+            10,
+            plain.curve().firstPlan(),
+            plain.curve().firstCost(),
+            plain.curve().steps(),
+            List.of(
+                new Obstacle.NotBefore(0, 3),
+                new Obstacle.AtShortest(0, 4),
+                new Obstacle.CannotBeLonger(2, -3),
+                new Obstacle.AtShortest(1, 3)));
+    CurveAnswer stopped =
+        new CurveAnswer(
+            plain.of(),
+            curve,
+            plain.asPlanned(),
+            plain.rows(),
+            List.of(plain.rows().get(2), plain.rows().get(3)),
+            plain.steps(),
+            plain.atContract(),
+            plain.crashEverything(),
+            plain.asked(),
+            plain.provedRows(),
+            plain.crossCheck());
+    List<String> lines = CurveText.lines(stopped, Style.PLAIN, 94);
+    assertTrue(
+        lines.contains(
+            "  7 days is the shortest: 3 + A 4 - C 3 + =B 3 = 7: A may not start before 3; C cannot be"),
+        lines.toString());
+    assertTrue(lines.contains("  longer than 3."), lines.toString());
+    assertTrue(
+        lines.contains(
+            "  2 finishes share the least total; the longest is 8 days, the shortest 7 days."),
+        lines.toString());
   }
 
   @Test
