@@ -77,7 +77,7 @@ public final class ResultSet {
     try {
       finishEarlierRun();
       requirePlaces(journal);
-      stage(files);
+      stageOrSweep(files);
       swap(journal);
     } finally {
       lock.get().close();
@@ -107,6 +107,20 @@ public final class ResultSet {
       if (Files.exists(parent) && !Files.isDirectory(parent)) {
         throw new IOException(parent + " is a file, not a folder");
       }
+    }
+  }
+
+  /** Leaves nothing half staged behind, for a full disk needs the room. */
+  private void stageOrSweep(SortedMap<String, byte[]> files) throws IOException {
+    try {
+      stage(files);
+    } catch (IOException failure) {
+      try {
+        disk.removeAll(folder.resolve(STAGING));
+      } catch (IOException second) {
+        failure.addSuppressed(second);
+      }
+      throw failure;
     }
   }
 
