@@ -1,0 +1,163 @@
+package dayworth.report;
+
+import dayworth.decision.Case;
+import dayworth.decision.CheckAnswer;
+import dayworth.decision.CheckAnswer.NeverCritical;
+import dayworth.network.Activity;
+import dayworth.network.Link;
+import dayworth.network.Network;
+import java.math.BigDecimal;
+import java.math.BigInteger;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+
+/** The answer of {@code dayworth check} for a terminal. */
+public final class CheckText {
+
+  private static final int MOST_NOTES = 12;
+  private static final String NOTE_INDENT = "        ";
+
+  private final CheckAnswer answer;
+  private final Case of;
+  private final Network network;
+  private final int width;
+
+  private CheckText(CheckAnswer answer, int width) {
+    this.answer = answer;
+    this.of = answer.of();
+    this.network = of.network();
+    this.width = Math.min(width, CurveText.WIDEST);
+  }
+
+  /** The lines of the answer; the first says it all. */
+  public static List<String> lines(CheckAnswer answer, Style style, int width) {
+    CheckText text = new CheckText(answer, width);
+    List<String> lines = new ArrayList<>();
+    lines.add(style.bold(text.sentence()));
+    lines.add("");
+    lines.addAll(text.facts());
+    return lines;
+  }
+
+  /** What its owner should know of a sound case: whose compression gains nothing. */
+  public static List<String> notes(CheckAnswer answer, int width) {
+    return new CheckText(answer, width).notes();
+  }
+
+  private String sentence() {
+    List<String> with = new ArrayList<>();
+    if (!of.warnings().isEmpty()) {
+      with.add(Wording.count(of.warnings().size(), "warning", "warnings"));
+    }
+    if (!answer.neverCritical().isEmpty()) {
+      with.add(Wording.count(answer.neverCritical().size(), "note", "notes"));
+    }
+    long finish = answer.asPlanned().finish();
+    return "The case is sound"
+        + (with.isEmpty() ? "" : ", with " + String.join(" and ", with))
+        + ". As planned: "
+        + Wording.workingDuration(of, finish)
+        + of.terms().contractFinish().map(due -> lateness(finish - due)).orElse("")
+        + ".";
+  }
+
+  private String lateness(long late) {
+    if (late == 0) {
+      return ", on time";
+    }
+    return ", " + Wording.duration(of, Math.abs(late)) + (late > 0 ? " late" : " early");
+  }
+
+  private List<String> facts() {
+    List<String> lines = new ArrayList<>();
+    int compressible = (int) network.activities().stream().filter(Activity::isCompressible).count();
+    int waits = (int) network.links().stream().mapToLong(Link::lag).filter(l -> l != 0).count();
+    add(
+        lines,
+        Wording.count(network.size(), "activity", "activities")
+            + String.format(Locale.ROOT, ", %,d can be shortened; ", compressible)
+            + Wording.count(network.links().size(), "link", "links")
+            + (waits == 0 ? "" : String.format(Locale.ROOT, ", %,d of them with a wait", waits)));
+    add(lines, "No finish is shorter than " + Wording.duration(of, answer.shortest()));
+    chains(lines);
+    floats(lines);
+    list(lines, "Nothing comes before: ", answer.openStarts());
+    list(lines, "Nothing comes after: ", answer.openEnds());
+    return lines;
+  }
+
+  private void chains(List<String> lines) {
+    if (answer.chainCount().equals(BigInteger.ONE)) {
+      answer.firstChains().forEach(chain -> list(lines, "One chain is critical: ", chain));
+      return;
+    }
+    String count = Wording.grouped(new BigDecimal(answer.chainCount()));
+    add(lines, count + " chains are critical" + (answer.firstChains().isEmpty() ? "" : ":"));
+    answer.firstChains().forEach(chain -> list(lines, "  ", chain));
+    BigInteger more = answer.chainCount().subtract(BigInteger.valueOf(answer.firstChains().size()));
+    if (more.signum() > 0 && !answer.firstChains().isEmpty()) {
+      lines.add("    and " + Wording.grouped(new BigDecimal(more)) + " more");
+    }
+  }
+
+  private void floats(List<String> lines) {
+    long least = Long.MAX_VALUE;
+    long most = 0;
+    for (int i = 0; i < network.size(); i++) {
+      long slack = answer.asPlanned().totalFloat(i);
+      most = Math.max(most, slack);
+      least = slack > 0 ? Math.min(least, slack) : least;
+    }
+    if (most == 0) {
+      add(lines, "Every activity is critical");
+      return;
+    }
+    String from = least == most ? "" : Wording.grouped(network.scale().units(least)) + " to ";
+    add(lines, "The others have " + from + Wording.duration(of, most) + " of float");
+    List<String> near =
+        answer.nearCritical().stream()
+            .map(i -> id(i) + " " + network.scale().text(answer.asPlanned().totalFloat(i)))
+            .toList();
+    if (!near.isEmpty()) {
+      add(lines, "Least float: " + String.join(", ", near));
+    }
+  }
+
+  private List<String> notes() {
+    List<String> lines = new ArrayList<>();
+    List<NeverCritical> all = answer.neverCritical();
+    for (NeverCritical never : all.subList(0, Math.min(MOST_NOTES, all.size()))) {
+      lines.add("  note  activities.csv crash_duration");
+      String first = lines.size() > 1 ? "." : ", and no finish is shorter than ";
+      String text =
+          Wording.safe(id(never.activity()))
+              + " can never become critical: the longest chain through it takes "
+              + Wording.duration(of, never.longestThrough())
+              + " as planned"
+              + first
+              + (lines.size() > 1
+                  ? ""
+                  : network.scale().text(answer.shortest()) + ". Shortening it gains nothing.");
+      lines.addAll(Wording.wrap(text, NOTE_INDENT, width));
+    }
+    if (all.size() > MOST_NOTES) {
+      lines.add("  and " + Wording.count(all.size() - MOST_NOTES, "note", "notes") + " more");
+    }
+    return lines;
+  }
+
+  private void list(List<String> lines, String before, List<Integer> activities) {
+    String start = Wording.INDENT + before;
+    List<String> ids = activities.stream().map(this::id).toList();
+    lines.add(start + Wording.ids(ids, width - start.length()));
+  }
+
+  private void add(List<String> lines, String text) {
+    lines.addAll(Wording.wrap(Wording.safe(text), Wording.INDENT, width));
+  }
+
+  private String id(int activity) {
+    return network.activity(activity).id();
+  }
+}

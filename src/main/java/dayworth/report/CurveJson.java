@@ -1,0 +1,153 @@
+package dayworth.report;
+
+import dayworth.decision.CrossCheck;
+import dayworth.decision.CurveAnswer;
+import dayworth.decision.Finish;
+import dayworth.decision.StepFacts;
+import dayworth.engine.Change;
+import dayworth.network.Activity;
+import dayworth.network.Network;
+import dayworth.network.Timing;
+import dayworth.value.Money;
+import java.io.IOException;
+import java.util.Optional;
+import java.util.stream.IntStream;
+
+/** The members of a curve's result. */
+final class CurveJson {
+
+  private final CurveAnswer answer;
+  private final Network network;
+  private final CaseJson names;
+
+  CurveJson(CurveAnswer answer) {
+    this.answer = answer;
+    this.network = answer.of().network();
+    this.names = new CaseJson(network);
+  }
+
+  void write(JsonText json) throws IOException {
+    json.object("as_planned", members -> finish(members, answer.asPlanned()));
+    json.array("least", answer.least(), this::finish);
+    contractFinish(json);
+    json.object("shortest", members -> shortest(members));
+    json.object("crash_everything", members -> finish(members, answer.crashEverything()));
+    json.array("curve", answer.rows(), this::finish);
+    json.array("steps", answer.steps(), this::step);
+    json.object("plan", this::plan);
+    json.object("crosscheck", this::crossCheck);
+    json.object(
+        "proof",
+        members -> {
+          members.number("proved", answer.provedRows());
+          members.number("of", answer.rows().size());
+        });
+  }
+
+  private void finish(JsonText json, Finish finish) throws IOException {
+    json.number("duration", names.units(finish.duration()));
+    json.number("direct_cost", finish.direct().cents());
+    json.number("running_cost", finish.running().cents());
+    json.number("time_related_cost", finish.other().timeRelated().cents());
+    json.number("fixed_cost", finish.other().fixed().cents());
+    json.number("damages", finish.other().damages().cents());
+    json.number("bonus", finish.other().bonus().cents());
+    json.number("total_cost", finish.total());
+    if (finish.pricePerUnit().isPresent()) {
+      json.number("price_per_unit", finish.pricePerUnit().get().cents());
+    } else {
+      json.nothing("price_per_unit");
+    }
+    json.yesNo("breakpoint", finish.breakpoint());
+  }
+
+  private void contractFinish(JsonText json) throws IOException {
+    Optional<Long> due = answer.of().terms().contractFinish();
+    if (due.isEmpty()) {
+      json.nothing("contract_finish");
+      return;
+    }
+    json.object(
+        "contract_finish",
+        members -> {
+          members.number("due", names.units(due.get()));
+          members.yesNo("can_be_met", answer.atContract().isPresent());
+          if (answer.atContract().isPresent()) {
+            Finish met = answer.atContract().get();
+            members.object("cheapest", inner -> finish(inner, met));
+          } else {
+            members.nothing("cheapest");
+          }
+        });
+  }
+
+  private void shortest(JsonText json) throws IOException {
+    finish(json, answer.shortest());
+    json.array(
+        "stopped_by",
+        answer.curve().obstacles(),
+        (members, obstacle) -> new ObstacleJson(network).write(members, obstacle));
+  }
+
+  private void step(JsonText json, StepFacts facts) throws IOException {
+    json.number("from_duration", names.units(facts.step().from()));
+    json.number("to_duration", names.units(facts.step().to()));
+    json.number("price_per_unit", perUnit(facts.step().pricePerTick()).cents());
+    json.number("extra_cost", facts.step().extra().cents());
+    json.array("changes", facts.step().changes(), this::change);
+    json.number("critical_activities", facts.criticalAfter());
+    json.texts("newly_critical", names.ids(facts.newlyCritical()));
+  }
+
+  private void change(JsonText json, Change change) throws IOException {
+    json.text("activity", names.id(change.activity()));
+    json.text("change", change.isRelaxation() ? "relax" : "compress");
+    json.number("units", names.units(Math.abs(change.shortened())));
+    json.number("slope", perUnit(network.activity(change.activity()).slope()).cents());
+  }
+
+  private Money perUnit(Money perTick) {
+    return perTick.times(network.scale().ticksPerUnit());
+  }
+
+  private void plan(JsonText json) throws IOException {
+    json.number("duration", names.units(answer.asked().finish().duration()));
+    Iterable<Integer> all = IntStream.range(0, network.size()).boxed().toList();
+    json.array("activities", all, this::activity);
+  }
+
+  private void activity(JsonText json, int index) throws IOException {
+    Timing timing = answer.asked().timing();
+    Activity activity = network.activity(index);
+    long duration = timing.plan().duration(index);
+    json.text("id", activity.id());
+    json.text("name", activity.name());
+    json.number("duration", names.units(duration));
+    json.number("units_compressed", names.units(activity.normal() - duration));
+    json.number("extra_cost", PlanTable.extraCost(activity, duration).cents());
+    json.number("early_start", names.units(timing.earlyStart(index)));
+    json.number("early_finish", names.units(timing.earlyFinish(index)));
+    json.number("late_start", names.units(timing.lateStart(index)));
+    json.number("late_finish", names.units(timing.lateFinish(index)));
+    json.number("total_float", names.units(timing.totalFloat(index)));
+    json.number("free_float", names.units(timing.freeFloat(index)));
+    json.yesNo("critical", timing.isCritical(index));
+  }
+
+  private void crossCheck(JsonText json) throws IOException {
+    CrossCheck crossCheck = answer.crossCheck();
+    json.number("at_breakpoints", crossCheck.atBreakpoints());
+    json.number("between", crossCheck.between());
+    json.number("of_points", crossCheck.ofPoints());
+    json.number("largest_difference", crossCheck.largestDifference());
+    json.array(
+        "points",
+        crossCheck.comparisons(),
+        (members, point) -> {
+          members.number("duration", names.units(point.duration()));
+          members.number("stepping_cost", point.stepping().cents());
+          members.number("lp_cost", point.linear());
+          members.number("difference", point.difference());
+        });
+  }
+}

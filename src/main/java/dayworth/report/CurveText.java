@@ -1,0 +1,159 @@
+package dayworth.report;
+
+import dayworth.decision.Case;
+import dayworth.decision.CrossCheck;
+import dayworth.decision.CurveAnswer;
+import dayworth.decision.Finish;
+import dayworth.value.Money;
+import java.math.BigDecimal;
+import java.util.ArrayList;
+import java.util.Collection;
+import java.util.List;
+
+/** The short answer of {@code dayworth curve} for a terminal. */
+public final class CurveText {
+
+  /** No line is longer, however wide the terminal is. */
+  public static final int WIDEST = 94;
+
+  private CurveText() {}
+
+  /**
+   * The lines of the answer; the first says it all.
+   *
+   * @param width columns of the terminal; more than {@link #WIDEST} are not used
+   */
+  public static List<String> lines(CurveAnswer answer, Style style, int width) {
+    int used = Math.min(width, WIDEST);
+    FinishTable finishes = new FinishTable(answer);
+    List<String> lines = new ArrayList<>();
+    String sentence = sentence(answer, finishes.look());
+    lines.add(style.bold(Wording.answer(sentence, answer.of().currency(), used)));
+    lines.add("");
+    lines.addAll(finishes.lines(style, used));
+    lines.addAll(prose(ties(answer), used));
+    lines.addAll(prose(lows(answer, finishes.look()), used));
+    List<String> prices = new PriceTable(answer).lines(used);
+    if (!prices.isEmpty()) {
+      lines.add("");
+      lines.addAll(prices);
+    }
+    lines.add("");
+    lines.addAll(prose(new ObstacleText(answer).sentence(), used));
+    lines.add("");
+    lines.addAll(prose(proof(answer), used));
+    return lines;
+  }
+
+  /** The line that tells where the results are. */
+  public static List<String> written(String folder, Collection<String> names, int width) {
+    List<String> said = new ArrayList<>();
+    int pictures = 0;
+    for (String name : names) {
+      if (name.contains("/")) {
+        pictures++;
+      } else {
+        said.add(name.replaceFirst("\\.[a-z]+$", ""));
+      }
+    }
+    if (pictures > 0) {
+      said.add(Wording.count(pictures, "picture", "pictures"));
+    }
+    String text = "Written: " + folder + " (" + String.join(", ", said) + ")";
+    return prose(Wording.safe(text), Math.min(width, WIDEST));
+  }
+
+  private static List<String> prose(String text, int width) {
+    return text.isEmpty() ? List.of() : Wording.wrap(text, Wording.INDENT, width);
+  }
+
+  private static String sentence(CurveAnswer answer, MoneyLook look) {
+    Case of = answer.of();
+    Finish least = answer.leastTotal();
+    String finish = "Least total: finish in " + Wording.workingDuration(of, least.duration());
+    BigDecimal better = answer.asPlanned().total().subtract(least.total());
+    if (better.signum() > 0) {
+      return finish + ", " + look.text(better) + " better than as planned.";
+    }
+    return least.duration() == answer.asPlanned().duration()
+        ? finish + ", as planned."
+        : finish + ", no better than as planned.";
+  }
+
+  private static String ties(CurveAnswer answer) {
+    int count = answer.least().size();
+    if (count < 2) {
+      return "";
+    }
+    Finish last = answer.least().get(count - 1);
+    return count
+        + " finishes share the least total; the longest is "
+        + Wording.duration(answer.of(), answer.leastTotal().duration())
+        + ", the shortest "
+        + Wording.duration(answer.of(), last.duration())
+        + ".";
+  }
+
+  /** Finishes from which the total rises both ways and that are not the least. */
+  private static String lows(CurveAnswer answer, MoneyLook look) {
+    List<String> lows = new ArrayList<>();
+    List<Finish> rows = answer.rows();
+    Money least = total(answer.leastTotal());
+    BigDecimal left =
+        answer.asPlanned().direct().cents().add(answer.asPlanned().other().fixed().cents());
+    boolean falling = true;
+    for (int i = 0; i < rows.size(); i++) {
+      Money here = total(rows.get(i));
+      int next = i + 1 < rows.size() ? total(rows.get(i + 1)).compareTo(here) : 1;
+      if (falling && next > 0 && here.compareTo(least) > 0) {
+        lows.add(
+            Wording.duration(answer.of(), rows.get(i).duration())
+                + " ("
+                + look.text(rows.get(i).total().subtract(left))
+                + ")");
+      }
+      falling = next == 0 ? falling : next < 0;
+    }
+    int shown = Math.min(3, lows.size());
+    String more = shown < lows.size() ? " and " + (lows.size() - shown) + " more" : "";
+    return lows.isEmpty()
+        ? ""
+        : "The total also turns, without being the least, at "
+            + String.join(", ", lows.subList(0, shown))
+            + more
+            + ".";
+  }
+
+  private static Money total(Finish finish) {
+    return finish.direct().plus(finish.running()).plus(finish.other().sum());
+  }
+
+  private static String proof(CurveAnswer answer) {
+    CrossCheck check = answer.crossCheck();
+    String proved =
+        "Proved: "
+            + answer.provedRows()
+            + " of "
+            + Wording.count(answer.rows().size(), "finish", "finishes")
+            + ". ";
+    int points = check.comparisons().size();
+    if (points == 0) {
+      return proved + "The linear programme was not asked.";
+    }
+    BigDecimal largest = check.largestDifference();
+    String sampled =
+        points < check.ofPoints() ? " (" + points + " of " + check.ofPoints() + ")" : "";
+    return proved
+        + (largest.signum() == 0
+            ? "The linear programme agrees at "
+            : "The linear programme was compared at ")
+        + Wording.count(check.atBreakpoints(), "breakpoint", "breakpoints")
+        + " and "
+        + Wording.count(check.between(), "point", "points")
+        + " between them"
+        + sampled
+        + "; largest difference "
+        + largest.toPlainString()
+        + ".";
+  }
+}

@@ -1,0 +1,31 @@
+package dayworth.report;
+
+import dayworth.decision.CheckAnswer;
+import dayworth.decision.CurveAnswer;
+
+/**
+ * The text of result.json: an answer for programs.
+ *
+ * <p>Money is a number with two decimals, a duration a number in time units with as many decimals
+ * as it needs, an activity its id. The members and their order are part of the format's version.
+ */
+public final class ResultJson {
+
+  private ResultJson() {}
+
+  public static String ofCurve(CurveAnswer answer, String programVersion) {
+    return JsonText.object(
+        json -> {
+          CaseJson.writeHead(json, answer.of(), "curve", programVersion);
+          new CurveJson(answer).write(json);
+        });
+  }
+
+  public static String ofCheck(CheckAnswer answer, String programVersion) {
+    return JsonText.object(
+        json -> {
+          CaseJson.writeHead(json, answer.of(), "check", programVersion);
+          new CheckJson(answer).write(json);
+        });
+  }
+}

@@ -1,0 +1,127 @@
+package dayworth.report;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import dayworth.decision.CurveAnswer;
+import dayworth.decision.Notice;
+import dayworth.engine.Curve;
+import dayworth.engine.Obstacle;
+import java.util.List;
+import java.util.Map;
+import org.junit.jupiter.api.Test;
+
+/** Every figure is worked by hand at {@link SeriesAnswer}. */
+class CurveTextTest {
+
+  /** Extra direct is above 160. Worth of a day: 25, and 10 more before day 9. Waste: 235 - 230. */
+  @Test
+  void theAnswerComesFirstAndItsRowIsMarked() {
+    assertEquals(
+        """
+        Least total: finish in 8 working days, 20 better than as planned.                        EUR
+
+                            days  extra direct  time-related  damages  total
+          as planned          10             0           250       10    260
+        > least total          8            40           200        0    240
+          contract finish      9            20           225        0    245
+          shortest             7            70           175        0    245
+          crash everything     7            75           175        0    250
+            5 of it is wasted: it reaches the same 7 days
+          160 of direct cost as planned is the same in every row and is left out.
+
+          What the next days cost, and what they are worth
+            days     price     worth   shortened
+            10 to 8     20  25 to 35   A
+            -------- least total: no other finish is cheaper -------------------------------
+            8 to 7      30        25   =B
+
+          7 days is the shortest: every activity of A =B is at its shortest.
+
+          Proved: 4 of 4 finishes. The linear programme agrees at 1 breakpoint and 1 point between
+          them; largest difference 0.00.
+        """,
+        String.join("\n", CurveText.lines(SeriesAnswer.answer(), Style.PLAIN, 200)) + "\n");
+  }
+
+  /** 2 + 16 + 2 + 4 + 2 + 12 = 38 columns; 2 + 12 more for time-related make 52, above 50. */
+  @Test
+  void aNarrowTerminalLosesTheLastColumnsAndTheirNamesAreSaid() {
+    List<String> lines = CurveText.lines(SeriesAnswer.answer(), Style.PLAIN, 50);
+    assertTrue(lines.contains("  No room for: time-related, damages, total"), lines.toString());
+    assertTrue(lines.stream().skip(1).allMatch(line -> line.length() <= 50), lines.toString());
+  }
+
+  /** By hand: 3 + 4 - 3 + 3 = 7. */
+  @Test
+  void aChainThatRunsBackwardsIsShownAsItsSum() {
+    CurveAnswer plain = SeriesAnswer.answer();
+    Curve curve =
+        new Curve(
+            plain.curve().network(),
+            10,
+            plain.curve().firstPlan(),
+            plain.curve().firstCost(),
+            plain.curve().steps(),
+            List.of(
+                new Obstacle.NotBefore(0, 3),
+                new Obstacle.AtShortest(0, 4),
+                new Obstacle.CannotBeLonger(2, -3),
+                new Obstacle.AtShortest(1, 3)));
+    CurveAnswer stopped =
+        new CurveAnswer(
+            plain.of(),
+            curve,
+            plain.asPlanned(),
+            plain.rows(),
+            List.of(plain.rows().get(2), plain.rows().get(3)),
+            plain.steps(),
+            plain.atContract(),
+            plain.crashEverything(),
+            plain.asked(),
+            plain.provedRows(),
+            plain.crossCheck());
+    List<String> lines = CurveText.lines(stopped, Style.PLAIN, 94);
+    assertTrue(
+        lines.contains(
+            "  7 days is the shortest: 3 + A 4 - C 3 + =B 3 = 7: A may not start before 3; C cannot be"),
+        lines.toString());
+    assertTrue(lines.contains("  longer than 3."), lines.toString());
+    assertTrue(
+        lines.contains(
+            "  2 finishes share the least total; the longest is 8 days, the shortest 7 days."),
+        lines.toString());
+  }
+
+  @Test
+  void boldIsOnlyWhereATerminalTakesIt() {
+    assertEquals(Style.BOLD, Style.of(true, Map.of("TERM", "xterm")));
+    assertEquals(Style.PLAIN, Style.of(true, Map.of("TERM", "dumb")));
+    assertEquals(Style.PLAIN, Style.of(true, Map.of("NO_COLOR", "1")));
+    assertEquals(Style.PLAIN, Style.of(false, Map.of()));
+  }
+
+  @Test
+  void problemsSayWhereWhatFoundAndRight() {
+    Notice wrong =
+        new Notice(
+            "activities.csv", 4, "predecessors", "W11 is no activity", "W11", "nearest is W1");
+    assertEquals(
+        """
+        Nothing was computed: 1 problem in 1 file.
+
+          activities.csv:4 predecessors       W11 is no activity
+                                              found "W11"; nearest is W1
+
+          output/x is as it was.""",
+        String.join("\n", NoticeText.problems(List.of(wrong), "output/x", Style.PLAIN)));
+  }
+
+  @Test
+  void picturesAreCounted() {
+    assertEquals(
+        List.of("  Written: output/x (curve, result, 2 pictures)"),
+        CurveText.written(
+            "output/x", List.of("curve.csv", "result.json", "charts/a.svg", "charts/b.svg"), 94));
+  }
+}
