@@ -1,0 +1,116 @@
+package dayworth.engine.linear;
+
+import dayworth.network.Activity;
+import dayworth.network.Link;
+import dayworth.network.Network;
+import dayworth.value.MoneySum;
+import org.ojalgo.optimisation.Optimisation;
+
+/**
+ * The least direct cost of finishing by a deadline, as a linear programme for ojAlgo.
+ *
+ * <p>Written from the activities and links themselves (Kelley 1961, "Critical-path planning and
+ * scheduling: mathematical basis"). Variables: the start s of each activity, at least its
+ * not-before time, and the shortening y of each compressible one, from 0 to normal − crash; its
+ * finish is s + normal − y, so work is contiguous and never stretched. One row for each link:
+ * successor's event − predecessor's event ≥ lag. One row for each finish ≤ deadline, except where a
+ * link with a lag of at least 0 leads from that finish to an event of another activity, whose own
+ * finish then comes no earlier. Least: Σ slope × y; slopes may be zero or negative.
+ *
+ * <p><b>Error.</b> In terms of events the rows are differences of two unknowns, a totally
+ * unimodular system, so every corner is a whole number of ticks, and a simplex solver answers with
+ * a corner. Its starts and shortenings are rounded to ticks, checked against every rule in whole
+ * numbers, and the cost is counted exactly from them. What remains floating point is the choice of
+ * the corner: slopes are seen as fractions of the steepest, and differences much finer than {@value
+ * #FINEST} would be lost. Where a slope is that flat beside the steepest the programme says that it
+ * is not solved, rather than answer with money that might be too much.
+ *
+ * <p><b>Cost.</b> The tableau is dense: rows × columns numbers of 8 bytes. The first deadline is
+ * solved from nothing, later ones from the basis of the last.
+ *
+ * <p>Not safe for use by several threads.
+ */
+public final class LinearProgramme {
+
+  /** The flattest slope, as a fraction of the steepest, that the solver is trusted with. */
+  static final double FINEST = 1e-9;
+
+  private final Network network;
+  private final Tableau tableau;
+  private final boolean tooFarApart;
+
+  public LinearProgramme(Network network) {
+    this.network = network;
+    double[] slopes =
+        network.activities().stream()
+            .mapToDouble(activity -> Math.abs(activity.slope().toDouble()))
+            .filter(slope -> slope > 0)
+            .sorted()
+            .toArray();
+    double steepest = slopes.length == 0 ? 1 : slopes[slopes.length - 1];
+    this.tooFarApart = slopes.length > 0 && slopes[0] < FINEST * steepest;
+    this.tableau = new Tableau(network, steepest);
+  }
+
+  /**
+   * The least direct cost of finishing within a deadline.
+   *
+   * @param deadlineTicks ticks after the project start
+   */
+  public Answer at(long deadlineTicks) {
+    if (deadlineTicks < 0) {
+      return new Answer.Infeasible();
+    }
+    if (tooFarApart) {
+      return new Answer.NotSolved("the cost slopes are too far apart for floating point");
+    }
+    Answer answer = read(tableau.solve(deadlineTicks), deadlineTicks);
+    if (answer instanceof Answer.Least) {
+      return answer;
+    }
+    tableau.restart();
+    Answer fresh = read(tableau.solve(deadlineTicks), deadlineTicks);
+    tableau.restart();
+    return fresh;
+  }
+
+  private Answer read(Optimisation.State state, long deadline) {
+    if (state == Optimisation.State.INFEASIBLE) {
+      return new Answer.Infeasible();
+    }
+    if (state != Optimisation.State.OPTIMAL) {
+      return new Answer.NotSolved("the solver stopped in the state " + state);
+    }
+    long[] starts = new long[network.size()];
+    long[] finishes = new long[network.size()];
+    MoneySum cost = new MoneySum();
+    for (int i = 0; i < network.size(); i++) {
+      Activity activity = network.activity(i);
+      long shortening = Math.round(tableau.shortening(i));
+      starts[i] = Math.round(tableau.start(i));
+      finishes[i] = starts[i] + activity.normal() - shortening;
+      if (!isAllowed(activity, starts[i], finishes[i], deadline)) {
+        return new Answer.NotSolved("the solver's answer breaks a limit of " + activity.id());
+      }
+      cost.add(activity.normalCost()).add(activity.slope(), shortening, 1);
+    }
+    if (!network.links().stream().allMatch(link -> holds(link, starts, finishes))) {
+      return new Answer.NotSolved("the solver's answer breaks a link");
+    }
+    return new Answer.Least(cost.total().cents());
+  }
+
+  private static boolean isAllowed(Activity activity, long start, long finish, long deadline) {
+    long duration = finish - start;
+    return start >= activity.notBefore()
+        && duration >= activity.crash()
+        && duration <= activity.normal()
+        && finish <= deadline;
+  }
+
+  private static boolean holds(Link link, long[] starts, long[] finishes) {
+    long from = (link.relation().fromStart() ? starts : finishes)[link.predecessor()];
+    long to = (link.relation().toStart() ? starts : finishes)[link.successor()];
+    return to - from >= link.lag();
+  }
+}
