@@ -25,6 +25,11 @@ final class EventNetworkBuilder {
 
   private final ArcNetwork.Builder arcs = new ArcNetwork.Builder();
   private final long[] slope;
+
+  /** Chains while nothing is paid for: where crashing is free it is done. */
+  private final Reach cheapest;
+
+  /** Chains with every activity at its normal duration. */
   private final Reach normal;
 
   /** Chains shorter than this never carry flow. */
@@ -41,7 +46,12 @@ final class EventNetworkBuilder {
     int size = network.size();
     slope = new long[size];
     Arrays.setAll(slope, i -> EventNetwork.scaledSlope(network.activity(i), scale));
-    normal = new Reach(network, cheapestDurations());
+    cheapest = new Reach(network, cheapestDurations());
+    normal =
+        Arrays.stream(slope).allMatch(s -> s > 0)
+            ? cheapest
+            : new Reach(
+                network, network.activities().stream().mapToLong(Activity::normal).toArray());
     least = Arrays.stream(slope).anyMatch(s -> s < 0) ? Long.MIN_VALUE : shortest();
     startEvent = none(size);
     finishEvent = none(size);
@@ -95,11 +105,11 @@ final class EventNetworkBuilder {
 
   long[] lateTimes() {
     long[] times = new long[events];
-    times[EventNetwork.END] = normal.longest();
+    times[EventNetwork.END] = cheapest.longest();
     for (int i = 0; i < network.size(); i++) {
       if (startEvent[i] != NONE) {
-        times[finishEvent[i]] = normal.longest() - normal.finishToEnd(i);
-        times[startEvent[i]] = normal.longest() - normal.startToEnd(i);
+        times[finishEvent[i]] = cheapest.longest() - cheapest.finishToEnd(i);
+        times[startEvent[i]] = cheapest.longest() - cheapest.startToEnd(i);
       }
     }
     return times;

@@ -3,6 +3,7 @@ package dayworth.engine.stepping;
 import dayworth.engine.Obstacle;
 import dayworth.network.Activity;
 import dayworth.network.Link;
+import dayworth.network.Relation;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -57,7 +58,7 @@ final class HoldingChain {
   private void follow(int index) {
     Link link = events.network.link(index);
     comeTo(link.relation().fromStart());
-    if (link.lag() != 0) {
+    if (link.lag() != 0 || link.relation() != Relation.FS) {
       terms.add(new Obstacle.Lag(index, link.lag()));
     }
     activity = link.successor();
