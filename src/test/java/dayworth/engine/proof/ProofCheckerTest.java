@@ -18,6 +18,7 @@ import dayworth.testing.OutsideSolver;
 import dayworth.testing.RandomNetworks;
 import dayworth.value.Money;
 import dayworth.value.SlopeScale;
+import dayworth.value.TimeScale;
 import java.math.BigDecimal;
 import java.util.List;
 import java.util.Optional;
@@ -113,6 +114,29 @@ class ProofCheckerTest {
     }
     Refuted refuted = refuted(series, series.to().plan(), series.to().cost());
     assertEquals(new Refuted("activity A", "carries more than can be counted"), refuted);
+  }
+
+  /**
+   * By hand: a slope of 1/3 is 349525 of 1048576; 3 ticks of it are 1048575, one unit short of the
+   * cost of 1. On a scale of 100 it is 33, and 0.99 leaves more than half a cent.
+   */
+  @Test
+  void aRoundedScaleMayLeaveLessThanHalfACentAndAnExactOneNothing() {
+    Verdict fine = thirds(new SlopeScale(1 << 20, false));
+    assertEquals(new Proved(Money.of(1), Money.of(1048575).dividedBy(1 << 20)), fine);
+    assertInstanceOf(Refuted.class, thirds(new SlopeScale(1 << 20, true)));
+    assertInstanceOf(Refuted.class, thirds(new SlopeScale(100, false)));
+    assertInstanceOf(Refuted.class, thirds(new SlopeScale(-1, true)));
+  }
+
+  private static Verdict thirds(SlopeScale scale) {
+    Activity activity = Activity.compressible("A", 4, Money.ZERO, 1, Money.of(1));
+    Network network = new Network(TimeScale.WHOLE, List.of(activity), List.of());
+    Flow flow = new Flow(scale, 1, 0);
+    for (Over over : List.of(Over.FROM_PROJECT, Over.SLOPE, Over.TO_PROJECT)) {
+      flow.set(over, 0, Math.max(0, scale.perUnit() / 3));
+    }
+    return new ProofChecker(network).check(Plan.allCrash(network), 1, flow, Money.of(1));
   }
 
   /** Expected: GLOP's plan and dual values, which know nothing of this checker. */
