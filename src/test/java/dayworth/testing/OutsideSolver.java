@@ -5,9 +5,13 @@ import com.google.ortools.linearsolver.MPConstraint;
 import com.google.ortools.linearsolver.MPObjective;
 import com.google.ortools.linearsolver.MPSolver;
 import com.google.ortools.linearsolver.MPVariable;
+import dayworth.engine.Flow;
+import dayworth.engine.Flow.Over;
 import dayworth.network.Activity;
 import dayworth.network.Link;
 import dayworth.network.Network;
+import dayworth.network.Plan;
+import dayworth.value.SlopeScale;
 import java.util.OptionalLong;
 
 /**
@@ -27,24 +31,36 @@ public final class OutsideSolver {
   private final MPVariable[] starts;
   private final MPVariable[] finishes;
   private final MPVariable projectFinish;
+  private final MPConstraint[] works;
+  private final MPConstraint[] ends;
+  private final MPConstraint[] links;
 
   private OutsideSolver(Network network, double deadline) {
     this.network = network;
     this.starts = new MPVariable[network.size()];
     this.finishes = new MPVariable[network.size()];
+    this.works = new MPConstraint[network.size()];
+    this.ends = new MPConstraint[network.size()];
+    this.links = new MPConstraint[network.links().size()];
     this.projectFinish = solver.makeNumVar(0, deadline, "finish");
     for (int i = 0; i < network.size(); i++) {
       Activity activity = network.activity(i);
       starts[i] = solver.makeNumVar((double) activity.notBefore(), MPSolver.infinity(), "s" + i);
       finishes[i] = solver.makeNumVar(-MPSolver.infinity(), MPSolver.infinity(), "f" + i);
-      require(starts[i], finishes[i], (double) activity.crash(), (double) activity.normal());
-      require(finishes[i], projectFinish, 0, MPSolver.infinity());
+      works[i] =
+          require(starts[i], finishes[i], (double) activity.crash(), (double) activity.normal());
+      ends[i] = require(finishes[i], projectFinish, 0, MPSolver.infinity());
     }
-    for (Link link : network.links()) {
+    for (int j = 0; j < links.length; j++) {
+      Link link = network.link(j);
       MPVariable[] from = link.relation().fromStart() ? starts : finishes;
       MPVariable[] to = link.relation().toStart() ? starts : finishes;
-      require(
-          from[link.predecessor()], to[link.successor()], (double) link.lag(), MPSolver.infinity());
+      links[j] =
+          require(
+              from[link.predecessor()],
+              to[link.successor()],
+              (double) link.lag(),
+              MPSolver.infinity());
     }
   }
 
@@ -55,7 +71,10 @@ public final class OutsideSolver {
    * @return positive infinity if no plan meets it
    */
   public static double leastCost(Network network, long deadline) {
-    OutsideSolver outside = new OutsideSolver(network, deadline);
+    if (deadline < 0) {
+      return Double.POSITIVE_INFINITY;
+    }
+    OutsideSolver outside = new OutsideSolver(network, (double) deadline);
     double fixed = outside.setDirectCost();
     MPSolver.ResultStatus status = outside.solver.solve();
     double cost =
@@ -81,6 +100,39 @@ public final class OutsideSolver {
     return shortest;
   }
 
+  /**
+   * GLOP's own plan and dual values at a deadline that can be met.
+   *
+   * @param scale on which the dual values are whole; coarse enough for a double to tell them apart
+   */
+  public static OutsideProof proof(Network network, long deadline, SlopeScale scale) {
+    OutsideSolver outside = new OutsideSolver(network, (double) deadline);
+    outside.setDirectCost();
+    if (outside.solver.solve() != MPSolver.ResultStatus.OPTIMAL) {
+      throw new IllegalStateException("GLOP finds no plan by " + deadline);
+    }
+    Flow flow = new Flow(scale, network.size(), outside.links.length);
+    long[] durations = new long[network.size()];
+    for (int i = 0; i < durations.length; i++) {
+      Activity activity = network.activity(i);
+      durations[i] =
+          Math.round(outside.finishes[i].solutionValue() - outside.starts[i].solutionValue());
+      double price = activity.slope().toDouble() + outside.works[i].dualValue();
+      OutsideProof.spread(activity, i, scaled(price, scale), flow);
+      flow.set(Over.FROM_PROJECT, i, scaled(outside.starts[i].reducedCost(), scale));
+      flow.set(Over.TO_PROJECT, i, scaled(outside.ends[i].dualValue(), scale));
+    }
+    for (int j = 0; j < outside.links.length; j++) {
+      flow.set(Over.LINK, j, scaled(outside.links[j].dualValue(), scale));
+    }
+    outside.solver.delete();
+    return new OutsideProof(Plan.of(durations), flow);
+  }
+
+  private static long scaled(double price, SlopeScale scale) {
+    return Math.round(price * scale.perUnit());
+  }
+
   /** Minimises Σ slope × (normal − duration). */
   private double setDirectCost() {
     MPObjective objective = solver.objective();
@@ -96,9 +148,10 @@ public final class OutsideSolver {
     return fixed;
   }
 
-  private void require(MPVariable from, MPVariable to, double least, double most) {
+  private MPConstraint require(MPVariable from, MPVariable to, double least, double most) {
     MPConstraint row = solver.makeConstraint(least, most);
     row.setCoefficient(to, 1);
     row.setCoefficient(from, -1);
+    return row;
   }
 }

@@ -21,12 +21,16 @@ import org.ojalgo.optimisation.Optimisation;
  * unimodular system, so every corner is a whole number of ticks, and a simplex solver answers with
  * a corner. Its starts and shortenings are rounded to ticks, checked against every rule in whole
  * numbers, and the cost is counted exactly from them. What remains floating point is the choice of
- * the corner: slopes are seen as fractions of the steepest, and differences much finer than {@value
- * #FINEST} would be lost. Where a slope is that flat beside the steepest the programme says that it
- * is not solved, rather than answer with money that might be too much.
+ * the corner: a plan is possible and its cost exact, but where prices differ by less than the
+ * solver's tolerance (a fraction of the steepest slope) it may be a dearer one. Seen: no difference
+ * from an outside solver with slopes up to {@value #FINEST} of the steepest. Where one is flatter
+ * than that the programme says that it is not solved, rather than answer with money that might be
+ * too much.
  *
- * <p><b>Cost.</b> The tableau is dense: rows × columns numbers of 8 bytes. The first deadline is
- * solved from nothing, later ones from the basis of the last.
+ * <p><b>Cost.</b> The tableau is dense: rows × columns numbers of 8 bytes, 0.25 GB for 2,000
+ * activities. The first deadline is solved from nothing, later ones from the basis of the last.
+ * Measured on one core with about two links an activity, k thousand activities: 0.5 s to load
+ * ojAlgo, 1.2 k³ s for the first deadline and 0.025 k² s for each further one.
  *
  * <p>Not safe for use by several threads.
  */

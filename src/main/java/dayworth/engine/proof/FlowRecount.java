@@ -38,6 +38,9 @@ final class FlowRecount {
 
   static FlowBound of(Network network, FlowLimits limits, Flow flow) {
     FlowRecount recount = new FlowRecount(network, limits, flow);
+    if (flow.scale().perUnit() < 1) {
+      recount.refute(Place.PROJECT, "flow has no scale: " + flow.scale());
+    }
     for (int i = 0; i < network.size(); i++) {
       recount.addActivity(i);
     }
