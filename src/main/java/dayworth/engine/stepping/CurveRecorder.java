@@ -53,6 +53,11 @@ final class CurveRecorder implements Squeeze.Listener {
   @Override
   public void priced(long length, long price) {}
 
+  /** The plan to report where the squeeze stands now. */
+  Plan planHere() {
+    return Plan.of(ties.choose(squeeze, plan.toArray()));
+  }
+
   Curve curve(List<Obstacle> obstacles) {
     return new Curve(
         events.network, longest, firstPlan, firstPlan.directCost(events.network), steps, obstacles);

@@ -8,6 +8,7 @@ import dayworth.engine.Curve;
 import dayworth.engine.PieceWitness;
 import dayworth.network.Activity;
 import dayworth.network.Network;
+import dayworth.network.Plan;
 import dayworth.value.SlopeScale;
 import java.util.List;
 import java.util.Optional;
@@ -59,6 +60,26 @@ public final class Stepping {
       throw new IllegalStateException("nothing holds the project's finish from its start");
     }
     return recorder.curve(HoldingChain.of(events, squeeze.heldBy(END)));
+  }
+
+  /**
+   * The cheapest plan that finishes within {@code duration} ticks, chosen as the curve's own plans
+   * are; between two breakpoints against the plan of the longer one.
+   *
+   * @throws IllegalArgumentException if no plan finishes within it
+   */
+  public static Plan planWithin(Network network, long duration) {
+    SlopeScale scale =
+        scaleFor(network)
+            .orElseThrow(() -> new ArithmeticException("the slopes do not fit one scale"));
+    EventNetwork events = EventNetwork.of(network, scale);
+    Squeeze squeeze = squeezeCheaper(events);
+    CurveRecorder recorder = new CurveRecorder(events, squeeze, PieceWitness.NONE);
+    Squeeze.End end = squeeze.run(BEGIN, END, UNLIMITED, duration, recorder);
+    if (end == Squeeze.End.HELD) {
+      throw new IllegalArgumentException("no plan finishes within " + duration + " ticks");
+    }
+    return recorder.planHere();
   }
 
   /** Breakpoints and prices alone, without plans: what a benchmark of the method measures. */
