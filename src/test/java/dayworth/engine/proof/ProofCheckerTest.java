@@ -65,6 +65,34 @@ class ProofCheckerTest {
     }
   }
 
+  /** Round and round the same length: conserved, the bound unchanged, only the limit is broken. */
+  @ParameterizedTest
+  @MethodSource("handWorked")
+  void flowBeyondALimitIsRefutedThoughItIsConserved(HandWorked worked) {
+    for (int i = 0; i < worked.network().size(); i++) {
+      for (boolean normal : new boolean[] {true, false}) {
+        Over limited = normal ? Over.SLOPE : Over.BACK_OVER_CRASH;
+        Over unlimited = normal ? Over.BACK_OVER_NORMAL : Over.CRASH;
+        long[] right = {worked.flow().get(limited, i), worked.flow().get(unlimited, i)};
+        long most = limit(worked.network().activity(i), normal);
+        long more = most + 1 - right[0];
+        worked.flow().set(limited, i, right[0] + more);
+        worked.flow().set(unlimited, i, right[1] + more);
+        Refuted refuted = refuted(worked, worked.to().plan(), worked.to().cost());
+        assertEquals("activity " + worked.network().activity(i).id(), refuted.where());
+        assertTrue(refuted.why().endsWith("carries " + (most + 1) + "; 0 to " + most));
+        worked.flow().set(limited, i, right[0]);
+        worked.flow().set(unlimited, i, right[1]);
+      }
+    }
+  }
+
+  /** The slopes of the hand-worked networks are whole, and so is their scale. */
+  private static long limit(Activity activity, boolean normal) {
+    Money slope = normal ? activity.slope() : activity.slope().negate();
+    return slope.max(Money.ZERO).numerator().longValueExact();
+  }
+
   @ParameterizedTest
   @MethodSource("handWorked")
   void oneTickOfDurationMoreOrLessIsRefuted(HandWorked worked) {
