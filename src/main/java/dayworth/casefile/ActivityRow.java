@@ -1,0 +1,22 @@
+package dayworth.casefile;
+
+import java.math.BigDecimal;
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * A row of activities.csv as far as it could be read; a value that is missing or faulty is empty.
+ *
+ * @param predecessors ids as they stand in the cell
+ */
+record ActivityRow(
+    int line,
+    String id,
+    String name,
+    String group,
+    Optional<BigDecimal> normal,
+    Optional<BigDecimal> normalCost,
+    Optional<BigDecimal> crash,
+    Optional<BigDecimal> crashCost,
+    Optional<BigDecimal> notBefore,
+    List<String> predecessors) {}

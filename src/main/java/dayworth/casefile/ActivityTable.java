@@ -1,0 +1,183 @@
+package dayworth.casefile;
+
+import java.math.BigDecimal;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+
+/** Reads activities.csv. */
+final class ActivityTable {
+
+  static final String FILE = "activities.csv";
+
+  private static final List<Column> COLUMNS =
+      List.of(
+          Column.needed("id"),
+          Column.optional("name"),
+          Column.optional("group"),
+          Column.needed("normal_duration").withNumbers(),
+          Column.needed("normal_cost").withNumbers(),
+          Column.optional("crash_duration").withNumbers(),
+          Column.optional("crash_cost").withNumbers(),
+          Column.optional("divisible"),
+          Column.optional("predecessors"),
+          Column.optional("not_before").withNumbers());
+
+  private static final CellParser<String> DIVISIBLE =
+      (text, style) -> {
+        if (text.equals("no")) {
+          throw new CellFault("all-or-nothing activities are not served yet", "yes, or blank");
+        }
+        if (!text.equals("yes")) {
+          throw new CellFault("no such choice", "yes, or blank");
+        }
+        return text;
+      };
+
+  private final Findings findings;
+  private final Map<String, Integer> lineById = new HashMap<>();
+
+  private ActivityTable(Findings findings) {
+    this.findings = findings;
+  }
+
+  static List<ActivityRow> read(String text, Findings findings) {
+    Optional<Table> table = Table.of(FILE, text, COLUMNS, findings);
+    if (table.isEmpty()) {
+      return List.of();
+    }
+    List<ActivityRow> rows = new ActivityTable(findings).rows(table.get());
+    if (rows.isEmpty() && table.get().misfits().isEmpty()) {
+      findings.problem(Place.whole(FILE).notice("no activity", "a header only", "a row for each"));
+    }
+    return rows;
+  }
+
+  private List<ActivityRow> rows(Table table) {
+    List<ActivityRow> rows = new ArrayList<>();
+    for (Row row : table.rows()) {
+      String id = table.text(row, "id");
+      checkId(table, row, id);
+      rows.add(row(table, row, id));
+    }
+    for (Row misfit : table.misfits()) {
+      rows.add(unread(misfit.line(), table.text(misfit, "id")));
+    }
+    return rows;
+  }
+
+  private static ActivityRow unread(int line, String id) {
+    return new ActivityRow(
+        line,
+        id,
+        "",
+        "",
+        Optional.empty(),
+        Optional.empty(),
+        Optional.empty(),
+        Optional.empty(),
+        Optional.empty(),
+        List.of());
+  }
+
+  private void checkId(Table table, Row row, String id) {
+    if (!table.has("id")) {
+      return;
+    }
+    Place place = table.place(row, "id");
+    if (id.isEmpty()) {
+      findings.problem(place.notice("blank", "", "each activity needs an id"));
+    } else if (id.matches("(?s).*[;,\\v].*")) {
+      findings.problem(
+          place.notice("an id may not hold ; or , or a line break", id, "an id without them"));
+    }
+    Integer earlier = id.isEmpty() ? null : lineById.putIfAbsent(id, row.line());
+    if (earlier != null) {
+      findings.problem(
+          place.notice(
+              "a second activity of this id", id, "another id; line " + earlier + " has it"));
+    }
+  }
+
+  private ActivityRow row(Table table, Row row, String id) {
+    Cell<BigDecimal> normal = table.needed(row, "normal_duration", TimeCell.DURATION, findings);
+    Cell<BigDecimal> cost = table.needed(row, "normal_cost", MoneyCell.AMOUNT, findings);
+    Cell<BigDecimal> crash = table.cell(row, "crash_duration", TimeCell.DURATION, findings);
+    Cell<BigDecimal> crashCost = table.cell(row, "crash_cost", MoneyCell.AMOUNT, findings);
+    table.cell(row, "divisible", DIVISIBLE, findings);
+    Cell<BigDecimal> notBefore = table.cell(row, "not_before", TimeCell.MOMENT, findings);
+    checkBothOrNeither(table, row, crash, crashCost);
+    checkCrash(table, row, normal, cost, crash, crashCost);
+    return new ActivityRow(
+        row.line(),
+        id,
+        table.text(row, "name"),
+        table.text(row, "group"),
+        normal.value(),
+        cost.value(),
+        crash.value(),
+        crashCost.value(),
+        notBefore.value(),
+        ids(table.text(row, "predecessors")));
+  }
+
+  private static List<String> ids(String cell) {
+    return Arrays.stream(cell.split("[;,]"))
+        .map(String::strip)
+        .filter(id -> !id.isEmpty())
+        .toList();
+  }
+
+  private void checkBothOrNeither(
+      Table table, Row row, Cell<BigDecimal> crash, Cell<BigDecimal> crashCost) {
+    if (crash.given() && !crashCost.given()) {
+      findings.problem(
+          table
+              .place(row, "crash_cost")
+              .notice(
+                  "blank beside a crash duration", "", "the cost at that duration, or neither"));
+    }
+    if (crashCost.given() && !crash.given()) {
+      findings.problem(
+          table
+              .place(row, "crash_duration")
+              .notice("blank beside a crash cost", "", "the duration at that cost, or neither"));
+    }
+  }
+
+  private void checkCrash(
+      Table table,
+      Row row,
+      Cell<BigDecimal> normal,
+      Cell<BigDecimal> cost,
+      Cell<BigDecimal> crash,
+      Cell<BigDecimal> crashCost) {
+    if (normal.value().isEmpty() || crash.value().isEmpty()) {
+      return;
+    }
+    int difference = crash.value().get().compareTo(normal.value().get());
+    if (difference > 0) {
+      findings.problem(
+          table
+              .place(row, "crash_duration")
+              .notice(
+                  "longer than the normal duration",
+                  crash.text(),
+                  "at most " + normal.text() + ", the normal duration"));
+    } else if (difference == 0
+        && cost.value().isPresent()
+        && crashCost.value().isPresent()
+        && crashCost.value().get().compareTo(cost.value().get()) != 0) {
+      findings.problem(
+          table
+              .place(row, "crash_cost")
+              .notice(
+                  "another cost for the same duration",
+                  crashCost.text(),
+                  cost.text() + ", or a shorter crash duration"));
+    }
+  }
+}

@@ -1,0 +1,141 @@
+package dayworth.casefile;
+
+import dayworth.decision.InputFile;
+import java.io.IOException;
+import java.nio.ByteBuffer;
+import java.nio.charset.CharacterCodingException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.security.MessageDigest;
+import java.security.NoSuchAlgorithmException;
+import java.util.ArrayList;
+import java.util.HexFormat;
+import java.util.List;
+import java.util.Optional;
+import java.util.Set;
+import java.util.stream.Stream;
+
+/** The files of a case folder: their texts and digests. */
+final class CaseFolder {
+
+  private static final List<String> SERVED =
+      List.of(ActivityTable.FILE, LinkTable.FILE, TermsTable.FILE);
+
+  private static final Set<String> NOT_YET =
+      Set.of(
+          "holidays.csv",
+          "sections.csv",
+          "running.csv",
+          "progress.csv",
+          "measures.csv",
+          "packages.csv",
+          "labour.csv",
+          "patterns.csv",
+          "pay.csv",
+          "output_loss.csv");
+
+  /** Only other commands use these. */
+  private static final Set<String> LEFT_ALONE = Set.of("ranges.csv", "notes.md");
+
+  private static final String BYTE_ORDER_MARK = "\uFEFF";
+
+  private final Path folder;
+  private final Findings findings;
+  private final List<InputFile> inputs = new ArrayList<>();
+
+  CaseFolder(Path folder, Findings findings) {
+    this.folder = folder;
+    this.findings = findings;
+  }
+
+  /** The files that were read, by name. */
+  List<InputFile> inputs() {
+    return inputs;
+  }
+
+  /** Reports what is wrong with the folder itself and the names in it. */
+  void checkNames() {
+    String name = String.valueOf(folder.getFileName());
+    if (!Files.isDirectory(folder)) {
+      String right = "a folder with " + ActivityTable.FILE + " in it";
+      findings.problem(Place.whole(name).notice("no such folder", folder.toString(), right));
+      return;
+    }
+    try (Stream<Path> entries = Files.list(folder)) {
+      entries.map(entry -> entry.getFileName().toString()).forEach(this::checkName);
+    } catch (IOException e) {
+      findings.problem(Place.whole(name).notice("cannot be listed", "", "leave to read it"));
+    }
+    if (!Files.exists(folder.resolve(ActivityTable.FILE))) {
+      findings.problem(
+          Place.whole(ActivityTable.FILE).notice("is not there", "", "a case needs this file"));
+    }
+  }
+
+  private void checkName(String name) {
+    if (NOT_YET.contains(name)) {
+      findings.problem(
+          Place.whole(name).notice("is not served yet", "", "take it out of the folder"));
+    } else if (!SERVED.contains(name) && !LEFT_ALONE.contains(name)) {
+      List<String> known = new ArrayList<>(SERVED);
+      known.addAll(NOT_YET.stream().sorted().toList());
+      new Nearest(known)
+          .to(name)
+          .filter(near -> name.length() > 4)
+          .ifPresent(
+              near ->
+                  findings.warning(
+                      Place.whole(name).notice("is left alone", "", "perhaps meant as " + near)));
+    }
+  }
+
+  /** The text of a file without its byte order mark; empty if there is none or it is faulty. */
+  Optional<String> text(String name) {
+    Path file = folder.resolve(name);
+    if (!Files.exists(file)) {
+      return Optional.empty();
+    }
+    byte[] bytes;
+    try {
+      bytes = Files.readAllBytes(file);
+    } catch (IOException e) {
+      findings.problem(Place.whole(name).notice("cannot be read", "", "a file one may read"));
+      return Optional.empty();
+    }
+    inputs.add(new InputFile(name, digest(bytes)));
+    try {
+      String text = StandardCharsets.UTF_8.newDecoder().decode(ByteBuffer.wrap(bytes)).toString();
+      return Optional.of(text.startsWith(BYTE_ORDER_MARK) ? text.substring(1) : text);
+    } catch (CharacterCodingException e) {
+      findings.problem(
+          new Place(name, firstBadLine(bytes), "").notice("not UTF-8", "", "save it as UTF-8"));
+      return Optional.empty();
+    }
+  }
+
+  private static int firstBadLine(byte[] bytes) {
+    int line = 1;
+    int start = 0;
+    for (int at = 0; at <= bytes.length; at++) {
+      if (at == bytes.length || bytes[at] == '\n') {
+        try {
+          StandardCharsets.UTF_8.newDecoder().decode(ByteBuffer.wrap(bytes, start, at - start));
+        } catch (CharacterCodingException e) {
+          return line;
+        }
+        start = at + 1;
+        line++;
+      }
+    }
+    return line;
+  }
+
+  private static String digest(byte[] bytes) {
+    try {
+      return HexFormat.of().formatHex(MessageDigest.getInstance("SHA-256").digest(bytes));
+    } catch (NoSuchAlgorithmException e) {
+      throw new IllegalStateException("every Java has SHA-256", e);
+    }
+  }
+}

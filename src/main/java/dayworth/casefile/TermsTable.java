@@ -1,0 +1,162 @@
+package dayworth.casefile;
+
+import java.math.BigDecimal;
+import java.time.LocalDate;
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+
+/** Reads terms.csv: each term with its own parser. */
+final class TermsTable {
+
+  static final String FILE = "terms.csv";
+
+  private static final List<Column> COLUMNS =
+      List.of(Column.needed("term"), Column.needed("value"));
+
+  private static final WordCell<String> PER_UNIT =
+      WordCell.<String>of("word").with("unit", "unit").notYet("calendar_day").notYet("week");
+
+  private static final Map<String, CellParser<?>> PARSERS =
+      Map.ofEntries(
+          Map.entry("title", (text, style) -> text),
+          Map.entry("currency", (text, style) -> text),
+          Map.entry(
+              "time_unit",
+              WordCell.<String>of("time unit")
+                  .with("day", "DAY")
+                  .with("week", "WEEK")
+                  .with("hour", "HOUR")
+                  .with("shift", "SHIFT")),
+          Map.entry("units_per_working_day", TimeCell.DURATION),
+          Map.entry("start_date", (CellParser<LocalDate>) TimeCell::date),
+          Map.entry("working_days", (CellParser<List<String>>) WorkingDays::parse),
+          Map.entry("time_related_cost", MoneyCell.AMOUNT),
+          Map.entry("time_related_per", PER_UNIT),
+          Map.entry("fixed_cost", MoneyCell.AMOUNT),
+          Map.entry("contract_finish", TimeCell.MOMENT),
+          Map.entry("damages_rate", MoneyCell.AMOUNT),
+          Map.entry("damages_per", PER_UNIT),
+          Map.entry("damages_grace", TimeCell.DURATION),
+          Map.entry("damages_cap", MoneyCell.ABOVE_ZERO),
+          Map.entry("bonus_rate", MoneyCell.AMOUNT),
+          Map.entry("bonus_per", PER_UNIT),
+          Map.entry("bonus_cap", MoneyCell.ABOVE_ZERO),
+          Map.entry("bonus_cap_units", TimeCell.DURATION));
+
+  private static final Set<String> NOT_YET =
+      Set.of(
+          "data_date",
+          "extension",
+          "damages_part_week",
+          "basis",
+          "prepared_for",
+          "prepared_by",
+          "reference",
+          "valid_until",
+          "on_cost_percent",
+          "proposal_cost");
+
+  private final Findings findings;
+  private final Map<String, Place> places = new HashMap<>();
+  private final Map<String, Object> values = new HashMap<>();
+
+  private TermsTable(Findings findings) {
+    this.findings = findings;
+  }
+
+  static TermsTable read(Optional<String> text, Findings findings) {
+    TermsTable terms = new TermsTable(findings);
+    text.flatMap(csv -> Table.of(FILE, csv, COLUMNS, findings)).ifPresent(terms::addRows);
+    terms.requireTogether();
+    return terms;
+  }
+
+  Optional<Place> place(String term) {
+    return Optional.ofNullable(places.get(term));
+  }
+
+  Optional<String> text(String term) {
+    return Optional.ofNullable(values.get(term)).map(Object::toString);
+  }
+
+  Optional<BigDecimal> number(String term) {
+    return Optional.ofNullable((BigDecimal) values.get(term));
+  }
+
+  BigDecimal amount(String term) {
+    return number(term).orElse(BigDecimal.ZERO);
+  }
+
+  private void addRows(Table table) {
+    Nearest nearest = new Nearest(known());
+    for (Row row : table.rows()) {
+      String term = table.text(row, "term");
+      Place place = new Place(FILE, row.line(), term);
+      if (NOT_YET.contains(term)) {
+        findings.problem(place.notice("this term is not served yet", term, "take the row out"));
+      } else if (!PARSERS.containsKey(term)) {
+        String right = nearest.hint(term, "one of " + String.join(", ", known()));
+        findings.problem(new Place(FILE, row.line(), "term").notice("no such term", term, right));
+      } else if (places.putIfAbsent(term, place) != null) {
+        findings.problem(
+            place.notice(
+                "a second row of this term", term, "line " + places.get(term).line() + " has it"));
+      } else {
+        addValue(table, row, term);
+      }
+    }
+  }
+
+  private void addValue(Table table, Row row, String term) {
+    String text = table.text(row, "value");
+    if (text.isEmpty()) {
+      return;
+    }
+    try {
+      values.put(term, PARSERS.get(term).parse(text, table.style()));
+    } catch (CellFault fault) {
+      findings.problem(places.get(term).notice(fault.wrong(), text, fault.right()));
+    }
+  }
+
+  private static List<String> known() {
+    List<String> known = new ArrayList<>(PARSERS.keySet());
+    known.addAll(NOT_YET);
+    known.sort(null);
+    return known;
+  }
+
+  private void requireTogether() {
+    require("damages_rate", "contract_finish");
+    require("bonus_rate", "contract_finish");
+    require("damages_grace", "damages_rate");
+    require("damages_cap", "damages_rate");
+    require("bonus_cap", "bonus_rate");
+    require("bonus_cap_units", "bonus_rate");
+    String unit = text("time_unit").orElse("DAY");
+    boolean finer = unit.equals("HOUR") || unit.equals("SHIFT");
+    if (finer && !places.containsKey("units_per_working_day")) {
+      findings.problem(
+          places
+              .get("time_unit")
+              .notice("needs units_per_working_day", "", "how many of them make a working day"));
+    }
+    number("units_per_working_day")
+        .filter(units -> units.signum() == 0)
+        .ifPresent(
+            units ->
+                findings.problem(
+                    places.get("units_per_working_day").notice("zero", "0", "more than 0")));
+  }
+
+  private void require(String term, String other) {
+    if (values.containsKey(term) && !places.containsKey(other)) {
+      findings.problem(
+          places.get(term).notice("means nothing without " + other, term, "a row for " + other));
+    }
+  }
+}
