@@ -1,0 +1,64 @@
+package dayworth.command;
+
+import dayworth.decision.Case;
+import dayworth.decision.CurveAnswer;
+import dayworth.decision.CurveQuestion;
+import dayworth.report.CurveFiles;
+import dayworth.report.CurveText;
+import dayworth.report.ResultJson;
+import dayworth.report.ResultsNotWritten;
+import dayworth.value.TimeScale;
+import java.math.BigDecimal;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalLong;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Option;
+
+/** {@code dayworth curve}. */
+@Command(name = "curve", description = "Compute and prove what each finish costs.")
+final class CurveCommand extends CaseCommand {
+
+  @Option(
+      names = "--at",
+      paramLabel = "UNITS",
+      description = "Write the plan for this duration; the least total if not given.")
+  private Optional<BigDecimal> at = Optional.empty();
+
+  @Option(
+      names = "--crosscheck",
+      paramLabel = "all|none|N",
+      description = "How many points to compare with the linear programme.",
+      converter = CrossCheckSize.Parser.class)
+  private Optional<CrossCheckSize> crosscheck = Optional.empty();
+
+  @Override
+  TimeScale finest() {
+    return at.map(TimeScale::of).orElse(TimeScale.WHOLE);
+  }
+
+  @Override
+  int answer(Case read) throws ResultsNotWritten {
+    TimeScale scale = read.network().scale();
+    OptionalLong asked =
+        at.map(units -> OptionalLong.of(scale.ticks(units))).orElseGet(OptionalLong::empty);
+    long size =
+        crosscheck.map(CrossCheckSize::most).orElseGet(() -> CrossCheckSize.usual(read.network()));
+    CurveAnswer answer;
+    try {
+      answer = CurveQuestion.ask(read, asked, size);
+    } catch (IllegalArgumentException impossible) {
+      err().println("dayworth: " + impossible.getMessage());
+      return Exit.NO_ANSWER;
+    }
+    Map<String, byte[]> files = CurveFiles.of(answer, Version.text());
+    Path target = write(files, files.keySet());
+    List<String> lines = new ArrayList<>(CurveText.lines(answer, style(), CurveText.WIDEST));
+    lines.addAll(CurveText.written(target.toString(), files.keySet(), CurveText.WIDEST));
+    say(lines, ResultJson.ofCurve(answer, Version.text()));
+    return Exit.DONE;
+  }
+}

@@ -1,0 +1,61 @@
+package dayworth.decision;
+
+import dayworth.engine.Curve;
+import dayworth.engine.PieceWitness;
+import dayworth.engine.stepping.Stepping;
+import dayworth.network.CriticalChains;
+import dayworth.network.Network;
+import dayworth.network.Plan;
+import dayworth.network.Timing;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.stream.IntStream;
+
+/** What are the facts of the network? */
+public final class CheckQuestion {
+
+  private static final int FIRST_CHAINS = 3;
+  private static final int NEAREST = 5;
+
+  private CheckQuestion() {}
+
+  /** The answer; the shortest finish is that of the exact curve. */
+  public static CheckAnswer ask(Case of) {
+    Network network = of.network();
+    Timing asPlanned = Timing.earliest(network, Plan.allNormal(network));
+    CriticalChains chains = CriticalChains.of(network, asPlanned);
+    Curve curve = Stepping.curve(network, PieceWitness.NONE);
+    return new CheckAnswer(
+        of,
+        asPlanned,
+        curve.shortest(),
+        chains.count(),
+        chains.first(FIRST_CHAINS),
+        nearCritical(network, asPlanned),
+        network.openStarts(),
+        network.openEnds(),
+        neverCritical(network, asPlanned, curve.shortest()));
+  }
+
+  private static List<Integer> nearCritical(Network network, Timing asPlanned) {
+    return IntStream.range(0, network.size())
+        .filter(i -> !asPlanned.isCritical(i))
+        .boxed()
+        .sorted(Comparator.comparingLong(asPlanned::totalFloat))
+        .limit(NEAREST)
+        .toList();
+  }
+
+  private static List<CheckAnswer.NeverCritical> neverCritical(
+      Network network, Timing asPlanned, long shortest) {
+    List<CheckAnswer.NeverCritical> never = new ArrayList<>();
+    for (int i = 0; i < network.size(); i++) {
+      long through = asPlanned.finish() - asPlanned.totalFloat(i);
+      if (network.activity(i).isCompressible() && through < shortest) {
+        never.add(new CheckAnswer.NeverCritical(i, through));
+      }
+    }
+    return never;
+  }
+}
