@@ -33,15 +33,25 @@ final class CaseFolder {
   }
 
   private static String row(Activity activity) {
-    String crash =
-        activity.isCompressible() ? activity.crash() + "," + activity.crashCost() : ",";
-    return activity.id() + "," + activity.normal() + "," + activity.normalCost() + "," + crash
+    String crash = activity.isCompressible() ? activity.crash() + "," + activity.crashCost() : ",";
+    return activity.id()
+        + ","
+        + activity.normal()
+        + ","
+        + activity.normalCost()
+        + ","
+        + crash
         + "\n";
   }
 
   private static String row(Network network, Link link) {
     return network.activity(link.predecessor()).id()
-        + "," + network.activity(link.successor()).id()
-        + "," + link.relation() + "," + link.lag() + "\n";
+        + ","
+        + network.activity(link.successor()).id()
+        + ","
+        + link.relation()
+        + ","
+        + link.lag()
+        + "\n";
   }
 }

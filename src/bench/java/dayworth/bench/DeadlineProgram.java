@@ -7,9 +7,9 @@ import java.io.PrintWriter;
 import java.util.stream.IntStream;
 
 /**
- * The least extra cost of one deadline as a linear program, in the CPLEX LP format that most solvers
- * read: a start s and a shortening y for each activity, a row for each link, and a row for each
- * finish that no link already holds before another finish.
+ * The least extra cost of one deadline as a linear program, in the CPLEX LP format that most
+ * solvers read: a start s and a shortening y for each activity, a row for each link, and a row for
+ * each finish that no link already holds before another finish.
  */
 final class DeadlineProgram {
 

@@ -28,7 +28,7 @@ final class NetworkGenerator {
   }
 
   /**
-   * Many chains side by side, nearly equally long: each activity follows one to three of the layer
+   * Many chains side by side, nearly equally long: each activity follows one or two of the layer
    * before it, most of them by a plain finish-to-start link.
    *
    * @param size how many activities
@@ -57,7 +57,7 @@ final class NetworkGenerator {
   static Network chain(int size, long seed) {
     NetworkGenerator generator = new NetworkGenerator(seed);
     for (int i = 0; i < size; i++) {
-      generator.addActivity(generator.between(2, 12));
+      generator.addActivity(generator.between(2, 8));
       if (i > 0) {
         generator.overlap(i - 1, i);
       }
@@ -72,27 +72,25 @@ final class NetworkGenerator {
   private void addActivity(int normal) {
     String id = "A" + (activities.size() + 1);
     Money normalCost = Money.of(normal * (long) between(200, 2000));
-    int crash = Math.max(1, (normal * between(50, 90) + 50) / 100);
+    int crash = Math.max(1, (normal * Math.min(between(50, 90), between(50, 90)) + 50) / 100);
     if (crash == normal || !chance(70)) {
       activities.add(Activity.fixed(id, normal, normalCost));
       return;
     }
     Money extra = Money.of((normal - crash) * (long) slope());
-    activities.add(
-        Activity.compressible(id, normal, normalCost, crash, normalCost.plus(extra)));
+    activities.add(Activity.compressible(id, normal, normalCost, crash, normalCost.plus(extra)));
   }
 
-  /** Spread over two powers of ten, cheap ones as often as dear ones. */
+  /** Cheap ones as often as dear ones, and few alike. */
   private int slope() {
-    int decade = chance(50) ? 1 : 10;
-    return decade * between(20, 400);
+    return chance(50) ? between(20, 999) : between(200, 9_999);
   }
 
   private void followLayer(int activity, int firstBefore, int firstHere) {
     if (firstBefore == firstHere) {
       return;
     }
-    int wanted = Math.min(between(1, 3), firstHere - firstBefore);
+    int wanted = Math.min(chance(60) ? 1 : 2, firstHere - firstBefore);
     List<Integer> taken = new ArrayList<>();
     while (taken.size() < wanted) {
       int predecessor = between(firstBefore, firstHere - 1);
@@ -121,8 +119,8 @@ final class NetworkGenerator {
   }
 
   private void overlap(int predecessor, int successor) {
-    links.add(new Link(predecessor, successor, Relation.SS, between(1, 2)));
-    links.add(new Link(predecessor, successor, Relation.FF, between(1, 2)));
+    links.add(new Link(predecessor, successor, Relation.SS, between(0, 2)));
+    links.add(new Link(predecessor, successor, Relation.FF, between(0, 2)));
   }
 
   private boolean chance(int percent) {
