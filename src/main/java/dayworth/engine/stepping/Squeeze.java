@@ -2,7 +2,6 @@ package dayworth.engine.stepping;
 
 import static dayworth.engine.stepping.ArcNetwork.UNLIMITED;
 
-import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 
@@ -14,18 +13,19 @@ import java.util.List;
  * is kept: t(v) − t(u) ≥ its length. Make t(to) − t(from) smaller, at the least cost.
  *
  * <p><b>Method.</b> Primal-dual successive longest paths (Kelley 1961; Fulkerson 1961; the view by
- * minimum cuts is Phillips and Dessouky 1977). A tree holds the events that are reached from {@code
- * from} over half-arcs with room and no slack. While {@code to} is outside, the tree moves later as
- * one until the next half-arc out of it becomes tight, and grows over it: the half-arcs between
- * tree and rest are a minimum cut, and what flows over it is the price of a tick. When {@code to}
- * is reached, as much as the path has room for is sent along it; what hung on a half-arc that is
- * now full is hung elsewhere in the tree or leaves it. So a step touches only what it changes.
+ * minimum cuts is Phillips and Dessouky 1977). Known is the set of events that are reached from
+ * {@code from} over half-arcs with room and no slack. While {@code to} is outside, the set moves
+ * later as one until the next half-arc out of it becomes tight, and grows over it: the half-arcs
+ * between set and rest are a minimum cut, and what flows over it is the price of a tick. When
+ * {@code to} is reached, a maximum flow is sent over the half-arcs without slack ({@link
+ * TightFlow}), and what is then no longer reached leaves the set.
  *
  * <p><b>Invariant.</b> Every half-arc with room is kept by the times; half-arcs with flow in both
  * directions have no slack; so times and flow are cheapest for the present t(to) − t(from).
  *
- * <p><b>Cost.</b> Each event that joins or leaves costs its half-arcs and their places in a heap.
- * All numbers are whole.
+ * <p><b>Cost.</b> For each change of price the half-arcs of the events reached, a few times over;
+ * for each event that joins or leaves its half-arcs and their places in a heap. All numbers are
+ * whole.
  */
 final class Squeeze {
 
@@ -59,21 +59,19 @@ final class Squeeze {
     HELD
   }
 
-  private static final int NONE = -1;
-
   private final ArcNetwork net;
 
-  /** Of an event outside the tree its time; of one inside its time less the present shift. */
+  /** Of an event that is not reached its time; of one that is its time less the present shift. */
   private final long[] time;
 
-  private final TightTree tree;
+  private final Reached reached;
+  private final TightFlow flow;
   private final EventHeap heap = new EventHeap();
 
-  /** Half-arcs out of the tree that are tight already, in the order in which they were found. */
+  /** Half-arcs out of the set that are tight already. */
   private int[] tight = new int[64];
 
-  private int tightRead;
-  private int tightWrite;
+  private int tightCount;
 
   private long shift;
   private long sent;
@@ -81,12 +79,13 @@ final class Squeeze {
   Squeeze(ArcNetwork net, long[] times) {
     this.net = net;
     this.time = times.clone();
-    this.tree = new TightTree(net, time);
+    this.reached = new Reached(net, time);
+    this.flow = new TightFlow(net, time, reached);
   }
 
   /** The present time of an event. */
   long time(int event) {
-    return tree.holds(event) ? time[event] + shift : time[event];
+    return reached.holds(event) ? time[event] + shift : time[event];
   }
 
   /** How much the last squeeze sent. */
@@ -95,12 +94,8 @@ final class Squeeze {
   }
 
   /** The half-arcs of the path that holds the events apart, from first to last. */
-  List<Integer> heldBy(int to) {
-    List<Integer> path = new ArrayList<>();
-    for (int half = tree.into(to); half != NONE; half = tree.into(tail(half))) {
-      path.add(0, half);
-    }
-    return path;
+  List<Integer> heldBy() {
+    return flow.heldBy();
   }
 
   /**
@@ -112,136 +107,97 @@ final class Squeeze {
   End run(int from, int to, long most, long close, Listener listener) {
     settle();
     sent = 0;
-    join(from, NONE);
-    long told = UNLIMITED;
+    join(from);
     while (sent < most) {
-      if (!reach(from, to, close)) {
+      if (!reach(from, to, close) || time(to) - time(from) <= close) {
         return End.CLOSE_ENOUGH;
       }
       long length = time(to) - time(from);
-      if (length <= close) {
-        return End.CLOSE_ENOUGH;
-      }
-      if (length < told) {
-        listener.arrived(length);
-      }
-      if (!augment(to, most)) {
+      listener.arrived(length);
+      sent += flow.send(from, to, most == UNLIMITED ? UNLIMITED : most - sent);
+      if (flow.isHeld()) {
         return End.HELD;
       }
-      told = length;
-      if (!tree.holds(to)) {
-        listener.priced(length, sent);
-      }
+      listener.priced(length, sent);
+      reached.sweep();
+      leave();
     }
     return End.AMOUNT_SENT;
   }
 
-  /** Takes the tree apart; its events keep the times they have come to. */
+  /** Lets go of all events; they keep the times they have come to. */
   void settle() {
-    tree.clear(shift);
+    reached.clear(shift);
     heap.clear();
-    tightRead = 0;
-    tightWrite = 0;
+    tightCount = 0;
     shift = 0;
   }
 
-  /** Grows the tree until it holds {@code to}; false if the events came close enough before. */
+  /** Grows the set until it holds {@code to}; false if the events came close enough before. */
   private boolean reach(int from, int to, long close) {
-    while (!tree.holds(to)) {
-      if (tightRead < tightWrite) {
-        int half = tight[tightRead++];
-        if (isTightNow(half)) {
-          join(net.head[half], half);
-        }
-        continue;
+    while (true) {
+      spread();
+      if (reached.holds(to)) {
+        return true;
       }
-      tightRead = 0;
-      tightWrite = 0;
       long enough = time[to] - time[from] - close;
       if (heap.isEmpty() || heap.leastKey() > enough) {
         shift = Math.max(shift, enough);
         return false;
       }
-      long key = heap.leastKey();
-      int half = heap.pop();
-      if (leavesTree(half) && key == shiftWhenTight(half)) {
-        shift = key;
-        join(net.head[half], half);
+      shift = heap.leastKey();
+    }
+  }
+
+  /** Adds all that is reached at the present shift. */
+  private void spread() {
+    while (tightCount > 0 || (!heap.isEmpty() && heap.leastKey() <= shift)) {
+      int half = tightCount > 0 ? tight[--tightCount] : heap.pop();
+      int tail = net.head[net.mate[half]];
+      int head = net.head[half];
+      if (!reached.holds(head)
+          && reached.holds(tail)
+          && net.room[half] > 0
+          && time[head] - time[tail] - net.length[half] == shift) {
+        join(head);
       }
     }
-    return true;
   }
 
-  private boolean isTightNow(int half) {
-    return leavesTree(half) && shiftWhenTight(half) == shift;
-  }
-
-  private boolean leavesTree(int half) {
-    return net.room[half] > 0 && !tree.holds(net.head[half]) && tree.holds(tail(half));
-  }
-
-  private long shiftWhenTight(int half) {
-    return time[net.head[half]] - time[tail(half)] - net.length[half];
-  }
-
-  private int tail(int half) {
-    return net.head[net.mate[half]];
-  }
-
-  private void join(int event, int half) {
+  private void join(int event) {
     time[event] -= shift;
-    tree.add(event, half);
+    reached.add(event);
     for (int out = net.first[event]; out < net.first[event + 1]; out++) {
-      if (net.room[out] > 0 && !tree.holds(net.head[out])) {
-        await(out);
+      int head = net.head[out];
+      if (net.room[out] > 0 && !reached.holds(head)) {
+        await(out, time[head] - time[event] - net.length[out]);
       }
     }
   }
 
-  private void await(int half) {
-    long key = shiftWhenTight(half);
+  private void await(int half, long key) {
     if (key > shift) {
       heap.push(key, half);
       return;
     }
-    if (tightWrite == tight.length) {
-      tight = Arrays.copyOf(tight, 2 * tightWrite);
+    if (tightCount == tight.length) {
+      tight = Arrays.copyOf(tight, 2 * tightCount);
     }
-    tight[tightWrite++] = half;
+    tight[tightCount++] = half;
   }
 
-  /** Sends what the tree's path to an event has room for; false if that has no limit. */
-  private boolean augment(int to, long most) {
-    long amount = most == UNLIMITED ? UNLIMITED : most - sent;
-    for (int half = tree.into(to); half != NONE; half = tree.into(tail(half))) {
-      amount = Math.min(amount, net.room[half]);
-    }
-    if (amount == UNLIMITED) {
-      return false;
-    }
-    sent += amount;
-    for (int half = tree.into(to); half != NONE; half = tree.into(tail(half))) {
-      net.send(half, amount);
-      if (net.room[half] == 0) {
-        tree.cut(net.head[half]);
-      }
-    }
-    tree.mend();
-    leave();
-    return true;
-  }
-
-  /** Lets go of the events that found no other place in the tree. */
+  /** Gives the events that are no longer reached their own time again. */
   private void leave() {
-    for (int k = 0; k < tree.lostCount(); k++) {
-      time[tree.lost(k)] += shift;
+    for (int k = 0; k < reached.lostCount(); k++) {
+      time[reached.lost(k)] += shift;
     }
-    for (int k = 0; k < tree.lostCount(); k++) {
-      int event = tree.lost(k);
+    for (int k = 0; k < reached.lostCount(); k++) {
+      int event = reached.lost(k);
       for (int out = net.first[event]; out < net.first[event + 1]; out++) {
         int in = net.mate[out];
-        if (net.room[in] > 0 && tree.holds(net.head[out])) {
-          await(in);
+        int tail = net.head[out];
+        if (net.room[in] > 0 && reached.holds(tail)) {
+          heap.push(time[event] - time[tail] - net.length[in], in);
         }
       }
     }

@@ -59,7 +59,7 @@ public final class Stepping {
     if (squeeze.run(BEGIN, END, UNLIMITED, -1, recorder) != Squeeze.End.HELD) {
       throw new IllegalStateException("nothing holds the project's finish from its start");
     }
-    return recorder.curve(HoldingChain.of(events, squeeze.heldBy(END)));
+    return recorder.curve(HoldingChain.of(events, squeeze.heldBy()));
   }
 
   /**
