@@ -17,6 +17,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.concurrent.Callable;
+import picocli.CommandLine;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
@@ -71,6 +72,10 @@ abstract class CaseCommand implements Callable<Integer> {
     }
   }
 
+  final CommandLine.ParameterException wrongUsage(String why) {
+    return new CommandLine.ParameterException(spec.commandLine(), why);
+  }
+
   final void say(List<String> lines, String result) {
     if (json) {
       spec.commandLine().getOut().print(result);
@@ -104,7 +109,7 @@ abstract class CaseCommand implements Callable<Integer> {
     return out.orElse(Path.of("output", name));
   }
 
-  private static void print(PrintWriter writer, List<String> lines) {
+  static void print(PrintWriter writer, List<String> lines) {
     lines.forEach(writer::println);
   }
 }

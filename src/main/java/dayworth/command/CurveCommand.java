@@ -3,6 +3,7 @@ package dayworth.command;
 import dayworth.decision.Case;
 import dayworth.decision.CurveAnswer;
 import dayworth.decision.CurveQuestion;
+import dayworth.decision.FinishTooEarly;
 import dayworth.report.CurveFiles;
 import dayworth.report.CurveText;
 import dayworth.report.ResultJson;
@@ -22,6 +23,9 @@ import picocli.CommandLine.Option;
 @Command(name = "curve", description = "Compute and prove what each finish costs.")
 final class CurveCommand extends CaseCommand {
 
+  /** Longer than any project that a case may hold. */
+  private static final BigDecimal MOST_UNITS = BigDecimal.valueOf(1_000_000_000);
+
   @Option(
       names = "--at",
       paramLabel = "UNITS",
@@ -37,6 +41,16 @@ final class CurveCommand extends CaseCommand {
 
   @Override
   TimeScale finest() {
+    if (at.filter(units -> units.signum() < 0).isPresent()) {
+      throw wrongUsage("--at wants a duration of 0 or more");
+    }
+    if (at.filter(units -> units.stripTrailingZeros().scale() > TimeScale.MOST_DECIMALS)
+        .isPresent()) {
+      throw wrongUsage("--at wants at most 3 decimals");
+    }
+    if (at.filter(units -> units.compareTo(MOST_UNITS) > 0).isPresent()) {
+      throw wrongUsage("--at wants at most " + MOST_UNITS);
+    }
     return at.map(TimeScale::of).orElse(TimeScale.WHOLE);
   }
 
@@ -47,18 +61,20 @@ final class CurveCommand extends CaseCommand {
         at.map(units -> OptionalLong.of(scale.ticks(units))).orElseGet(OptionalLong::empty);
     long size =
         crosscheck.map(CrossCheckSize::most).orElseGet(() -> CrossCheckSize.usual(read.network()));
-    CurveAnswer answer;
     try {
-      answer = CurveQuestion.ask(read, asked, size);
-    } catch (IllegalArgumentException impossible) {
-      err().println("dayworth: " + impossible.getMessage());
+      tell(CurveQuestion.ask(read, asked, size));
+      return Exit.DONE;
+    } catch (FinishTooEarly tooEarly) {
+      print(err(), CurveText.tooEarly(tooEarly, style(), CurveText.WIDEST));
       return Exit.NO_ANSWER;
     }
+  }
+
+  private void tell(CurveAnswer answer) throws ResultsNotWritten {
     Map<String, byte[]> files = CurveFiles.of(answer, Version.text());
     Path target = write(files, files.keySet());
     List<String> lines = new ArrayList<>(CurveText.lines(answer, style(), CurveText.WIDEST));
     lines.addAll(CurveText.written(target.toString(), files.keySet(), CurveText.WIDEST));
     say(lines, ResultJson.ofCurve(answer, Version.text()));
-    return Exit.DONE;
   }
 }

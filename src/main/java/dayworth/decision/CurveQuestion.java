@@ -37,13 +37,16 @@ public final class CurveQuestion {
    * @param at the duration in ticks of the plan asked for; empty for the least total
    * @param crossChecks how many points to compare with the linear programme at most
    * @throws ProofFailed if a check refutes what was computed
-   * @throws IllegalArgumentException if the project cannot finish within {@code at}
+   * @throws FinishTooEarly if the project cannot finish within {@code at}
    */
-  public static CurveAnswer ask(Case of, OptionalLong at, long crossChecks) {
+  public static CurveAnswer ask(Case of, OptionalLong at, long crossChecks) throws FinishTooEarly {
     return new CurveQuestion(of).answer(at, crossChecks);
   }
 
-  private CurveAnswer answer(OptionalLong at, long crossChecks) {
+  private CurveAnswer answer(OptionalLong at, long crossChecks) throws FinishTooEarly {
+    if (at.isPresent() && at.getAsLong() < curve.shortest()) {
+      throw new FinishTooEarly(of, curve, at.getAsLong());
+    }
     ProofChecker.stops(network, curve.obstacles(), curve.shortest())
         .ifPresent(
             refuted -> {

@@ -4,6 +4,7 @@ import dayworth.decision.Case;
 import dayworth.decision.CrossCheck;
 import dayworth.decision.CurveAnswer;
 import dayworth.decision.Finish;
+import dayworth.decision.FinishTooEarly;
 import dayworth.value.Money;
 import java.math.BigDecimal;
 import java.util.ArrayList;
@@ -39,9 +40,26 @@ public final class CurveText {
       lines.addAll(prices);
     }
     lines.add("");
-    lines.addAll(prose(new ObstacleText(answer).sentence(), used));
+    lines.addAll(prose(new ObstacleText(answer.of(), answer.curve()).sentence(), used));
     lines.add("");
     lines.addAll(prose(proof(answer), used));
+    return lines;
+  }
+
+  /** What is said where a finish is asked for that cannot be had. */
+  public static List<String> tooEarly(FinishTooEarly asked, Style style, int width) {
+    int used = Math.min(width, WIDEST);
+    Case of = asked.of();
+    List<String> lines = new ArrayList<>();
+    String nearest = Wording.duration(of, asked.curve().shortest());
+    lines.add(
+        style.bold(
+            Wording.duration(of, asked.asked())
+                + " cannot be had. The nearest is "
+                + nearest
+                + "."));
+    lines.add("");
+    lines.addAll(prose(new ObstacleText(of, asked.curve()).sentence(), used));
     return lines;
   }
 

@@ -1,6 +1,7 @@
 package dayworth.report;
 
-import dayworth.decision.CurveAnswer;
+import dayworth.decision.Case;
+import dayworth.engine.Curve;
 import dayworth.engine.Obstacle;
 import dayworth.network.Network;
 import java.util.ArrayList;
@@ -12,18 +13,20 @@ final class ObstacleText {
   private static final int MOST_TERMS = 12;
   private static final int IDS_WIDTH = 120;
 
-  private final CurveAnswer answer;
+  private final Case of;
+  private final long shortest;
   private final Network network;
   private final List<Obstacle> terms;
 
-  ObstacleText(CurveAnswer answer) {
-    this.answer = answer;
-    this.network = answer.of().network();
-    this.terms = answer.curve().obstacles().stream().filter(term -> term.ticks() != 0).toList();
+  ObstacleText(Case of, Curve curve) {
+    this.of = of;
+    this.shortest = curve.shortest();
+    this.network = of.network();
+    this.terms = curve.obstacles().stream().filter(term -> term.ticks() != 0).toList();
   }
 
   String sentence() {
-    String start = Wording.duration(answer.of(), answer.shortest().duration()) + " is the shortest";
+    String start = Wording.duration(of, shortest) + " is the shortest";
     if (terms.isEmpty()) {
       return start + ".";
     }
@@ -53,7 +56,7 @@ final class ObstacleText {
     if (terms.size() > MOST_TERMS) {
       append(sum, (terms.size() - MOST_TERMS) + " more terms ", rest);
     }
-    return sum + " = " + units(answer.shortest().duration());
+    return sum + " = " + units(shortest);
   }
 
   private void append(StringBuilder sum, String name, long ticks) {

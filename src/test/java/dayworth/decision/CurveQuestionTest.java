@@ -44,7 +44,7 @@ class CurveQuestionTest {
           List.of());
 
   @Test
-  void stopsAtTheLeastTotal() {
+  void stopsAtTheLeastTotal() throws FinishTooEarly {
     CurveAnswer answer = CurveQuestion.ask(SERIES, OptionalLong.empty(), Long.MAX_VALUE);
     // 9 days 300 + 225 = 525; 8: 320 + 200 = 520; 7: 340 + 175 = 515; 6: 370 + 150 = 520;
     // 5: 400 + 125 = 525
@@ -60,7 +60,7 @@ class CurveQuestionTest {
   }
 
   @Test
-  void givesThePlanOfAFinishBetweenTwoBreakpoints() {
+  void givesThePlanOfAFinishBetweenTwoBreakpoints() throws FinishTooEarly {
     CurveAnswer answer = CurveQuestion.ask(SERIES, OptionalLong.of(6), 0);
     // A at its shortest, 3; B one of its two days: 3
     assertEquals(3, answer.asked().timing().plan().duration(1));

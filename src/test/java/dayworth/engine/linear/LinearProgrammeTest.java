@@ -10,6 +10,7 @@ import dayworth.network.Network;
 import dayworth.network.Plan;
 import dayworth.network.Timing;
 import dayworth.testing.OutsideSolver;
+import dayworth.testing.PublishedExample;
 import dayworth.testing.RandomNetworks;
 import dayworth.value.Money;
 import dayworth.value.TimeScale;

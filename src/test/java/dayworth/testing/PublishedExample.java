@@ -1,4 +1,4 @@
-package dayworth.engine.linear;
+package dayworth.testing;
 
 import dayworth.network.Activity;
 import dayworth.network.Link;
@@ -17,9 +17,29 @@ import java.util.Map;
 import java.util.TreeMap;
 
 /** One of the examples in the test resources, read without the program's own reader. */
-record PublishedExample(Network network, Map<Long, BigDecimal> leastCosts) {
+public record PublishedExample(Network network, Map<Long, BigDecimal> leastCosts) {
 
-  static PublishedExample read(String name) {
+  /** The name of each example and where it comes from, as SOURCES.md has them. */
+  public static Map<String, String> sources() {
+    try (InputStream in = PublishedExample.class.getResourceAsStream("/published/SOURCES.md")) {
+      String text = new String(in.readAllBytes(), StandardCharsets.UTF_8);
+      Map<String, String> sources = new TreeMap<>();
+      text.lines()
+          .filter(
+              line ->
+                  line.startsWith("| ")
+                      && !line.startsWith("| folder")
+                      && !line.startsWith("| ---"))
+          .map(line -> line.split(" \\| ", -1))
+          .forEach(cells -> sources.put(cells[0].substring(2), cells[1]));
+      return sources;
+    } catch (IOException e) {
+      throw new UncheckedIOException(e);
+    }
+  }
+
+  /** Reads an example by its folder's name. */
+  public static PublishedExample read(String name) {
     List<String[]> rows = rows(name, "activities.csv");
     List<String> ids = rows.stream().map(row -> row[0]).toList();
     List<Activity> activities = new ArrayList<>();

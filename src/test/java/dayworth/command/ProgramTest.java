@@ -1,0 +1,150 @@
+package dayworth.command;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.concurrent.TimeUnit;
+import org.junit.jupiter.api.BeforeEach;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+
+/** Runs the real jar in an empty folder, as a user would. */
+class ProgramTest {
+
+  private static final Path JAR = Path.of("target", "dayworth.jar").toAbsolutePath();
+  private static final Path CASES = Path.of("cases").toAbsolutePath();
+
+  @TempDir private Path folder;
+
+  /** What a run left behind. */
+  private record Run(int status, String out, String err) {}
+
+  @BeforeEach
+  void thereIsAJar() {
+    assertTrue(Files.exists(JAR), "the tests run after the jar is built: mvn verify");
+  }
+
+  private Run run(String... arguments) throws IOException, InterruptedException {
+    List<String> command = new ArrayList<>();
+    command.add(Path.of(System.getProperty("java.home"), "bin", "java").toString());
+    command.add("-jar");
+    command.add(JAR.toString());
+    command.addAll(List.of(arguments));
+    Path out = folder.resolve("out.txt");
+    Path err = folder.resolve("err.txt");
+    Process process =
+        new ProcessBuilder(command)
+            .directory(folder.toFile())
+            .redirectOutput(out.toFile())
+            .redirectError(err.toFile())
+            .start();
+    assertTrue(process.waitFor(2, TimeUnit.MINUTES), "the program ends");
+    return new Run(
+        process.exitValue(),
+        Files.readString(out, StandardCharsets.UTF_8),
+        Files.readString(err, StandardCharsets.UTF_8));
+  }
+
+  private static String demo(String name) {
+    return CASES.resolve(name).toString();
+  }
+
+  /** 16 weeks, 74,800 in all: computed outside this program. */
+  @Test
+  void curveAnswersAndLeavesItsTables() throws IOException, InterruptedException {
+    Run run = run("curve", demo("starter"));
+    assertEquals(0, run.status(), run.err());
+    assertTrue(run.out().startsWith("Least total: finish in 16 weeks"), run.out());
+    Path output = folder.resolve("output").resolve("starter");
+    List<String> rows = Files.readAllLines(output.resolve("curve.csv"));
+    assertEquals(
+        "duration,finish_date,direct_cost,running_cost,time_related_cost,fixed_cost,damages,bonus,"
+            + "total_cost,price_per_unit,breakpoint",
+        rows.get(0));
+    // 16 weeks: direct 67,300, time 16 x 500 = 8,000, bonus 1 week x 500; 74,800 in all
+    assertTrue(
+        rows.contains("16,,67300.00,0.00,8000.00,0.00,0.00,500.00,74800.00,1400.00,yes"),
+        rows.toString());
+    for (String file : List.of("steps.csv", "plan.csv", "crosscheck.csv", "result.json")) {
+      assertTrue(Files.size(output.resolve(file)) > 0, file);
+    }
+  }
+
+  @Test
+  void thePlanOfAnotherFinishCanBeAsked() throws IOException, InterruptedException {
+    Run run = run("curve", demo("starter"), "--at", "17.5", "--out", "here");
+    assertEquals(0, run.status(), run.err());
+    List<String> rows = Files.readAllLines(folder.resolve("here").resolve("plan.csv"));
+    // from 18 to 17 weeks PLAN is shortened; half a week of it is half of 400
+    assertTrue(
+        rows.stream().anyMatch(row -> row.startsWith("PLAN,Drawings and permits,5.5,,0.5,200.00,")),
+        rows.toString());
+  }
+
+  @Test
+  void aFinishThatCannotBeHadIsNoAnswer() throws IOException, InterruptedException {
+    Run run = run("curve", demo("starter"), "--at", "11");
+    assertEquals(1, run.status());
+    assertTrue(run.err().contains("12"), run.err());
+    assertFalse(Files.exists(folder.resolve("output")));
+  }
+
+  @Test
+  void checkTellsTheFacts() throws IOException, InterruptedException {
+    Run run = run("check", demo("starter"));
+    assertEquals(0, run.status(), run.err());
+    assertTrue(run.out().contains("One chain is critical: PLAN FLUE BASE FIRE"), run.out());
+    assertFalse(Files.exists(folder.resolve("output")));
+  }
+
+  @Test
+  void problemsStopEverythingAndLeaveResultsAsTheyWere() throws IOException, InterruptedException {
+    Path draft = Files.createDirectory(folder.resolve("draft"));
+    Files.writeString(
+        draft.resolve("activities.csv"),
+        "id,normal_duration,normal_cost,predecessors\nA,5,100,\nB,x,100,A;C\n");
+    Path output = Files.createDirectories(folder.resolve("output").resolve("draft"));
+    Files.writeString(output.resolve("curve.csv"), "as it was");
+    Run run = run("curve", "draft");
+    assertEquals(2, run.status());
+    assertTrue(run.err().contains("activities.csv:3 normal_duration"), run.err());
+    assertTrue(run.err().contains("activities.csv:3 predecessors"), run.err());
+    assertEquals("", run.out());
+    assertEquals("as it was", Files.readString(output.resolve("curve.csv")));
+  }
+
+  @Test
+  void wrongUsageIsToldWithoutATrace() throws IOException, InterruptedException {
+    for (String[] wrong :
+        new String[][] {
+          {},
+          {"curve"},
+          {"curv", "x"},
+          {"curve", "nowhere"},
+          {"curve", demo("starter"), "--at", "x"},
+          {"curve", demo("starter"), "--crosscheck", "some"},
+          {"check", "--out"}
+        }) {
+      Run run = run(wrong);
+      assertEquals(2, run.status(), String.join(" ", wrong));
+      assertFalse(run.err().contains("\tat "), run.err());
+      assertFalse(run.err().isBlank());
+    }
+  }
+
+  @Test
+  void aResultForProgramsCanBePrinted() throws IOException, InterruptedException {
+    Run run = run("curve", demo("starter"), "--json");
+    assertEquals(0, run.status(), run.err());
+    assertEquals(
+        Files.readString(folder.resolve("output").resolve("starter").resolve("result.json")),
+        run.out());
+  }
+}
