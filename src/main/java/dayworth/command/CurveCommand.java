@@ -4,6 +4,7 @@ import dayworth.decision.Case;
 import dayworth.decision.CurveAnswer;
 import dayworth.decision.CurveQuestion;
 import dayworth.decision.FinishTooEarly;
+import dayworth.engine.linear.LinearProgramme;
 import dayworth.report.CurveFiles;
 import dayworth.report.CurveText;
 import dayworth.report.ResultJson;
@@ -52,6 +53,17 @@ final class CurveCommand extends CaseCommand {
       throw wrongUsage("--at wants at most " + MOST_UNITS);
     }
     return at.map(TimeScale::of).orElse(TimeScale.WHOLE);
+  }
+
+  /** The solver's classes take longer to load than a case to read, and there is a second core. */
+  @Override
+  public Integer call() {
+    if (crosscheck.map(CrossCheckSize::most).orElse(1L) > 0) {
+      Thread loading = new Thread(LinearProgramme::load, "loading the solver");
+      loading.setDaemon(true);
+      loading.start();
+    }
+    return super.call();
   }
 
   @Override

@@ -35,6 +35,9 @@ final class CrossChecking {
       points.add(step.to());
       points.add(step.to() + step.ticks() / 2);
     }
+    if (most == 0) {
+      return new CrossCheck(List.of(), 0, points.size());
+    }
     List<CrossCheck.Comparison> comparisons = new ArrayList<>();
     int atBreakpoints = 0;
     LinearProgramme programme = new LinearProgramme(network);

@@ -3,7 +3,10 @@ package dayworth.engine.linear;
 import dayworth.network.Activity;
 import dayworth.network.Link;
 import dayworth.network.Network;
+import dayworth.value.Money;
 import dayworth.value.MoneySum;
+import dayworth.value.TimeScale;
+import java.util.List;
 import org.ojalgo.optimisation.Optimisation;
 
 /**
@@ -54,6 +57,15 @@ public final class LinearProgramme {
     double steepest = slopes.length == 0 ? 1 : slopes[slopes.length - 1];
     this.tooFarApart = slopes.length > 0 && slopes[0] < FINEST * steepest;
     this.tableau = new Tableau(network, steepest);
+  }
+
+  /**
+   * Loads the solver by having it solve a programme of one activity. Otherwise the first programme
+   * does it, which takes some tenths of a second.
+   */
+  public static void load() {
+    Activity activity = Activity.compressible("A", 2, Money.ZERO, 1, Money.of(1));
+    new LinearProgramme(new Network(TimeScale.WHOLE, List.of(activity), List.of())).at(1);
   }
 
   /**
