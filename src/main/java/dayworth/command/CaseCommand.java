@@ -97,8 +97,12 @@ abstract class CaseCommand implements Callable<Integer> {
 
   /** From JDK 22 on there always is a console; bold then shows in redirected output too. */
   @SuppressWarnings("SystemConsoleNull")
+  static boolean isTerminal() {
+    return System.console() != null;
+  }
+
   static Style style() {
-    return Style.of(System.console() != null, System.getenv());
+    return Style.of(isTerminal(), System.getenv());
   }
 
   private String name() {

@@ -74,11 +74,17 @@ final class CurveCommand extends CaseCommand {
     long size =
         crosscheck.map(CrossCheckSize::most).orElseGet(() -> CrossCheckSize.usual(read.network()));
     try {
-      tell(CurveQuestion.ask(read, asked, size));
+      tell(ask(read, asked, size));
       return Exit.DONE;
     } catch (FinishTooEarly tooEarly) {
       print(err(), CurveText.tooEarly(tooEarly, style(), CurveText.WIDEST));
       return Exit.NO_ANSWER;
+    }
+  }
+
+  private CurveAnswer ask(Case read, OptionalLong asked, long size) throws FinishTooEarly {
+    try (ProgressLine progress = ProgressLine.start(err(), isTerminal())) {
+      return CurveQuestion.ask(read, asked, size, progress);
     }
   }
 

@@ -27,7 +27,7 @@ final class CrossChecking {
    * @param most how many points at most; spread evenly where there are more
    * @throws ProofFailed if the two differ by more than rounding
    */
-  static CrossCheck of(Network network, Curve curve, long most) {
+  static CrossCheck of(Network network, Curve curve, long most, Watcher watcher) {
     TreeSet<Long> breakpoints = new TreeSet<>(List.of(curve.longest()));
     TreeSet<Long> points = new TreeSet<>(breakpoints);
     for (Step step : curve.steps()) {
@@ -42,6 +42,7 @@ final class CrossChecking {
     int atBreakpoints = 0;
     LinearProgramme programme = new LinearProgramme(network);
     for (long duration : spread(points, most)) {
+      watcher.now("comparing with the linear programme, now at " + network.scale().text(duration));
       comparisons.add(compare(network, curve, programme, duration));
       if (breakpoints.contains(duration)) {
         atBreakpoints++;

@@ -24,11 +24,14 @@ public final class CurveQuestion {
   private final Terms terms;
   private final Curve curve;
 
-  private CurveQuestion(Case of) {
+  private final Watcher watcher;
+
+  private CurveQuestion(Case of, Watcher watcher) {
     this.of = of;
+    this.watcher = watcher;
     this.network = of.network();
     this.terms = of.terms();
-    this.curve = Stepping.curve(network, new ProvingWitness(network));
+    this.curve = Stepping.curve(network, new ProvingWitness(network, watcher));
   }
 
   /**
@@ -36,11 +39,13 @@ public final class CurveQuestion {
    *
    * @param at the duration in ticks of the plan asked for; empty for the least total
    * @param crossChecks how many points to compare with the linear programme at most
+   * @param watcher is told what is being done
    * @throws ProofFailed if a check refutes what was computed
    * @throws FinishTooEarly if the project cannot finish within {@code at}
    */
-  public static CurveAnswer ask(Case of, OptionalLong at, long crossChecks) throws FinishTooEarly {
-    return new CurveQuestion(of).answer(at, crossChecks);
+  public static CurveAnswer ask(Case of, OptionalLong at, long crossChecks, Watcher watcher)
+      throws FinishTooEarly {
+    return new CurveQuestion(of, watcher).answer(at, crossChecks);
   }
 
   private CurveAnswer answer(OptionalLong at, long crossChecks) throws FinishTooEarly {
@@ -67,7 +72,7 @@ public final class CurveQuestion {
         new CurveAnswer.AskedPlan(
             finish(asked), Timing.by(network, Stepping.planWithin(network, asked), asked)),
         rows.size(),
-        CrossChecking.of(network, curve, crossChecks));
+        CrossChecking.of(network, curve, crossChecks, watcher));
   }
 
   /** A row for each whole unit, each breakpoint and each bend of the money, longest first. */

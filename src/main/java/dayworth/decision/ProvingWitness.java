@@ -17,14 +17,17 @@ final class ProvingWitness implements PieceWitness {
 
   private final Network network;
   private final ProofChecker checker;
+  private final Watcher watcher;
 
-  ProvingWitness(Network network) {
+  ProvingWitness(Network network, Watcher watcher) {
     this.network = network;
+    this.watcher = watcher;
     this.checker = new ProofChecker(network);
   }
 
   @Override
   public void piece(long from, Plan fromPlan, long to, Plan toPlan, Flow flow) {
+    watcher.now("finding and proving the curve, now at " + network.scale().text(to));
     FlowBound bound = checker.bound(flow);
     require(fromPlan, from, bound);
     if (to != from) {

@@ -45,7 +45,8 @@ class CurveQuestionTest {
 
   @Test
   void stopsAtTheLeastTotal() throws FinishTooEarly {
-    CurveAnswer answer = CurveQuestion.ask(SERIES, OptionalLong.empty(), Long.MAX_VALUE);
+    CurveAnswer answer =
+        CurveQuestion.ask(SERIES, OptionalLong.empty(), Long.MAX_VALUE, Watcher.NONE);
     // 9 days 300 + 225 = 525; 8: 320 + 200 = 520; 7: 340 + 175 = 515; 6: 370 + 150 = 520;
     // 5: 400 + 125 = 525
     assertEquals(
@@ -61,7 +62,7 @@ class CurveQuestionTest {
 
   @Test
   void givesThePlanOfAFinishBetweenTwoBreakpoints() throws FinishTooEarly {
-    CurveAnswer answer = CurveQuestion.ask(SERIES, OptionalLong.of(6), 0);
+    CurveAnswer answer = CurveQuestion.ask(SERIES, OptionalLong.of(6), 0, Watcher.NONE);
     // A at its shortest, 3; B one of its two days: 3
     assertEquals(3, answer.asked().timing().plan().duration(1));
     assertEquals(0, answer.crossCheck().comparisons().size());

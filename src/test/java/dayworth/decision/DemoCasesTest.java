@@ -97,7 +97,7 @@ class DemoCasesTest {
   private static CurveAnswer answer(String name) throws FinishTooEarly {
     Reading reading = CaseReader.read(Path.of("cases", name), TimeScale.WHOLE);
     Case of = assertInstanceOf(Reading.Sound.class, reading).of();
-    return CurveQuestion.ask(of, OptionalLong.empty(), Long.MAX_VALUE);
+    return CurveQuestion.ask(of, OptionalLong.empty(), Long.MAX_VALUE, Watcher.NONE);
   }
 
   private static List<String> rows(String name, String file) throws IOException {
