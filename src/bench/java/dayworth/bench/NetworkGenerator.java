@@ -28,8 +28,8 @@ final class NetworkGenerator {
   }
 
   /**
-   * Many chains side by side, nearly equally long: each activity follows one or two of the layer
-   * before it, most of them by a plain finish-to-start link.
+   * Many chains side by side, nearly equally long: each activity follows one to three of the layer
+   * before it, most of them by a plain finish-to-start link, and is followed by at least one.
    *
    * @param size how many activities
    * @param layers how many activities a chain has
@@ -44,6 +44,7 @@ final class NetworkGenerator {
         generator.addActivity(generator.between(2, MOST_WIDE_DAYS));
         generator.followLayer(i, firstBefore, firstHere);
       }
+      generator.leaveNoEndOpen(firstBefore, firstHere, firstNext);
       firstBefore = firstHere;
       firstHere = firstNext;
     }
@@ -90,13 +91,29 @@ final class NetworkGenerator {
     if (firstBefore == firstHere) {
       return;
     }
-    int wanted = Math.min(chance(60) ? 1 : 2, firstHere - firstBefore);
+    int draw = between(1, 100);
+    int wanted = Math.min(draw <= 40 ? 1 : draw <= 85 ? 2 : 3, firstHere - firstBefore);
     List<Integer> taken = new ArrayList<>();
     while (taken.size() < wanted) {
       int predecessor = between(firstBefore, firstHere - 1);
       if (!taken.contains(predecessor)) {
         taken.add(predecessor);
         links.add(anyLink(predecessor, activity));
+      }
+    }
+  }
+
+  /** Links what has no successor in the layer before to any activity of this one. */
+  private void leaveNoEndOpen(int firstBefore, int firstHere, int firstNext) {
+    boolean[] followed = new boolean[firstHere - firstBefore];
+    for (Link link : links) {
+      if (link.predecessor() >= firstBefore) {
+        followed[link.predecessor() - firstBefore] = true;
+      }
+    }
+    for (int k = 0; k < followed.length; k++) {
+      if (!followed[k]) {
+        links.add(Link.finishToStart(firstBefore + k, between(firstHere, firstNext - 1)));
       }
     }
   }

@@ -14,8 +14,8 @@ public enum Shape {
   /** The network; always the same one. */
   public Network network() {
     return switch (this) {
-      case WIDE10K -> NetworkGenerator.wide(10_000, 58, 20_261);
-      case WIDE100K -> NetworkGenerator.wide(100_000, 72, 20_262);
+      case WIDE10K -> NetworkGenerator.wide(10_000, 51, 20_261);
+      case WIDE100K -> NetworkGenerator.wide(100_000, 65, 20_262);
       case CHAIN10K -> NetworkGenerator.chain(10_000, 20_263);
     };
   }

@@ -3,11 +3,14 @@ package dayworth.report;
 import dayworth.decision.Notice;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
+import java.util.TreeMap;
 
 /** Problems and warnings for a terminal: where, what is wrong, what was found, what is right. */
 public final class NoticeText {
 
   private static final int LEAST_PLACE_WIDTH = 34;
+  private static final int MOST_ALIKE = 5;
 
   private NoticeText() {}
 
@@ -38,15 +41,32 @@ public final class NoticeText {
     return lines;
   }
 
-  /** Warnings, each with its place. */
+  /** Warnings, each with its place; of many alike only the first few, and how many more. */
   public static List<String> warnings(List<Notice> warnings, int width) {
+    Map<String, Integer> alike = new TreeMap<>();
     List<String> lines = new ArrayList<>();
     for (Notice warning : warnings) {
-      lines.add("  warning  " + Wording.safe(warning.place()));
-      String detail = detail(warning);
-      String text = Wording.safe(warning.wrong()) + (detail.isEmpty() ? "" : "; " + detail);
-      lines.addAll(Wording.wrap(text, "           ", Math.min(width, CurveText.WIDEST)));
+      if (alike.merge(warning.wrong(), 1, Integer::sum) <= MOST_ALIKE) {
+        lines.addAll(warning(warning, width));
+      }
     }
+    alike.forEach(
+        (wrong, count) -> {
+          if (count > MOST_ALIKE) {
+            String more = Wording.count(count - MOST_ALIKE, "more", "more");
+            lines.add("  warning  " + more + " like this: " + Wording.safe(wrong));
+            lines.add("           all of them are in result.json");
+          }
+        });
+    return lines;
+  }
+
+  private static List<String> warning(Notice warning, int width) {
+    List<String> lines = new ArrayList<>();
+    lines.add("  warning  " + Wording.safe(warning.place()));
+    String detail = detail(warning);
+    String text = Wording.safe(warning.wrong()) + (detail.isEmpty() ? "" : "; " + detail);
+    lines.addAll(Wording.wrap(text, "           ", Math.min(width, CurveText.WIDEST)));
     return lines;
   }
 
