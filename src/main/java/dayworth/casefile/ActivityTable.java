@@ -39,21 +39,24 @@ final class ActivityTable {
 
   private final Findings findings;
   private final Map<String, Integer> lineById = new HashMap<>();
+  private final CrashRules crashRules;
 
-  private ActivityTable(Findings findings) {
+  private ActivityTable(Table table, Findings findings) {
     this.findings = findings;
+    crashRules = new CrashRules(table, findings);
   }
 
-  static List<ActivityRow> read(String text, Findings findings) {
+  /** The rows; empty where they have no ids that links could name. */
+  static Optional<List<ActivityRow>> read(String text, Findings findings) {
     Optional<Table> table = Table.of(FILE, text, COLUMNS, findings);
     if (table.isEmpty()) {
-      return List.of();
+      return Optional.empty();
     }
-    List<ActivityRow> rows = new ActivityTable(findings).rows(table.get());
+    List<ActivityRow> rows = new ActivityTable(table.get(), findings).rows(table.get());
     if (rows.isEmpty() && table.get().misfits().isEmpty()) {
       findings.problem(Place.whole(FILE).notice("no activity", "a header only", "a row for each"));
     }
-    return rows;
+    return table.get().has("id") ? Optional.of(rows) : Optional.empty();
   }
 
   private List<ActivityRow> rows(Table table) {
@@ -63,6 +66,7 @@ final class ActivityTable {
       checkId(table, row, id);
       rows.add(row(table, row, id));
     }
+    crashRules.reportMissingColumn();
     for (Row misfit : table.misfits()) {
       rows.add(unread(misfit.line(), table.text(misfit, "id")));
     }
@@ -109,8 +113,7 @@ final class ActivityTable {
     Cell<BigDecimal> crashCost = table.cell(row, "crash_cost", MoneyCell.AMOUNT, findings);
     table.cell(row, "divisible", DIVISIBLE, findings);
     Cell<BigDecimal> notBefore = table.cell(row, "not_before", TimeCell.MOMENT, findings);
-    checkBothOrNeither(table, row, crash, crashCost);
-    checkCrash(table, row, normal, cost, crash, crashCost);
+    crashRules.check(row, normal, cost, crash, crashCost);
     return new ActivityRow(
         row.line(),
         id,
@@ -129,55 +132,5 @@ final class ActivityTable {
         .map(String::strip)
         .filter(id -> !id.isEmpty())
         .toList();
-  }
-
-  private void checkBothOrNeither(
-      Table table, Row row, Cell<BigDecimal> crash, Cell<BigDecimal> crashCost) {
-    if (crash.given() && !crashCost.given()) {
-      findings.problem(
-          table
-              .place(row, "crash_cost")
-              .notice(
-                  "blank beside a crash duration", "", "the cost at that duration, or neither"));
-    }
-    if (crashCost.given() && !crash.given()) {
-      findings.problem(
-          table
-              .place(row, "crash_duration")
-              .notice("blank beside a crash cost", "", "the duration at that cost, or neither"));
-    }
-  }
-
-  private void checkCrash(
-      Table table,
-      Row row,
-      Cell<BigDecimal> normal,
-      Cell<BigDecimal> cost,
-      Cell<BigDecimal> crash,
-      Cell<BigDecimal> crashCost) {
-    if (normal.value().isEmpty() || crash.value().isEmpty()) {
-      return;
-    }
-    int difference = crash.value().get().compareTo(normal.value().get());
-    if (difference > 0) {
-      findings.problem(
-          table
-              .place(row, "crash_duration")
-              .notice(
-                  "longer than the normal duration",
-                  crash.text(),
-                  "at most " + normal.text() + ", the normal duration"));
-    } else if (difference == 0
-        && cost.value().isPresent()
-        && crashCost.value().isPresent()
-        && crashCost.value().get().compareTo(cost.value().get()) != 0) {
-      findings.problem(
-          table
-              .place(row, "crash_cost")
-              .notice(
-                  "another cost for the same duration",
-                  crashCost.text(),
-                  cost.text() + ", or a shorter crash duration"));
-    }
   }
 }

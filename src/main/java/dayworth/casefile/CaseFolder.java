@@ -79,7 +79,7 @@ final class CaseFolder {
           Place.whole(name).notice("is not served yet", "", "take it out of the folder"));
     } else if (!SERVED.contains(name) && !LEFT_ALONE.contains(name)) {
       List<String> known = new ArrayList<>(SERVED);
-      known.addAll(NOT_YET.stream().sorted().toList());
+      Stream.concat(NOT_YET.stream(), LEFT_ALONE.stream()).sorted().forEach(known::add);
       new Nearest(known)
           .to(name)
           .filter(near -> name.length() > 4)

@@ -43,15 +43,14 @@ public final class CaseReader {
     Optional<String> activityText = folder.text(ActivityTable.FILE);
     Optional<String> linkText = folder.text(LinkTable.FILE);
     Optional<String> termText = folder.text(TermsTable.FILE);
-    List<ActivityRow> activities =
-        activityText.map(text -> ActivityTable.read(text, findings)).orElse(List.of());
-    List<LinkRow> links =
-        activityText.map(text -> LinkTable.read(activities, linkText, findings)).orElse(List.of());
+    Optional<List<ActivityRow>> known =
+        activityText.flatMap(text -> ActivityTable.read(text, findings));
+    List<LinkRow> links = LinkTable.read(known, linkText, findings);
     TermsTable terms = TermsTable.read(termText, findings);
     if (findings.hasProblems()) {
       return new Reading.Unsound(findings.problems(), findings.warnings());
     }
-    Case read = build(activities, links, terms, atLeast);
+    Case read = build(known.orElseThrow(), links, terms, atLeast);
     if (findings.hasProblems()) {
       return new Reading.Unsound(findings.problems(), findings.warnings());
     }

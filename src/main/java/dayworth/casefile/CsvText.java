@@ -19,7 +19,7 @@ record CsvText(boolean semicolons, List<Row> rows) {
 
   /** Takes the text apart; after a fault that hides where cells end, no row is trusted. */
   static CsvText parse(String file, String text, Findings findings) {
-    String header = text.lines().findFirst().orElse("");
+    String header = text.lines().filter(line -> !line.isBlank()).findFirst().orElse("");
     boolean semicolons = count(header, ';') > count(header, ',');
     if (!semicolons && header.indexOf('\t') >= 0 && header.indexOf(',') < 0) {
       findings.problem(

@@ -15,6 +15,7 @@ final class Header {
   private final int line;
   private final int width;
   private final Map<String, Integer> indexByName = new HashMap<>();
+  private final Set<String> probablyMeant = new TreeSet<>();
 
   private Header(String file, Row row) {
     this.file = file;
@@ -27,11 +28,13 @@ final class Header {
     Header header = new Header(file, row);
     List<String> names = known.stream().map(Column::name).toList();
     Nearest nearest = new Nearest(names);
-    Set<String> probablyMeant = new TreeSet<>();
     for (int i = 0; i < header.width; i++) {
       String name = row.cells().get(i);
-      if (!names.contains(name)) {
-        nearest.to(name).ifPresent(probablyMeant::add);
+      if (name.isEmpty()) {
+        String right = "a name, or no cell " + (i + 1) + " in every row";
+        findings.problem(header.place("").notice("a column without a name", "", right));
+      } else if (!names.contains(name)) {
+        nearest.to(name).ifPresent(header.probablyMeant::add);
         String right = nearest.hint(name, "one of " + String.join(", ", names));
         findings.problem(header.place(name).notice("no such column", name, right));
       } else if (header.indexByName.putIfAbsent(name, i) != null) {
@@ -39,15 +42,14 @@ final class Header {
             header.place(name).notice("a second column of this name", name, "take one out"));
       }
     }
-    header.reportMissing(known, probablyMeant, findings);
+    header.reportMissing(known, findings);
     return header;
   }
 
   /** A needed column whose misspelt name was reported is not reported as missing too. */
-  private void reportMissing(List<Column> known, Set<String> probablyMeant, Findings findings) {
+  private void reportMissing(List<Column> known, Findings findings) {
     List<Column> missing = new ArrayList<>(known);
-    missing.removeIf(column -> !column.needed() || has(column.name()));
-    missing.removeIf(column -> probablyMeant.contains(column.name()));
+    missing.removeIf(column -> !column.needed() || isThereOrMisspelt(column.name()));
     for (Column column : missing) {
       findings.problem(place(column.name()).notice("missing column", "", "the file needs it"));
     }
@@ -55,6 +57,11 @@ final class Header {
 
   boolean has(String column) {
     return indexByName.containsKey(column);
+  }
+
+  /** Whether the column is there, or one whose name was reported as a misspelling of it. */
+  boolean isThereOrMisspelt(String column) {
+    return has(column) || probablyMeant.contains(column);
   }
 
   OptionalInt indexOf(String column) {
@@ -66,7 +73,7 @@ final class Header {
     return width;
   }
 
-  private Place place(String column) {
+  Place place(String column) {
     return new Place(file, line, column);
   }
 }

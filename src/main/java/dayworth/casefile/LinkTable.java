@@ -32,14 +32,19 @@ final class LinkTable {
           .with("SF", Relation.SF);
 
   private final List<ActivityRow> activities;
+
+  /** Otherwise no id can be told right from wrong. */
+  private final boolean idsAreKnown;
+
   private final Findings findings;
   private final Map<String, Integer> indexById = new HashMap<>();
   private final Nearest nearest;
   private final List<LinkRow> links = new ArrayList<>();
   private final Set<Object> seen = new HashSet<>();
 
-  private LinkTable(List<ActivityRow> activities, Findings findings) {
-    this.activities = activities;
+  private LinkTable(Optional<List<ActivityRow>> known, Findings findings) {
+    activities = known.orElse(List.of());
+    idsAreKnown = known.isPresent();
     this.findings = findings;
     for (int i = 0; i < activities.size(); i++) {
       indexById.putIfAbsent(activities.get(i).id(), i);
@@ -47,11 +52,15 @@ final class LinkTable {
     nearest = new Nearest(activities.stream().map(ActivityRow::id).toList());
   }
 
-  /** All links whose two ends exist; loops and all other faults are reported. */
+  /**
+   * All links whose two ends exist; loops and all other faults are reported.
+   *
+   * @param known the activities; empty where their ids could not be read
+   */
   static List<LinkRow> read(
-      List<ActivityRow> activities, Optional<String> text, Findings findings) {
-    LinkTable table = new LinkTable(activities, findings);
-    for (int i = 0; i < activities.size(); i++) {
+      Optional<List<ActivityRow>> known, Optional<String> text, Findings findings) {
+    LinkTable table = new LinkTable(known, findings);
+    for (int i = 0; i < table.activities.size(); i++) {
       table.addPredecessors(i);
     }
     text.flatMap(csv -> Table.of(FILE, csv, COLUMNS, findings)).ifPresent(table::addRows);
@@ -63,8 +72,7 @@ final class LinkTable {
     ActivityRow row = activities.get(successor);
     Place place = new Place(ActivityTable.FILE, row.line(), "predecessors");
     for (String id : row.predecessors()) {
-      index(place, id)
-          .ifPresent(from -> add(place, from, successor, Relation.FS, BigDecimal.ZERO, id));
+      index(place, id).ifPresent(from -> add(place, from, successor, Relation.FS, BigDecimal.ZERO));
     }
   }
 
@@ -84,19 +92,18 @@ final class LinkTable {
             .ifPresent(
                 kind ->
                     add(
-                        table.place(row, "successor"),
+                        new Place(FILE, row.line(), ""),
                         tail.get(),
                         head.get(),
                         kind,
-                        lag.value().orElse(BigDecimal.ZERO),
-                        to.text()));
+                        lag.value().orElse(BigDecimal.ZERO)));
       }
     }
   }
 
   private Optional<Integer> index(Place place, String id) {
     Optional<Integer> index = Optional.ofNullable(indexById.get(id));
-    if (index.isEmpty()) {
+    if (index.isEmpty() && idsAreKnown) {
       findings.problem(
           place.notice(
               id + " is no activity", id, nearest.hint(id, "an id of " + ActivityTable.FILE)));
@@ -104,10 +111,11 @@ final class LinkTable {
     return index;
   }
 
-  private void add(Place place, int from, int to, Relation relation, BigDecimal lag, String found) {
+  private void add(Place place, int from, int to, Relation relation, BigDecimal lag) {
     if (from == to) {
-      findings.problem(place.notice("linked to itself", found, "another activity"));
+      findings.problem(place.notice("linked to itself", id(from), "another activity"));
     } else if (!seen.add(List.of(from, to, relation, lag.stripTrailingZeros()))) {
+      String found = id(from) + " before " + id(to);
       findings.problem(place.notice("the same link a second time", found, "take one out"));
     } else {
       links.add(new LinkRow(place, from, to, relation, lag));

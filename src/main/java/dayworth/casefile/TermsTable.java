@@ -1,9 +1,11 @@
 package dayworth.casefile;
 
 import java.math.BigDecimal;
+import java.time.DayOfWeek;
 import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -33,7 +35,7 @@ final class TermsTable {
                   .with("shift", "SHIFT")),
           Map.entry("units_per_working_day", TimeCell.DURATION),
           Map.entry("start_date", (CellParser<LocalDate>) TimeCell::date),
-          Map.entry("working_days", (CellParser<List<String>>) WorkingDays::parse),
+          Map.entry("working_days", (CellParser<WorkingDays>) WorkingDays::parse),
           Map.entry("time_related_cost", MoneyCell.AMOUNT),
           Map.entry("time_related_per", PER_UNIT),
           Map.entry("fixed_cost", MoneyCell.AMOUNT),
@@ -64,6 +66,9 @@ final class TermsTable {
   private final Map<String, Place> places = new HashMap<>();
   private final Map<String, Object> values = new HashMap<>();
 
+  /** Terms with a value, right or wrong, and those that a faulty row was probably meant to give. */
+  private final Set<String> given = new HashSet<>();
+
   private TermsTable(Findings findings) {
     this.findings = findings;
   }
@@ -79,6 +84,17 @@ final class TermsTable {
     return Optional.ofNullable(places.get(term));
   }
 
+  /** The first day of the project. */
+  Optional<LocalDate> startDate() {
+    return Optional.ofNullable((LocalDate) values.get("start_date"));
+  }
+
+  /** The days of the week that are worked; Monday to Friday if nothing else is said. */
+  Set<DayOfWeek> workingDays() {
+    WorkingDays days = (WorkingDays) values.getOrDefault("working_days", WorkingDays.USUAL);
+    return days.days();
+  }
+
   Optional<String> text(String term) {
     return Optional.ofNullable(values.get(term)).map(Object::toString);
   }
@@ -92,32 +108,56 @@ final class TermsTable {
   }
 
   private void addRows(Table table) {
+    if (!table.has("term")) {
+      return;
+    }
+    table.misfits().forEach(row -> given.add(table.text(row, "term")));
     Nearest nearest = new Nearest(known());
+    NumberStyle style = style(table);
     for (Row row : table.rows()) {
       String term = table.text(row, "term");
       Place place = new Place(FILE, row.line(), term);
-      if (NOT_YET.contains(term)) {
+      if (term.isEmpty()) {
+        findings.problem(
+            new Place(FILE, row.line(), "term").notice("blank", "", "each row needs a term"));
+      } else if (NOT_YET.contains(term)) {
         findings.problem(place.notice("this term is not served yet", term, "take the row out"));
       } else if (!PARSERS.containsKey(term)) {
         String right = nearest.hint(term, "one of " + String.join(", ", known()));
+        nearest.to(term).ifPresent(given::add);
         findings.problem(new Place(FILE, row.line(), "term").notice("no such term", term, right));
       } else if (places.putIfAbsent(term, place) != null) {
         findings.problem(
             place.notice(
                 "a second row of this term", term, "line " + places.get(term).line() + " has it"));
       } else {
-        addValue(table, row, term);
+        addValue(term, table.text(row, "value"), style);
       }
     }
   }
 
-  private void addValue(Table table, Row row, String term) {
-    String text = table.text(row, "value");
+  /** Only the values of terms that are numbers show the file's decimal mark. */
+  private static NumberStyle style(Table table) {
+    List<Row> numbers =
+        table.rows().stream().filter(row -> isNumber(table.text(row, "term"))).toList();
+    return table.style().semicolons()
+        ? NumberStyle.ofSemicolons(
+            numbers, table.header().indexOf("value").stream().boxed().toList())
+        : NumberStyle.PLAIN;
+  }
+
+  private static boolean isNumber(String term) {
+    CellParser<?> parser = PARSERS.get(term);
+    return parser instanceof MoneyCell || parser instanceof TimeCell;
+  }
+
+  private void addValue(String term, String text, NumberStyle style) {
     if (text.isEmpty()) {
       return;
     }
+    given.add(term);
     try {
-      values.put(term, PARSERS.get(term).parse(text, table.style()));
+      values.put(term, PARSERS.get(term).parse(text, style));
     } catch (CellFault fault) {
       findings.problem(places.get(term).notice(fault.wrong(), text, fault.right()));
     }
@@ -139,7 +179,7 @@ final class TermsTable {
     require("bonus_cap_units", "bonus_rate");
     String unit = text("time_unit").orElse("DAY");
     boolean finer = unit.equals("HOUR") || unit.equals("SHIFT");
-    if (finer && !places.containsKey("units_per_working_day")) {
+    if (finer && !given.contains("units_per_working_day")) {
       findings.problem(
           places
               .get("time_unit")
@@ -154,7 +194,7 @@ final class TermsTable {
   }
 
   private void require(String term, String other) {
-    if (values.containsKey(term) && !places.containsKey(other)) {
+    if (values.containsKey(term) && !given.contains(other)) {
       findings.problem(
           places.get(term).notice("means nothing without " + other, term, "a row for " + other));
     }

@@ -1,27 +1,48 @@
 package dayworth.casefile;
 
-import java.util.ArrayList;
-import java.util.List;
+import java.time.DayOfWeek;
+import java.time.format.TextStyle;
+import java.util.Arrays;
+import java.util.Collections;
+import java.util.EnumSet;
+import java.util.LinkedHashMap;
+import java.util.Locale;
+import java.util.Map;
+import java.util.Set;
 
-/** Reads a list of weekdays such as {@code Mon Tue Wed Thu Fri}. */
-final class WorkingDays {
+/** A list of weekdays such as {@code Mon Tue Wed Thu Fri}. */
+record WorkingDays(Set<DayOfWeek> days) {
 
-  private static final List<String> NAMES =
-      List.of("Mon", "Tue", "Wed", "Thu", "Fri", "Sat", "Sun");
+  /** Monday to Friday. */
+  static final WorkingDays USUAL =
+      new WorkingDays(EnumSet.range(DayOfWeek.MONDAY, DayOfWeek.FRIDAY));
 
-  private WorkingDays() {}
+  private static final Map<String, DayOfWeek> BY_NAME = new LinkedHashMap<>();
 
-  static List<String> parse(String text, NumberStyle style) throws CellFault {
-    List<String> days = new ArrayList<>();
-    for (String day : text.split("[\\s,;]+", -1)) {
-      if (!NAMES.contains(day)) {
-        throw new CellFault("no such weekday: " + day, "of " + String.join(" ", NAMES));
+  static {
+    Arrays.stream(DayOfWeek.values()).forEach(day -> BY_NAME.put(name(day), day));
+  }
+
+  WorkingDays {
+    days = Collections.unmodifiableSet(EnumSet.copyOf(days));
+  }
+
+  /** The weekday's name as it stands in a case. */
+  static String name(DayOfWeek day) {
+    return day.getDisplayName(TextStyle.SHORT, Locale.ENGLISH);
+  }
+
+  static WorkingDays parse(String text, NumberStyle style) throws CellFault {
+    Set<DayOfWeek> days = EnumSet.noneOf(DayOfWeek.class);
+    for (String name : text.split("[\\s,;]+", -1)) {
+      DayOfWeek day = BY_NAME.get(name);
+      if (day == null) {
+        throw new CellFault("no such weekday: " + name, "of " + String.join(" ", BY_NAME.keySet()));
       }
-      if (days.contains(day)) {
-        throw new CellFault("the same weekday twice: " + day, "each weekday once");
+      if (!days.add(day)) {
+        throw new CellFault("the same weekday twice: " + name, "each weekday once");
       }
-      days.add(day);
     }
-    return days;
+    return new WorkingDays(days);
   }
 }
