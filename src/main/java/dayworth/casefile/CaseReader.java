@@ -70,7 +70,7 @@ public final class CaseReader {
           Place.whole(ActivityTable.FILE)
               .notice("the costs are too far apart to be exact", "", "smaller or rounder costs"));
     }
-    Doubts.report(network, activities, terms, findings);
+    Doubts.report(new ReadCase(network, activities, links, terms), findings);
     return new Case(
         name,
         terms.text("title").orElse(""),

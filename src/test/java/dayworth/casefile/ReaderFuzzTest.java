@@ -26,8 +26,8 @@ class ReaderFuzzTest {
   /** What hurts readers of tables most often. */
   private static final List<String> SPLICES =
       List.of(
-          ",", ";", "\"", "\"\"", "\n", "\r\n", "\r", "\t", "-", ".", "0", "999999", "1e9", "\u00fc",
-          "\uFEFF", "A3", "FS", "id", " ", "\u0000", "=1+1");
+          ",", ";", "\"", "\"\"", "\n", "\r\n", "\r", "\t", "-", ".", "0", "999999", "1e9",
+          "\u00fc", "\uFEFF", "A3", "FS", "id", " ", "\u0000", "=1+1");
 
   @TempDir private Path folder;
 
@@ -70,7 +70,8 @@ class ReaderFuzzTest {
           switch (random.nextInt(5)) {
             case 0 -> spliced(text, at, at, new byte[] {(byte) random.nextInt(256)});
             case 1 -> spliced(text, at, Math.min(text.length, at + 1), new byte[0]);
-            case 2 -> spliced(text, at, Math.min(text.length, at + random.nextInt(40)), new byte[0]);
+            case 2 ->
+                spliced(text, at, Math.min(text.length, at + random.nextInt(40)), new byte[0]);
             case 3 -> spliced(text, at, Math.min(text.length, at + 1), digit(random));
             default -> spliced(text, at, at, splice(random));
           };

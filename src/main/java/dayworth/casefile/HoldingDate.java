@@ -1,0 +1,40 @@
+package dayworth.casefile;
+
+import dayworth.network.Activity;
+import dayworth.network.Network;
+import dayworth.network.Plan;
+import dayworth.network.Timing;
+
+/**
+ * Warns of a not_before that makes compression worthless: the project takes as long as planned
+ * however much is compressed, and without that not_before it could be shorter.
+ *
+ * <p>Every other not_before leaves the longest chain as it is, so the one with which that chain
+ * begins is the only one to try.
+ */
+final class HoldingDate {
+
+  private HoldingDate() {}
+
+  static void report(ReadCase read, Findings findings) {
+    Network network = read.network();
+    ShortestFinish shortest = ShortestFinish.of(network);
+    int holder = shortest.origin();
+    if (holder == ShortestFinish.NONE
+        || network.activities().stream().noneMatch(Activity::isCompressible)
+        || Timing.earliest(network, Plan.allNormal(network)).finish() > shortest.ticks()) {
+      return;
+    }
+    long without = ShortestFinish.without(network, holder).ticks();
+    if (without < shortest.ticks()) {
+      String wrong = "compression gains nothing";
+      String found = network.scale().text(network.activity(holder).notBefore());
+      String right =
+          "with it no finish is shorter than "
+              + network.scale().text(shortest.ticks())
+              + ", as planned; without it "
+              + network.scale().text(without);
+      findings.warning(read.place(holder, "not_before").notice(wrong, found, right));
+    }
+  }
+}

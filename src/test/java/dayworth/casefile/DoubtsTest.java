@@ -1,0 +1,155 @@
+package dayworth.casefile;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+
+import java.io.IOException;
+import java.nio.file.Path;
+import java.util.List;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+
+/** Each warning where it holds, and none where it does not; all sums by hand. */
+class DoubtsTest {
+
+  private static final String HEADER =
+      "id,normal_duration,normal_cost,crash_duration,crash_cost,predecessors,not_before\n";
+  private static final String LINKS = "predecessor,successor,relation,lag\n";
+
+  @TempDir private Path folder;
+
+  private CaseOnDisk activities(String rows) throws IOException {
+    return new CaseOnDisk(folder).with("activities.csv", HEADER + rows);
+  }
+
+  private void expect(String rows, String... warnings) throws IOException {
+    assertEquals(List.of(warnings), activities(rows).warnings());
+  }
+
+  @Test
+  void aCrashCostBelowTheNormalCost() throws IOException {
+    expect(
+        "A,5,100,3,90.5,,\nB,5,100,3,100,A,\n",
+        "activities.csv:2 crash_cost | below the normal cost | 90.50"
+            + " | the curve starts from the cheaper way");
+  }
+
+  @Test
+  void anActivityThatNothingWaitsForBesidesTheLast() throws IOException {
+    expect(
+        "A,5,100,,,,\nB,4,100,,,A,\nC,5,100,,,A,\n",
+        "activities.csv:3 id | no successor | B"
+            + " | a link to what waits for it, unless only the project's finish does");
+  }
+
+  @Test
+  void aLinkThatAChainImplies() throws IOException {
+    expect(
+        "A,5,100,,,,\nB,4,100,,,A,\nC,5,100,,,A;B,\n",
+        "activities.csv:4 predecessors | implied by other links | A before C"
+            + " | it can go: the chain A, B, C says as much");
+  }
+
+  /** B takes at least 2 of its 4, so the chain A, B, C with a lag of 3 is 5 long. */
+  @Test
+  void aLagIsMeasuredAgainstTheShortestChain() throws IOException {
+    String rows = "A,5,100,,,,\nB,4,100,2,120,A,\nC,5,100,,,,\n";
+    String chain = "B,C,FS,3\n";
+    assertEquals(
+        List.of(
+            "links.csv:3 | implied by other links | A before C"
+                + " | it can go: the chain A, B, C says as much"),
+        activities(rows).with("links.csv", LINKS + chain + "A,C,FS,5\n").warnings());
+    assertEquals(
+        List.of(), activities(rows).with("links.csv", LINKS + chain + "A,C,FS,5.001\n").warnings());
+  }
+
+  @Test
+  void otherRelationsAndNegativeLagsImplyNothing() throws IOException {
+    String rows = "A,5,100,,,,\nB,4,100,,,,\nC,5,100,,,A,\n";
+    for (String chain :
+        List.of("A,B,SS,9\nB,C,FS,0\n", "A,B,FS,0\nB,C,FF,9\n", "A,B,FS,-1\nB,C,FS,0\n")) {
+      assertEquals(List.of(), activities(rows).with("links.csv", LINKS + chain).warnings(), chain);
+    }
+  }
+
+  @Test
+  void aWeakerLinkOfTheSameKind() throws IOException {
+    assertEquals(
+        List.of(
+            "activities.csv:3 predecessors | implied by another link | A before B"
+                + " | it can go: the same link with lag 2 says more",
+            "links.csv:3 | implied by another link | A before B"
+                + " | it can go: the same link with lag 4 says more"),
+        activities("A,5,100,,,,\nB,4,100,,,A,\n")
+            .with("links.csv", LINKS + "A,B,FS,2\nA,B,SS,3\nA,B,SS,4\n")
+            .warnings());
+  }
+
+  @Test
+  void aLongChainIsNamedByItsEnds() throws IOException {
+    expect(
+        "A,1,1,,,,\nB,1,1,,,A,\nC,1,1,,,B,\nD,1,1,,,C,\nE,1,1,,,D,\nF,1,1,,,E,\nG,1,1,,,A;F,\n",
+        "activities.csv:8 predecessors | implied by other links | A before G"
+            + " | it can go: the chain A, B, and 3 more to F, G says as much");
+  }
+
+  /** Planned: B from 10 to 15. Shortest: A to 3, B still from 10 to 15. Without: 3 + 5 = 8. */
+  @Test
+  void aNotBeforeThatMakesCompressionWorthless() throws IOException {
+    expect(
+        "A,5,100,3,120,,\nB,5,100,,,A,10\n",
+        "activities.csv:3 not_before | compression gains nothing | 10"
+            + " | with it no finish is shorter than 15, as planned; without it 8");
+  }
+
+  @Test
+  void aNotBeforeThatLeavesSomethingToGainIsNotDoubtful() throws IOException {
+    // B can be compressed: 10 + 4 = 14 is shorter than the planned 15
+    expect("A,5,100,3,120,,\nB,5,100,4,120,A,10\n");
+    // A is planned to end at 5, after B's 4: the planned 10 can become 4 + 5 = 9
+    expect("A,5,100,3,120,,\nB,5,100,,,A,4\n");
+    // nothing can be compressed
+    expect("A,5,100,,,,\nB,5,100,,,A,10\n");
+    // C takes 15 whatever B does
+    expect("A,5,100,3,120,,\nB,5,100,,,A,10\nC,15,100,,,,\nD,0,0,,,B;C,\n");
+  }
+
+  @Test
+  void aStartDateOnARestDay() throws IOException {
+    CaseOnDisk disk = activities("A,5,100,,,,\n");
+    String dates =
+        "terms.csv:2 start_date | dates change nothing yet |  | results are in time units";
+    // 1 May 2027 is a Saturday, the Monday after it 3 May
+    assertEquals(
+        List.of(
+            "terms.csv:2 start_date | a rest day | Sat 2027-05-01 | work begins on Mon 2027-05-03",
+            dates),
+        disk.with("terms.csv", "term,value\nstart_date,2027-05-01\n").warnings());
+    assertEquals(
+        List.of(dates),
+        disk.with("terms.csv", "term,value\nstart_date,2027-05-01\nworking_days,Fri Sat\n")
+            .warnings());
+    assertEquals(
+        List.of(dates), disk.with("terms.csv", "term,value\nstart_date,2027-05-03\n").warnings());
+  }
+
+  /** What the makers of the demo cases put into them on purpose. */
+  @Test
+  void theDemoCasesAreDoubtfulOnlyWhereTheyAreMeantToBe() {
+    assertEquals(List.of(), new CaseOnDisk(Path.of("cases", "starter")).warnings());
+    assertEquals(
+        List.of(
+            "activities.csv:28 id | no successor | M9"
+                + " | a link to what waits for it, unless only the project's finish does",
+            "activities.csv:40 predecessors | implied by other links | F6 before I2"
+                + " | it can go: the chain F6, I1, I2 says as much"),
+        new CaseOnDisk(Path.of("cases", "ferry-berth-core")).warnings());
+    assertEquals(
+        List.of(
+            "activities.csv:71 predecessors | implied by other links | V1 before K4"
+                + " | it can go: the chain V1, S7, K4 says as much",
+            "terms.csv:5 start_date | dates change nothing yet | "
+                + " | results are in time units"),
+        new CaseOnDisk(Path.of("cases", "outage")).warnings());
+  }
+}
