@@ -94,8 +94,11 @@ class FolderRulesTest {
         .with("links.csv", "predecessor,successor,relation\nA,B,FX\n")
         .with(
             "activities.csv",
-            "id,normal_duration,normal_cost,crash_duration,crash_cost,predecessors\n"
-                + "A,5,x,6,100,\nB,y,100,,,AA\n")
+            """
+            id,normal_duration,normal_cost,crash_duration,crash_cost,predecessors
+            A,5,x,6,100,
+            B,y,100,,,AA
+            """)
         .with("pay.csv", "x");
     assertEquals(
         List.of(
