@@ -21,7 +21,7 @@ class ReaderFuzzTest {
 
   private static final Path CASE = Path.of("cases", "ferry-berth-core");
   private static final List<String> FILES = List.of("activities.csv", "links.csv", "terms.csv");
-  private static final int CASES = 800;
+  private static final int CASES = 2000;
 
   /** What hurts readers of tables most often. */
   private static final List<String> SPLICES =
