@@ -23,23 +23,21 @@ final class TightFlow {
 
   private static final int FAR = Integer.MAX_VALUE;
 
-  private final ArcNetwork net;
-  private final long[] time;
-  private final Reached reached;
+  /** The goal's number in the part. */
+  private static final int GOAL = 0;
+
+  private final TightPart part;
 
   /** How many half-arcs against the order lie between an event and the goal. */
   private final int[] distance;
-
-  /** The events whose distance is known, nearest first. */
-  private final int[] measured;
-
-  private int measuredCount;
 
   /** Events at the present distance whose half-arcs are still to be looked at. */
   private final int[] open;
 
   /** Events one farther; some may prove to be nearer. */
-  private final int[] farther;
+  private int[] farther = new int[64];
+
+  private int fartherCount;
 
   /** The next half-arc of each event to try. */
   private final int[] next;
@@ -51,17 +49,12 @@ final class TightFlow {
   private boolean isHeld;
 
   TightFlow(ArcNetwork net, long[] time, Reached reached) {
-    this.net = net;
-    this.time = time;
-    this.reached = reached;
+    part = new TightPart(net, time, reached);
     int events = net.events();
     distance = new int[events];
-    measured = new int[events];
     open = new int[events];
-    farther = new int[net.head.length];
     next = new int[events];
     path = new int[events];
-    Arrays.fill(distance, FAR);
   }
 
   /**
@@ -73,9 +66,14 @@ final class TightFlow {
   long send(int from, int to, long most) {
     isHeld = false;
     long sent = 0;
-    while (sent < most && !isHeld && measure(from, to)) {
-      sent += block(from, to, most == UNLIMITED ? UNLIMITED : most - sent);
+    int source = part.pick(from, to);
+    if (source < 0) {
+      return sent;
     }
+    while (sent < most && !isHeld && measure(source)) {
+      sent += block(source, most == UNLIMITED ? UNLIMITED : most - sent);
+    }
+    part.putBack();
     return sent;
   }
 
@@ -86,21 +84,18 @@ final class TightFlow {
 
   /** The half-arcs of the path without limit, from first to last. */
   List<Integer> heldBy() {
-    return Arrays.stream(path, 0, pathLength).boxed().toList();
+    return Arrays.stream(path, 0, pathLength).map(part::half).boxed().toList();
   }
 
-  /** Measures distances to the goal, round by round, until that of {@code from} is known. */
-  private boolean measure(int from, int to) {
-    for (int k = 0; k < measuredCount; k++) {
-      distance[measured[k]] = FAR;
-    }
-    measuredCount = 0;
+  /** Measures distances to the goal, round by round, until that of {@code source} is known. */
+  private boolean measure(int source) {
+    Arrays.fill(distance, 0, part.events(), FAR);
     int openCount = 1;
-    open[0] = to;
-    know(to, 0);
+    open[0] = GOAL;
+    know(GOAL, 0);
     for (int far = 0; openCount > 0; far++) {
-      int fartherCount = spread(openCount, far, to);
-      if (distance[from] != FAR) {
+      spread(openCount, far);
+      if (distance[source] != FAR) {
         return true;
       }
       openCount = 0;
@@ -115,46 +110,45 @@ final class TightFlow {
   }
 
   /** Finds all events at one distance, and those that may be one farther. */
-  private int spread(int countAtFirst, int far, int to) {
+  private void spread(int countAtFirst, int far) {
     int openCount = countAtFirst;
-    int fartherCount = 0;
+    fartherCount = 0;
     while (openCount > 0) {
-      int head = open[--openCount];
-      for (int out = net.first[head]; out < net.first[head + 1]; out++) {
-        int tail = net.head[out];
-        if (distance[tail] == FAR
-            && time[head] + net.length[out] == time[tail]
-            && reached.holds(tail)
-            && net.room[net.mate[out]] > 0) {
-          if (isInOrder(tail, head, to)) {
+      int here = open[--openCount];
+      for (int out = part.first[here]; out < part.first[here + 1]; out++) {
+        int tail = part.head[out];
+        int in = part.mate[out];
+        if (distance[tail] == FAR && part.room[in] > 0) {
+          if (part.against[in] == 0) {
             know(tail, far);
             open[openCount++] = tail;
           } else {
-            farther[fartherCount++] = tail;
+            perhapsFarther(tail);
           }
         }
       }
     }
-    return fartherCount;
   }
 
-  private static boolean isInOrder(int tail, int head, int to) {
-    return tail < head || head == to;
+  private void perhapsFarther(int event) {
+    if (fartherCount == farther.length) {
+      farther = Arrays.copyOf(farther, 2 * fartherCount);
+    }
+    farther[fartherCount++] = event;
   }
 
   private void know(int event, int far) {
     distance[event] = far;
-    next[event] = net.first[event];
-    measured[measuredCount++] = event;
+    next[event] = part.first[event];
   }
 
   /** Blocks every path on which each half-arc keeps the order or comes one nearer to the goal. */
-  private long block(int from, int to, long most) {
+  private long block(int source, long most) {
     long sent = 0;
     pathLength = 0;
-    int here = from;
+    int here = source;
     while (sent < most) {
-      if (here == to) {
+      if (here == GOAL) {
         long amount = roomOnPath(most == UNLIMITED ? UNLIMITED : most - sent);
         if (amount == UNLIMITED) {
           isHeld = true;
@@ -162,12 +156,12 @@ final class TightFlow {
         }
         sent += amount;
         here = sendOnPath(amount);
-      } else if (advance(here, to)) {
-        here = net.head[path[pathLength - 1]];
+      } else if (advance(here)) {
+        here = part.head[path[pathLength - 1]];
       } else if (pathLength == 0) {
         return sent;
       } else {
-        here = tail(path[--pathLength]);
+        here = part.tail(path[--pathLength]);
         next[here]++;
       }
     }
@@ -175,14 +169,10 @@ final class TightFlow {
   }
 
   /** Goes on over the next half-arc that leads towards the goal. */
-  private boolean advance(int here, int to) {
-    int end = net.first[here + 1];
+  private boolean advance(int here) {
+    int end = part.first[here + 1];
     for (int half = next[here]; half < end; half++) {
-      int head = net.head[half];
-      int nearer = isInOrder(here, head, to) ? 0 : 1;
-      if (distance[head] == distance[here] - nearer
-          && net.room[half] > 0
-          && time[here] + net.length[half] == time[head]) {
+      if (distance[part.head[half]] == distance[here] - part.against[half] && part.room[half] > 0) {
         next[here] = half;
         path[pathLength++] = half;
         return true;
@@ -195,7 +185,7 @@ final class TightFlow {
   private long roomOnPath(long most) {
     long room = most;
     for (int k = 0; k < pathLength; k++) {
-      room = Math.min(room, net.room[path[k]]);
+      room = Math.min(room, part.room[path[k]]);
     }
     return room;
   }
@@ -204,16 +194,12 @@ final class TightFlow {
   private int sendOnPath(long amount) {
     int whole = pathLength - 1;
     for (int k = pathLength - 1; k >= 0; k--) {
-      net.send(path[k], amount);
-      if (net.room[path[k]] == 0) {
+      part.send(path[k], amount);
+      if (part.room[path[k]] == 0) {
         whole = k;
       }
     }
     pathLength = whole;
-    return tail(path[whole]);
-  }
-
-  private int tail(int half) {
-    return net.head[net.mate[half]];
+    return part.tail(path[whole]);
   }
 }
