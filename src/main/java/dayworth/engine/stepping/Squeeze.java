@@ -24,7 +24,7 @@ import java.util.List;
  * directions have no slack; so times and flow are cheapest for the present t(to) − t(from).
  *
  * <p><b>Cost.</b> For each change of price the half-arcs of the events reached, a few times over;
- * for each event that joins or leaves its half-arcs and their places in a heap. All numbers are
+ * for each event that joins or leaves its half-arcs and their places in a queue. All numbers are
  * whole.
  */
 final class Squeeze {
@@ -66,7 +66,7 @@ final class Squeeze {
 
   private final Reached reached;
   private final TightFlow flow;
-  private final EventHeap heap = new EventHeap();
+  private final ArrivalQueue queue = new ArrivalQueue();
 
   /** Half-arcs out of the set that are tight already. */
   private int[] tight = new int[64];
@@ -128,7 +128,7 @@ final class Squeeze {
   /** Lets go of all events; they keep the times they have come to. */
   void settle() {
     reached.clear(shift);
-    heap.clear();
+    queue.clear();
     tightCount = 0;
     shift = 0;
   }
@@ -141,18 +141,18 @@ final class Squeeze {
         return true;
       }
       long enough = time[to] - time[from] - close;
-      if (heap.isEmpty() || heap.leastKey() > enough) {
+      if (queue.isEmpty() || queue.leastKey() > enough) {
         shift = Math.max(shift, enough);
         return false;
       }
-      shift = heap.leastKey();
+      shift = queue.leastKey();
     }
   }
 
   /** Adds all that is reached at the present shift. */
   private void spread() {
-    while (tightCount > 0 || (!heap.isEmpty() && heap.leastKey() <= shift)) {
-      int half = tightCount > 0 ? tight[--tightCount] : heap.pop();
+    while (tightCount > 0 || (!queue.isEmpty() && queue.leastKey() <= shift)) {
+      int half = tightCount > 0 ? tight[--tightCount] : queue.pop();
       int tail = net.head[net.mate[half]];
       int head = net.head[half];
       if (!reached.holds(head)
@@ -177,7 +177,7 @@ final class Squeeze {
 
   private void await(int half, long key) {
     if (key > shift) {
-      heap.push(key, half);
+      queue.push(key, half);
       return;
     }
     if (tightCount == tight.length) {
@@ -197,7 +197,7 @@ final class Squeeze {
         int in = net.mate[out];
         int tail = net.head[out];
         if (net.room[in] > 0 && reached.holds(tail)) {
-          heap.push(time[event] - time[tail] - net.length[in], in);
+          queue.push(time[event] - time[tail] - net.length[in], in);
         }
       }
     }
