@@ -25,6 +25,8 @@ public final class RandomNetworks {
   public enum Kind {
     /** Finish-to-start without lags, whole durations, no slope below zero. */
     PLAIN,
+    /** All that {@link #EVERYTHING} has, but whole durations, lags and times. */
+    WHOLE,
     /** All relations, lags, decimals, not-before times, slopes of zero and below. */
     EVERYTHING
   }
@@ -38,7 +40,8 @@ public final class RandomNetworks {
   private RandomNetworks(long seed, Kind kind) {
     this.random = new Random(seed);
     this.kind = kind;
-    this.ticksPerUnit = kind == Kind.PLAIN ? 1 : new int[] {1, 10, 100, 1000}[random.nextInt(4)];
+    this.ticksPerUnit =
+        kind == Kind.EVERYTHING ? new int[] {1, 10, 100, 1000}[random.nextInt(4)] : 1;
   }
 
   /** Everything that may be, with 3 to 40 activities. */
@@ -73,7 +76,7 @@ public final class RandomNetworks {
     long normal = time(0, 12);
     long most = Math.min(normal, time(0, 8));
     Money normalCost = Money.of(random.nextInt(1000));
-    long notBefore = kind == Kind.EVERYTHING && random.nextInt(8) == 0 ? time(0, 20) : 0;
+    long notBefore = kind != Kind.PLAIN && random.nextInt(8) == 0 ? time(0, 20) : 0;
     if (most == 0 || random.nextInt(5) == 0) {
       return new Activity(id, "", "", normal, normal, normalCost, normalCost, notBefore);
     }
@@ -84,10 +87,10 @@ public final class RandomNetworks {
   /** Half of all prices come from a few round ones for each unit, so that many are equal. */
   private Money extra(long ticks) {
     int draw = random.nextInt(10);
-    if (kind == Kind.EVERYTHING && draw == 0) {
+    if (kind != Kind.PLAIN && draw == 0) {
       return Money.ZERO;
     }
-    if (kind == Kind.EVERYTHING && draw == 1) {
+    if (kind != Kind.PLAIN && draw == 1) {
       return Money.of(-1 - random.nextInt(300));
     }
     return draw < 6
