@@ -10,11 +10,14 @@ import java.util.List;
  * @param comparisons longest duration first
  * @param atBreakpoints how many of them are at breakpoints
  * @param ofPoints how many points a full comparison would have
+ * @param unanswered where the linear programme was asked and gave no answer to rely on
  */
-public record CrossCheck(List<Comparison> comparisons, int atBreakpoints, int ofPoints) {
+public record CrossCheck(
+    List<Comparison> comparisons, int atBreakpoints, int ofPoints, List<Unanswered> unanswered) {
 
   public CrossCheck {
     comparisons = List.copyOf(comparisons);
+    unanswered = List.copyOf(unanswered);
   }
 
   /** How many comparisons are inside a piece, between two breakpoints. */
@@ -43,4 +46,12 @@ public record CrossCheck(List<Comparison> comparisons, int atBreakpoints, int of
       return stepping.cents().subtract(linear).abs();
     }
   }
+
+  /**
+   * A deadline that could not be compared, which is no disagreement.
+   *
+   * @param duration ticks
+   * @param reason for people
+   */
+  public record Unanswered(long duration, String reason) {}
 }

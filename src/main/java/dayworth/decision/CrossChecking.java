@@ -36,19 +36,23 @@ final class CrossChecking {
       points.add(step.to() + step.ticks() / 2);
     }
     if (most == 0) {
-      return new CrossCheck(List.of(), 0, points.size());
+      return new CrossCheck(List.of(), 0, points.size(), List.of());
     }
     List<CrossCheck.Comparison> comparisons = new ArrayList<>();
+    List<CrossCheck.Unanswered> unanswered = new ArrayList<>();
     int atBreakpoints = 0;
     LinearProgramme programme = new LinearProgramme(network);
     for (long duration : spread(points, most)) {
       watcher.now("comparing with the linear programme, now at " + network.scale().text(duration));
-      comparisons.add(compare(network, curve, programme, duration));
-      if (breakpoints.contains(duration)) {
-        atBreakpoints++;
+      Answer answer = programme.at(duration);
+      if (answer instanceof Answer.NotSolved silent) {
+        unanswered.add(new CrossCheck.Unanswered(duration, silent.reason()));
+      } else {
+        comparisons.add(compare(network, curve, answer, duration));
+        atBreakpoints += breakpoints.contains(duration) ? 1 : 0;
       }
     }
-    return new CrossCheck(comparisons, atBreakpoints, points.size());
+    return new CrossCheck(comparisons, atBreakpoints, points.size(), unanswered);
   }
 
   private static List<Long> spread(NavigableSet<Long> points, long most) {
@@ -64,9 +68,9 @@ final class CrossChecking {
   }
 
   private static CrossCheck.Comparison compare(
-      Network network, Curve curve, LinearProgramme programme, long duration) {
+      Network network, Curve curve, Answer answer, long duration) {
     String where = "the finish at " + network.scale().text(duration);
-    if (programme.at(duration) instanceof Answer.Least least) {
+    if (answer instanceof Answer.Least least) {
       CrossCheck.Comparison comparison =
           new CrossCheck.Comparison(duration, curve.costAt(duration), least.directCost());
       if (comparison.difference().compareTo(ROUNDING) > 0) {

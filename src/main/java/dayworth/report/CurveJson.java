@@ -149,5 +149,12 @@ final class CurveJson {
           members.number("lp_cost", point.linear());
           members.number("difference", point.difference());
         });
+    json.array(
+        "unanswered",
+        crossCheck.unanswered(),
+        (members, point) -> {
+          members.number("duration", names.units(point.duration()));
+          members.text("reason", point.reason());
+        });
   }
 }

@@ -155,8 +155,12 @@ public final class CurveText {
             + Wording.count(answer.rows().size(), "finish", "finishes")
             + ". ";
     int points = check.comparisons().size();
+    int silent = check.unanswered().size();
     if (points == 0) {
-      return proved + "The linear programme was not asked.";
+      return proved
+          + (silent == 0
+              ? "The linear programme was not asked."
+              : "The linear programme gave no answer: " + check.unanswered().get(0).reason() + ".");
     }
     BigDecimal largest = check.largestDifference();
     String sampled =
@@ -172,6 +176,11 @@ public final class CurveText {
         + sampled
         + "; largest difference "
         + largest.toPlainString()
-        + ".";
+        + "."
+        + (silent == 0
+            ? ""
+            : " It gave no answer at "
+                + Wording.count(silent, "other point", "other points")
+                + ".");
   }
 }

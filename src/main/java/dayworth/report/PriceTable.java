@@ -126,9 +126,9 @@ final class PriceTable {
         worths.add(perUnit(fall.dividedBy(later.duration() - sooner.duration())).cents());
       }
     }
-    MoneyLook look = MoneyLook.of(worths);
     BigDecimal low = worths.stream().reduce(BigDecimal::min).orElse(BigDecimal.ZERO);
     BigDecimal high = worths.stream().reduce(BigDecimal::max).orElse(BigDecimal.ZERO);
+    MoneyLook look = MoneyLook.of(List.of(low, high));
     return low.compareTo(high) == 0 ? look.text(low) : look.text(low) + " to " + look.text(high);
   }
 

@@ -99,7 +99,8 @@ final class SeriesAnswer {
                 new CrossCheck.Comparison(10, Money.of(160), new BigDecimal("160.00")),
                 new CrossCheck.Comparison(9, Money.of(180), new BigDecimal("180.00"))),
             1,
-            2));
+            2,
+            List.of()));
   }
 
   private static Finish finish(
