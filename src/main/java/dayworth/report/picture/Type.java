@@ -6,29 +6,24 @@ import java.util.ArrayList;
 import java.util.List;
 
 /**
- * The sizes and weights of words in pictures, in a font that every Java runtime can show.
+ * The sizes and weights of words in pictures, in the plain font of the Java runtime.
  *
  * <p>Words are measured on one and the same scale for both kinds of file, so that a label that has
  * room in one has it in the other.
  */
-enum Type {
-  TITLE(Font.BOLD, 17),
-  NOTE(Font.PLAIN, 12),
-  LABEL(Font.PLAIN, 12),
-  NAME(Font.BOLD, 12),
-  AXIS(Font.PLAIN, 11),
-  AXIS_NAMED(Font.BOLD, 11);
+record Type(Font font) {
+
+  static final Type TITLE = of(Font.BOLD, 17);
+  static final Type NOTE = of(Font.PLAIN, 12);
+  static final Type LABEL = of(Font.PLAIN, 12);
+  static final Type NAME = of(Font.BOLD, 12);
+  static final Type AXIS = of(Font.PLAIN, 11);
+  static final Type AXIS_NAMED = of(Font.BOLD, 11);
 
   private static final FontRenderContext SCALE = new FontRenderContext(null, true, true);
 
-  private final Font font;
-
-  Type(int weight, int size) {
-    font = new Font(Font.SANS_SERIF, weight, size);
-  }
-
-  Font font() {
-    return font;
+  private static Type of(int weight, int size) {
+    return new Type(new Font(Font.SANS_SERIF, weight, size));
   }
 
   int size() {
@@ -44,18 +39,18 @@ enum Type {
     return text.isEmpty() ? 0 : font.getStringBounds(text, SCALE).getWidth();
   }
 
-  /** The text broken between words into lines of at most {@code width}; a long word stays whole. */
+  /** The text broken between words into lines of at most {@code width}; a long word is cut. */
   List<String> wrap(String text, double width) {
     List<String> lines = new ArrayList<>();
     StringBuilder line = new StringBuilder();
     for (String word : text.split(" ", -1)) {
       if (line.length() > 0 && width(line + " " + word) > width) {
-        lines.add(line.toString());
+        lines.add(fit(line.toString(), width));
         line.setLength(0);
       }
       line.append(line.length() > 0 ? " " : "").append(word);
     }
-    lines.add(line.toString());
+    lines.add(fit(line.toString(), width));
     return lines;
   }
 
