@@ -19,6 +19,8 @@ record Pen(Color color, BasicStroke stroke) {
   static final Pen BONUS = dotted(Look.OLIVE, 2.4, 4.6);
   static final Pen PRICE = new Pen(Look.INK, stroke(3, BasicStroke.CAP_SQUARE));
   static final Pen PRICE_PLATE = new Pen(Look.PAPER, stroke(6, BasicStroke.CAP_SQUARE));
+  static final Pen CUT = dashed(Look.EDGE, 1, 2, 4);
+  static final Pen BONUS_DOTS = solid(Look.OLIVE, 2);
   static final Pen STOP = solid(Look.PLUM, 1.6);
   static final Pen CONTRACT = dashed(Look.INK, 1.1, 6, 3);
   static final Pen CROSS = solid(Look.INK, 2.2);

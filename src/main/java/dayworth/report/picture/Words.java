@@ -16,11 +16,46 @@ final class Words {
   private final String currency;
   private final String unit;
   private final TimeScale scale;
+  private final String project;
 
   Words(Case of) {
-    this.currency = of.currency();
+    this.currency = safe(of.currency());
     this.unit = of.unit().word();
     this.scale = of.network().scale();
+    String title = safe(of.title());
+    this.project = title.isEmpty() ? safe(of.name()) : title;
+  }
+
+  /**
+   * Text from a file as one line that can stand in XML: without control characters, marks that turn
+   * the direction of reading, and what is no character at all.
+   */
+  static String safe(String text) {
+    StringBuilder safe = new StringBuilder();
+    text.codePoints().map(Words::orBlank).forEach(safe::appendCodePoint);
+    return safe.toString().strip();
+  }
+
+  private static int orBlank(int character) {
+    boolean stays =
+        switch (Character.getType(character)) {
+          case Character.CONTROL,
+              Character.SURROGATE,
+              Character.UNASSIGNED,
+              Character.PRIVATE_USE,
+              Character.LINE_SEPARATOR,
+              Character.PARAGRAPH_SEPARATOR ->
+              false;
+          // The joiners shape letters; everything else of this kind is there to mislead.
+          case Character.FORMAT -> character == 0x200C || character == 0x200D;
+          default -> true;
+        };
+    return stays ? character : ' ';
+  }
+
+  /** What the case is called, without a full stop at its end. */
+  String project() {
+    return project.endsWith(".") ? project.substring(0, project.length() - 1) : project;
   }
 
   /** An amount without its currency: whole, but with cents where it is small and has them. */
