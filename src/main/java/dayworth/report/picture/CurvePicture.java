@@ -132,12 +132,24 @@ final class CurvePicture implements Picture {
     }
   }
 
+  /** Damages and bonus are not drawn where there are none. */
   private List<Point2D.Double> points(MoneyLine line) {
-    return answer.rows().stream()
-        .map(
-            row ->
-                new Point2D.Double(finishes.x(row.duration()), money.y(line.amount().apply(row))))
-        .toList();
+    List<Point2D.Double> points = new ArrayList<>();
+    for (int i = 0; i < answer.rows().size(); i++) {
+      boolean drawn = !line.stopsAtZero() || isNearMoney(line, i);
+      if (drawn) {
+        Finish row = answer.rows().get(i);
+        points.add(
+            new Point2D.Double(finishes.x(row.duration()), money.y(line.amount().apply(row))));
+      }
+    }
+    return points;
+  }
+
+  private boolean isNearMoney(MoneyLine line, int row) {
+    List<Finish> rows = answer.rows();
+    return rows.subList(Math.max(0, row - 1), Math.min(rows.size(), row + 2)).stream()
+        .anyMatch(near -> line.amount().apply(near).signum() != 0);
   }
 
   private void paintPoints(Sheet sheet) {
@@ -155,6 +167,7 @@ final class CurvePicture implements Picture {
   /** The round amounts, where neither a line nor a word is in the way. */
   private void paintGrid(Sheet sheet) {
     LabelPlacer placer = new LabelPlacer(plot);
+    placer.avoid(money.cutBand());
     for (MoneyLine line : lines) {
       List<Point2D.Double> points = points(line);
       for (int i = 1; i < points.size(); i++) {
@@ -199,8 +212,8 @@ final class CurvePicture implements Picture {
       left(line).ifPresent(label -> left.add(label, finishes.x(first.duration()), fromY));
       right(line).ifPresent(label -> right.add(label, finishes.x(last.duration()), toY));
     }
-    left.write(sheet, plot.y() - 20, plot.bottom() + 24);
-    right.write(sheet, plot.y() - 20, plot.bottom() + 24);
+    left.write(sheet, plot.y() - 20, plot.bottom() + 4);
+    right.write(sheet, plot.y() - 20, plot.bottom() + 4);
   }
 
   private Optional<Label> left(MoneyLine line) {
@@ -212,7 +225,9 @@ final class CurvePicture implements Picture {
     if (line.pen().equals(Pen.BONUS) && amount.signum() == 0) {
       return Optional.empty();
     }
-    return Optional.of(new Label(line.ink(), 0, List.of(line.name(), words.amount(amount))));
+    List<String> said =
+        amount.signum() == 0 ? List.of(line.name()) : List.of(line.name(), words.amount(amount));
+    return Optional.of(new Label(line.ink(), 0, said));
   }
 
   private Optional<Label> right(MoneyLine line) {

@@ -45,7 +45,7 @@ final class MoneyAxis {
     Range gap = widestGap(all);
     boolean cuts = gap.size() > WORTH_CUTTING * (high - low);
     double room = ROOM * (high - low - (cuts ? gap.size() : 0));
-    Range cut = cuts ? new Range(gap.low() + room, gap.high() - room) : new Range(low, low);
+    Range cut = cuts ? roundedInside(gap, room) : new Range(low, low);
     double lowest = low < 0 ? low - room : low;
     return new MoneyAxis(plot, lowest, high > low ? high + room : low + 1, cut);
   }
@@ -67,6 +67,20 @@ final class MoneyAxis {
       reached = Math.max(reached, range.high());
     }
     return widest;
+  }
+
+  /** As much of the gap as leaves room at both sides and is round. */
+  private static Range roundedInside(Range gap, double room) {
+    double step = NiceSteps.size(gap.size() - 2 * room, 20);
+    return new Range(
+        Math.ceil((gap.low() + room) / step) * step, Math.floor((gap.high() - room) / step) * step);
+  }
+
+  /** Where the scale is cut; without height if it is not. */
+  Box cutBand() {
+    return isCut()
+        ? new Box(plot.x(), y(cut.low()) - CUT_HEIGHT, plot.width(), CUT_HEIGHT)
+        : new Box(plot.x(), plot.bottom(), plot.width(), 0);
   }
 
   boolean isCut() {
@@ -105,12 +119,17 @@ final class MoneyAxis {
       sheet.line(pen, plot.x(), y(amount), plot.right(), y(amount));
     }
     if (isCut()) {
-      double lower = y(cut.low());
-      sheet.line(Pen.CUT, plot.x(), lower, plot.right(), lower);
-      sheet.line(Pen.CUT, plot.x(), lower - CUT_HEIGHT, plot.right(), lower - CUT_HEIGHT);
-      String said = words.amount(BigDecimal.valueOf(cut.size())) + " of the scale is cut out here";
+      Box band = cutBand();
+      sheet.line(Pen.CUT, band.x(), band.y(), band.right(), band.y());
+      sheet.line(Pen.CUT, band.x(), band.bottom(), band.right(), band.bottom());
+      String said =
+          "Nothing lies between "
+              + words.amount(BigDecimal.valueOf(cut.low()))
+              + " and "
+              + words.amount(BigDecimal.valueOf(cut.high()))
+              + ": cut out";
       double middle = plot.x() + plot.width() / 2;
-      sheet.text(Type.AXIS, Look.QUIET, Sheet.Anchor.MIDDLE, middle, lower - 6, said);
+      sheet.text(Type.AXIS, Look.QUIET, Sheet.Anchor.MIDDLE, middle, band.bottom() - 6, said);
     }
   }
 }

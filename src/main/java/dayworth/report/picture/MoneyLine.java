@@ -38,6 +38,11 @@ record MoneyLine(Pen pen, Color ink, String name, Function<Finish, BigDecimal> a
     return pen.equals(Pen.TOTAL);
   }
 
+  /** Whether it is paid at some finishes only. */
+  boolean stopsAtZero() {
+    return pen.equals(Pen.DAMAGES) || pen.equals(Pen.BONUS);
+  }
+
   MoneyAxis.Range range(CurveAnswer answer) {
     double[] all =
         answer.rows().stream()

@@ -26,6 +26,7 @@ public final class Pictures {
     Layout layout = Layout.of(units(answer));
     Map<String, Picture> pictures = new LinkedHashMap<>();
     pictures.put("curve", new CurvePicture(answer, layout));
+    pictures.put("price", new PricePicture(answer, layout));
     Map<String, CompletableFuture<byte[]>> making = new LinkedHashMap<>();
     pictures.forEach(
         (name, picture) -> {
