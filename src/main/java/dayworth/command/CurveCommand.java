@@ -9,14 +9,18 @@ import dayworth.report.CurveFiles;
 import dayworth.report.CurveText;
 import dayworth.report.ResultJson;
 import dayworth.report.ResultsNotWritten;
+import dayworth.report.picture.Pictures;
 import dayworth.value.TimeScale;
 import java.math.BigDecimal;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalLong;
+import java.util.Set;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
 
@@ -39,6 +43,9 @@ final class CurveCommand extends CaseCommand {
       description = "How many points to compare with the linear programme.",
       converter = CrossCheckSize.Parser.class)
   private Optional<CrossCheckSize> crosscheck = Optional.empty();
+
+  @Option(names = "--no-pictures", description = "Write no pictures, only tables.")
+  private boolean noPictures;
 
   @Override
   TimeScale finest() {
@@ -89,8 +96,13 @@ final class CurveCommand extends CaseCommand {
   }
 
   private void tell(CurveAnswer answer) throws ResultsNotWritten {
-    Map<String, byte[]> files = CurveFiles.of(answer, Version.text());
-    Path target = write(files, files.keySet());
+    Map<String, byte[]> files = new LinkedHashMap<>(CurveFiles.of(answer, Version.text()));
+    Set<String> owned = new LinkedHashSet<>(files.keySet());
+    owned.addAll(Pictures.NAMES);
+    if (!noPictures) {
+      files.putAll(Pictures.of(answer));
+    }
+    Path target = write(files, owned);
     List<String> lines = new ArrayList<>(CurveText.lines(answer, style(), CurveText.WIDEST));
     lines.addAll(CurveText.written(target.toString(), files.keySet(), CurveText.WIDEST));
     say(lines, ResultJson.ofCurve(answer, Version.text()));

@@ -10,6 +10,8 @@ public final class Main {
   private Main() {}
 
   public static void main(String[] arguments) {
+    // Pictures are painted into files; a screen is neither needed nor looked for.
+    System.setProperty("java.awt.headless", "true");
     System.exit(run(arguments));
   }
 

@@ -1,0 +1,54 @@
+package dayworth.report.picture;
+
+import dayworth.decision.CurveAnswer;
+import dayworth.decision.Finish;
+import java.awt.Color;
+import java.math.BigDecimal;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.function.Function;
+
+/**
+ * One kind of money against the finish.
+ *
+ * @param ink the colour of its name, a little darker than the line
+ * @param amount of a finish
+ */
+record MoneyLine(Pen pen, Color ink, String name, Function<Finish, BigDecimal> amount) {
+
+  /** The parts that the case has, then direct cost, then the total, which is painted last. */
+  static List<MoneyLine> of(CurveAnswer answer, Amounts amounts) {
+    List<MoneyLine> parts =
+        List.of(
+            new MoneyLine(Pen.TIME, Look.SLATE_INK, "Time-related cost", amounts::timeRelated),
+            new MoneyLine(Pen.DAMAGES, Look.BRICK, "Damages", amounts::damages),
+            new MoneyLine(Pen.BONUS, Look.OLIVE_INK, "Bonus", amounts::bonus));
+    List<MoneyLine> lines = new ArrayList<>();
+    for (MoneyLine part : parts) {
+      if (answer.rows().stream().anyMatch(row -> part.amount().apply(row).signum() != 0)) {
+        lines.add(part);
+      }
+    }
+    lines.add(new MoneyLine(Pen.DIRECT, Look.INK, "Extra direct cost", amounts::extraDirect));
+    lines.add(new MoneyLine(Pen.TOTAL, Look.PLUM, "Total", amounts::total));
+    return lines;
+  }
+
+  boolean isTotal() {
+    return pen.equals(Pen.TOTAL);
+  }
+
+  /** Whether it is paid at some finishes only. */
+  boolean stopsAtZero() {
+    return pen.equals(Pen.DAMAGES) || pen.equals(Pen.BONUS);
+  }
+
+  MoneyAxis.Range range(CurveAnswer answer) {
+    double[] all =
+        answer.rows().stream()
+            .mapToDouble(row -> amount.apply(row).doubleValue())
+            .sorted()
+            .toArray();
+    return new MoneyAxis.Range(all[0], all[all.length - 1]);
+  }
+}

@@ -1,0 +1,118 @@
+package dayworth.report.picture;
+
+import dayworth.decision.Case;
+import dayworth.value.TimeScale;
+import java.math.BigDecimal;
+import java.math.RoundingMode;
+import java.text.DecimalFormat;
+import java.text.DecimalFormatSymbols;
+import java.util.Locale;
+
+/** How figures are said in pictures: grouped, with their unit or currency. */
+final class Words {
+
+  private static final BigDecimal SMALL = BigDecimal.valueOf(1000);
+
+  private final String currency;
+  private final String unit;
+  private final TimeScale scale;
+  private final String project;
+
+  Words(Case of) {
+    this.currency = safe(of.currency());
+    this.unit = of.unit().word();
+    this.scale = of.network().scale();
+    String title = safe(of.title());
+    this.project = title.isEmpty() ? safe(of.name()) : title;
+  }
+
+  /**
+   * Text from a file as one line that can stand in XML: without control characters, marks that turn
+   * the direction of reading, and what is no character at all.
+   */
+  static String safe(String text) {
+    StringBuilder safe = new StringBuilder();
+    text.codePoints().map(Words::orBlank).forEach(safe::appendCodePoint);
+    return safe.toString().strip();
+  }
+
+  private static int orBlank(int character) {
+    boolean stays =
+        switch (Character.getType(character)) {
+          case Character.CONTROL,
+              Character.SURROGATE,
+              Character.UNASSIGNED,
+              Character.PRIVATE_USE,
+              Character.LINE_SEPARATOR,
+              Character.PARAGRAPH_SEPARATOR ->
+              false;
+          // The joiners shape letters; everything else of this kind is there to mislead.
+          case Character.FORMAT -> character == 0x200C || character == 0x200D;
+          default -> true;
+        };
+    return stays ? character : ' ';
+  }
+
+  /** What the case is called, without a full stop at its end. */
+  String project() {
+    return project.endsWith(".") ? project.substring(0, project.length() - 1) : project;
+  }
+
+  /** An amount without its currency: whole, but with cents where it is small and has them. */
+  String amount(BigDecimal amount) {
+    boolean cents = amount.abs().compareTo(SMALL) < 0 && amount.stripTrailingZeros().scale() > 0;
+    BigDecimal rounded = amount.setScale(cents ? 2 : 0, RoundingMode.HALF_UP);
+    String figures = grouped(cents ? "#,##0.00" : "#,##0", rounded.abs());
+    return rounded.signum() < 0 ? "−" + figures : figures;
+  }
+
+  /** An amount with its currency. */
+  String money(BigDecimal amount) {
+    if (currency.isEmpty()) {
+      return amount(amount);
+    }
+    boolean symbol = currency.codePointCount(0, currency.length()) == 1;
+    return symbol ? currency + amount(amount) : currency + " " + amount(amount);
+  }
+
+  /** What amounts without a currency are in, as a sentence; empty if the case does not say. */
+  String amountsIn() {
+    return currency.isEmpty() ? "" : " Amounts in " + currency + ".";
+  }
+
+  /** A duration without its unit. */
+  String figure(long ticks) {
+    return grouped("#,##0.###", scale.units(ticks));
+  }
+
+  /** A duration with its unit. */
+  String time(long ticks) {
+    return figure(ticks) + " " + (ticks == scale.ticksPerUnit() ? one() : many());
+  }
+
+  /** One unit of time: the word for the axis. */
+  String one() {
+    return unit.equals("day") ? "working day" : unit;
+  }
+
+  String many() {
+    return one() + "s";
+  }
+
+  /** The short word for one unit of time. */
+  String unit() {
+    return unit;
+  }
+
+  String units() {
+    return unit + "s";
+  }
+
+  static String count(int count, String one, String many) {
+    return grouped("#,##0", BigDecimal.valueOf(count)) + " " + (count == 1 ? one : many);
+  }
+
+  private static String grouped(String pattern, BigDecimal figure) {
+    return new DecimalFormat(pattern, DecimalFormatSymbols.getInstance(Locale.ROOT)).format(figure);
+  }
+}
