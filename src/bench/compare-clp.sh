@@ -11,9 +11,11 @@
 #   last line, "Optimal objective ... iterations time X", counts presolve, simplex and postsolve
 #   but neither reading the file nor starting the process: that is the solve time to compare. Wall
 #   time of the whole process, reading included, is printed beside it.
-# - engine: best of three JMH iterations after three warm-up iterations in one process. The network
-#   lies in memory when the time starts, as the problem does in clp's solve time. No file is read.
-# - The ratio is engine / clp solve: below 1 the whole curve takes less time than one deadline.
+# - engine: best of three JMH iterations after three warm-up iterations in one process with 1 GB of
+#   heap. The network lies in memory when the time starts, as the problem does in clp's solve time.
+#   No file is read. "prices" is every breakpoint with its price and flow; "plans" is the same with
+#   a plan at every breakpoint, chosen among equally cheap ones.
+# - The ratio is prices / clp solve: below 1 the whole curve takes less time than one deadline.
 set -euo pipefail
 export LC_ALL=C
 cd "$(dirname "$0")/../.."
@@ -31,6 +33,15 @@ mvn -B -ntp -q -Pbench -DskipTests package
 
 smallest() { sort -g | head -n 1; }
 
+# Milliseconds, the best iteration of one benchmark on one network.
+engine() {
+  java -jar "$jar" "CurveBenchmark.$2\$" -p shape="$1" -foe true >"$scratch/jmh.log" \
+    || { cat "$scratch/jmh.log" >&2; exit 1; }
+  best=$(sed -nE 's/^Iteration +[0-9]+: ([0-9.]+) ms\/op.*/\1/p' "$scratch/jmh.log" | smallest)
+  [ -n "$best" ] || { echo "compare-clp: no time in JMH's answer for $1" >&2; exit 1; }
+  echo "$best"
+}
+
 rows=()
 for shape in "${shapes[@]}"; do
   java -cp "$jar" dayworth.bench.GenerateNetwork "$shape" --lp "$scratch/$shape.lp"
@@ -44,14 +55,14 @@ for shape in "${shapes[@]}"; do
       || { echo "compare-clp: clp found no optimum for $shape" >&2; exit 1; }
     sed -E 's/.*iterations time ([0-9.]+).*/\1/' "$scratch/optimal" >>"$scratch/solve"
   done
-  java -jar "$jar" CurveBenchmark -p shape="$shape" -foe true >"$scratch/jmh.log" \
-    || { cat "$scratch/jmh.log" >&2; exit 1; }
-  engine=$(sed -nE 's/^Iteration +[0-9]+: ([0-9.]+) ms\/op.*/\1/p' "$scratch/jmh.log" | smallest)
-  [ -n "$engine" ] || { echo "compare-clp: no time in JMH's answer for $shape" >&2; exit 1; }
-  rows+=("$shape $engine $(smallest <"$scratch/solve") $(smallest <"$scratch/wall")")
+  prices=$(engine "$shape" prices)
+  plans=$(engine "$shape" curve)
+  rows+=("$shape $prices $plans $(smallest <"$scratch/solve") $(smallest <"$scratch/wall")")
 done
 
-printf '\n%-10s %16s %12s %12s %15s\n' network "engine, curve s" "clp solve s" "clp wall s" "engine / solve"
+printf '\n%-10s %10s %10s %12s %12s %15s\n' \
+  network "prices s" "plans s" "clp solve s" "clp wall s" "prices / solve"
 for row in "${rows[@]}"; do
-  awk '{ printf "%-10s %16.2f %12.2f %12.2f %15.2f\n", $1, $2 / 1000, $3, $4, $2 / 1000 / $3 }' <<<"$row"
+  awk '{ printf "%-10s %10.2f %10.2f %12.2f %12.2f %15.2f\n",
+         $1, $2 / 1000, $3 / 1000, $4, $5, $2 / 1000 / $4 }' <<<"$row"
 done

@@ -2,8 +2,10 @@ package dayworth.bench;
 
 import dayworth.engine.Curve;
 import dayworth.engine.PieceWitness;
+import dayworth.engine.stepping.Prices;
 import dayworth.engine.stepping.Stepping;
 import dayworth.network.Network;
+import dayworth.value.SlopeScale;
 import java.util.concurrent.TimeUnit;
 import org.openjdk.jmh.annotations.Benchmark;
 import org.openjdk.jmh.annotations.BenchmarkMode;
@@ -21,7 +23,7 @@ import org.openjdk.jmh.annotations.Warmup;
 @State(Scope.Benchmark)
 @BenchmarkMode(Mode.SingleShotTime)
 @OutputTimeUnit(TimeUnit.MILLISECONDS)
-@Fork(value = 1, jvmArgsAppend = "-Xmx2g")
+@Fork(value = 1, jvmArgsAppend = "-Xmx1g")
 @Warmup(iterations = 3)
 @Measurement(iterations = 3)
 public class CurveBenchmark {
@@ -31,14 +33,22 @@ public class CurveBenchmark {
   public Shape shape;
 
   private Network network;
+  private SlopeScale scale;
 
   /** Generates the network, outside the time that is taken. */
   @Setup
   public void generate() {
     network = shape.network();
+    scale = Stepping.scaleFor(network).orElseThrow();
   }
 
-  /** From the network to the last breakpoint. */
+  /** Every breakpoint with its price and its flow, which proves it: the method alone. */
+  @Benchmark
+  public Prices prices() {
+    return Stepping.prices(network, scale);
+  }
+
+  /** The same with a plan at every breakpoint, chosen among ties by the tie rule. */
   @Benchmark
   public Curve curve() {
     return Stepping.curve(network, PieceWitness.NONE);
