@@ -72,7 +72,7 @@ final class CrossChecking {
     String where = "the finish at " + network.scale().text(duration);
     if (answer instanceof Answer.Least least) {
       CrossCheck.Comparison comparison =
-          new CrossCheck.Comparison(duration, curve.costAt(duration), least.directCost());
+          new CrossCheck.Comparison(duration, curve.costAt(duration), least.cost());
       if (comparison.difference().compareTo(ROUNDING) > 0) {
         throw new ProofFailed(
             where,

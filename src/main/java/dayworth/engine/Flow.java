@@ -1,5 +1,6 @@
 package dayworth.engine;
 
+import dayworth.network.Network;
 import dayworth.value.SlopeScale;
 import java.util.EnumMap;
 import java.util.Map;
@@ -11,7 +12,9 @@ import java.util.Map;
  */
 public final class Flow {
 
-  /** What a unit of flow runs over; all are indexed by activity but {@link #LINK}. */
+  /**
+   * What a unit of flow runs over; all are indexed by activity but {@link #LINK} and {@link #SPAN}.
+   */
   public enum Over {
     /** Start to finish, over the normal duration; at most the activity's cost slope. */
     SLOPE,
@@ -26,18 +29,28 @@ public final class Flow {
     /** The activity's finish to the project finish. */
     TO_PROJECT,
     /** A link, by its index. */
-    LINK
+    LINK,
+    /** Back over a span, from its later moment to its earlier one; at most the span's rate. */
+    SPAN
   }
 
   private final SlopeScale scale;
   private final Map<Over, long[]> amounts = new EnumMap<>(Over.class);
 
   /** No flow at all: the bound that nothing is cheaper than the cheapest way of each activity. */
-  public Flow(SlopeScale scale, int activities, int links) {
+  public Flow(SlopeScale scale, Network network) {
     this.scale = scale;
     for (Over over : Over.values()) {
-      amounts.put(over, new long[over == Over.LINK ? links : activities]);
+      amounts.put(over, new long[size(over, network)]);
     }
+  }
+
+  private static int size(Over over, Network network) {
+    return switch (over) {
+      case LINK -> network.links().size();
+      case SPAN -> network.spans().size();
+      default -> network.size();
+    };
   }
 
   /** What one unit of flow is worth. */

@@ -18,6 +18,7 @@ public final class Network {
   private final TimeScale scale;
   private final List<Activity> activities;
   private final List<Link> links;
+  private final List<Span> spans;
   private final Map<String, Integer> indexById = new HashMap<>();
   private final int[] order;
 
@@ -35,15 +36,26 @@ public final class Network {
    *     a loop (see {@link Loop#in})
    */
   public Network(TimeScale scale, List<Activity> activities, List<Link> links) {
+    this(scale, activities, links, List.of());
+  }
+
+  /**
+   * Joins activities and links, with money that runs between moments.
+   *
+   * @throws IllegalArgumentException as without; or if a span's moment is of no activity
+   */
+  public Network(TimeScale scale, List<Activity> activities, List<Link> links, List<Span> spans) {
     this.scale = scale;
     this.activities = List.copyOf(activities);
     this.links = List.copyOf(links);
+    this.spans = List.copyOf(spans);
     for (int i = 0; i < activities.size(); i++) {
       if (indexById.put(activities.get(i).id(), i) != null) {
         throw new IllegalArgumentException("two activities are called " + activities.get(i).id());
       }
     }
     links.forEach(this::requireEnds);
+    spans.forEach(this::requireMoments);
     firstInto = firsts(Link::successor);
     into = grouped(firstInto, Link::successor);
     firstOutOf = firsts(Link::predecessor);
@@ -73,6 +85,11 @@ public final class Network {
 
   public Link link(int index) {
     return links.get(index);
+  }
+
+  /** Money that runs between moments; by their index. */
+  public List<Span> spans() {
+    return spans;
   }
 
   public OptionalInt indexOf(String id) {
@@ -121,6 +138,12 @@ public final class Network {
       }
     }
     return found;
+  }
+
+  private void requireMoments(Span span) {
+    if (span.from().activity() >= size() || span.to().activity() >= size()) {
+      throw new IllegalArgumentException("span " + span.name() + " is of no activity");
+    }
   }
 
   private void requireEnds(Link link) {

@@ -7,6 +7,7 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.SortedSet;
 import java.util.TreeSet;
 import java.util.concurrent.TimeUnit;
 import java.util.stream.Collectors;
@@ -60,7 +61,7 @@ class GoldenSampleTest {
     assertEquals(List.of(), untold);
   }
 
-  private static TreeSet<String> files(Path folder) throws IOException {
+  private static SortedSet<String> files(Path folder) throws IOException {
     try (Stream<Path> all = Files.walk(folder)) {
       return all.filter(Files::isRegularFile)
           .map(path -> folder.relativize(path).toString().replace('\\', '/'))

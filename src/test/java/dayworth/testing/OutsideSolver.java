@@ -9,8 +9,10 @@ import dayworth.engine.Flow;
 import dayworth.engine.Flow.Over;
 import dayworth.network.Activity;
 import dayworth.network.Link;
+import dayworth.network.Moment;
 import dayworth.network.Network;
 import dayworth.network.Plan;
+import dayworth.network.Span;
 import dayworth.value.SlopeScale;
 import java.util.OptionalLong;
 
@@ -65,7 +67,7 @@ public final class OutsideSolver {
   }
 
   /**
-   * The least direct cost of finishing within a deadline.
+   * The least cost of finishing within a deadline.
    *
    * @param deadline ticks
    * @return positive infinity if no plan meets it
@@ -111,7 +113,7 @@ public final class OutsideSolver {
     if (outside.solver.solve() != MPSolver.ResultStatus.OPTIMAL) {
       throw new IllegalStateException("GLOP finds no plan by " + deadline);
     }
-    Flow flow = new Flow(scale, network.size(), outside.links.length);
+    Flow flow = new Flow(scale, network);
     long[] durations = new long[network.size()];
     for (int i = 0; i < durations.length; i++) {
       Activity activity = network.activity(i);
@@ -133,7 +135,7 @@ public final class OutsideSolver {
     return Math.round(price * scale.perUnit());
   }
 
-  /** Minimises Σ slope × (normal − duration). */
+  /** Minimises Σ slope × (normal − duration) + Σ rate × what each span is charged for. */
   private double setDirectCost() {
     MPObjective objective = solver.objective();
     double fixed = 0;
@@ -144,8 +146,23 @@ public final class OutsideSolver {
       objective.setCoefficient(starts[i], slope);
       fixed += activity.normalCost().toDouble() + slope * activity.normal();
     }
+    for (Span span : network.spans()) {
+      MPVariable charged = solver.makeNumVar(0, MPSolver.infinity(), "span");
+      MPConstraint row = solver.makeConstraint((double) -span.free(), MPSolver.infinity());
+      row.setCoefficient(charged, 1);
+      addMoment(row, span.to(), -1);
+      addMoment(row, span.from(), 1);
+      objective.setCoefficient(charged, span.rate().toDouble());
+    }
     objective.setMinimization();
     return fixed;
+  }
+
+  private void addMoment(MPConstraint row, Moment moment, double factor) {
+    if (!moment.isProjectStart()) {
+      MPVariable event = (moment.isFinish() ? finishes : starts)[moment.activity()];
+      row.setCoefficient(event, factor);
+    }
   }
 
   private MPConstraint require(MPVariable from, MPVariable to, double least, double most) {

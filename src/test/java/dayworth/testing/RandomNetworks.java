@@ -2,8 +2,10 @@ package dayworth.testing;
 
 import dayworth.network.Activity;
 import dayworth.network.Link;
+import dayworth.network.Moment;
 import dayworth.network.Network;
 import dayworth.network.Relation;
+import dayworth.network.Span;
 import dayworth.value.Money;
 import dayworth.value.TimeScale;
 import java.util.ArrayList;
@@ -28,7 +30,9 @@ public final class RandomNetworks {
     /** All that {@link #EVERYTHING} has, but whole durations, lags and times. */
     WHOLE,
     /** All relations, lags, decimals, not-before times, slopes of zero and below. */
-    EVERYTHING
+    EVERYTHING,
+    /** Everything, and up to four spans: hire, sections, or between any two moments. */
+    WITH_SPANS
   }
 
   private static final List<Relation> RELATIONS = List.of(Relation.values());
@@ -41,7 +45,9 @@ public final class RandomNetworks {
     this.random = new Random(seed);
     this.kind = kind;
     this.ticksPerUnit =
-        kind == Kind.EVERYTHING ? new int[] {1, 10, 100, 1000}[random.nextInt(4)] : 1;
+        kind == Kind.EVERYTHING || kind == Kind.WITH_SPANS
+            ? new int[] {1, 10, 100, 1000}[random.nextInt(4)]
+            : 1;
   }
 
   /** Everything that may be, with 3 to 40 activities. */
@@ -68,7 +74,25 @@ public final class RandomNetworks {
       }
     }
     TimeScale scale = new TimeScale(Integer.toString(ticksPerUnit).length() - 1);
-    return new Network(scale, activities, List.copyOf(links));
+    List<Span> spans = new ArrayList<>();
+    for (int count = kind == Kind.WITH_SPANS ? 1 + random.nextInt(4) : 0; count > 0; count--) {
+      spans.add(span(size));
+    }
+    return new Network(scale, activities, List.copyOf(links), spans);
+  }
+
+  private Span span(int size) {
+    Moment to = new Moment(random.nextInt(size), random.nextInt(4) > 0);
+    Moment from =
+        random.nextInt(3) == 0
+            ? Moment.PROJECT_START
+            : new Moment(random.nextInt(size), random.nextInt(4) == 0);
+    if (from.equals(to)) {
+      from = Moment.PROJECT_START;
+    }
+    long free = from.isProjectStart() || random.nextInt(4) == 0 ? time(0, 25) - time(0, 3) : 0;
+    Money rate = Money.of(10L * (1 + random.nextInt(6))).dividedBy(ticksPerUnit);
+    return new Span("span", from, to, free, rate);
   }
 
   private Activity activity(int index) {

@@ -6,11 +6,11 @@ import java.math.BigDecimal;
 public sealed interface Answer {
 
   /**
-   * The least direct cost.
+   * The least cost: direct cost and spans.
    *
-   * @param directCost counted exactly from a plan that meets the deadline, rounded to cents
+   * @param cost counted exactly from a plan that meets the deadline, rounded to cents
    */
-  record Least(BigDecimal directCost) implements Answer {}
+  record Least(BigDecimal cost) implements Answer {}
 
   /** No plan finishes by the deadline. */
   record Infeasible() implements Answer {}

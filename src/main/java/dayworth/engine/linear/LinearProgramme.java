@@ -3,14 +3,17 @@ package dayworth.engine.linear;
 import dayworth.network.Activity;
 import dayworth.network.Link;
 import dayworth.network.Network;
+import dayworth.network.Plan;
 import dayworth.value.Money;
 import dayworth.value.MoneySum;
 import dayworth.value.TimeScale;
+import java.util.Arrays;
 import java.util.List;
+import java.util.stream.DoubleStream;
 import org.ojalgo.optimisation.Optimisation;
 
 /**
- * The least direct cost of finishing by a deadline, as a linear programme for ojAlgo.
+ * The least cost of finishing by a deadline, as a linear programme for ojAlgo.
  *
  * <p>Written from the activities and links themselves (Kelley 1961, "Critical-path planning and
  * scheduling: mathematical basis"). Variables: the start s of each activity, at least its
@@ -18,7 +21,9 @@ import org.ojalgo.optimisation.Optimisation;
  * finish is s + normal − y, so work is contiguous and never stretched. One row for each link:
  * successor's event − predecessor's event ≥ lag. One row for each finish ≤ deadline, except where a
  * link with a lag of at least 0 leads from that finish to an event of another activity, whose own
- * finish then comes no earlier. Least: Σ slope × y; slopes may be zero or negative.
+ * finish then comes no earlier. A span has a variable z ≥ 0 for the ticks that it is charged for,
+ * and a row z ≥ later moment − earlier moment − free. Least: Σ slope × y + Σ rate × z; slopes may
+ * be zero or negative.
  *
  * <p><b>Error.</b> In terms of events the rows are differences of two unknowns, a totally
  * unimodular system, so every corner is a whole number of ticks, and a simplex solver answers with
@@ -49,8 +54,10 @@ public final class LinearProgramme {
   public LinearProgramme(Network network) {
     this.network = network;
     double[] slopes =
-        network.activities().stream()
-            .mapToDouble(activity -> Math.abs(activity.slope().toDouble()))
+        DoubleStream.concat(
+                network.activities().stream()
+                    .mapToDouble(activity -> Math.abs(activity.slope().toDouble())),
+                network.spans().stream().mapToDouble(span -> span.rate().toDouble()))
             .filter(slope -> slope > 0)
             .sorted()
             .toArray();
@@ -69,7 +76,7 @@ public final class LinearProgramme {
   }
 
   /**
-   * The least direct cost of finishing within a deadline.
+   * The least cost of finishing within a deadline.
    *
    * @param deadlineTicks ticks after the project start
    */
@@ -113,7 +120,14 @@ public final class LinearProgramme {
     if (!network.links().stream().allMatch(link -> holds(link, starts, finishes))) {
       return new Answer.NotSolved("the solver's answer breaks a link");
     }
-    return new Answer.Least(cost.total().cents());
+    Plan plan = Plan.scheduled(durations(starts, finishes), starts);
+    return new Answer.Least(cost.add(plan.spanCost(network)).total().cents());
+  }
+
+  private static long[] durations(long[] starts, long[] finishes) {
+    long[] durations = new long[starts.length];
+    Arrays.setAll(durations, i -> finishes[i] - starts[i]);
+    return durations;
   }
 
   private static boolean isAllowed(Activity activity, long start, long finish, long deadline) {

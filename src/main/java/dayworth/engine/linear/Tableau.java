@@ -2,7 +2,9 @@ package dayworth.engine.linear;
 
 import dayworth.network.Activity;
 import dayworth.network.Link;
+import dayworth.network.Moment;
 import dayworth.network.Network;
+import dayworth.network.Span;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -45,6 +47,7 @@ final class Tableau {
     }
     this.deadline = model.addVariable().lower(0);
     network.links().forEach(this::addLink);
+    network.spans().forEach(span -> addSpan(span, steepest));
     for (int i = 0; i < network.size(); i++) {
       if (!isFollowed(i)) {
         addFinish(i);
@@ -106,6 +109,31 @@ final class Tableau {
     }
     if (!toStart) {
       shortenings.get(link.successor()).ifPresent(y -> row.set(y, -1));
+    }
+  }
+
+  /** charged − later moment + earlier moment ≥ −free. */
+  private void addSpan(Span span, double steepest) {
+    Variable charged = model.addVariable().lower(0).weight(span.rate().toDouble() / steepest);
+    long least = normalOffset(span.to()) - normalOffset(span.from()) - span.free();
+    Expression row = model.addExpression().lower(scaled(least));
+    row.set(charged, 1);
+    addMoment(row, span.to(), -1);
+    addMoment(row, span.from(), 1);
+  }
+
+  /** How long after its activity's start a moment comes while nothing is shortened. */
+  private long normalOffset(Moment moment) {
+    return moment.isFinish() ? network.activity(moment.activity()).normal() : 0;
+  }
+
+  /** Both moments of a span may be of one activity, so factors are added up. */
+  private void addMoment(Expression row, Moment moment, int factor) {
+    if (!moment.isProjectStart()) {
+      row.add(starts.get(moment.activity()), factor);
+      if (moment.isFinish()) {
+        shortenings.get(moment.activity()).ifPresent(y -> row.add(y, -factor));
+      }
     }
   }
 

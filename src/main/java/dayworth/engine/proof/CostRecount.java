@@ -1,8 +1,10 @@
 package dayworth.engine.proof;
 
 import dayworth.network.Activity;
+import dayworth.network.Moment;
 import dayworth.network.Network;
 import dayworth.network.Plan;
+import dayworth.network.Span;
 import dayworth.value.Money;
 import dayworth.value.MoneySum;
 import java.math.BigInteger;
@@ -10,7 +12,8 @@ import java.util.LinkedHashMap;
 import java.util.Map;
 
 /**
- * Recounts a plan's direct cost exactly: Σ normal cost + slope × (normal − duration).
+ * Recounts a plan's cost exactly: Σ normal cost + slope × (normal − duration), and for each span
+ * its rate times the ticks beyond what is free.
  *
  * <p>Slopes are fractions; those with equal denominators are added as whole numbers, so that a
  * large network is counted in one quick pass. A slope whose numerator does not fit in a long is
@@ -65,6 +68,20 @@ final class CostRecount {
     for (int g = 0; g < sums.length; g++) {
       cost.add(Money.fraction(sums[g].total(), denominators[g]));
     }
+    for (Span span : network.spans()) {
+      long apart = time(plan, span.to()) - time(plan, span.from());
+      if (apart > span.free()) {
+        cost.add(span.rate(), apart - span.free(), 1);
+      }
+    }
     return cost.total();
+  }
+
+  private static long time(Plan plan, Moment moment) {
+    if (moment.isProjectStart()) {
+      return 0;
+    }
+    long start = plan.start(moment.activity());
+    return moment.isFinish() ? start + plan.duration(moment.activity()) : start;
   }
 }

@@ -16,12 +16,14 @@ final class FlowLimits {
   private final SlopeScale scale;
   private final long[] overNormal;
   private final long[] backOverCrash;
+  private final long[] backOverSpan;
   private final Money base;
 
   FlowLimits(Network network, SlopeScale scale) {
     this.scale = scale;
     this.overNormal = new long[network.size()];
     this.backOverCrash = new long[network.size()];
+    this.backOverSpan = network.spans().stream().mapToLong(span -> floor(span.rate())).toArray();
     MoneySum sum = new MoneySum();
     for (int i = 0; i < network.size(); i++) {
       Activity activity = network.activity(i);
@@ -53,6 +55,11 @@ final class FlowLimits {
   /** The most back over the crash duration; zero where crashing is not cheaper. */
   long backOverCrash(int activity) {
     return backOverCrash[activity];
+  }
+
+  /** The most back over a span. */
+  long backOverSpan(int span) {
+    return backOverSpan[span];
   }
 
   /** A slope beyond a long is cut to the largest long, which is on the safe side too. */

@@ -6,6 +6,7 @@ import dayworth.engine.proof.Verdict.Refuted;
 import dayworth.network.Activity;
 import dayworth.network.Link;
 import dayworth.network.Network;
+import dayworth.network.Span;
 import java.util.Locale;
 import java.util.Optional;
 
@@ -46,6 +47,9 @@ final class FlowRecount {
     }
     for (int j = 0; j < network.links().size(); j++) {
       recount.addLink(j);
+    }
+    for (int j = 0; j < network.spans().size(); j++) {
+      recount.addSpan(j);
     }
     recount.balance();
     return new FlowBound(limits, recount.lengths.total(), recount.leaving.total(), recount.fault);
@@ -98,6 +102,23 @@ final class FlowRecount {
       lengths.addProduct(link.lag(), amount);
       add(link.relation().fromStart() ? atStart : atFinish, link.predecessor(), -amount);
       add(link.relation().toStart() ? atStart : atFinish, link.successor(), amount);
+    }
+  }
+
+  private void addSpan(int index) {
+    long amount = flow.get(Over.SPAN, index);
+    long most = limits.backOverSpan(index);
+    if (amount < 0 || amount > most) {
+      refute(Place.span(network, index), "carries " + amount + "; 0 to " + most);
+    } else if (amount > 0) {
+      Span span = network.spans().get(index);
+      lengths.addProduct(-span.free(), amount);
+      add(span.to().isFinish() ? atFinish : atStart, span.to().activity(), -amount);
+      if (span.from().isProjectStart()) {
+        leaving.addProduct(-1, amount);
+      } else {
+        add(span.from().isFinish() ? atFinish : atStart, span.from().activity(), amount);
+      }
     }
   }
 

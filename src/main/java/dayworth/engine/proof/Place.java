@@ -15,6 +15,10 @@ final class Place {
     return "activity " + network.activity(activity).id();
   }
 
+  static String span(Network network, int index) {
+    return "span " + network.spans().get(index).name();
+  }
+
   static String link(Network network, int index) {
     Link link = network.link(index);
     return "link "

@@ -29,6 +29,8 @@ import java.util.Optional;
  *   <li>link, w its lag: x(lag − (t_v − t_u)) ≤ 0.
  *   <li>project start to s, w the not-before time: x(w − s) ≤ 0. f to project finish, w = 0: x(f −
  *       F) ≤ 0.
+ *   <li>span of rate r, its later moment to its earlier one, w = minus what is free, x ≤ r: it
+ *       costs r·max(0, t(to) − t(from) − free) ≥ x(w − (t(from) − t(to))).
  * </ul>
  *
  * Added up, cost ≥ Σ cheapest cost + Σ w·x − Σ x(t_v − t_u). As the flow is conserved at every
@@ -57,7 +59,7 @@ public final class ProofChecker {
    * Checks one point.
    *
    * @param finish ticks within which the plan is said to finish and to be cheapest
-   * @param claimed the direct cost that is said to be the plan's
+   * @param claimed the cost that is said to be the plan's
    */
   public Verdict check(Plan plan, long finish, Flow flow, Money claimed) {
     return check(plan, finish, bound(flow), claimed);

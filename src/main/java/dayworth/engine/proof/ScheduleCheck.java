@@ -5,11 +5,13 @@ import dayworth.network.Activity;
 import dayworth.network.Link;
 import dayworth.network.Network;
 import dayworth.network.Plan;
+import java.util.Arrays;
 import java.util.Optional;
 
 /**
- * Whether a plan can be carried out by a finish: builds the earliest start of every activity in an
- * own pass, then looks at every limit and every link once more.
+ * Whether a plan can be carried out by a finish: takes the plan's starts or, where it has none,
+ * builds the earliest start of every activity in an own pass; then looks at every limit and every
+ * link once more.
  */
 final class ScheduleCheck {
 
@@ -30,6 +32,10 @@ final class ScheduleCheck {
           new Refuted(
               Place.PROJECT, plan.size() + " durations for " + network.size() + " activities"));
     }
+    if (!network.spans().isEmpty() && !plan.isScheduled()) {
+      return Optional.of(
+          new Refuted(Place.PROJECT, "no starts, and money depends on them; a start for each"));
+    }
     ScheduleCheck check = new ScheduleCheck(network, plan);
     for (int i = 0; i < network.size(); i++) {
       Activity activity = network.activity(i);
@@ -39,7 +45,11 @@ final class ScheduleCheck {
             i, "lasts " + duration + " ticks", activity.crash() + " to " + activity.normal());
       }
     }
-    check.placeEarliest();
+    if (plan.isScheduled()) {
+      Arrays.setAll(check.start, plan::start);
+    } else {
+      check.placeEarliest();
+    }
     return check.brokenLimit(finish).or(check::brokenLink);
   }
 

@@ -66,11 +66,27 @@ final class Bodies {
     for (int arc = 0; arc < events.net.arcs(); arc++) {
       int tail = body[events.net.tail(arc)];
       int head = body[events.net.head(arc)];
-      if (tail != head && isLogic(events.over(arc))) {
-        long apart = between(events.net.tail(arc), events.net.head(arc));
-        arcs.add(tail, head, events.net.length(arc) - apart, UNLIMITED);
+      if (tail != head) {
+        long room = events.net.length(arc) - between(events.net.tail(arc), events.net.head(arc));
+        if (isLogic(events.over(arc)) || isEmptySpan(arc)) {
+          arcs.add(tail, head, room, UNLIMITED);
+        } else if (isFullSpan(arc)) {
+          arcs.add(head, tail, -room, UNLIMITED);
+        }
       }
     }
+  }
+
+  private boolean isEmptySpan(int arc) {
+    return events.over(arc) == Over.SPAN && events.net.flow(arc) == 0;
+  }
+
+  private boolean isFullSpan(int arc) {
+    return events.over(arc) == Over.SPAN && events.net.isFull(arc);
+  }
+
+  private boolean isPartlyFullSpan(int arc) {
+    return events.over(arc) == Over.SPAN && events.net.flow(arc) > 0 && !events.net.isFull(arc);
   }
 
   private static boolean isLogic(Over over) {
@@ -95,7 +111,7 @@ final class Bodies {
 
   private void joinOverFlow() {
     for (int arc = 0; arc < events.net.arcs(); arc++) {
-      if (isLogic(events.over(arc)) && events.net.flow(arc) > 0) {
+      if ((isLogic(events.over(arc)) && events.net.flow(arc) > 0) || isPartlyFullSpan(arc)) {
         join(events.net.tail(arc), events.net.head(arc));
       }
     }

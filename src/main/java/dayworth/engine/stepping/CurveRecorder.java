@@ -8,7 +8,7 @@ import dayworth.engine.Step;
 import dayworth.network.Activity;
 import dayworth.network.Network;
 import dayworth.network.Plan;
-import dayworth.value.Money;
+import dayworth.network.Span;
 import dayworth.value.MoneySum;
 import java.util.ArrayList;
 import java.util.List;
@@ -21,6 +21,10 @@ final class CurveRecorder implements Squeeze.Listener {
   private final PieceWitness witness;
   private final TieRule ties;
   private final List<Step> steps = new ArrayList<>();
+
+  /** The plans of the breakpoints, where spans make their starts matter. */
+  private final List<Plan> scheduled = new ArrayList<>();
+
   private long longest;
   private long last;
   private Plan firstPlan;
@@ -38,7 +42,10 @@ final class CurveRecorder implements Squeeze.Listener {
   @Override
   public void arrived(long length) {
     Plan before = plan;
-    plan = Plan.of(ties.choose(squeeze, before.toArray()));
+    plan = ties.choose(squeeze, before);
+    if (!events.network.spans().isEmpty()) {
+      scheduled.add(plan);
+    }
     if (squeeze.sent() == 0) {
       firstPlan = plan;
       longest = length;
@@ -55,12 +62,18 @@ final class CurveRecorder implements Squeeze.Listener {
 
   /** The plan to report where the squeeze stands now. */
   Plan planHere() {
-    return Plan.of(ties.choose(squeeze, plan.toArray()));
+    return ties.choose(squeeze, plan);
   }
 
   Curve curve(List<Obstacle> obstacles) {
     return new Curve(
-        events.network, longest, firstPlan, firstPlan.directCost(events.network), steps, obstacles);
+        events.network,
+        longest,
+        firstPlan,
+        firstPlan.cost(events.network),
+        steps,
+        obstacles,
+        scheduled);
   }
 
   private void tell(long from, Plan fromPlan, long to) {
@@ -81,7 +94,9 @@ final class CurveRecorder implements Squeeze.Listener {
         extra.add(activity.crashExtra(), shortened, activity.mostShortening());
       }
     }
-    Money total = extra.total();
-    return new Step(from, to, total, changes);
+    for (Span span : network.spans()) {
+      extra.add(span.rate(), plan.charged(span) - before.charged(span), 1);
+    }
+    return new Step(from, to, extra.total(), changes);
   }
 }

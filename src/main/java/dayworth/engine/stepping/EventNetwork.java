@@ -4,6 +4,7 @@ import dayworth.engine.Flow;
 import dayworth.engine.Flow.Over;
 import dayworth.network.Activity;
 import dayworth.network.Link;
+import dayworth.network.Moment;
 import dayworth.network.Network;
 import dayworth.value.SlopeScale;
 import java.util.Arrays;
@@ -15,12 +16,13 @@ import java.util.Arrays;
  * normal duration (capacity: its slope), start→finish over its crash duration (unlimited) and
  * finish→start over minus its normal duration (unlimited: it is never stretched). What cannot be
  * compressed is one event. Where crashing is cheaper, an arc finish→start over minus the crash
- * duration (capacity: minus the slope) stands for the first.
+ * duration (capacity: minus the slope) stands for the first. A span has an arc back from its later
+ * moment to its earlier one over minus what is free (capacity: its rate).
  *
  * <p>Left out is what cannot matter: arcs on no chain as long as the shortest possible project (any
  * arc that carries flow lies on a chain at least as long as the project, and no project is
- * shorter), which holds only while no slope is negative; and arcs from the project's start and to
- * its finish that follow from others.
+ * shorter), which holds only while no slope is negative and there are no spans; and arcs from the
+ * project's start and to its finish that follow from others.
  */
 final class EventNetwork {
 
@@ -50,6 +52,12 @@ final class EventNetwork {
   final int[] stretchArc;
   final int[] cheaperArc;
 
+  /** The arc of each span; -1 where its two moments are one event or its rate is too small. */
+  final int[] spanArc;
+
+  /** The length of each span's arc, also where it has none. */
+  private final long[] spanLength;
+
   private final long[] lateTimes;
 
   EventNetwork(EventNetworkBuilder from) {
@@ -64,6 +72,8 @@ final class EventNetwork {
     crashArc = from.crashArc;
     stretchArc = from.stretchArc;
     cheaperArc = from.cheaperArc;
+    spanArc = from.spanArc;
+    spanLength = network.spans().stream().mapToLong(from::spanLength).toArray();
     lateTimes = from.lateTimes();
   }
 
@@ -115,13 +125,19 @@ final class EventNetwork {
 
   /** The flow as a checker reads it. */
   Flow flow() {
-    Flow flow = new Flow(scale, network.size(), network.links().size());
+    Flow flow = new Flow(scale, network);
     long[] through = new long[network.size()];
     for (int arc = 0; arc < net.arcs(); arc++) {
       long amount = net.flow(arc);
       if (amount != 0) {
         flow.set(arcOver[arc], arcIndex[arc], amount);
         countThrough(arc, amount, through);
+      }
+    }
+    for (int j = 0; j < spanArc.length; j++) {
+      if (isAlwaysCharged(j)) {
+        flow.set(Over.SPAN, j, rate(j));
+        countThroughSpan(j, rate(j), through);
       }
     }
     for (int i = 0; i < through.length; i++) {
@@ -144,7 +160,37 @@ final class EventNetwork {
       if (link.relation().fromStart()) {
         through[link.predecessor()] -= amount;
       }
+    } else if (arcOver[arc] == Over.SPAN) {
+      countThroughSpan(arcIndex[arc], amount, through);
     }
+  }
+
+  private void countThroughSpan(int span, long amount, long[] through) {
+    Moment from = network.spans().get(span).from();
+    Moment to = network.spans().get(span).to();
+    if (!from.isProjectStart() && !from.isFinish()) {
+      through[from.activity()] += amount;
+    }
+    if (!to.isFinish()) {
+      through[to.activity()] -= amount;
+    }
+  }
+
+  /** Whether a span lies within an activity that takes what it takes, longer than is free. */
+  private boolean isAlwaysCharged(int span) {
+    return spanArc[span] == NONE && spanLength[span] > 0;
+  }
+
+  /** The scaled rate of a span: what a tick of it costs. */
+  long rate(int span) {
+    return scale.scaled(network.spans().get(span).rate());
+  }
+
+  /** The starts that event times mean; only of a network of which nothing was left out. */
+  long[] starts(Squeeze timeOf) {
+    long[] starts = new long[network.size()];
+    Arrays.setAll(starts, i -> timeOf.time(startEvent[i]) - timeOf.time(BEGIN));
+    return starts;
   }
 
   /**

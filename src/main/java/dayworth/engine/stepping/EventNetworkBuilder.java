@@ -5,7 +5,9 @@ import static dayworth.engine.stepping.ArcNetwork.UNLIMITED;
 import dayworth.engine.Flow.Over;
 import dayworth.network.Activity;
 import dayworth.network.Link;
+import dayworth.network.Moment;
 import dayworth.network.Network;
+import dayworth.network.Span;
 import dayworth.value.SlopeScale;
 import java.util.Arrays;
 
@@ -22,6 +24,9 @@ final class EventNetworkBuilder {
   final int[] crashArc;
   final int[] stretchArc;
   final int[] cheaperArc;
+
+  /** The arc of each span; -1 where its two moments are one event or its rate is too small. */
+  final int[] spanArc;
 
   private final ArcNetwork.Builder arcs = new ArcNetwork.Builder();
   private final long[] slope;
@@ -52,13 +57,17 @@ final class EventNetworkBuilder {
             ? cheapest
             : new Reach(
                 network, network.activities().stream().mapToLong(Activity::normal).toArray());
-    least = Arrays.stream(slope).anyMatch(s -> s < 0) ? Long.MIN_VALUE : shortest();
+    least =
+        Arrays.stream(slope).anyMatch(s -> s < 0) || !network.spans().isEmpty()
+            ? Long.MIN_VALUE
+            : shortest();
     startEvent = none(size);
     finishEvent = none(size);
     slopeArc = none(size);
     crashArc = none(size);
     stretchArc = none(size);
     cheaperArc = none(size);
+    spanArc = none(network.spans().size());
   }
 
   private static int[] none(int size) {
@@ -91,6 +100,9 @@ final class EventNetworkBuilder {
       if (startEvent[i] != NONE) {
         addEnds(i);
       }
+    }
+    for (int j = 0; j < network.spans().size(); j++) {
+      addSpan(j);
     }
     return arcs.build(events);
   }
@@ -171,6 +183,37 @@ final class EventNetworkBuilder {
       length -= network.activity(to).normal();
     }
     arc(Over.LINK, j, tail, head, length, UNLIMITED);
+  }
+
+  /** Its capacity is given to it when it has been filled. */
+  private void addSpan(int j) {
+    Span span = network.spans().get(j);
+    int tail = event(span.to());
+    int head = event(span.from());
+    if (tail != head && scale.scaled(span.rate()) > 0) {
+      spanArc[j] = arc(Over.SPAN, j, tail, head, spanLength(span), 0);
+    }
+  }
+
+  private int event(Moment moment) {
+    if (moment.isProjectStart()) {
+      return EventNetwork.BEGIN;
+    }
+    return (moment.isFinish() ? finishEvent : startEvent)[moment.activity()];
+  }
+
+  /** The length of a span's arc, from its later moment's event to its earlier one's. */
+  long spanLength(Span span) {
+    return offset(span.to()) - offset(span.from()) - span.free();
+  }
+
+  /** How long after its event a moment comes. */
+  private long offset(Moment moment) {
+    boolean apart =
+        !moment.isProjectStart()
+            && moment.isFinish()
+            && finishEvent[moment.activity()] == startEvent[moment.activity()];
+    return apart ? network.activity(moment.activity()).normal() : 0;
   }
 
   private void addEnds(int i) {

@@ -9,7 +9,10 @@ import dayworth.engine.PieceWitness;
 import dayworth.network.Activity;
 import dayworth.network.Network;
 import dayworth.network.Plan;
+import dayworth.network.Span;
+import dayworth.value.Money;
 import dayworth.value.SlopeScale;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 
@@ -21,12 +24,13 @@ import java.util.Optional;
  * (Kelley 1961, "Critical-path planning and scheduling: mathematical basis", Operations Research 9;
  * Fulkerson 1961, "A network flow computation for project cost curves", Management Science 7).
  *
- * <p><b>Method.</b> What is cheaper than normal is taken first; then the project's finish is
- * squeezed towards its start ({@link Squeeze}). Every length at which the price changes is a
- * breakpoint; the flow that has run is the price, the minimum cut what is compressed and, where it
- * is crossed backwards, relaxed (Phillips and Dessouky 1977, "Solving the project time/cost
- * tradeoff problem using the minimal cut concept", Management Science 24). Where several plans are
- * equally cheap, {@link TieRule} chooses.
+ * <p><b>Method.</b> What pays by itself is done first: what is cheaper than normal is taken, and
+ * spans are drawn together as far as that saves money. Then the project's finish is squeezed
+ * towards its start ({@link Squeeze}). Every length at which the price changes is a breakpoint; the
+ * flow that has run is the price, the minimum cut what is compressed and, where it is crossed
+ * backwards, relaxed (Phillips and Dessouky 1977, "Solving the project time/cost tradeoff problem
+ * using the minimal cut concept", Management Science 24). Where several plans are equally cheap,
+ * {@link TieRule} chooses.
  *
  * <p><b>Invariant.</b> At each breakpoint the plan and the flow are of equal value, so neither can
  * be better. <b>Limits.</b> Slopes must fit one scale ({@link #scaleFor}).
@@ -35,12 +39,28 @@ public final class Stepping {
 
   private Stepping() {}
 
-  /** A scale for the slopes of a network; empty if its amounts are too large to be exact. */
+  /**
+   * A scale for the slopes and rates of a network; empty if its amounts are too large to be exact.
+   */
   public static Optional<SlopeScale> scaleFor(Network network) {
-    List<Activity> open = network.activities().stream().filter(Activity::isCompressible).toList();
-    return SlopeScale.fit(
-        open.stream().map(activity -> activity.slope().max(activity.slope().negate())).toList(),
-        open.stream().mapToLong(Activity::mostShortening).toArray());
+    List<Money> slopes = new ArrayList<>();
+    List<Long> ticks = new ArrayList<>();
+    for (Activity activity : network.activities()) {
+      if (activity.isCompressible()) {
+        slopes.add(activity.slope().max(activity.slope().negate()));
+        ticks.add(activity.mostShortening());
+      }
+    }
+    if (!network.spans().isEmpty()) {
+      long longest =
+          new Reach(network, network.activities().stream().mapToLong(Activity::normal).toArray())
+              .longest();
+      for (Span span : network.spans()) {
+        slopes.add(span.rate());
+        ticks.add(longest + Math.abs(span.free()));
+      }
+    }
+    return SlopeScale.fit(slopes, ticks.stream().mapToLong(Long::longValue).toArray());
   }
 
   /**
@@ -54,7 +74,7 @@ public final class Stepping {
         scaleFor(network)
             .orElseThrow(() -> new ArithmeticException("the slopes do not fit one scale"));
     EventNetwork events = EventNetwork.of(network, scale);
-    Squeeze squeeze = squeezeCheaper(events);
+    Squeeze squeeze = squeezeWhatPays(events);
     CurveRecorder recorder = new CurveRecorder(events, squeeze, witness);
     if (squeeze.run(BEGIN, END, UNLIMITED, -1, recorder) != Squeeze.End.HELD) {
       throw new IllegalStateException("nothing holds the project's finish from its start");
@@ -73,7 +93,7 @@ public final class Stepping {
         scaleFor(network)
             .orElseThrow(() -> new ArithmeticException("the slopes do not fit one scale"));
     EventNetwork events = EventNetwork.of(network, scale);
-    Squeeze squeeze = squeezeCheaper(events);
+    Squeeze squeeze = squeezeWhatPays(events);
     CurveRecorder recorder = new CurveRecorder(events, squeeze, PieceWitness.NONE);
     Squeeze.End end = squeeze.run(BEGIN, END, UNLIMITED, duration, recorder);
     if (end == Squeeze.End.HELD) {
@@ -85,14 +105,14 @@ public final class Stepping {
   /** Breakpoints and prices alone, without plans: what a benchmark of the method measures. */
   public static Prices prices(Network network, SlopeScale scale) {
     EventNetwork events = EventNetwork.of(network, scale);
-    Squeeze squeeze = squeezeCheaper(events);
+    Squeeze squeeze = squeezeWhatPays(events);
     Prices prices = new Prices(scale);
     squeeze.run(BEGIN, END, UNLIMITED, -1, prices);
     return prices;
   }
 
-  /** Takes what costs less crashed than normal, as far as the network lets it. */
-  private static Squeeze squeezeCheaper(EventNetwork events) {
+  /** Takes what saves money whatever the finish, as far as the network lets it. */
+  private static Squeeze squeezeWhatPays(EventNetwork events) {
     Squeeze squeeze = new Squeeze(events.net, events.lateTimes());
     for (int i = 0; i < events.network.size(); i++) {
       int arc = events.has(i) ? events.cheaperArc[i] : -1;
@@ -101,6 +121,15 @@ public final class Stepping {
         long crash = events.network.activity(i).crash();
         squeeze.run(events.start(i), events.finish(i), saved, crash, Squeeze.Listener.NONE);
         events.net.set(arc, saved, squeeze.sent());
+      }
+    }
+    for (int arc : events.spanArc) {
+      if (arc >= 0) {
+        long rate = events.rate(events.index(arc));
+        int from = events.net.head(arc);
+        int to = events.net.tail(arc);
+        squeeze.run(from, to, rate, -events.net.length(arc), Squeeze.Listener.NONE);
+        events.net.set(arc, rate, squeeze.sent());
       }
     }
     return squeeze;

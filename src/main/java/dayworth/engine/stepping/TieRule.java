@@ -3,6 +3,7 @@ package dayworth.engine.stepping;
 import static dayworth.engine.stepping.ArcNetwork.UNLIMITED;
 
 import dayworth.network.Activity;
+import dayworth.network.Plan;
 import java.util.Arrays;
 
 /**
@@ -26,20 +27,29 @@ final class TieRule {
   }
 
   /**
-   * The durations of the plan to report.
+   * The plan to report; with spans it says when activities start.
    *
    * @param squeeze stands at the length in question
-   * @param before the durations of the plan before
+   * @param before the plan before
    */
-  long[] choose(Squeeze squeeze, long[] before) {
+  Plan choose(Squeeze squeeze, Plan before) {
     Bodies bodies = Bodies.of(events, squeeze);
     long[] durations = events.durations(squeeze);
     int[] open = open(bodies);
-    if (open.length == 0 || Arrays.stream(open).allMatch(i -> durations[i] == before[i])) {
-      return durations;
+    boolean isSettled =
+        open.length == 0 || Arrays.stream(open).allMatch(i -> durations[i] == before.duration(i));
+    long[] moved = isSettled ? new long[bodies.count()] : settle(open, bodies, before);
+    for (int i : open) {
+      durations[i] += moved[bodies.of(events.finish(i))] - moved[bodies.of(events.start(i))];
     }
-    settle(open, bodies, before, durations);
-    return durations;
+    if (events.network.spans().isEmpty()) {
+      return Plan.of(durations);
+    }
+    long[] starts = events.starts(squeeze);
+    for (int i = 0; i < starts.length; i++) {
+      starts[i] += moved[bodies.of(events.start(i))] - moved[bodies.of(EventNetwork.BEGIN)];
+    }
+    return Plan.scheduled(durations, starts).earliest(events.network);
   }
 
   /** The activities whose duration differs among the cheapest plans. */
@@ -56,7 +66,8 @@ final class TieRule {
     return Arrays.copyOf(open, count);
   }
 
-  private void settle(int[] open, Bodies bodies, long[] before, long[] durations) {
+  /** How far each body moves from where the squeeze stands. */
+  private long[] settle(int[] open, Bodies bodies, Plan before) {
     long relaxing = priceOfRelaxing(open);
     ArcNetwork.Builder arcs = new ArcNetwork.Builder();
     int[] relaxArc = new int[open.length];
@@ -69,8 +80,8 @@ final class TieRule {
       long apart = bodies.between(events.start(i), events.finish(i));
       arcs.add(start, finish, activity.crash() - apart, UNLIMITED);
       arcs.add(finish, start, apart - activity.normal(), UNLIMITED);
-      relaxArc[k] = arcs.add(finish, start, apart - before[i], 0);
-      compressArc[k] = arcs.add(start, finish, before[i] - apart, 0);
+      relaxArc[k] = arcs.add(finish, start, apart - before.duration(i), 0);
+      compressArc[k] = arcs.add(start, finish, before.duration(i) - apart, 0);
     }
     bodies.addLogic(arcs);
     ArcNetwork net = arcs.build(bodies.count());
@@ -78,19 +89,17 @@ final class TieRule {
     for (int k = 0; k < open.length; k++) {
       int start = bodies.of(events.start(open[k]));
       int finish = bodies.of(events.finish(open[k]));
-      long wanted = before[open[k]] - bodies.between(events.start(open[k]), events.finish(open[k]));
+      long wanted =
+          before.duration(open[k]) - bodies.between(events.start(open[k]), events.finish(open[k]));
       choice.run(start, finish, relaxing, wanted, Squeeze.Listener.NONE);
       net.set(relaxArc[k], relaxing, choice.sent());
       choice.run(finish, start, 1, -wanted, Squeeze.Listener.NONE);
       net.set(compressArc[k], 1, choice.sent());
     }
     choice.settle();
-    for (int i : open) {
-      durations[i] =
-          bodies.between(events.start(i), events.finish(i))
-              + choice.time(bodies.of(events.finish(i)))
-              - choice.time(bodies.of(events.start(i)));
-    }
+    long[] moved = new long[bodies.count()];
+    Arrays.setAll(moved, choice::time);
+    return moved;
   }
 
   /** One tick relaxed outweighs all ticks that can change, as far as the sums stay whole. */

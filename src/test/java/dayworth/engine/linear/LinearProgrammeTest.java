@@ -106,7 +106,7 @@ class LinearProgrammeTest {
   private static void assertCost(Network network, long deadline, Answer answer, String where) {
     double expected = OutsideSolver.leastCost(network, deadline);
     Answer.Least least = assertInstanceOf(Answer.Least.class, answer, where);
-    assertEquals(expected, least.directCost().doubleValue(), 0.006, where);
+    assertEquals(expected, least.cost().doubleValue(), 0.006, where);
   }
 
   private static Network farApart(String steepest) {

@@ -178,7 +178,7 @@ record HandWorked(String name, Network network, Point from, Point to, Flow flow)
 
   private static HandWorked worked(
       String name, Network network, Point from, Point to, Consumer<Flow> amounts) {
-    Flow flow = new Flow(new SlopeScale(1, true), network.size(), network.links().size());
+    Flow flow = new Flow(new SlopeScale(1, true), network);
     amounts.accept(flow);
     return new HandWorked(name, network, from, to, flow);
   }

@@ -51,7 +51,12 @@ class ProofCheckerTest {
   @MethodSource("handWorked")
   void oneUnitOfFlowMoreOrLessIsRefutedWhereItIs(HandWorked worked) {
     for (Over over : Over.values()) {
-      int count = over == Over.LINK ? worked.network().links().size() : worked.network().size();
+      int count =
+          switch (over) {
+            case LINK -> worked.network().links().size();
+            case SPAN -> worked.network().spans().size();
+            default -> worked.network().size();
+          };
       for (int index = 0; index < count; index++) {
         for (long unit : new long[] {-1, 1}) {
           long right = worked.flow().get(over, index);
@@ -160,7 +165,7 @@ class ProofCheckerTest {
   private static Verdict thirds(SlopeScale scale) {
     Activity activity = Activity.compressible("A", 4, Money.ZERO, 1, Money.of(1));
     Network network = new Network(TimeScale.WHOLE, List.of(activity), List.of());
-    Flow flow = new Flow(scale, 1, 0);
+    Flow flow = new Flow(scale, network);
     for (Over over : List.of(Over.FROM_PROJECT, Over.SLOPE, Over.TO_PROJECT)) {
       flow.set(over, 0, Math.max(0, scale.perUnit() / 3));
     }
