@@ -44,6 +44,11 @@ final class FinishAxis {
             + (plot.width() - 2 * inset) * (longest - duration) / (double) (longest - shortest);
   }
 
+  /** Pixels from the plot's side to the finish nearest to it. */
+  double inset() {
+    return inset;
+  }
+
   /** Pixels from one unit of time to the next. */
   double unitWidth() {
     return longest == shortest

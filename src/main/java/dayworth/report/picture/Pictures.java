@@ -27,6 +27,7 @@ public final class Pictures {
     Map<String, Picture> pictures = new LinkedHashMap<>();
     pictures.put("curve", new CurvePicture(answer, layout));
     pictures.put("price", new PricePicture(answer, layout));
+    pictures.put("compression-map", new CompressionMap(answer, layout));
     Map<String, CompletableFuture<byte[]>> making = new LinkedHashMap<>();
     pictures.forEach(
         (name, picture) -> {
