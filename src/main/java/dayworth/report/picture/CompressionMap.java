@@ -15,6 +15,7 @@ final class CompressionMap implements Picture {
   private static final double BOTTOM = 18;
   private static final double WIDEST_ID = 64;
   private static final double ID_GAP = 7;
+  private static final double RIGHT = 14;
 
   private final CurveAnswer answer;
   private final Words words;
@@ -72,32 +73,40 @@ final class CompressionMap implements Picture {
         Type.AXIS,
         Look.QUIET,
         Sheet.Anchor.START,
-        plot.right() + 8,
+        plot.right() + RIGHT,
         plot.y() - 9,
         "price of " + words.aUnit());
-    MapCells cells = new MapCells(sheet, columns, words);
+    MapCells cells = new MapCells(columns, words);
     double idWidth =
         rows.shown().stream()
             .mapToDouble(row -> Type.NAME.width(Words.safe(row.activity().id())))
             .max()
             .orElse(0);
-    double top = plot.y() + 2;
-    for (MapRow row : rows.shown()) {
-      cells.paint(row, top);
-      paintWords(sheet, row.activity(), Math.min(WIDEST_ID, idWidth), top + 13);
-      top += ROW;
+    for (int i = 0; i < rows.shown().size(); i++) {
+      cells.add(rows.shown().get(i), top(i));
+    }
+    cells.paint(sheet);
+    finishes.frame(sheet, answer.leastTotal().duration());
+    for (int i = 0; i < rows.shown().size(); i++) {
+      MapRow row = rows.shown().get(i);
+      cells.writeFigures(sheet, row, top(i));
+      paintWords(sheet, row.activity(), Math.min(WIDEST_ID, idWidth), top(i) + 13);
     }
     legend.paint(sheet, plot.bottom() + AXIS_BELOW);
+  }
+
+  private double top(int row) {
+    return plot.y() + 2 + row * ROW;
   }
 
   private void paintWords(Sheet sheet, Activity activity, double idWidth, double baseline) {
     String id = Type.NAME.fit(Words.safe(activity.id()), idWidth);
     sheet.text(Type.NAME, Look.INK, Sheet.Anchor.START, Layout.MARGIN, baseline, id);
     double from = Layout.MARGIN + idWidth + ID_GAP;
-    String name = Type.LABEL.fit(Words.safe(activity.name()), plot.x() - 8 - from);
-    sheet.text(Type.LABEL, Look.INK, Sheet.Anchor.START, from, baseline, name);
-    double room = layout.width() - plot.right() - 8 - 4;
+    String name = Type.AXIS.fit(Words.safe(activity.name()), plot.x() - 8 - from);
+    sheet.text(Type.AXIS, Look.INK, Sheet.Anchor.START, from, baseline, name);
+    double room = layout.width() - plot.right() - RIGHT - 4;
     String price = Type.AXIS.fit(wording.price(activity), room);
-    sheet.text(Type.AXIS, Look.QUIET, Sheet.Anchor.START, plot.right() + 8, baseline, price);
+    sheet.text(Type.AXIS, Look.QUIET, Sheet.Anchor.START, plot.right() + RIGHT, baseline, price);
   }
 }

@@ -2,108 +2,100 @@ package dayworth.report.picture;
 
 import java.awt.Color;
 
-/** The cells of one row of the compression map, and the marks that its legend explains. */
+/** The cells of the rows of the compression map. */
 final class MapCells {
 
   static final double HEIGHT = 18;
 
-  private static final double BAND = 2.4;
+  private static final double BELOW_CELL = 0.6;
   private static final double WIDE = 16;
-  private static final double HATCH_EVERY = 6;
 
-  private final Sheet sheet;
+  private final MapInk ink = new MapInk();
   private final MapColumns columns;
   private final Words words;
 
-  MapCells(Sheet sheet, MapColumns columns, Words words) {
-    this.sheet = sheet;
+  MapCells(MapColumns columns, Words words) {
     this.columns = columns;
     this.words = words;
   }
 
-  void paint(MapRow row, double top) {
+  /** Gathers the marks of a row. */
+  void add(MapRow row, double top) {
     for (int column = 0; column < columns.count(); column++) {
-      paintCell(row, column, box(column, top));
+      addCell(row, column, box(column, top));
     }
+    addCritical(row, top);
+  }
+
+  /** Paints what was gathered; figures are written over it. */
+  void paint(Sheet sheet) {
+    ink.paint(sheet);
+  }
+
+  void writeFigures(Sheet sheet, MapRow row, double top) {
     for (int column = 0; column < columns.count(); column++) {
-      paintBand(row, column, top);
-      paintFigure(row, column, top);
-    }
-  }
-
-  private Box box(int column, double top) {
-    double left = columns.left(column);
-    double width = columns.right(column) - left;
-    double air = width >= WIDE ? 1 : 0.5;
-    return new Box(left + air, top, width - 2 * air, HEIGHT);
-  }
-
-  private void paintCell(MapRow row, int column, Box box) {
-    if (row.bought(column) > 0) {
-      bought(sheet, box, row.tone(column, Look.OCHRE.size()));
-    } else if (!row.isCritical(column)) {
-      hatch(sheet, box);
-    } else {
-      sheet.frame(Pen.CELL, box);
-    }
-    if (row.isAtShortest(column)) {
-      cap(sheet, box);
-    }
-    if (row.isRelaxed(column)) {
-      relaxed(sheet, box);
-    }
-  }
-
-  private void paintBand(MapRow row, int column, double top) {
-    if (row.isCritical(column)) {
-      double left = columns.left(column);
-      double bottom = top + HEIGHT + 0.6;
-      sheet.fill(Look.PLUM, new Box(left, bottom - BAND, columns.right(column) - left, BAND));
-      if (row.becomesCritical(column)) {
-        sheet.fill(Look.PLUM, new Box(left - BAND / 2, top, BAND, HEIGHT + 0.6));
+      boolean told = row.bought(column) > 0 || row.isRelaxed(column);
+      if (told && (isWide(column) || row.changes(column))) {
+        writeFigure(sheet, row, column, top);
       }
     }
   }
 
-  /** In narrow columns only where it changes; over two of them where the second is the same. */
-  private void paintFigure(MapRow row, int column, double top) {
-    Box box = box(column, top);
-    boolean told = row.bought(column) > 0 || row.isRelaxed(column);
-    if (!told || (box.width() < WIDE && !row.changes(column))) {
-      return;
+  private boolean isWide(int column) {
+    return columns.right(column) - columns.left(column) >= WIDE;
+  }
+
+  private Box box(int column, double top) {
+    double left = columns.left(column);
+    double air = isWide(column) ? 1 : 0.5;
+    return new Box(left + air, top, columns.right(column) - left - 2 * air, HEIGHT);
+  }
+
+  private void addCell(MapRow row, int column, Box box) {
+    if (row.bought(column) > 0) {
+      ink.bought(box, row.tone(column, Look.OCHRE.size()));
+    } else if (row.isCritical(column)) {
+      ink.empty(box);
+    } else {
+      ink.hatch(box);
     }
+    if (row.isAtShortest(column)) {
+      ink.cap(box);
+    }
+    if (row.isRelaxed(column)) {
+      ink.relaxed(box);
+    }
+  }
+
+  /** A riser where the activity becomes critical, and a band for as long as it stays so. */
+  private void addCritical(MapRow row, double top) {
+    double bottom = top + HEIGHT + BELOW_CELL;
+    int column = 0;
+    while (column < columns.count()) {
+      int end = column;
+      while (end < columns.count() && row.isCritical(end)) {
+        end++;
+      }
+      if (end > column) {
+        ink.riser(columns.left(column), top, HEIGHT + BELOW_CELL);
+        ink.critical(columns.left(column), columns.right(end - 1), bottom);
+      }
+      column = end + 1;
+    }
+  }
+
+  /** Over two narrow columns where the second is the same; left out where it has no room. */
+  private void writeFigure(Sheet sheet, MapRow row, int column, double top) {
+    Box box = box(column, top);
+    Type type = isWide(column) ? Type.AXIS_NAMED : Type.AXIS;
     String figure = words.figure(row.bought(column));
-    double width = Type.AXIS_NAMED.width(figure) + 1;
+    double width = type.width(figure) + 0.5;
     boolean overTwo =
         width > box.width() && column + 1 < columns.count() && !row.changes(column + 1);
     double right = overTwo ? box(column + 1, top).right() : box.right();
     if (width <= right - box.x()) {
-      Color ink = row.isRelaxed(column) ? Look.TEAL_INK : Look.INK;
-      double middle = (box.x() + right) / 2;
-      sheet.text(Type.AXIS_NAMED, ink, Sheet.Anchor.MIDDLE, middle, top + 13, figure);
+      Color color = row.isRelaxed(column) ? Look.TEAL_INK : Look.INK;
+      sheet.text(type, color, Sheet.Anchor.MIDDLE, (box.x() + right) / 2, top + 13, figure);
     }
-  }
-
-  static void bought(Sheet sheet, Box box, int tone) {
-    sheet.fill(Look.OCHRE.get(tone), box);
-  }
-
-  static void cap(Sheet sheet, Box box) {
-    sheet.fill(Look.INK, new Box(box.x(), box.y(), box.width(), 2.6));
-  }
-
-  static void hatch(Sheet sheet, Box box) {
-    sheet.lines(Pen.FLOAT_HATCH, Hatch.rising(box, HATCH_EVERY));
-  }
-
-  /** On paper, whatever is bought still: the frame must be seen. */
-  static void relaxed(Sheet sheet, Box box) {
-    sheet.fill(Look.PAPER, box);
-    sheet.frame(Pen.RELAXED, new Box(box.x() + 1, box.y() + 1, box.width() - 2, box.height() - 2));
-  }
-
-  static void critical(Sheet sheet, Box box) {
-    sheet.fill(Look.PLUM, new Box(box.x(), box.y(), BAND, box.height()));
-    sheet.fill(Look.PLUM, new Box(box.x(), box.bottom() - BAND, box.width(), BAND));
   }
 }

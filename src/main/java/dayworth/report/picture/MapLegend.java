@@ -11,6 +11,8 @@ final class MapLegend {
   private static final double BETWEEN = 22;
   private static final double LINE = 24;
 
+  private static final List<String> FIGURES = List.of("2", "6", "1");
+
   private record Mark(String text, double x, double y) {}
 
   private final Words words;
@@ -62,27 +64,26 @@ final class MapLegend {
   }
 
   private static void paintMark(Sheet sheet, int which, Box box) {
-    double middle = box.x() + box.width() / 2;
+    MapInk ink = new MapInk();
     switch (which) {
-      case 0 -> {
-        MapCells.bought(sheet, box, 1);
-        figure(sheet, Look.INK, "2", middle, box);
-      }
+      case 0 -> ink.bought(box, 1);
       case 1 -> {
-        MapCells.bought(sheet, box, Look.OCHRE.size() - 1);
-        MapCells.cap(sheet, box);
-        figure(sheet, Look.INK, "6", middle, box);
+        ink.bought(box, Look.OCHRE.size() - 1);
+        ink.cap(box);
       }
-      case 2 -> {
-        MapCells.relaxed(sheet, box);
-        figure(sheet, Look.TEAL_INK, "1", middle, box);
+      case 2 -> ink.relaxed(box);
+      case 3 -> ink.hatch(box);
+      default -> {
+        ink.riser(box.x() + MapInk.BAND / 2, box.y(), box.height());
+        ink.critical(box.x(), box.right(), box.bottom());
       }
-      case 3 -> MapCells.hatch(sheet, box);
-      default -> MapCells.critical(sheet, box);
     }
-  }
-
-  private static void figure(Sheet sheet, java.awt.Color ink, String text, double middle, Box box) {
-    sheet.text(Type.AXIS_NAMED, ink, Sheet.Anchor.MIDDLE, middle, box.y() + 13, text);
+    ink.paint(sheet);
+    if (which < FIGURES.size()) {
+      java.awt.Color color = which == 2 ? Look.TEAL_INK : Look.INK;
+      double middle = box.x() + box.width() / 2;
+      sheet.text(
+          Type.AXIS_NAMED, color, Sheet.Anchor.MIDDLE, middle, box.y() + 13, FIGURES.get(which));
+    }
   }
 }

@@ -22,10 +22,6 @@ record MapRow(int index, Activity activity, List<Timing> timings) {
     return timings.get(column).isCritical(index);
   }
 
-  boolean becomesCritical(int column) {
-    return isCritical(column) && (column == 0 || !isCritical(column - 1));
-  }
-
   boolean isAtShortest(int column) {
     return activity.isCompressible() && bought(column) == activity.mostShortening();
   }

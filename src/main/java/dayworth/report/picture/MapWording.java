@@ -36,13 +36,13 @@ final class MapWording {
     return "At "
         + words.time(least.finish())
         + " "
-        + (shortened == 0
-            ? "no activity is"
-            : Words.count(shortened, "activity is", "activities are"))
-        + " shortened; "
-        + Words.count(least.criticalCount(), "is critical", "are critical")
-        + ", of "
-        + Words.count(network.size(), "", "").strip();
+        + Words.count(shortened, "of", "of")
+        + " "
+        + Words.count(network.size(), "activity", "activities")
+        + (shortened == 1 ? " is" : " are")
+        + " shortened and "
+        + Words.count(least.criticalCount(), "is", "are")
+        + " critical";
   }
 
   String note() {
