@@ -24,6 +24,7 @@ final class MapCells {
     for (int column = 0; column < columns.count(); column++) {
       addCell(row, column, box(column, top));
     }
+    addRelaxed(row, top);
     addCritical(row, top);
   }
 
@@ -33,10 +34,11 @@ final class MapCells {
   }
 
   void writeFigures(Sheet sheet, MapRow row, double top) {
+    double free = 0;
     for (int column = 0; column < columns.count(); column++) {
       boolean told = row.bought(column) > 0 || row.isRelaxed(column);
       if (told && (isWide(column) || row.changes(column))) {
-        writeFigure(sheet, row, column, top);
+        free = writeFigure(sheet, row, column, top, free);
       }
     }
   }
@@ -62,8 +64,21 @@ final class MapCells {
     if (row.isAtShortest(column)) {
       ink.cap(box);
     }
-    if (row.isRelaxed(column)) {
-      ink.relaxed(box);
+  }
+
+  /** One frame around neighbours that are all given back. */
+  private void addRelaxed(MapRow row, double top) {
+    int column = 0;
+    while (column < columns.count()) {
+      int end = column;
+      while (end < columns.count() && row.isRelaxed(end)) {
+        end++;
+      }
+      if (end > column) {
+        double left = box(column, top).x();
+        ink.relaxed(new Box(left, top, box(end - 1, top).right() - left, HEIGHT));
+      }
+      column = end + 1;
     }
   }
 
@@ -84,8 +99,13 @@ final class MapCells {
     }
   }
 
-  /** Over two narrow columns where the second is the same; left out where it has no room. */
-  private void writeFigure(Sheet sheet, MapRow row, int column, double top) {
+  /**
+   * Over two narrow columns where the second is the same; left out where it has no room.
+   *
+   * @param free where the figure before ends
+   * @return where this one does
+   */
+  private double writeFigure(Sheet sheet, MapRow row, int column, double top, double free) {
     Box box = box(column, top);
     Type type = isWide(column) ? Type.AXIS_NAMED : Type.AXIS;
     String figure = words.figure(row.bought(column));
@@ -93,9 +113,11 @@ final class MapCells {
     boolean overTwo =
         width > box.width() && column + 1 < columns.count() && !row.changes(column + 1);
     double right = overTwo ? box(column + 1, top).right() : box.right();
-    if (width <= right - box.x()) {
-      Color color = row.isRelaxed(column) ? Look.TEAL_INK : Look.INK;
-      sheet.text(type, color, Sheet.Anchor.MIDDLE, (box.x() + right) / 2, top + 13, figure);
+    if (width > right - box.x() || box.x() < free) {
+      return free;
     }
+    Color color = row.isRelaxed(column) ? Look.TEAL_INK : Look.INK;
+    sheet.text(type, color, Sheet.Anchor.MIDDLE, (box.x() + right) / 2, top + 13, figure);
+    return right;
   }
 }
