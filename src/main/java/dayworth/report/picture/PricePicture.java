@@ -140,8 +140,8 @@ final class PricePicture implements Picture {
       Label label = new Label(Look.INK, 1, List.of("Price of the next " + words.unit(), price));
       right.add(label, plot.right() - layout.inset(), y(last));
     }
-    left.write(sheet, plot.y(), plot.bottom() + 4);
-    right.write(sheet, plot.y() - 20, plot.bottom() + 4);
+    left.write(sheet, plot.y() - 6, plot.bottom() + 4);
+    right.write(sheet, plot.y() - 6, plot.bottom() + 4);
     paintPrices(sheet, placer);
     paintGrid(sheet, placer);
   }
