@@ -10,6 +10,9 @@ final class MapCells {
   private static final double BELOW_CELL = 0.6;
   private static final double WIDE = 16;
 
+  /** In a narrower frame no figure can be read. */
+  private static final double LEAST_FRAMED = 11;
+
   private final MapInk ink = new MapInk();
   private final MapColumns columns;
   private final Words words;
@@ -113,7 +116,8 @@ final class MapCells {
     boolean overTwo =
         width > box.width() && column + 1 < columns.count() && !row.changes(column + 1);
     double right = overTwo ? box(column + 1, top).right() : box.right();
-    if (width > right - box.x() || box.x() < free) {
+    boolean inFrame = row.isRelaxed(column) && box.width() < LEAST_FRAMED;
+    if (inFrame || width > right - box.x() || box.x() < free) {
       return free;
     }
     Color color = row.isRelaxed(column) ? Look.TEAL_INK : Look.INK;

@@ -31,8 +31,12 @@ final class PriceWording {
     if (next.isEmpty()) {
       return "Buying time pays all the way to " + finish + ", the shortest possible";
     }
+    String price = words.amount(next.get().price());
+    boolean even = next.get().price().compareTo(next.get().worth()) == 0;
     String end =
-        words.amount(next.get().price()) + " and is worth " + words.amount(next.get().worth());
+        even
+            ? price + ", just what it is worth"
+            : price + " and is worth " + words.amount(next.get().worth());
     return least.duration() == answer.rows().get(0).duration()
         ? "Buying time does not pay: the first " + words.unit() + " costs " + end
         : "Buying time pays down to " + finish + "; the next costs " + end;
