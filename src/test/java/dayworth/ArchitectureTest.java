@@ -103,7 +103,21 @@ class ArchitectureTest {
         .resideOutsideOfPackage("dayworth.report..")
         .should()
         .dependOnClassesThat()
-        .resideInAnyPackage("org.knowm..", "java.awt..", "tools.jackson..", "com.fasterxml..")
+        .resideInAnyPackage("tools.jackson..", "com.fasterxml..")
+        .check(CLASSES);
+    noClasses()
+        .that()
+        .resideOutsideOfPackage("dayworth.report.picture")
+        .should()
+        .dependOnClassesThat()
+        .resideInAnyPackage("org.knowm..", "org.apache.batik..", "java.awt..", "org.w3c.dom..")
+        .check(CLASSES);
+    noClasses()
+        .that()
+        .resideOutsideOfPackages("dayworth.report.picture", "dayworth.command")
+        .should()
+        .dependOnClassesThat()
+        .resideInAPackage("dayworth.report.picture")
         .check(CLASSES);
     noClasses()
         .that()

@@ -147,4 +147,20 @@ class ProgramTest {
         Files.readString(folder.resolve("output").resolve("starter").resolve("result.json")),
         run.out());
   }
+
+  @Test
+  void picturesComeWithTheTablesAndGoWithoutThem() throws IOException, InterruptedException {
+    Run with = run("curve", demo("starter"), "--out", "here");
+    assertEquals(0, with.status(), with.err());
+    Path charts = folder.resolve("here").resolve("charts");
+    for (String name : List.of("curve", "price", "compression-map")) {
+      assertTrue(Files.size(charts.resolve(name + ".png")) > 0, name);
+      assertTrue(Files.readString(charts.resolve(name + ".svg")).contains("16"), name);
+    }
+    assertTrue(with.out().contains("6 pictures"), with.out());
+    Run without = run("curve", demo("starter"), "--out", "here", "--no-pictures");
+    assertEquals(0, without.status(), without.err());
+    assertFalse(Files.exists(charts));
+    assertFalse(without.out().contains("pictures"), without.out());
+  }
 }

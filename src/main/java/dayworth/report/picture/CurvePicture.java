@@ -212,8 +212,8 @@ final class CurvePicture implements Picture {
       left(line).ifPresent(label -> left.add(label, finishes.x(first.duration()), fromY));
       right(line).ifPresent(label -> right.add(label, finishes.x(last.duration()), toY));
     }
-    left.write(sheet, plot.y() - 20, plot.bottom() + 4);
-    right.write(sheet, plot.y() - 20, plot.bottom() + 4);
+    left.write(sheet, plot.y() - 6, plot.bottom() + 4);
+    right.write(sheet, plot.y() - 6, plot.bottom() + 4);
   }
 
   private Optional<Label> left(MoneyLine line) {

@@ -44,6 +44,11 @@ final class FinishAxis {
             + (plot.width() - 2 * inset) * (longest - duration) / (double) (longest - shortest);
   }
 
+  /** Pixels from the plot's side to the finish nearest to it. */
+  double inset() {
+    return inset;
+  }
+
   /** Pixels from one unit of time to the next. */
   double unitWidth() {
     return longest == shortest
@@ -53,13 +58,22 @@ final class FinishAxis {
 
   /** The column of a finish, from top to bottom of the plot, washed. */
   void mark(Sheet sheet, long duration) {
+    sheet.fill(Look.PLUM_WASH, column(duration));
+  }
+
+  /** The same column framed, over what covers its wash. */
+  void frame(Sheet sheet, long duration) {
+    sheet.frame(Pen.COLUMN, column(duration));
+  }
+
+  private Box column(long duration) {
     double width = Math.max(6, unitWidth());
-    sheet.fill(Look.PLUM_WASH, new Box(x(duration) - width / 2, plot.y(), width, plot.height()));
+    return new Box(x(duration) - width / 2, plot.y(), width, plot.height());
   }
 
   /** The figures alone, above the plot. */
   void paintAbove(Sheet sheet, long named) {
-    figures(sheet, named, plot.y() - TICK, plot.y() - TICK, plot.y() - 9);
+    figures(sheet, named, plot.y() - TICK, plot.y() - 1, plot.y() - 9);
   }
 
   /** The line below the plot with its figures and, below them, what they are. */

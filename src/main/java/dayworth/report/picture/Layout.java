@@ -10,7 +10,11 @@ package dayworth.report.picture;
 record Layout(double plotWidth, double inset) {
 
   static final double MARGIN = 20;
-  static final double GUTTER = 176;
+
+  /** For the names of activities and of lines. */
+  private static final double LEFT_GUTTER = 236;
+
+  private static final double RIGHT_GUTTER = 176;
 
   private static final double WIDEST = 544;
   private static final double NARROWEST = 336;
@@ -29,7 +33,7 @@ record Layout(double plotWidth, double inset) {
   }
 
   int width() {
-    return (int) Math.ceil(2 * GUTTER + plotWidth);
+    return (int) Math.ceil(LEFT_GUTTER + plotWidth + RIGHT_GUTTER);
   }
 
   /** What titles and notes may fill. */
@@ -38,6 +42,6 @@ record Layout(double plotWidth, double inset) {
   }
 
   Box plot(double top, double height) {
-    return new Box(GUTTER, top, plotWidth, height);
+    return new Box(LEFT_GUTTER, top, plotWidth, height);
   }
 }

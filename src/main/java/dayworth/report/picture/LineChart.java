@@ -52,8 +52,11 @@ final class LineChart {
     styler.setYAxisMax(0.0);
   }
 
-  /** Adds a line through points of the picture. */
+  /** Adds a line through points of the picture; no points, no line. */
   void add(Pen pen, List<Point2D.Double> points) {
+    if (points.isEmpty()) {
+      return;
+    }
     List<Point2D.Double> bends = bends(points);
     double[] xs = bends.stream().mapToDouble(point -> point.x - plot.x()).toArray();
     double[] ys = bends.stream().mapToDouble(point -> plot.y() - point.y).toArray();

@@ -27,6 +27,7 @@ record Pen(Color color, BasicStroke stroke) {
   static final Pen WASTE = dashed(Look.INK, 1.4, 2, 2.4);
   static final Pen RING = solid(Look.PLUM, 2.2);
   static final Pen RELAXED = dashed(Look.TEAL, 2, 3.2, 2);
+  static final Pen COLUMN = solid(Look.PLUM, 1.1);
   static final Pen CELL = solid(Look.RULE, 0.6);
   static final Pen WORTH = solid(Look.SLATE_INK, 1);
   static final Pen TIME_HATCH = solid(Look.SLATE, 0.9);

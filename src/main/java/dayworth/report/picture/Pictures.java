@@ -21,25 +21,35 @@ public final class Pictures {
 
   private Pictures() {}
 
-  /** The curve as PNG and SVG; the name of each file is relative to the folder of results. */
+  /**
+   * The curve, the prices and the compression map, each as PNG and SVG, by names relative to the
+   * folder of results: {@link #NAMES}. Each file is made by itself, so that all processors of the
+   * machine have work.
+   */
   public static Map<String, byte[]> of(CurveAnswer answer) {
+    Map<String, CompletableFuture<byte[]>> making = new LinkedHashMap<>();
+    drawn(answer)
+        .forEach(
+            (name, picture) -> {
+              making.put(
+                  "charts/" + name + ".png",
+                  CompletableFuture.supplyAsync(() -> Rendering.png(picture)));
+              making.put(
+                  "charts/" + name + ".svg",
+                  CompletableFuture.supplyAsync(() -> Rendering.svg(picture)));
+            });
+    Map<String, byte[]> files = new LinkedHashMap<>();
+    making.forEach((name, bytes) -> files.put(name, bytes.join()));
+    return files;
+  }
+
+  static Map<String, Picture> drawn(CurveAnswer answer) {
     Layout layout = Layout.of(units(answer));
     Map<String, Picture> pictures = new LinkedHashMap<>();
     pictures.put("curve", new CurvePicture(answer, layout));
     pictures.put("price", new PricePicture(answer, layout));
-    Map<String, CompletableFuture<byte[]>> making = new LinkedHashMap<>();
-    pictures.forEach(
-        (name, picture) -> {
-          making.put(
-              "charts/" + name + ".png",
-              CompletableFuture.supplyAsync(() -> Rendering.png(picture)));
-          making.put(
-              "charts/" + name + ".svg",
-              CompletableFuture.supplyAsync(() -> Rendering.svg(picture)));
-        });
-    Map<String, byte[]> files = new LinkedHashMap<>();
-    making.forEach((name, bytes) -> files.put(name, bytes.join()));
-    return files;
+    pictures.put("compression-map", new CompressionMap(answer, layout));
+    return pictures;
   }
 
   private static double units(CurveAnswer answer) {

@@ -1,6 +1,7 @@
 package dayworth.report.picture;
 
 import dayworth.decision.CurveAnswer;
+import java.awt.Color;
 import java.awt.geom.Point2D;
 import java.math.BigDecimal;
 import java.util.ArrayList;
@@ -139,8 +140,8 @@ final class PricePicture implements Picture {
       Label label = new Label(Look.INK, 1, List.of("Price of the next " + words.unit(), price));
       right.add(label, plot.right() - layout.inset(), y(last));
     }
-    left.write(sheet, plot.y(), plot.bottom() + 4);
-    right.write(sheet, plot.y() - 20, plot.bottom() + 4);
+    left.write(sheet, plot.y() - 6, plot.bottom() + 4);
+    right.write(sheet, plot.y() - 6, plot.bottom() + 4);
     paintPrices(sheet, placer);
     paintGrid(sheet, placer);
   }
@@ -168,7 +169,7 @@ final class PricePicture implements Picture {
     if (widest.isEmpty()) {
       return;
     }
-    String rate = words.amount(widest.get().share()) + " a " + words.unit();
+    String rate = words.amount(widest.get().share()) + " " + words.aUnit();
     Label label = new Label(worth.ink(), 0, List.of(worth.name(), rate));
     Box band = box(widest.get());
     if (band.x() < plot.x() + NEAR_GUTTER) {
@@ -186,10 +187,14 @@ final class PricePicture implements Picture {
     }
   }
 
-  /** First within the band, from its middle outwards, then ever higher above it. */
+  /** First in the band's middle, then beside it, then elsewhere in it, then ever higher above. */
   private List<Box> insides(Box band, Label label) {
     List<Box> places = new ArrayList<>();
     double middle = band.x() + band.width() / 2;
+    double level = band.middle() - label.height() / 2;
+    places.add(label.at(Sheet.Anchor.MIDDLE, middle, level));
+    places.add(label.at(Sheet.Anchor.START, band.right() + 8, level));
+    places.add(label.at(Sheet.Anchor.END, band.x() - 8, level));
     for (double y = band.y() + 4; y + label.height() < band.bottom(); y += 6) {
       places.add(label.at(Sheet.Anchor.MIDDLE, middle, y));
     }
@@ -230,30 +235,27 @@ final class PricePicture implements Picture {
             new Box((from + to) / 2 - width / 2, above, width, 14),
             new Box(to - 7 - width, above, width, 14),
             new Box(Math.max(from + 7, to - width / 2), y(stretch) + 5, width, 14));
-    placer
-        .place(places)
-        .ifPresent(
-            box -> {
-              sheet.fill(Look.PAPER, new Box(box.x() - 2, box.y() + 1, width + 4, 13));
-              sheet.text(Type.AXIS, Look.INK, Sheet.Anchor.START, box.x(), box.y() + 11.5, figure);
-            });
+    placer.place(places).ifPresent(box -> onPlate(sheet, Look.INK, figure, box));
   }
 
   private void paintGrid(Sheet sheet, LabelPlacer placer) {
     for (BigDecimal amount : money.grid()) {
       String figure = words.amount(amount);
       double width = Type.AXIS.width(figure);
-      Box place = new Box(plot.right() - width, money.y(amount) - 15, width, 13);
-      Box other = place.movedTo(plot.x() + 3, place.y());
-      if (amount.signum() != 0 && money.y(amount) < worthTop()) {
+      Box right = new Box(plot.right() - width - 3, money.y(amount) - 15, width, 13);
+      Box left = right.movedTo(plot.x() + 3, right.y());
+      boolean bare = money.y(amount) < worthTop();
+      if (amount.signum() != 0) {
         placer
-            .place(List.of(other, place))
-            .ifPresent(
-                box ->
-                    sheet.text(
-                        Type.AXIS, Look.QUIET, Sheet.Anchor.START, box.x(), box.y() + 11, figure));
+            .place(bare ? List.of(left, right) : List.of(right, left))
+            .ifPresent(box -> onPlate(sheet, Look.QUIET, figure, box));
       }
     }
+  }
+
+  private static void onPlate(Sheet sheet, Color ink, String figure, Box box) {
+    sheet.fill(Look.PAPER, new Box(box.x() - 2, box.y() + 1, box.width() + 4, 13));
+    sheet.text(Type.AXIS, ink, Sheet.Anchor.START, box.x(), box.y() + 11.5, figure);
   }
 
   /** Above this the paper is bare. */

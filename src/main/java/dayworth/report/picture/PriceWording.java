@@ -31,11 +31,15 @@ final class PriceWording {
     if (next.isEmpty()) {
       return "Buying time pays all the way to " + finish + ", the shortest possible";
     }
+    String price = words.amount(next.get().price());
+    boolean even = next.get().price().compareTo(next.get().worth()) == 0;
     String end =
-        words.money(next.get().price()) + " and is worth " + words.money(next.get().worth());
+        even
+            ? price + ", just what it is worth"
+            : price + " and is worth " + words.amount(next.get().worth());
     return least.duration() == answer.rows().get(0).duration()
-        ? "Buying time does not pay: the first " + words.one() + " costs " + end
-        : "Buying time pays down to " + finish + "; the next " + words.unit() + " costs " + end;
+        ? "Buying time does not pay: the first " + words.unit() + " costs " + end
+        : "Buying time pays down to " + finish + "; the next costs " + end;
   }
 
   String note() {

@@ -4,15 +4,12 @@ import java.awt.Dimension;
 import java.awt.Graphics2D;
 import java.awt.RenderingHints;
 import java.awt.image.BufferedImage;
-import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.io.StringWriter;
 import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Locale;
-import javax.imageio.ImageIO;
-import javax.imageio.stream.MemoryCacheImageOutputStream;
 import javax.xml.parsers.DocumentBuilderFactory;
 import javax.xml.parsers.ParserConfigurationException;
 import org.apache.batik.svggen.SVGGeneratorContext;
@@ -26,6 +23,7 @@ import org.w3c.dom.NodeList;
 final class Rendering {
 
   private static final String SVG = "http://www.w3.org/2000/svg";
+  private static final String DECLARATION = "<?xml version=\"1.0\" encoding=\"UTF-8\"?>\n";
   private static final int PIXELS_PER_PIXEL = 2;
 
   private Rendering() {}
@@ -47,13 +45,7 @@ final class Rendering {
     graphics.scale(PIXELS_PER_PIXEL, PIXELS_PER_PIXEL);
     paint(picture, new Sheet(graphics));
     graphics.dispose();
-    ByteArrayOutputStream bytes = new ByteArrayOutputStream();
-    try (MemoryCacheImageOutputStream out = new MemoryCacheImageOutputStream(bytes)) {
-      ImageIO.write(image, "png", out);
-    } catch (IOException e) {
-      throw new UncheckedIOException(e);
-    }
-    return bytes.toByteArray();
+    return PngFile.of(image);
   }
 
   /** Words stay words: they can be searched, and are read out with the title and description. */
@@ -70,7 +62,10 @@ final class Rendering {
     describe(root, picture);
     try (StringWriter out = new StringWriter()) {
       graphics.stream(root, out, false, false);
-      return out.toString().getBytes(StandardCharsets.UTF_8);
+      String written = out.toString();
+      // Without the document type, which would send some viewers to the net for it.
+      String svg = DECLARATION + written.substring(written.indexOf("<svg"));
+      return svg.getBytes(StandardCharsets.UTF_8);
     } catch (IOException e) {
       throw new UncheckedIOException(e);
     }
@@ -112,6 +107,7 @@ final class Rendering {
   private static void describe(Element root, Picture picture) {
     root.setAttribute("viewBox", "0 0 " + picture.width() + " " + picture.height());
     root.setAttribute("role", "img");
+    root.setAttribute("font-family", "sans-serif");
     Node first = root.getFirstChild();
     root.insertBefore(textElement(root, "title", picture.title()), first);
     root.insertBefore(textElement(root, "desc", picture.description()), first);

@@ -104,6 +104,11 @@ final class Words {
     return unit;
   }
 
+  /** One of it with its article. */
+  String aUnit() {
+    return (unit.startsWith("h") ? "an " : "a ") + unit;
+  }
+
   String units() {
     return unit + "s";
   }

@@ -1,0 +1,48 @@
+package dayworth.report.picture;
+
+import dayworth.decision.CurveAnswer;
+import dayworth.network.Network;
+import dayworth.network.Timing;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+
+/**
+ * The activities that are rows of the compression map, in file order: those that are shortened or
+ * critical at some finish; where they are many, the ones of which most is bought.
+ *
+ * @param shown the rows
+ * @param quiet how many are left out because they are never shortened nor critical
+ * @param crowded how many are left out because there is no room
+ */
+record MapRows(List<MapRow> shown, int quiet, int crowded) {
+
+  private static final int MOST = 40;
+
+  MapRows {
+    shown = List.copyOf(shown);
+  }
+
+  static MapRows of(CurveAnswer answer, List<Timing> timings) {
+    Network network = answer.of().network();
+    List<MapRow> told = new ArrayList<>();
+    for (int i = 0; i < network.size(); i++) {
+      MapRow row = new MapRow(i, network.activity(i), timings);
+      if (row.isTold()) {
+        told.add(row);
+      }
+    }
+    int quiet = network.size() - told.size();
+    int crowded = Math.max(0, told.size() - MOST);
+    if (crowded > 0) {
+      told.sort(
+          Comparator.comparingLong(MapRow::mostBought)
+              .thenComparingInt(MapRow::criticalColumns)
+              .reversed()
+              .thenComparingInt(MapRow::index));
+      told = new ArrayList<>(told.subList(0, MOST));
+      told.sort(Comparator.comparingInt(MapRow::index));
+    }
+    return new MapRows(told, quiet, crowded);
+  }
+}
