@@ -2,7 +2,10 @@ package dayworth.casefile;
 
 import dayworth.contract.Bonus;
 import dayworth.contract.Damages;
+import dayworth.contract.Due;
+import dayworth.contract.Per;
 import dayworth.contract.Terms;
+import dayworth.contract.TimeRelated;
 import dayworth.decision.Case;
 import dayworth.decision.TimeUnit;
 import dayworth.engine.stepping.Stepping;
@@ -133,16 +136,18 @@ public final class CaseReader {
   private static Terms contract(TermsTable terms, TimeScale scale) {
     return new Terms(
         scale,
-        Money.of(terms.amount("time_related_cost")),
+        Optional.empty(),
+        new TimeRelated(Money.of(terms.amount("time_related_cost")), Per.UNIT),
         Money.of(terms.amount("fixed_cost")),
-        terms.number("contract_finish").map(scale::ticks),
-        new Damages(
+        terms.number("contract_finish").map(scale::ticks).map(Due::at),
+        Damages.perUnit(
             Money.of(terms.amount("damages_rate")),
-            scale.ticks(terms.amount("damages_grace")),
+            terms.amount("damages_grace"),
             terms.number("damages_cap").map(Money::of)),
         new Bonus(
             Money.of(terms.amount("bonus_rate")),
+            Per.UNIT,
             terms.number("bonus_cap").map(Money::of),
-            terms.number("bonus_cap_units").map(scale::ticks)));
+            terms.number("bonus_cap_units")));
   }
 }

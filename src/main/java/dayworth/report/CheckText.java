@@ -58,7 +58,7 @@ public final class CheckText {
         + (with.isEmpty() ? "" : ", with " + String.join(" and ", with))
         + ". As planned: "
         + Wording.workingDuration(of, finish)
-        + of.terms().contractFinish().map(due -> lateness(finish - due)).orElse("")
+        + of.terms().contractFinish().map(due -> lateness(finish - due.ticks())).orElse("")
         + ".";
   }
 

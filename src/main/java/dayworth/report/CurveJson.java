@@ -1,5 +1,6 @@
 package dayworth.report;
 
+import dayworth.contract.Due;
 import dayworth.decision.CrossCheck;
 import dayworth.decision.CurveAnswer;
 import dayworth.decision.Finish;
@@ -62,7 +63,7 @@ final class CurveJson {
   }
 
   private void contractFinish(JsonText json) throws IOException {
-    Optional<Long> due = answer.of().terms().contractFinish();
+    Optional<Due> due = answer.of().terms().contractFinish();
     if (due.isEmpty()) {
       json.nothing("contract_finish");
       return;
@@ -70,7 +71,7 @@ final class CurveJson {
     json.object(
         "contract_finish",
         members -> {
-          members.number("due", names.units(due.get()));
+          members.number("due", names.units(due.get().ticks()));
           members.yesNo("can_be_met", answer.atContract().isPresent());
           if (answer.atContract().isPresent()) {
             Finish met = answer.atContract().get();

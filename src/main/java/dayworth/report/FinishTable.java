@@ -119,7 +119,7 @@ final class FinishTable {
         .of()
         .terms()
         .contractFinish()
-        .filter(due -> due < answer.shortest().duration())
-        .map(due -> "The contract finish of " + units(due) + " cannot be met.");
+        .filter(due -> due.ticks() < answer.shortest().duration())
+        .map(due -> "The contract finish of " + units(due.ticks()) + " cannot be met.");
   }
 }

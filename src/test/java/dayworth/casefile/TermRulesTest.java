@@ -3,6 +3,7 @@ package dayworth.casefile;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dayworth.contract.Due;
 import dayworth.contract.Terms;
 import dayworth.decision.Case;
 import dayworth.decision.TimeUnit;
@@ -55,15 +56,15 @@ class TermRulesTest {
     assertEquals("A wall", read.title());
     assertEquals("EUR", read.currency());
     assertEquals(TimeUnit.WEEK, read.unit());
-    assertEquals(Money.of(new BigDecimal("500")), contract.timeRelatedRate());
+    assertEquals(Money.of(new BigDecimal("500")), contract.timeRelated().rate());
     assertEquals(Money.of(new BigDecimal("70.5")), contract.fixedCost());
-    assertEquals(Optional.of(4L), contract.contractFinish());
+    assertEquals(Optional.of(Due.at(4)), contract.contractFinish());
     assertEquals(Money.of(new BigDecimal("30")), contract.damages().rate());
-    assertEquals(1, contract.damages().grace());
+    assertEquals(BigDecimal.ONE, contract.damages().grace());
     assertEquals(Optional.of(Money.of(new BigDecimal("60"))), contract.damages().cap());
     assertEquals(Money.of(new BigDecimal("20")), contract.bonus().rate());
     assertEquals(Optional.of(Money.of(new BigDecimal("40"))), contract.bonus().cap());
-    assertEquals(Optional.of(3L), contract.bonus().capTicks());
+    assertEquals(Optional.of(BigDecimal.valueOf(3)), contract.bonus().capCount());
   }
 
   @Test

@@ -2,8 +2,11 @@ package dayworth.report;
 
 import dayworth.contract.Bonus;
 import dayworth.contract.Damages;
+import dayworth.contract.Due;
 import dayworth.contract.FinishCost;
+import dayworth.contract.Per;
 import dayworth.contract.Terms;
+import dayworth.contract.TimeRelated;
 import dayworth.decision.Case;
 import dayworth.decision.CrossCheck;
 import dayworth.decision.CurveAnswer;
@@ -50,10 +53,11 @@ final class SeriesAnswer {
   private static final Terms TERMS =
       new Terms(
           TimeScale.WHOLE,
-          Money.of(25),
+          Optional.empty(),
+          new TimeRelated(Money.of(25), Per.UNIT),
           Money.ZERO,
-          Optional.of(9L),
-          new Damages(Money.of(10), 0, Optional.empty()),
+          Optional.of(Due.at(9)),
+          Damages.perUnit(Money.of(10), BigDecimal.ZERO, Optional.empty()),
           Bonus.NONE);
 
   static final Case CASE =
