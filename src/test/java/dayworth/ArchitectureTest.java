@@ -1,11 +1,19 @@
 package dayworth;
 
+import static com.tngtech.archunit.base.DescribedPredicate.not;
+import static com.tngtech.archunit.core.domain.JavaClass.Predicates.assignableFrom;
+import static com.tngtech.archunit.core.domain.JavaClass.Predicates.belongToAnyOf;
+import static com.tngtech.archunit.core.domain.JavaClass.Predicates.resideInAPackage;
 import static com.tngtech.archunit.lang.syntax.ArchRuleDefinition.noClasses;
 import static com.tngtech.archunit.library.Architectures.layeredArchitecture;
 
 import com.tngtech.archunit.core.domain.JavaClasses;
 import com.tngtech.archunit.core.importer.ClassFileImporter;
 import com.tngtech.archunit.core.importer.ImportOption;
+import com.tngtech.archunit.lang.syntax.elements.GivenClassesConjunction;
+import java.time.DayOfWeek;
+import java.time.LocalDate;
+import java.time.temporal.ChronoUnit;
 import org.junit.jupiter.api.Test;
 
 /** The arrows between the packages, and who may touch the world. */
@@ -73,13 +81,27 @@ class ArchitectureTest {
 
   @Test
   void onlyTheEndsTouchFilesClocksAndStreams() {
-    noClasses()
-        .that()
-        .resideOutsideOfPackages("dayworth.casefile", "dayworth.report..", "dayworth.command")
+    core()
         .should()
         .dependOnClassesThat()
-        .resideInAnyPackage("java.io", "java.nio..", "java.time..")
+        .resideInAnyPackage("java.io", "java.nio..")
         .check(CLASSES);
+    core()
+        .should()
+        .dependOnClassesThat(
+            resideInAPackage("java.time..")
+                .and(not(belongToAnyOf(LocalDate.class, DayOfWeek.class, ChronoUnit.class)))
+                .and(not(assignableFrom(LocalDate.class)))
+                .and(not(assignableFrom(ChronoUnit.class))))
+        .check(CLASSES);
+    core().should().callMethod(LocalDate.class, "now").check(CLASSES);
+  }
+
+  /** A date is a value; what day it is today only the ends may ask. */
+  private static GivenClassesConjunction core() {
+    return noClasses()
+        .that()
+        .resideOutsideOfPackages("dayworth.casefile", "dayworth.report..", "dayworth.command");
   }
 
   @Test

@@ -18,5 +18,5 @@ record ActivityRow(
     Optional<BigDecimal> normalCost,
     Optional<BigDecimal> crash,
     Optional<BigDecimal> crashCost,
-    Optional<BigDecimal> notBefore,
+    Optional<Moment> notBefore,
     List<String> predecessors) {}

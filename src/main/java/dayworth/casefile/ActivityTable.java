@@ -112,7 +112,7 @@ final class ActivityTable {
     Cell<BigDecimal> crash = table.cell(row, "crash_duration", TimeCell.DURATION, findings);
     Cell<BigDecimal> crashCost = table.cell(row, "crash_cost", MoneyCell.AMOUNT, findings);
     table.cell(row, "divisible", DIVISIBLE, findings);
-    Cell<BigDecimal> notBefore = table.cell(row, "not_before", TimeCell.MOMENT, findings);
+    Cell<Moment> notBefore = table.cell(row, "not_before", Moment.Parser.MOMENT, findings);
     crashRules.check(row, normal, cost, crash, crashCost);
     return new ActivityRow(
         row.line(),

@@ -20,11 +20,10 @@ import java.util.stream.Stream;
 final class CaseFolder {
 
   private static final List<String> SERVED =
-      List.of(ActivityTable.FILE, LinkTable.FILE, TermsTable.FILE);
+      List.of(ActivityTable.FILE, LinkTable.FILE, TermsTable.FILE, HolidayTable.FILE);
 
   private static final Set<String> NOT_YET =
       Set.of(
-          "holidays.csv",
           "sections.csv",
           "running.csv",
           "progress.csv",

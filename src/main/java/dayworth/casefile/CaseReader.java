@@ -1,18 +1,17 @@
 package dayworth.casefile;
 
-import dayworth.contract.Bonus;
-import dayworth.contract.Damages;
-import dayworth.contract.Terms;
 import dayworth.decision.Case;
-import dayworth.decision.TimeUnit;
 import dayworth.engine.stepping.Stepping;
 import dayworth.network.Activity;
 import dayworth.network.Link;
 import dayworth.network.Network;
+import dayworth.network.Plan;
+import dayworth.network.Timing;
 import dayworth.value.Money;
 import dayworth.value.TimeScale;
 import java.math.BigDecimal;
 import java.nio.file.Path;
+import java.time.LocalDate;
 import java.util.List;
 import java.util.Optional;
 
@@ -41,16 +40,19 @@ public final class CaseReader {
   private Reading read(TimeScale atLeast) {
     folder.checkNames();
     Optional<String> activityText = folder.text(ActivityTable.FILE);
+    Optional<String> holidayText = folder.text(HolidayTable.FILE);
     Optional<String> linkText = folder.text(LinkTable.FILE);
     Optional<String> termText = folder.text(TermsTable.FILE);
     Optional<List<ActivityRow>> known =
         activityText.flatMap(text -> ActivityTable.read(text, findings));
     List<LinkRow> links = LinkTable.read(known, linkText, findings);
     TermsTable terms = TermsTable.read(termText, findings);
+    List<LocalDate> holidays = HolidayTable.read(holidayText, findings);
+    DateRules.check(known.orElse(List.of()), holidays, terms, findings);
     if (findings.hasProblems()) {
       return new Reading.Unsound(findings.problems(), findings.warnings());
     }
-    Case read = build(known.orElseThrow(), links, terms, atLeast);
+    Case read = build(known.orElseThrow(), links, terms, holidays, atLeast);
     if (findings.hasProblems()) {
       return new Reading.Unsound(findings.problems(), findings.warnings());
     }
@@ -58,61 +60,56 @@ public final class CaseReader {
   }
 
   private Case build(
-      List<ActivityRow> activities, List<LinkRow> links, TermsTable terms, TimeScale atLeast) {
-    TimeScale scale = scale(activities, links, terms).and(atLeast);
+      List<ActivityRow> activities,
+      List<LinkRow> links,
+      TermsTable terms,
+      List<LocalDate> holidays,
+      TimeScale atLeast) {
+    TimeScale scale = Resolution.of(activities, links, terms).and(atLeast);
+    CaseCalendar times = CaseCalendar.of(terms, holidays, scale);
     Network network =
         new Network(
             scale,
-            activities.stream().map(row -> activity(row, scale)).toList(),
+            activities.stream().map(row -> activity(row, times)).toList(),
             links.stream().map(row -> link(row, scale)).toList());
+    checkSize(network, terms, times);
+    Doubts.report(new ReadCase(network, activities, links, terms, times.calendar()), findings);
+    return new Case(
+        name,
+        terms.text("title").orElse(""),
+        terms.text("currency").orElse(""),
+        terms.unit(),
+        network,
+        ContractTerms.of(terms, times),
+        findings.warnings(),
+        folder.inputs());
+  }
+
+  private void checkSize(Network network, TermsTable terms, CaseCalendar times) {
     if (Stepping.scaleFor(network).isEmpty()) {
       findings.problem(
           Place.whole(ActivityTable.FILE)
               .notice("the costs are too far apart to be exact", "", "smaller or rounder costs"));
     }
-    Doubts.report(new ReadCase(network, activities, links, terms), findings);
-    return new Case(
-        name,
-        terms.text("title").orElse(""),
-        terms.text("currency").orElse(""),
-        TimeUnit.valueOf(terms.text("time_unit").orElse("DAY")),
-        network,
-        contract(terms, scale),
-        findings.warnings(),
-        folder.inputs());
-  }
-
-  private static TimeScale scale(
-      List<ActivityRow> activities, List<LinkRow> links, TermsTable terms) {
-    TimeScale scale = TimeScale.WHOLE;
-    for (ActivityRow row : activities) {
-      scale = scale.and(of(row.normal())).and(of(row.crash())).and(of(row.notBefore()));
+    if (times.isBeyondDates(Timing.earliest(network, Plan.allNormal(network)).finish())) {
+      findings.problem(
+          terms
+              .at("start_date")
+              .notice("the project ends after the year 9999", "", "shorter durations"));
     }
-    for (LinkRow row : links) {
-      scale = scale.and(TimeScale.of(row.lag()));
-    }
-    for (String term : List.of("contract_finish", "damages_grace", "bonus_cap_units")) {
-      scale = scale.and(of(terms.number(term)));
-    }
-    return bendsAreWhole(terms) ? scale : new TimeScale(TimeScale.MOST_DECIMALS);
+    terms
+        .moment("contract_finish")
+        .filter(moment -> times.isBeyondDates(times.due(moment).ticks()))
+        .ifPresent(
+            moment ->
+                findings.problem(
+                    terms
+                        .at("contract_finish")
+                        .notice("after the year 9999", "", "an earlier finish")));
   }
 
-  private static TimeScale of(Optional<BigDecimal> units) {
-    return units.map(TimeScale::of).orElse(TimeScale.WHOLE);
-  }
-
-  /** Whether the caps in money are reached at whole units; otherwise the finest scale is used. */
-  private static boolean bendsAreWhole(TermsTable terms) {
-    return isWhole(terms, "damages_cap", "damages_rate")
-        && isWhole(terms, "bonus_cap", "bonus_rate");
-  }
-
-  private static boolean isWhole(TermsTable terms, String cap, String rate) {
-    BigDecimal per = terms.amount(rate);
-    return per.signum() == 0 || terms.amount(cap).remainder(per).signum() == 0;
-  }
-
-  private static Activity activity(ActivityRow row, TimeScale scale) {
+  private static Activity activity(ActivityRow row, CaseCalendar times) {
+    TimeScale scale = times.scale();
     BigDecimal normal = row.normal().orElseThrow();
     Money cost = Money.of(row.normalCost().orElseThrow());
     return new Activity(
@@ -123,26 +120,10 @@ public final class CaseReader {
         scale.ticks(row.crash().orElse(normal)),
         cost,
         row.crashCost().map(Money::of).orElse(cost),
-        scale.ticks(row.notBefore().orElse(BigDecimal.ZERO)));
+        row.notBefore().map(times::start).orElse(0L));
   }
 
   private static Link link(LinkRow row, TimeScale scale) {
     return new Link(row.predecessor(), row.successor(), row.relation(), scale.ticks(row.lag()));
-  }
-
-  private static Terms contract(TermsTable terms, TimeScale scale) {
-    return new Terms(
-        scale,
-        Money.of(terms.amount("time_related_cost")),
-        Money.of(terms.amount("fixed_cost")),
-        terms.number("contract_finish").map(scale::ticks),
-        new Damages(
-            Money.of(terms.amount("damages_rate")),
-            scale.ticks(terms.amount("damages_grace")),
-            terms.number("damages_cap").map(Money::of)),
-        new Bonus(
-            Money.of(terms.amount("bonus_rate")),
-            terms.number("bonus_cap").map(Money::of),
-            terms.number("bonus_cap_units").map(scale::ticks)));
   }
 }

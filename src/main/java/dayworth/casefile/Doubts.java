@@ -13,7 +13,8 @@ final class Doubts {
           WeakerLinks::report,
           ImpliedLinks::report,
           HoldingDate::report,
-          StartDate::report);
+          StartDate::report,
+          IdleTerms::report);
 
   private Doubts() {}
 

@@ -27,14 +27,29 @@ final class HoldingDate {
     }
     long without = ShortestFinish.without(network, holder).ticks();
     if (without < shortest.ticks()) {
-      String wrong = "compression gains nothing";
-      String found = network.scale().text(network.activity(holder).notBefore());
+      String found =
+          read.activities()
+              .get(holder)
+              .notBefore()
+              .flatMap(Moment::date)
+              .map(WorkingDays::named)
+              .orElseGet(() -> network.scale().text(network.activity(holder).notBefore()));
       String right =
-          "with it no finish is shorter than "
-              + network.scale().text(shortest.ticks())
+          "with it no finish is "
+              + (read.calendar().isPresent() ? "before " : "shorter than ")
+              + finish(read, shortest.ticks())
               + ", as planned; without it "
-              + network.scale().text(without);
-      findings.warning(read.place(holder, "not_before").notice(wrong, found, right));
+              + finish(read, without)
+              + "; the chain: "
+              + read.named(shortest.chain());
+      findings.warning(
+          read.place(holder, "not_before").notice("compression gains nothing", found, right));
     }
+  }
+
+  private static String finish(ReadCase read, long ticks) {
+    return read.calendar()
+        .map(calendar -> WorkingDays.named(calendar.finishDate(ticks)))
+        .orElseGet(() -> read.network().scale().text(ticks));
   }
 }

@@ -1,7 +1,6 @@
 package dayworth.casefile;
 
 import dayworth.network.Link;
-import java.util.List;
 
 /**
  * Warns of a finish-to-start link that a chain of other finish-to-start links implies.
@@ -11,8 +10,6 @@ import java.util.List;
  * by what implies it, so all that are warned of can go together.
  */
 final class ImpliedLinks {
-
-  private static final int MOST_NAMED = 6;
 
   private final ReadCase read;
   private final Findings findings;
@@ -45,23 +42,10 @@ final class ImpliedLinks {
       boolean strongest = link.lag() == chains.longestDirectLag(link.successor());
       if (strongest && chains.reach(link.successor()) >= link.lag()) {
         LinkRow row = read.links().get(index);
-        String chain = named(chains.to(link.successor()));
+        String chain = read.named(chains.to(link.successor()));
         String right = "it can go: the chain " + chain + " says as much";
         findings.warning(row.place().notice("implied by other links", named(read, row), right));
       }
     }
-  }
-
-  /** The ids of a chain; of a long one only where it begins and ends. */
-  private String named(List<Integer> chain) {
-    List<String> ids = chain.stream().map(i -> read.network().activity(i).id()).toList();
-    int size = ids.size();
-    return size <= MOST_NAMED
-        ? String.join(", ", ids)
-        : String.join(", ", ids.subList(0, 2))
-            + ", and "
-            + (size - MOST_NAMED + 2)
-            + " more to "
-            + String.join(", ", ids.subList(size - 2, size));
   }
 }

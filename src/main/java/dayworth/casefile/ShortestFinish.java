@@ -3,10 +3,13 @@ package dayworth.casefile;
 import dayworth.network.Activity;
 import dayworth.network.Link;
 import dayworth.network.Network;
+import java.util.ArrayList;
+import java.util.Collections;
+import java.util.List;
 import java.util.function.IntToLongFunction;
 
 /**
- * The earliest finish that any plan can reach, and which not_before the longest chain begins with.
+ * The earliest finish that any plan can reach, and the longest chain that leads to it.
  *
  * <p>One forward pass over both events of each activity: its finish comes at least the crash
  * duration after its start, its start at most the normal duration before its finish, and every link
@@ -15,29 +18,26 @@ import java.util.function.IntToLongFunction;
  */
 final class ShortestFinish {
 
-  /** The chain begins with the project's start. */
+  /** No activity, and no event. */
   static final int NONE = -1;
 
   private final Network network;
   private final IntToLongFunction notBefore;
 
-  /** Earliest times in ticks, and the activity whose not_before the chain to each begins with. */
-  private final long[] start;
+  /** Earliest times in ticks by event: 2 x activity is its start, the next one its finish. */
+  private final long[] time;
 
-  private final int[] startOrigin;
-  private final long[] finish;
-  private final int[] finishOrigin;
+  /** The event from which the longest chain comes to an event; NONE where it begins there. */
+  private final int[] before;
 
   private long shortest;
-  private int origin = NONE;
+  private int last = NONE;
 
   private ShortestFinish(Network network, IntToLongFunction notBefore) {
     this.network = network;
     this.notBefore = notBefore;
-    start = new long[network.size()];
-    startOrigin = new int[network.size()];
-    finish = new long[network.size()];
-    finishOrigin = new int[network.size()];
+    time = new long[2 * network.size()];
+    before = new int[2 * network.size()];
     for (int position = 0; position < network.size(); position++) {
       place(network.inOrder(position));
     }
@@ -59,44 +59,58 @@ final class ShortestFinish {
 
   /** The only activity whose not_before can hold the finish, or {@link #NONE}. */
   int origin() {
-    return origin;
+    List<Integer> chain = chain();
+    return !chain.isEmpty() && notBefore.applyAsLong(chain.get(0)) > 0 && beginsWithStart()
+        ? chain.get(0)
+        : NONE;
+  }
+
+  /** The activities of the longest chain, first to last. */
+  List<Integer> chain() {
+    List<Integer> chain = new ArrayList<>();
+    for (int event = last; event != NONE; event = before[event]) {
+      if (chain.isEmpty() || chain.get(chain.size() - 1) != event / 2) {
+        chain.add(event / 2);
+      }
+    }
+    Collections.reverse(chain);
+    return chain;
+  }
+
+  /** Whether its first event is a start; a finish at 0 waits for nothing. */
+  private boolean beginsWithStart() {
+    int first = last;
+    while (before[first] != NONE) {
+      first = before[first];
+    }
+    return first % 2 == 0;
   }
 
   private void place(int i) {
     Activity activity = network.activity(i);
-    long waits = notBefore.applyAsLong(i);
-    start[i] = waits;
-    startOrigin[i] = waits > 0 ? i : NONE;
-    finish[i] = 0;
-    finishOrigin[i] = NONE;
+    int start = 2 * i;
+    int finish = start + 1;
+    time[start] = notBefore.applyAsLong(i);
+    before[start] = NONE;
+    time[finish] = 0;
+    before[finish] = NONE;
     for (int k = 0; k < network.linksInto(i); k++) {
-      bind(i, network.link(network.linkInto(i, k)));
+      Link link = network.link(network.linkInto(i, k));
+      int from = 2 * link.predecessor() + (link.relation().fromStart() ? 0 : 1);
+      bind(link.relation().toStart() ? start : finish, time[from] + link.lag(), from);
     }
-    if (finish[i] - activity.normal() > start[i]) {
-      start[i] = finish[i] - activity.normal();
-      startOrigin[i] = finishOrigin[i];
-    }
-    if (start[i] + activity.crash() >= finish[i]) {
-      finish[i] = start[i] + activity.crash();
-      finishOrigin[i] = startOrigin[i];
-    }
-    if (finish[i] > shortest) {
-      shortest = finish[i];
-      origin = finishOrigin[i];
+    bind(start, time[finish] - activity.normal(), finish);
+    bind(finish, time[start] + activity.crash(), start);
+    if (time[finish] > shortest) {
+      shortest = time[finish];
+      last = finish;
     }
   }
 
-  private void bind(int i, Link link) {
-    int from = link.predecessor();
-    boolean fromStart = link.relation().fromStart();
-    long bound = (fromStart ? start[from] : finish[from]) + link.lag();
-    int boundOrigin = fromStart ? startOrigin[from] : finishOrigin[from];
-    if (link.relation().toStart() && bound > start[i]) {
-      start[i] = bound;
-      startOrigin[i] = boundOrigin;
-    } else if (!link.relation().toStart() && bound > finish[i]) {
-      finish[i] = bound;
-      finishOrigin[i] = boundOrigin;
+  private void bind(int event, long bound, int from) {
+    if (bound > time[event]) {
+      time[event] = bound;
+      before[event] = from;
     }
   }
 }

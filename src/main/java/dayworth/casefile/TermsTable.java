@@ -1,5 +1,8 @@
 package dayworth.casefile;
 
+import dayworth.contract.PartWeek;
+import dayworth.contract.Per;
+import dayworth.decision.TimeUnit;
 import java.math.BigDecimal;
 import java.time.DayOfWeek;
 import java.time.LocalDate;
@@ -19,8 +22,11 @@ final class TermsTable {
   private static final List<Column> COLUMNS =
       List.of(Column.needed("term"), Column.needed("value"));
 
-  private static final WordCell<String> PER_UNIT =
-      WordCell.<String>of("word").with("unit", "unit").notYet("calendar_day").notYet("week");
+  private static final WordCell<Per> PER =
+      WordCell.<Per>of("word")
+          .with("unit", Per.UNIT)
+          .with("calendar_day", Per.CALENDAR_DAY)
+          .with("week", Per.WEEK);
 
   private static final Map<String, CellParser<?>> PARSERS =
       Map.ofEntries(
@@ -28,24 +34,29 @@ final class TermsTable {
           Map.entry("currency", (text, style) -> text),
           Map.entry(
               "time_unit",
-              WordCell.<String>of("time unit")
-                  .with("day", "DAY")
-                  .with("week", "WEEK")
-                  .with("hour", "HOUR")
-                  .with("shift", "SHIFT")),
+              WordCell.<TimeUnit>of("time unit")
+                  .with("day", TimeUnit.DAY)
+                  .with("week", TimeUnit.WEEK)
+                  .with("hour", TimeUnit.HOUR)
+                  .with("shift", TimeUnit.SHIFT)),
           Map.entry("units_per_working_day", TimeCell.DURATION),
-          Map.entry("start_date", (CellParser<LocalDate>) TimeCell::date),
+          Map.entry("start_date", DateCell.DATE),
           Map.entry("working_days", (CellParser<WorkingDays>) WorkingDays::parse),
           Map.entry("time_related_cost", MoneyCell.AMOUNT),
-          Map.entry("time_related_per", PER_UNIT),
+          Map.entry("time_related_per", PER),
           Map.entry("fixed_cost", MoneyCell.AMOUNT),
-          Map.entry("contract_finish", TimeCell.MOMENT),
+          Map.entry("contract_finish", Moment.Parser.MOMENT),
           Map.entry("damages_rate", MoneyCell.AMOUNT),
-          Map.entry("damages_per", PER_UNIT),
+          Map.entry("damages_per", PER),
+          Map.entry(
+              "damages_part_week",
+              WordCell.<PartWeek>of("word")
+                  .with("pro_rata", PartWeek.PRO_RATA)
+                  .with("whole", PartWeek.WHOLE)),
           Map.entry("damages_grace", TimeCell.DURATION),
           Map.entry("damages_cap", MoneyCell.ABOVE_ZERO),
           Map.entry("bonus_rate", MoneyCell.AMOUNT),
-          Map.entry("bonus_per", PER_UNIT),
+          Map.entry("bonus_per", PER),
           Map.entry("bonus_cap", MoneyCell.ABOVE_ZERO),
           Map.entry("bonus_cap_units", TimeCell.DURATION));
 
@@ -53,7 +64,6 @@ final class TermsTable {
       Set.of(
           "data_date",
           "extension",
-          "damages_part_week",
           "basis",
           "prepared_for",
           "prepared_by",
@@ -80,8 +90,32 @@ final class TermsTable {
     return terms;
   }
 
-  Optional<Place> place(String term) {
-    return Optional.ofNullable(places.get(term));
+  /** Where a term stands that has a value. */
+  Place at(String term) {
+    return places.get(term);
+  }
+
+  /** Whether a term has a value, right or wrong. */
+  boolean isGiven(String term) {
+    return given.contains(term);
+  }
+
+  /** What a duration of one means. */
+  TimeUnit unit() {
+    return (TimeUnit) values.getOrDefault("time_unit", TimeUnit.DAY);
+  }
+
+  /** What a rate is per. */
+  Optional<Per> per(String term) {
+    return Optional.ofNullable((Per) values.get(term));
+  }
+
+  Optional<PartWeek> partWeek() {
+    return Optional.ofNullable((PartWeek) values.get("damages_part_week"));
+  }
+
+  Optional<Moment> moment(String term) {
+    return Optional.ofNullable((Moment) values.get(term));
   }
 
   /** The first day of the project. */
@@ -148,7 +182,9 @@ final class TermsTable {
 
   private static boolean isNumber(String term) {
     CellParser<?> parser = PARSERS.get(term);
-    return parser instanceof MoneyCell || parser instanceof TimeCell;
+    return parser instanceof MoneyCell
+        || parser instanceof TimeCell
+        || parser instanceof Moment.Parser;
   }
 
   private void addValue(String term, String text, NumberStyle style) {
@@ -177,8 +213,7 @@ final class TermsTable {
     require("damages_cap", "damages_rate");
     require("bonus_cap", "bonus_rate");
     require("bonus_cap_units", "bonus_rate");
-    String unit = text("time_unit").orElse("DAY");
-    boolean finer = unit.equals("HOUR") || unit.equals("SHIFT");
+    boolean finer = unit() == TimeUnit.HOUR || unit() == TimeUnit.SHIFT;
     if (finer && !given.contains("units_per_working_day")) {
       findings.problem(
           places

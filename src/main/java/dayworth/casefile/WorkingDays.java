@@ -1,6 +1,7 @@
 package dayworth.casefile;
 
 import java.time.DayOfWeek;
+import java.time.LocalDate;
 import java.time.format.TextStyle;
 import java.util.Arrays;
 import java.util.Collections;
@@ -30,6 +31,11 @@ record WorkingDays(Set<DayOfWeek> days) {
   /** The weekday's name as it stands in a case. */
   static String name(DayOfWeek day) {
     return day.getDisplayName(TextStyle.SHORT, Locale.ENGLISH);
+  }
+
+  /** A date with its weekday, for a message. */
+  static String named(LocalDate date) {
+    return name(date.getDayOfWeek()) + " " + date;
   }
 
   static WorkingDays parse(String text, NumberStyle style) throws CellFault {

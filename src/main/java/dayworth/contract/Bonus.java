@@ -1,27 +1,28 @@
 package dayworth.contract;
 
 import dayworth.value.Money;
+import java.math.BigDecimal;
 import java.util.Optional;
 
 /**
- * Early-completion bonus: money for each time unit before the contract finish.
+ * Early-completion bonus: money for finishing before the contract finish.
  *
- * @param rate money per time unit
+ * @param rate money for one of {@code per}; a part of a week brings its share
  * @param cap the most that is paid
- * @param capTicks the most earliness that is paid for, in ticks
+ * @param capCount the most earliness that is paid for, counted in {@code per}
  */
-public record Bonus(Money rate, Optional<Money> cap, Optional<Long> capTicks) {
+public record Bonus(Money rate, Per per, Optional<Money> cap, Optional<BigDecimal> capCount) {
 
   /** No bonus. */
-  public static final Bonus NONE = new Bonus(Money.ZERO, Optional.empty(), Optional.empty());
+  public static final Bonus NONE =
+      new Bonus(Money.ZERO, Per.UNIT, Optional.empty(), Optional.empty());
 
-  /** What is paid for finishing {@code early} ticks before the contract finish. */
-  Money forEarliness(long early, long ticksPerUnit) {
-    if (early <= 0) {
+  /** What is paid for being so early. */
+  Money forEarliness(Count early) {
+    if (!early.isAboveZero()) {
       return Money.ZERO;
     }
-    long counted = capTicks.map(most -> Math.min(most, early)).orElse(early);
-    Money paid = rate.times(counted).dividedBy(ticksPerUnit);
+    Money paid = capCount.map(most -> early.atMost(Count.of(most))).orElse(early).at(rate);
     return cap.map(paid::min).orElse(paid);
   }
 }

@@ -1,26 +1,41 @@
 package dayworth.contract;
 
 import dayworth.value.Money;
+import java.math.BigDecimal;
 import java.util.Optional;
 
 /**
- * Liquidated damages: money for each time unit of lateness beyond the grace.
+ * Liquidated damages: money for lateness beyond the grace.
  *
- * @param rate money per time unit
- * @param grace lateness that costs nothing, in ticks; only what is beyond it is charged
+ * @param rate money for one of {@code per}
+ * @param grace lateness that costs nothing, counted in {@code per}; only what is beyond it is
+ *     charged
  * @param cap the most that can be charged
+ * @param partWeek used per week only
  */
-public record Damages(Money rate, long grace, Optional<Money> cap) {
+public record Damages(
+    Money rate, Per per, BigDecimal grace, Optional<Money> cap, PartWeek partWeek) {
 
   /** No damages. */
-  public static final Damages NONE = new Damages(Money.ZERO, 0, Optional.empty());
+  public static final Damages NONE = perUnit(Money.ZERO, BigDecimal.ZERO, Optional.empty());
 
-  /** What is charged for finishing {@code late} ticks after the contract finish. */
-  Money forLateness(long late, long ticksPerUnit) {
-    if (late <= grace) {
+  /** Damages for each time unit. */
+  public static Damages perUnit(Money rate, BigDecimal grace, Optional<Money> cap) {
+    return new Damages(rate, Per.UNIT, grace, cap, PartWeek.PRO_RATA);
+  }
+
+  /** What is charged for being so late. */
+  Money forLateness(Count late) {
+    Count beyond = late.plus(Count.of(grace).negate());
+    if (!beyond.isAboveZero()) {
       return Money.ZERO;
     }
-    Money charge = rate.times(late - grace).dividedBy(ticksPerUnit);
+    Money charge = (countsWholeWeeks() ? beyond.roundedUp() : beyond).at(rate);
     return cap.map(charge::min).orElse(charge);
+  }
+
+  /** Whether the charge rises by whole weeks. */
+  boolean countsWholeWeeks() {
+    return per == Per.WEEK && partWeek == PartWeek.WHOLE;
   }
 }

@@ -2,8 +2,9 @@ package dayworth.contract;
 
 import dayworth.value.Money;
 import dayworth.value.TimeScale;
-import java.math.RoundingMode;
+import dayworth.value.WorkingCalendar;
 import java.util.Optional;
+import java.util.Set;
 import java.util.SortedSet;
 import java.util.TreeSet;
 
@@ -11,66 +12,122 @@ import java.util.TreeSet;
  * What time is worth under the contract and on the site.
  *
  * @param scale the scale of every time here
- * @param timeRelatedRate indirect cost per time unit until the finish
+ * @param calendar turns a finish into its date; needed where money goes by the date
+ * @param timeRelated indirect cost until the finish
  * @param fixedCost indirect cost that does not depend on time
- * @param contractFinish ticks after the start by which the contract wants completion
+ * @param contractFinish by when the contract wants completion
  * @param damages charged after the contract finish
  * @param bonus paid before the contract finish
  */
 public record Terms(
     TimeScale scale,
-    Money timeRelatedRate,
+    Optional<WorkingCalendar> calendar,
+    TimeRelated timeRelated,
     Money fixedCost,
-    Optional<Long> contractFinish,
+    Optional<Due> contractFinish,
     Damages damages,
     Bonus bonus) {
 
+  /**
+   * Joins the terms.
+   *
+   * @throws IllegalArgumentException if money goes by the date and there are no dates
+   */
+  public Terms {
+    boolean byDate =
+        timeRelated.per().isByDate() || damages.per().isByDate() || bonus.per().isByDate();
+    boolean dueHasDate = contractFinish.flatMap(Due::date).isPresent();
+    if ((byDate && calendar.isEmpty())
+        || (contractFinish.isPresent() && dueHasDate != calendar.isPresent())) {
+      throw new IllegalArgumentException("money by the date needs dates");
+    }
+  }
+
   /** No terms at all: only direct cost counts. */
   public static Terms none(TimeScale scale) {
-    return new Terms(scale, Money.ZERO, Money.ZERO, Optional.empty(), Damages.NONE, Bonus.NONE);
+    return new Terms(
+        scale,
+        Optional.empty(),
+        TimeRelated.NONE,
+        Money.ZERO,
+        Optional.empty(),
+        Damages.NONE,
+        Bonus.NONE);
   }
 
   /** The money that goes with finishing at {@code finish} ticks. */
   public FinishCost at(long finish) {
-    long perUnit = scale.ticksPerUnit();
+    Counting counting = counting();
     return new FinishCost(
-        timeRelatedRate.times(finish).dividedBy(perUnit),
+        timeRelated.until(counting.until(finish, timeRelated.per())),
         fixedCost,
-        contractFinish.map(due -> damages.forLateness(finish - due, perUnit)).orElse(Money.ZERO),
-        contractFinish.map(due -> bonus.forEarliness(due - finish, perUnit)).orElse(Money.ZERO));
+        contractFinish
+            .map(due -> damages.forLateness(counting.lateness(due, finish, damages.per())))
+            .orElse(Money.ZERO),
+        contractFinish
+            .map(due -> bonus.forEarliness(counting.lateness(due, finish, bonus.per()).negate()))
+            .orElse(Money.ZERO));
   }
 
   /**
    * The finishes where a money rule bends: contract finish, end of grace, cap reached, bonus limit.
    *
-   * <p>A bend between two ticks is moved to the nearest tick on the far side, where the cap is just
-   * reached; the reader of a case chooses a scale fine enough for what it can resolve.
+   * <p>Money that goes by the date changes between two working days; the bend is then the end of
+   * the last working day before it, or for a cap of the first on which it is reached. A cap that is
+   * reached between two ticks is moved to the nearest tick on the far side; the reader of a case
+   * chooses a scale fine enough for what it can resolve.
    */
   public SortedSet<Long> bends() {
     SortedSet<Long> bends = new TreeSet<>();
     contractFinish.ifPresent(
         due -> {
-          bends.add(due);
-          if (damages.rate().signum() > 0) {
-            bends.add(due + damages.grace());
-            damages
-                .cap()
-                .ifPresent(cap -> bends.add(due + damages.grace() + ticksFor(cap, damages.rate())));
-          }
-          if (bonus.rate().signum() > 0) {
-            bonus.capTicks().ifPresent(most -> bends.add(due - most));
-            bonus.cap().ifPresent(cap -> bends.add(due - ticksFor(cap, bonus.rate())));
-          }
+          bends.add(due.ticks());
+          addDamages(due, bends);
+          addBonus(due, bends);
         });
     return bends;
   }
 
-  /** How many ticks at {@code rate} per unit reach {@code cap}, rounded up to a whole tick. */
-  private long ticksFor(Money cap, Money rate) {
-    Money ticks =
-        Money.fraction(
-            cap.numerator().multiply(rate.denominator()),
-            cap.denominator().multiply(rate.numerator()));
-    return ticks.times(scale.ticksPerUnit()).rounded(0, RoundingMode.CEILING).longValueExact();
+  private void addDamages(Due due, Set<Long> bends) {
+    if (damages.rate().signum() == 0) {
+      return;
+    }
+    Per per = damages.per();
+    Count grace = Count.of(damages.grace());
+    counting().lastAtMost(due, Count.NONE, per).ifPresent(bends::add);
+    counting().lastAtMost(due, grace, per).ifPresent(bends::add);
+    damages.cap().flatMap(cap -> capReached(due, grace, cap)).ifPresent(bends::add);
+  }
+
+  /** A whole week is charged from its first day, a part of one when it is over. */
+  private Optional<Long> capReached(Due due, Count grace, Money cap) {
+    Count charged = Count.reaching(cap, damages.rate());
+    if (damages.countsWholeWeeks()) {
+      Count before = charged.roundedUp().plus(Count.of(-1, 1));
+      return counting().firstBeyond(due, grace.plus(before), damages.per());
+    }
+    return counting().firstAtLeast(due, grace.plus(charged), damages.per());
+  }
+
+  private void addBonus(Due due, Set<Long> bends) {
+    if (bonus.rate().signum() == 0) {
+      return;
+    }
+    Per per = bonus.per();
+    counting().lastAtMost(due, Count.NONE, per).ifPresent(bends::add);
+    bonus
+        .capCount()
+        .map(Count::of)
+        .flatMap(most -> counting().lastAtMost(due, most.negate(), per))
+        .ifPresent(bends::add);
+    bonus
+        .cap()
+        .map(cap -> Count.reaching(cap, bonus.rate()))
+        .flatMap(most -> counting().lastAtMost(due, most.negate(), per))
+        .ifPresent(bends::add);
+  }
+
+  private Counting counting() {
+    return new Counting(scale, calendar);
   }
 }

@@ -1,5 +1,6 @@
 package dayworth.decision;
 
+import dayworth.contract.Due;
 import dayworth.contract.Terms;
 import dayworth.engine.Curve;
 import dayworth.engine.Step;
@@ -67,7 +68,11 @@ public final class CurveQuestion {
         rows,
         least,
         steps(),
-        terms.contractFinish().filter(due -> due >= curve.shortest()).map(this::finish),
+        terms
+            .contractFinish()
+            .map(Due::ticks)
+            .filter(due -> due >= curve.shortest())
+            .map(this::finish),
         of(Plan.allCrash(network)),
         new CurveAnswer.AskedPlan(
             finish(asked), Timing.by(network, Stepping.planWithin(network, asked), asked)),
@@ -75,7 +80,11 @@ public final class CurveQuestion {
         CrossChecking.of(network, curve, crossChecks, watcher));
   }
 
-  /** A row for each whole unit, each breakpoint and each bend of the money, longest first. */
+  /**
+   * A row for each whole unit, each breakpoint, each end of a working day and each bend of the
+   * money, longest first. Between two neighbours all money is linear or, where it goes by the date,
+   * the same from just above the one to the other; so no finish between them costs less in all.
+   */
   private List<Finish> rows() {
     TreeSet<Long> durations = new TreeSet<>();
     durations.add(curve.longest());
@@ -84,6 +93,10 @@ public final class CurveQuestion {
     for (long whole = curve.longest() / unit * unit; whole >= curve.shortest(); whole -= unit) {
       durations.add(whole);
     }
+    terms
+        .calendar()
+        .map(calendar -> calendar.endsOfDays(curve.shortest(), curve.longest()))
+        .ifPresent(durations::addAll);
     durations.addAll(terms.bends().subSet(curve.shortest(), curve.longest()));
     return durations.descendingSet().stream().map(this::finish).toList();
   }

@@ -31,6 +31,9 @@ final class CaseJson {
           members.text("title", of.title());
           members.text("currency", of.currency());
           members.text("time_unit", of.unit().word());
+          if (of.terms().calendar().isPresent()) {
+            members.text("start_date", of.terms().calendar().get().startDate().toString());
+          }
         });
     json.array(
         "inputs",

@@ -9,10 +9,12 @@ import java.math.BigDecimal;
 final class CheckJson {
 
   private final CheckAnswer answer;
+  private final Dates dates;
   private final CaseJson names;
 
   CheckJson(CheckAnswer answer) {
     this.answer = answer;
+    this.dates = new Dates(answer.of());
     this.names = new CaseJson(answer.of().network());
   }
 
@@ -21,7 +23,13 @@ final class CheckJson {
     json.number("activities", network.size());
     json.number("links", network.links().size());
     json.number("as_planned", names.units(answer.asPlanned().finish()));
+    if (dates.areKnown()) {
+      json.text("as_planned_date", dates.finish(answer.asPlanned().finish()));
+    }
     json.number("shortest", names.units(answer.shortest()));
+    if (dates.areKnown()) {
+      json.text("shortest_date", dates.finish(answer.shortest()));
+    }
     json.number("critical_activities", answer.asPlanned().criticalCount());
     json.number("critical_chains", new BigDecimal(answer.chainCount()));
     json.array(

@@ -1,16 +1,20 @@
 package dayworth.report;
 
+import dayworth.contract.Due;
 import dayworth.decision.Case;
 import dayworth.decision.CheckAnswer;
 import dayworth.decision.CheckAnswer.NeverCritical;
+import dayworth.decision.TimeUnit;
 import dayworth.network.Activity;
 import dayworth.network.Link;
 import dayworth.network.Network;
+import dayworth.value.WorkingCalendar;
 import java.math.BigDecimal;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.Optional;
 
 /** The answer of {@code dayworth check} for a terminal. */
 public final class CheckText {
@@ -21,12 +25,14 @@ public final class CheckText {
   private final CheckAnswer answer;
   private final Case of;
   private final Network network;
+  private final Dates dates;
   private final int width;
 
   private CheckText(CheckAnswer answer, int width) {
     this.answer = answer;
     this.of = answer.of();
     this.network = of.network();
+    this.dates = new Dates(of);
     this.width = Math.min(width, CurveText.WIDEST);
   }
 
@@ -57,16 +63,25 @@ public final class CheckText {
     return "The case is sound"
         + (with.isEmpty() ? "" : ", with " + String.join(" and ", with))
         + ". As planned: "
-        + Wording.workingDuration(of, finish)
-        + of.terms().contractFinish().map(due -> lateness(finish - due)).orElse("")
+        + (dates.areKnown()
+            ? dates.spokenFinish("", finish, "")
+            : Wording.workingDuration(of, finish))
+        + of.terms().contractFinish().map(due -> lateness(due, finish)).orElse("")
         + ".";
   }
 
-  private String lateness(long late) {
+  /** In calendar days where there are dates. */
+  private String lateness(Due due, long finish) {
+    Optional<Integer> days = dates.daysAfter(due, finish);
+    long late = days.map(Integer::longValue).orElse(finish - due.ticks());
     if (late == 0) {
       return ", on time";
     }
-    return ", " + Wording.duration(of, Math.abs(late)) + (late > 0 ? " late" : " early");
+    String amount =
+        days.map(Math::abs)
+            .map(count -> Wording.count(count, "calendar day", "calendar days"))
+            .orElseGet(() -> Wording.duration(of, Math.abs(late)));
+    return ", " + amount + (late > 0 ? " late" : " early");
   }
 
   private List<String> facts() {
@@ -79,12 +94,29 @@ public final class CheckText {
             + String.format(Locale.ROOT, ", %,d can be shortened; ", compressible)
             + Wording.count(network.links().size(), "link", "links")
             + (waits == 0 ? "" : String.format(Locale.ROOT, ", %,d of them with a wait", waits)));
-    add(lines, "No finish is shorter than " + Wording.duration(of, answer.shortest()));
+    of.terms().calendar().ifPresent(calendar -> add(lines, workingTime(calendar)));
+    add(lines, "No finish is shorter than " + Wording.finish(of, answer.shortest()));
     chains(lines);
     floats(lines);
     list(lines, "Nothing comes before: ", answer.openStarts());
     list(lines, "Nothing comes after: ", answer.openEnds());
     return lines;
+  }
+
+  private String workingTime(WorkingCalendar calendar) {
+    BigDecimal perDay = network.scale().units(calendar.dayLength().ticks());
+    boolean finer = of.unit() == TimeUnit.HOUR || of.unit() == TimeUnit.SHIFT;
+    int holidays = calendar.holidaysThatCount();
+    return Wording.workingDuration(of, answer.asPlanned().finish())
+        + " from "
+        + Dates.spoken(calendar.startDate())
+        + ", "
+        + Dates.weekdays(calendar.weekdays())
+        + (finer ? ", " + perDay + " " + Wording.unit(of, perDay) + " a working day" : "")
+        + ", "
+        + (holidays == 0
+            ? "no holidays"
+            : Wording.count(holidays, "holiday", "holidays") + " on those days");
   }
 
   private void chains(List<String> lines) {

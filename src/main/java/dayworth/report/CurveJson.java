@@ -1,5 +1,6 @@
 package dayworth.report;
 
+import dayworth.contract.Due;
 import dayworth.decision.CrossCheck;
 import dayworth.decision.CurveAnswer;
 import dayworth.decision.Finish;
@@ -18,11 +19,13 @@ final class CurveJson {
 
   private final CurveAnswer answer;
   private final Network network;
+  private final Dates dates;
   private final CaseJson names;
 
   CurveJson(CurveAnswer answer) {
     this.answer = answer;
     this.network = answer.of().network();
+    this.dates = new Dates(answer.of());
     this.names = new CaseJson(network);
   }
 
@@ -46,6 +49,9 @@ final class CurveJson {
 
   private void finish(JsonText json, Finish finish) throws IOException {
     json.number("duration", names.units(finish.duration()));
+    if (dates.areKnown()) {
+      json.text("finish_date", dates.finish(finish.duration()));
+    }
     json.number("direct_cost", finish.direct().cents());
     json.number("running_cost", finish.running().cents());
     json.number("time_related_cost", finish.other().timeRelated().cents());
@@ -62,7 +68,7 @@ final class CurveJson {
   }
 
   private void contractFinish(JsonText json) throws IOException {
-    Optional<Long> due = answer.of().terms().contractFinish();
+    Optional<Due> due = answer.of().terms().contractFinish();
     if (due.isEmpty()) {
       json.nothing("contract_finish");
       return;
@@ -70,7 +76,10 @@ final class CurveJson {
     json.object(
         "contract_finish",
         members -> {
-          members.number("due", names.units(due.get()));
+          members.number("due", names.units(due.get().ticks()));
+          if (due.get().date().isPresent()) {
+            members.text("due_date", due.get().date().get().toString());
+          }
           members.yesNo("can_be_met", answer.atContract().isPresent());
           if (answer.atContract().isPresent()) {
             Finish met = answer.atContract().get();
@@ -125,6 +134,10 @@ final class CurveJson {
     json.number("duration", names.units(duration));
     json.number("units_compressed", names.units(activity.normal() - duration));
     json.number("extra_cost", PlanTable.extraCost(activity, duration).cents());
+    if (dates.areKnown()) {
+      json.text("start_date", dates.start(timing.earlyStart(index), timing.earlyFinish(index)));
+      json.text("finish_date", dates.finish(timing.earlyFinish(index)));
+    }
     json.number("early_start", names.units(timing.earlyStart(index)));
     json.number("early_finish", names.units(timing.earlyFinish(index)));
     json.number("late_start", names.units(timing.lateStart(index)));

@@ -23,11 +23,12 @@ public final class CurveTable {
             "total_cost",
             "price_per_unit",
             "breakpoint");
+    Dates dates = new Dates(answer.of());
     TimeScale scale = answer.of().network().scale();
     for (Finish row : answer.rows()) {
       csv.row(
           scale.text(row.duration()),
-          CsvText.BLANK,
+          dates.finish(row.duration()),
           CsvText.money(row.direct()),
           CsvText.money(row.running()),
           CsvText.money(row.other().timeRelated()),

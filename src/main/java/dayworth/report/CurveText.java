@@ -51,7 +51,9 @@ public final class CurveText {
     int used = Math.min(width, WIDEST);
     Case of = asked.of();
     List<String> lines = new ArrayList<>();
-    String nearest = Wording.duration(of, asked.curve().shortest());
+    long shortest = asked.curve().shortest();
+    String nearest =
+        Wording.duration(of, shortest) + new Dates(of).spokenFinish(", ", shortest, "");
     lines.add(
         style.bold(
             Wording.duration(of, asked.asked())
@@ -88,7 +90,13 @@ public final class CurveText {
   private static String sentence(CurveAnswer answer, MoneyLook look) {
     Case of = answer.of();
     Finish least = answer.leastTotal();
-    String finish = "Least total: finish in " + Wording.workingDuration(of, least.duration());
+    String duration = Wording.workingDuration(of, least.duration());
+    Dates dates = new Dates(of);
+    String finish =
+        "Least total: finish "
+            + (dates.areKnown()
+                ? dates.spokenFinish("on ", least.duration(), " (" + duration + ")")
+                : "in " + duration);
     BigDecimal better = answer.asPlanned().total().subtract(least.total());
     if (better.signum() > 0) {
       return finish + ", " + look.text(better) + " better than as planned.";
@@ -106,9 +114,9 @@ public final class CurveText {
     Finish last = answer.least().get(count - 1);
     return count
         + " finishes share the least total; the longest is "
-        + Wording.duration(answer.of(), answer.leastTotal().duration())
+        + Wording.finish(answer.of(), answer.leastTotal().duration())
         + ", the shortest "
-        + Wording.duration(answer.of(), last.duration())
+        + Wording.finish(answer.of(), last.duration())
         + ".";
   }
 
@@ -127,6 +135,7 @@ public final class CurveText {
         lows.add(
             Wording.duration(answer.of(), rows.get(i).duration())
                 + " ("
+                + new Dates(answer.of()).spokenFinish("", rows.get(i).duration(), ", ")
                 + look.text(rows.get(i).total().subtract(left))
                 + ")");
       }

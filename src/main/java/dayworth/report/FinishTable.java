@@ -1,10 +1,12 @@
 package dayworth.report;
 
+import dayworth.contract.Due;
 import dayworth.decision.CurveAnswer;
 import dayworth.decision.Finish;
 import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.function.Function;
 
@@ -15,10 +17,12 @@ final class FinishTable {
 
   private final CurveAnswer answer;
   private final List<Row> rows = new ArrayList<>();
+  private final Dates dates;
   private final MoneyLook look;
 
   FinishTable(CurveAnswer answer) {
     this.answer = answer;
+    this.dates = new Dates(answer.of());
     rows.add(new Row("as planned", answer.asPlanned()));
     rows.add(new Row("least total", answer.leastTotal()));
     answer.atContract().ifPresent(finish -> rows.add(new Row("contract finish", finish)));
@@ -39,7 +43,13 @@ final class FinishTable {
   }
 
   List<String> lines(Style style, int width) {
-    TextColumns columns = columns(width - Wording.INDENT.length());
+    int room = width - Wording.INDENT.length();
+    TextColumns columns = columns(room, look);
+    boolean rounded = dates.areKnown() && !columns.dropped().isEmpty() && look.decimals() > 0;
+    if (rounded) {
+      // A date takes the room that cents would need.
+      columns = columns(room, new MoneyLook(0));
+    }
     List<String> lines = new ArrayList<>();
     for (String line : columns.lines()) {
       // The header is line 0, as planned is 1, the least total 2.
@@ -50,6 +60,10 @@ final class FinishTable {
       String names = String.join(", ", columns.dropped());
       lines.addAll(Wording.wrap("No room for: " + names, "  ", width));
     }
+    if (rounded) {
+      String exact = "Amounts are rounded to whole ones here; curve.csv has the cents.";
+      lines.addAll(Wording.wrap(exact, "  ", width));
+    }
     cannotBeMet().ifPresent(line -> lines.addAll(Wording.wrap(line, "  ", width)));
     if (sameForAll().signum() != 0) {
       lines.addAll(Wording.wrap(leftOut(), "  ", width));
@@ -57,21 +71,33 @@ final class FinishTable {
     return lines;
   }
 
-  private TextColumns columns(int width) {
+  private TextColumns columns(int width, MoneyLook look) {
     TextColumns columns = new TextColumns(width);
     columns.add("", false, rows.stream().map(Row::name).toList());
     columns.add(answer.of().unit().word() + "s", true, column(f -> units(f.duration())));
+    addDates(columns);
     columns.add("extra direct", true, column(f -> look.text(extraDirect(f))));
-    money(columns, "running", f -> f.running().cents());
-    money(columns, "time-related", f -> f.other().timeRelated().cents());
-    money(columns, "damages", f -> f.other().damages().cents());
-    money(columns, "bonus", f -> f.other().bonus().cents().negate());
+    money(columns, look, "running", f -> f.running().cents());
+    money(columns, look, "time-related", f -> f.other().timeRelated().cents());
+    money(columns, look, "damages", f -> f.other().damages().cents());
+    money(columns, look, "bonus", f -> f.other().bonus().cents().negate());
     columns.add("total", true, column(f -> look.text(f.total().subtract(sameForAll()))));
     return columns;
   }
 
+  /** Dates stand close to the durations, their header to the left. */
+  private void addDates(TextColumns columns) {
+    if (dates.areKnown()) {
+      List<String> finishes =
+          dates.column(rows.stream().map(row -> row.finish().duration()).toList());
+      int width = finishes.get(0).length();
+      columns.add(String.format(Locale.ROOT, "%-" + width + "s", "finish"), true, finishes);
+    }
+  }
+
   /** Money that no finish has is left out. */
-  private void money(TextColumns columns, String name, Function<Finish, BigDecimal> amount) {
+  private void money(
+      TextColumns columns, MoneyLook look, String name, Function<Finish, BigDecimal> amount) {
     if (rows.stream().anyMatch(row -> amount.apply(row.finish()).signum() != 0)) {
       columns.add(name, true, column(finish -> look.text(amount.apply(finish))));
     }
@@ -119,7 +145,13 @@ final class FinishTable {
         .of()
         .terms()
         .contractFinish()
-        .filter(due -> due < answer.shortest().duration())
-        .map(due -> "The contract finish of " + units(due) + " cannot be met.");
+        .filter(due -> due.ticks() < answer.shortest().duration())
+        .map(due -> "The contract finish" + named(due) + " cannot be met.");
+  }
+
+  private String named(Due due) {
+    return due.date()
+        .map(date -> ", " + Dates.spoken(date) + ",")
+        .orElseGet(() -> " of " + units(due.ticks()));
   }
 }

@@ -82,7 +82,8 @@ final class ObstacleText {
         reasons.add(": " + id(longer.activity()) + " cannot be longer than " + most);
       } else if (term instanceof Obstacle.NotBefore start) {
         String when = units(start.ticks());
-        reasons.add(": " + id(start.activity()) + " may not start before " + when);
+        String date = new Dates(of).spokenStart(" (", start.ticks(), ")");
+        reasons.add(": " + id(start.activity()) + " may not start before " + when + date);
       }
     }
     return reasons.stream()

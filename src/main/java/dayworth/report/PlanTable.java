@@ -33,13 +33,16 @@ public final class PlanTable {
             "free_float",
             "critical");
     Network network = answer.of().network();
+    Dates dates = new Dates(answer.of());
     for (int i = 0; i < network.size(); i++) {
-      row(csv, network, answer.asked().timing(), i);
+      row(csv, answer, dates, i);
     }
     return csv.toString();
   }
 
-  private static void row(CsvText csv, Network network, Timing timing, int index) {
+  private static void row(CsvText csv, CurveAnswer answer, Dates dates, int index) {
+    Network network = answer.of().network();
+    Timing timing = answer.asked().timing();
     TimeScale scale = network.scale();
     Activity activity = network.activity(index);
     long duration = timing.plan().duration(index);
@@ -52,8 +55,8 @@ public final class PlanTable {
         CsvText.money(extraCost(activity, duration)),
         scale.text(timing.earlyStart(index)),
         scale.text(timing.earlyFinish(index)),
-        CsvText.BLANK,
-        CsvText.BLANK,
+        dates.start(timing.earlyStart(index), timing.earlyFinish(index)),
+        dates.finish(timing.earlyFinish(index)),
         scale.text(timing.earlyStart(index)),
         scale.text(timing.earlyFinish(index)),
         scale.text(timing.lateStart(index)),

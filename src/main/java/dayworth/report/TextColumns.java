@@ -36,7 +36,7 @@ final class TextColumns {
 
   /** The names of the columns that have no room. */
   List<String> dropped() {
-    return headers.subList(shown(), headers.size());
+    return headers.subList(shown(), headers.size()).stream().map(String::strip).toList();
   }
 
   private String line(List<String> row, int shown) {

@@ -31,7 +31,12 @@ final class Wording {
     return grouped(units) + " " + unit(of, units);
   }
 
-  /** The same, days being called working days. */
+  /** A duration and, where there are dates, its finish date: {@code 48 days (Wed 11 Nov 2026)}. */
+  static String finish(Case of, long ticks) {
+    return duration(of, ticks) + new Dates(of).spokenFinish(" (", ticks, ")");
+  }
+
+  /** A duration, days being called working days. */
   static String workingDuration(Case of, long ticks) {
     BigDecimal units = of.network().scale().units(ticks);
     String working = of.unit() == TimeUnit.DAY ? "working " : "";

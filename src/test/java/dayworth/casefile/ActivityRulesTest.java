@@ -138,10 +138,10 @@ class ActivityRulesTest {
   }
 
   @Test
-  void aDateIsNotServedYet() throws IOException {
+  void aDateNeedsAStartDate() throws IOException {
     expect(
         "A,Dig,5,100,,,,2027-09-06\n",
-        "activities.csv:2 not_before | a date is not served yet | 2027-09-06"
-            + " | a number of time units after the start");
+        "activities.csv:2 not_before | a date needs a start_date | 2027-09-06"
+            + " | a row for start_date in terms.csv, or a number of time units");
   }
 }

@@ -91,7 +91,7 @@ class CsvRulesTest {
     assertEquals(25, new CaseOnDisk(folder).sound().network().link(1).lag());
     assertEquals(
         Money.of(new BigDecimal("3900.5")),
-        new CaseOnDisk(folder).sound().terms().timeRelatedRate());
+        new CaseOnDisk(folder).sound().terms().timeRelated().rate());
   }
 
   @Test

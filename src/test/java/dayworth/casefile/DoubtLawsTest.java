@@ -39,7 +39,16 @@ class DoubtLawsTest {
       Optional<BigDecimal> blank = Optional.empty();
       rows.add(
           new ActivityRow(
-              i, network.activity(i).id(), "", "", blank, blank, blank, blank, blank, List.of()));
+              i,
+              network.activity(i).id(),
+              "",
+              "",
+              blank,
+              blank,
+              blank,
+              blank,
+              Optional.empty(),
+              List.of()));
     }
     List<LinkRow> links = new ArrayList<>();
     for (int j = 0; j < network.links().size(); j++) {
@@ -52,7 +61,8 @@ class DoubtLawsTest {
               link.relation(),
               network.scale().units(link.lag())));
     }
-    return new ReadCase(network, rows, links, TermsTable.read(Optional.empty(), none));
+    return new ReadCase(
+        network, rows, links, TermsTable.read(Optional.empty(), none), Optional.empty());
   }
 
   private static Set<Integer> implied(Network network) {
@@ -160,6 +170,31 @@ class DoubtLawsTest {
     }
   }
 
+  /** How long the chain's own terms make it: they are tried in every way that joins its ends. */
+  private static long longest(Network network, ShortestFinish shortest) {
+    List<Integer> chain = shortest.chain();
+    long best = Long.MIN_VALUE;
+    // by activity of the chain: the longest time to its start and to its finish
+    long start = Long.MIN_VALUE / 4;
+    long finish = Long.MIN_VALUE / 4;
+    for (int k = 0; k < chain.size(); k++) {
+      Activity activity = network.activity(chain.get(k));
+      long nextStart = k == 0 ? activity.notBefore() : Long.MIN_VALUE / 4;
+      long nextFinish = k == 0 ? 0 : Long.MIN_VALUE / 4;
+      for (Link link : network.links()) {
+        if (k > 0 && link.predecessor() == chain.get(k - 1) && link.successor() == chain.get(k)) {
+          long bound = (link.relation().fromStart() ? start : finish) + link.lag();
+          nextStart = link.relation().toStart() ? Math.max(nextStart, bound) : nextStart;
+          nextFinish = link.relation().toStart() ? nextFinish : Math.max(nextFinish, bound);
+        }
+      }
+      start = Math.max(nextStart, nextFinish - activity.normal());
+      finish = Math.max(nextFinish, start + activity.crash());
+      best = finish;
+    }
+    return chain.isEmpty() ? 0 : best;
+  }
+
   /** The other way to the shortest finish is the whole curve. */
   @Test
   void theShortestFinishIsWhereTheCurveEnds() {
@@ -168,6 +203,7 @@ class DoubtLawsTest {
       ShortestFinish shortest = ShortestFinish.of(network);
       assertEquals(
           Stepping.curve(network, PieceWitness.NONE).shortest(), shortest.ticks(), "seed " + seed);
+      assertEquals(shortest.ticks(), longest(network, shortest), "seed " + seed);
       for (int i = 0; i < network.size(); i++) {
         boolean holds = ShortestFinish.without(network, i).ticks() < shortest.ticks();
         assertTrue(!holds || shortest.origin() == i, "seed " + seed + ", activity " + i);

@@ -99,7 +99,7 @@ class DoubtsTest {
     expect(
         "A,5,100,3,120,,\nB,5,100,,,A,10\n",
         "activities.csv:3 not_before | compression gains nothing | 10"
-            + " | with it no finish is shorter than 15, as planned; without it 8");
+            + " | with it no finish is shorter than 15, as planned; without it 8; the chain: B");
   }
 
   @Test
@@ -114,23 +114,66 @@ class DoubtsTest {
     expect("A,5,100,3,120,,\nB,5,100,,,A,10\nC,15,100,,,,\nD,0,0,,,B;C,\n");
   }
 
+  /**
+   * From Monday 7 September: B waits for Monday 21 (day 10) and takes 5 days to Friday 25; without
+   * it A takes 3 days at least and B 5 more: Wednesday 16.
+   */
   @Test
-  void aStartDateOnARestDay() throws IOException {
+  void aDateThatMakesCompressionWorthlessIsToldInDates() throws IOException {
+    CaseOnDisk disk =
+        activities("A,5,100,3,120,,\nB,5,100,,,A,2026-09-19\nC,0,0,,,B,\n")
+            .with("terms.csv", "term,value\nstart_date,2026-09-07\n");
+    assertEquals(
+        List.of(
+            "activities.csv:3 not_before | compression gains nothing | Sat 2026-09-19"
+                + " | with it no finish is before Fri 2026-09-25, as planned; without it"
+                + " Wed 2026-09-16; the chain: B"),
+        disk.warnings());
+  }
+
+  @Test
+  void aStartDateOnARestDayOrAHoliday() throws IOException {
     CaseOnDisk disk = activities("A,5,100,,,,\n");
-    String dates =
-        "terms.csv:2 start_date | dates change nothing yet |  | results are in time units";
     // 1 May 2027 is a Saturday, the Monday after it 3 May
     assertEquals(
         List.of(
-            "terms.csv:2 start_date | a rest day | Sat 2027-05-01 | work begins on Mon 2027-05-03",
-            dates),
+            "terms.csv:2 start_date | a rest day | Sat 2027-05-01"
+                + " | work begins on Mon 2027-05-03"),
         disk.with("terms.csv", "term,value\nstart_date,2027-05-01\n").warnings());
     assertEquals(
-        List.of(dates),
+        List.of(),
         disk.with("terms.csv", "term,value\nstart_date,2027-05-01\nworking_days,Fri Sat\n")
             .warnings());
     assertEquals(
-        List.of(dates), disk.with("terms.csv", "term,value\nstart_date,2027-05-03\n").warnings());
+        List.of(), disk.with("terms.csv", "term,value\nstart_date,2027-05-03\n").warnings());
+    assertEquals(
+        List.of(
+            "terms.csv:2 start_date | a holiday | Mon 2027-05-03"
+                + " | work begins on Tue 2027-05-04"),
+        disk.with("holidays.csv", "date,name\n2027-05-03,Bank holiday\n").warnings());
+  }
+
+  @Test
+  void termsThatChangeNothingBesideTheOthers() throws IOException {
+    CaseOnDisk disk = activities("A,5,100,,,,\n");
+    assertEquals(
+        List.of(
+            "terms.csv:3 units_per_working_day | changes nothing | "
+                + " | a week is 5 working days"),
+        disk.with("terms.csv", "term,value\ntime_unit,week\nunits_per_working_day,0.2\n")
+            .warnings());
+    assertEquals(
+        List.of(
+            "terms.csv:2 units_per_working_day | changes nothing | "
+                + " | a day is one working day; time_unit hour or shift uses it",
+            "terms.csv:3 damages_part_week | changes nothing |  | it is for damages_per week"),
+        disk.with("terms.csv", "term,value\nunits_per_working_day,8\ndamages_part_week,whole\n")
+            .warnings());
+    assertEquals(
+        List.of("holidays.csv | changes nothing |  | a row for start_date in terms.csv"),
+        disk.with("terms.csv", "term,value\nunits_per_working_day,1\n")
+            .with("holidays.csv", "date\n2027-05-03\n")
+            .warnings());
   }
 
   /**
@@ -151,9 +194,7 @@ class DoubtsTest {
     assertEquals(
         List.of(
             "activities.csv:71 predecessors | implied by other links | V1 before K4"
-                + " | it can go: the chain V1, C3, K2, K3, K4 says as much",
-            "terms.csv:6 start_date | dates change nothing yet | "
-                + " | results are in time units"),
+                + " | it can go: the chain V1, C3, K2, K3, K4 says as much"),
         new CaseOnDisk(Path.of("cases", "outage")).warnings());
   }
 }

@@ -48,7 +48,6 @@ class FolderRulesTest {
   @ParameterizedTest
   @ValueSource(
       strings = {
-        "holidays.csv",
         "sections.csv",
         "running.csv",
         "progress.csv",

@@ -3,13 +3,22 @@ package dayworth.casefile;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dayworth.contract.Bonus;
+import dayworth.contract.Damages;
+import dayworth.contract.Due;
+import dayworth.contract.PartWeek;
+import dayworth.contract.Per;
 import dayworth.contract.Terms;
+import dayworth.contract.TimeRelated;
 import dayworth.decision.Case;
 import dayworth.decision.TimeUnit;
 import dayworth.value.Money;
+import dayworth.value.TimeScale;
+import dayworth.value.WorkingCalendar;
 import java.io.IOException;
 import java.math.BigDecimal;
 import java.nio.file.Path;
+import java.time.LocalDate;
 import java.util.List;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
@@ -55,15 +64,15 @@ class TermRulesTest {
     assertEquals("A wall", read.title());
     assertEquals("EUR", read.currency());
     assertEquals(TimeUnit.WEEK, read.unit());
-    assertEquals(Money.of(new BigDecimal("500")), contract.timeRelatedRate());
+    assertEquals(Money.of(new BigDecimal("500")), contract.timeRelated().rate());
     assertEquals(Money.of(new BigDecimal("70.5")), contract.fixedCost());
-    assertEquals(Optional.of(4L), contract.contractFinish());
+    assertEquals(Optional.of(Due.at(4)), contract.contractFinish());
     assertEquals(Money.of(new BigDecimal("30")), contract.damages().rate());
-    assertEquals(1, contract.damages().grace());
+    assertEquals(BigDecimal.ONE, contract.damages().grace());
     assertEquals(Optional.of(Money.of(new BigDecimal("60"))), contract.damages().cap());
     assertEquals(Money.of(new BigDecimal("20")), contract.bonus().rate());
     assertEquals(Optional.of(Money.of(new BigDecimal("40"))), contract.bonus().cap());
-    assertEquals(Optional.of(3L), contract.bonus().capTicks());
+    assertEquals(Optional.of(BigDecimal.valueOf(3)), contract.bonus().capCount());
   }
 
   @Test
@@ -113,7 +122,6 @@ class TermRulesTest {
       strings = {
         "data_date",
         "extension",
-        "damages_part_week",
         "basis",
         "prepared_for",
         "prepared_by",
@@ -165,20 +173,135 @@ class TermRulesTest {
   }
 
   @Test
-  void datesAreNotServedWhereATimeIsWanted() throws IOException {
+  void aDateNeedsAStartDate() throws IOException {
     expect(
         "contract_finish,2027-11-23\n",
-        "terms.csv:2 contract_finish | a date is not served yet | 2027-11-23"
-            + " | a number of time units after the start");
+        "terms.csv:2 contract_finish | a date needs a start_date | 2027-11-23"
+            + " | a row for start_date in terms.csv, or a number of time units");
+    expect("contract_finish,2027-11-23\nstart_date,2027-11-23\n");
+    expect(
+        "contract_finish,2027-11-23\nstart_date,soon\n",
+        "terms.csv:3 start_date | not a date | soon | year-month-day, such as 2026-09-07");
   }
 
   @Test
-  void moneyIsPerUnitSoFar() throws IOException {
+  void moneyByTheDateNeedsAStartDate() throws IOException {
     expect(
         "time_related_per,week\ndamages_per,calendar_day\nbonus_per,month\n",
-        "terms.csv:2 time_related_per | not served yet | week | only unit",
-        "terms.csv:3 damages_per | not served yet | calendar_day | only unit",
+        "terms.csv:2 time_related_per | week needs dates | week"
+            + " | a row for start_date in terms.csv, or unit",
+        "terms.csv:3 damages_per | calendar_day needs dates | calendar_day"
+            + " | a row for start_date in terms.csv, or unit",
         "terms.csv:4 bonus_per | no such word | month | one of unit, calendar_day, week");
+    expect("time_related_per,week\nbonus_per,calendar_day\nstart_date,2026-09-07\n");
+    expect(
+        "damages_part_week,half\n",
+        "terms.csv:2 damages_part_week | no such word | half | one of pro_rata, whole");
+  }
+
+  @Test
+  void theContractFinishIsNotBeforeTheStart() throws IOException {
+    expect(
+        "start_date,2026-09-07\ncontract_finish,2026-09-04\n",
+        "terms.csv:3 contract_finish | before the start_date | 2026-09-04"
+            + " | on 2026-09-07, the start_date, or later");
+  }
+
+  @Test
+  void aDateIsInOneOfElevenCenturies() throws IOException {
+    expect(
+        "start_date,0207-03-15\n",
+        "terms.csv:2 start_date | a date out of range | 0207-03-15"
+            + " | from 1900-01-01 to 2999-12-31");
+    expect(
+        "start_date,2026-09-07\ncontract_finish,7.9.2027\n",
+        "terms.csv:3 contract_finish | not a date | 7.9.2027"
+            + " | year-month-day, such as 2026-09-07");
+  }
+
+  @Test
+  void aProjectEndsBeforeTheYearTenThousand() throws IOException {
+    terms("start_date,2990-01-06\ncontract_finish,1000000\ntime_unit,week\n")
+        .with("activities.csv", "id,normal_duration,normal_cost\nA,999999,100\n");
+    assertEquals(
+        List.of(
+            "terms.csv:2 start_date | the project ends after the year 9999 |  | shorter durations",
+            "terms.csv:3 contract_finish | after the year 9999 |  | an earlier finish"),
+        new CaseOnDisk(folder).problems());
+  }
+
+  @Test
+  void datesAndMoneyByTheDateAreReadAsTheyStand() throws IOException {
+    Terms contract =
+        terms(
+                """
+                start_date,2026-09-07
+                working_days,Mon Tue Wed Thu
+                contract_finish,2026-09-18
+                time_related_cost,700
+                time_related_per,week
+                damages_rate,30
+                damages_per,week
+                damages_part_week,whole
+                damages_grace,1.5
+                bonus_rate,20
+                bonus_per,calendar_day
+                bonus_cap_units,3.5
+                """)
+            .with("holidays.csv", "date,name\n2026-09-08,Regatta\n2026-09-08,Feast\n")
+            .sound()
+            .terms();
+    WorkingCalendar calendar = contract.calendar().orElseThrow();
+    assertEquals(1, calendar.holidaysThatCount());
+    // Mon 7, Wed 9, Thu 10, Mon 14 to Thu 17 are 7 working days; Friday 18 is a rest day
+    assertEquals(
+        Optional.of(new Due(7, Optional.of(LocalDate.parse("2026-09-18")))),
+        contract.contractFinish());
+    assertEquals(new TimeRelated(Money.of(700), Per.WEEK), contract.timeRelated());
+    assertEquals(
+        new Damages(
+            Money.of(30), Per.WEEK, new BigDecimal("1.5"), Optional.empty(), PartWeek.WHOLE),
+        contract.damages());
+    assertEquals(
+        new Bonus(
+            Money.of(20), Per.CALENDAR_DAY, Optional.empty(), Optional.of(new BigDecimal("3.5"))),
+        contract.bonus());
+    assertEquals(TimeScale.WHOLE, contract.scale(), "counts of days are no times");
+  }
+
+  @Test
+  void aWorkingDayIsWholeTicks() throws IOException {
+    String start = "start_date,2026-09-07\n";
+    assertEquals(0, terms(start).sound().network().scale().decimals());
+    assertEquals(1, terms(start + "time_unit,week\n").sound().network().scale().decimals());
+    assertEquals(
+        1,
+        terms(start + "time_unit,hour\nunits_per_working_day,7.5\n")
+            .sound()
+            .network()
+            .scale()
+            .decimals());
+    assertEquals(
+        0,
+        terms("time_unit,hour\nunits_per_working_day,7.5\n").sound().network().scale().decimals());
+  }
+
+  @Test
+  void holidaysAreDates() throws IOException {
+    terms("start_date,2026-09-07\n")
+        .with("holidays.csv", "date,name\n2026-13-01,x\n,y\n24 Dec,z\n");
+    assertEquals(
+        List.of(
+            "holidays.csv:2 date | no such date | 2026-13-01 | a day that the calendar has",
+            "holidays.csv:3 date | blank |  | this cell is needed",
+            "holidays.csv:4 date | not a date | 24 Dec | year-month-day, such as 2026-09-07"),
+        new CaseOnDisk(folder).problems());
+    new CaseOnDisk(folder).with("holidays.csv", "name,day\nx,2026-12-24\n");
+    assertEquals(
+        List.of(
+            "holidays.csv:1 date | missing column |  | the file needs it",
+            "holidays.csv:1 day | no such column | day | one of date, name"),
+        new CaseOnDisk(folder).problems());
   }
 
   @Test

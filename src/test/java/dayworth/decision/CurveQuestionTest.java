@@ -4,7 +4,9 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 
 import dayworth.contract.Bonus;
 import dayworth.contract.Damages;
+import dayworth.contract.Per;
 import dayworth.contract.Terms;
+import dayworth.contract.TimeRelated;
 import dayworth.network.Activity;
 import dayworth.network.Link;
 import dayworth.network.Network;
@@ -35,7 +37,8 @@ class CurveQuestionTest {
               List.of(Link.finishToStart(0, 1))),
           new Terms(
               TimeScale.WHOLE,
-              Money.of(25),
+              Optional.empty(),
+              new TimeRelated(Money.of(25), Per.UNIT),
               Money.ZERO,
               Optional.empty(),
               Damages.NONE,

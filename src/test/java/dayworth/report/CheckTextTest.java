@@ -2,6 +2,7 @@ package dayworth.report;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
+import dayworth.decision.Case;
 import dayworth.decision.CheckAnswer;
 import dayworth.network.Plan;
 import dayworth.network.Timing;
@@ -13,8 +14,12 @@ import org.junit.jupiter.api.Test;
 class CheckTextTest {
 
   private static CheckAnswer answer(BigInteger chains) {
+    return answer(SeriesAnswer.CASE, chains);
+  }
+
+  private static CheckAnswer answer(Case of, BigInteger chains) {
     return new CheckAnswer(
-        SeriesAnswer.CASE,
+        of,
         Timing.earliest(SeriesAnswer.NETWORK, Plan.allNormal(SeriesAnswer.NETWORK)),
         7,
         chains,
@@ -39,6 +44,22 @@ class CheckTextTest {
           Nothing comes before: A C
           Nothing comes after: =B C""",
         String.join("\n", CheckText.lines(answer(BigInteger.ONE), Style.PLAIN, 94)));
+  }
+
+  /** Ten days from Monday 7 are over on Friday 18, a day after Thursday 17. */
+  @Test
+  void datesStandBesideDurations() {
+    List<String> lines =
+        CheckText.lines(answer(SeriesAnswer.DATED, BigInteger.ONE), Style.PLAIN, 94);
+    assertEquals(
+        """
+        The case is sound, with 1 warning and 1 note. As planned: Fri 18 Sep 2026, 1 calendar day \
+        late.
+
+          3 activities, 3 can be shortened; 1 link
+          10 working days from Mon 7 Sep 2026, Mon to Fri, no holidays
+          No finish is shorter than 7 days (Tue 15 Sep 2026)""",
+        String.join("\n", lines.subList(0, 5)));
   }
 
   @Test

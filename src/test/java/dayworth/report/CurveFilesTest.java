@@ -1,6 +1,7 @@
 package dayworth.report;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import com.fasterxml.jackson.core.JsonFactory;
@@ -50,6 +51,30 @@ class CurveFilesTest {
         C,,3,,0,0.00,0,3,,,0,3,5,8,5,5,no
         """,
         PlanTable.of(SeriesAnswer.answer()));
+  }
+
+  /**
+   * From Monday 7 September: A takes days 1 to 4, to Thursday 10; =B days 5 to 8, Friday 11 to
+   * Wednesday 16; C days 1 to 3, to Wednesday 9.
+   */
+  @Test
+  void rowsHaveDatesWhereTheCaseHas() {
+    String plan = PlanTable.of(SeriesAnswer.answer(SeriesAnswer.DATED));
+    assertTrue(plan.contains("A,,4,,2,40.00,0,4,2026-09-07,2026-09-10,0,4,"), plan);
+    assertTrue(plan.contains("'=B,,4,,0,0.00,4,8,2026-09-11,2026-09-16,4,8,"), plan);
+    assertTrue(plan.contains("C,,3,,0,0.00,0,3,2026-09-07,2026-09-09,0,3,"), plan);
+    String curve = CurveTable.of(SeriesAnswer.answer(SeriesAnswer.DATED));
+    assertTrue(curve.contains("\n9,2026-09-17,180.00,"), curve);
+    String json = ResultJson.ofCurve(SeriesAnswer.answer(SeriesAnswer.DATED), "1");
+    for (String member :
+        List.of(
+            "\"time_unit\" : \"day\",\n    \"start_date\" : \"2026-09-07\"",
+            "\"duration\" : 10,\n    \"finish_date\" : \"2026-09-18\"",
+            "\"due\" : 9,\n    \"due_date\" : \"2026-09-17\"",
+            "\"start_date\" : \"2026-09-11\",\n      \"finish_date\" : \"2026-09-16\"")) {
+      assertTrue(json.contains(member), member + json);
+    }
+    assertFalse(ResultJson.ofCurve(SeriesAnswer.answer(), "1").contains("_date"));
   }
 
   @Test

@@ -44,6 +44,25 @@ class CurveTextTest {
         String.join("\n", CurveText.lines(SeriesAnswer.answer(), Style.PLAIN, 200)) + "\n");
   }
 
+  /** Day 10 is Friday 18, day 9 Thursday 17, day 8 Wednesday 16, day 7 Tuesday 15 September. */
+  @Test
+  void datesStandBesideTheDurations() {
+    List<String> lines = CurveText.lines(SeriesAnswer.answer(SeriesAnswer.DATED), Style.PLAIN, 94);
+    assertEquals(
+        """
+        Least total: finish on Wed 16 Sep 2026 (8 working days), 20 better than as planned.      EUR
+
+                            days  finish      extra direct  time-related  damages  total
+          as planned          10  Fri 18 Sep             0           250       10    260
+        > least total          8  Wed 16 Sep            40           200        0    240
+          contract finish      9  Thu 17 Sep            20           225        0    245
+          shortest             7  Tue 15 Sep            70           175        0    245
+          crash everything     7  Tue 15 Sep            75           175        0    250""",
+        String.join("\n", lines.subList(0, 8)));
+    List<String> narrow = CurveText.lines(SeriesAnswer.answer(SeriesAnswer.DATED), Style.PLAIN, 24);
+    assertTrue(narrow.contains("  No room for: finish,"), narrow.toString());
+  }
+
   /** 2 + 16 + 2 + 4 + 2 + 12 = 38 columns; 2 + 12 more for time-related make 52, above 50. */
   @Test
   void aNarrowTerminalLosesTheLastColumnsAndTheirNamesAreSaid() {

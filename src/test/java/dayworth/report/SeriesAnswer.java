@@ -2,8 +2,11 @@ package dayworth.report;
 
 import dayworth.contract.Bonus;
 import dayworth.contract.Damages;
+import dayworth.contract.Due;
 import dayworth.contract.FinishCost;
+import dayworth.contract.Per;
 import dayworth.contract.Terms;
+import dayworth.contract.TimeRelated;
 import dayworth.decision.Case;
 import dayworth.decision.CrossCheck;
 import dayworth.decision.CurveAnswer;
@@ -21,9 +24,14 @@ import dayworth.network.Link;
 import dayworth.network.Network;
 import dayworth.network.Plan;
 import dayworth.network.Timing;
+import dayworth.value.DayLength;
 import dayworth.value.Money;
 import dayworth.value.TimeScale;
+import dayworth.value.WorkingCalendar;
 import java.math.BigDecimal;
+import java.time.DayOfWeek;
+import java.time.LocalDate;
+import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
 
@@ -47,29 +55,47 @@ final class SeriesAnswer {
               Activity.compressible("C", 3, Money.of(10), 2, Money.of(15))),
           List.of(Link.finishToStart(0, 1)));
 
-  private static final Terms TERMS =
-      new Terms(
-          TimeScale.WHOLE,
-          Money.of(25),
-          Money.ZERO,
-          Optional.of(9L),
-          new Damages(Money.of(10), 0, Optional.empty()),
-          Bonus.NONE);
+  /** Without dates. */
+  static final Case CASE = aCase(Optional.empty());
 
-  static final Case CASE =
-      new Case(
-          "series",
-          "Two in a row",
-          "EUR",
-          TimeUnit.DAY,
-          NETWORK,
-          TERMS,
-          List.of(new Notice("activities.csv", 4, "id", "nothing follows C", "", "link it")),
-          List.of(new InputFile("activities.csv", "00ff")));
+  /** The same from Monday 7 September 2026, Monday to Friday; day 9 is Thursday the 17th. */
+  static final Case DATED =
+      aCase(
+          Optional.of(
+              WorkingCalendar.of(
+                  LocalDate.parse("2026-09-07"),
+                  EnumSet.range(DayOfWeek.MONDAY, DayOfWeek.FRIDAY),
+                  List.of(),
+                  new DayLength(1, 1))));
 
   private SeriesAnswer() {}
 
+  private static Case aCase(Optional<WorkingCalendar> calendar) {
+    Terms terms =
+        new Terms(
+            TimeScale.WHOLE,
+            calendar,
+            new TimeRelated(Money.of(25), Per.UNIT),
+            Money.ZERO,
+            Optional.of(calendar.map(dates -> Due.after(9, dates)).orElse(Due.at(9))),
+            Damages.perUnit(Money.of(10), BigDecimal.ZERO, Optional.empty()),
+            Bonus.NONE);
+    return new Case(
+        "series",
+        "Two in a row",
+        "EUR",
+        TimeUnit.DAY,
+        NETWORK,
+        terms,
+        List.of(new Notice("activities.csv", 4, "id", "nothing follows C", "", "link it")),
+        List.of(new InputFile("activities.csv", "00ff")));
+  }
+
   static CurveAnswer answer() {
+    return answer(CASE);
+  }
+
+  static CurveAnswer answer(Case of) {
     Finish ten = finish(10, 160, 250, 10, Optional.of(20L), true);
     Finish nine = finish(9, 180, 225, 0, Optional.of(20L), false);
     Finish eight = finish(8, 200, 200, 0, Optional.of(30L), true);
@@ -78,7 +104,7 @@ final class SeriesAnswer {
     Step second = new Step(8, 7, Money.of(30), List.of(new Change(1, 1)));
     Plan atEight = Plan.of(new long[] {4, 4, 3});
     return new CurveAnswer(
-        CASE,
+        of,
         new Curve(
             NETWORK,
             10,

@@ -1,0 +1,77 @@
+package dayworth.casefile;
+
+import dayworth.contract.Per;
+import dayworth.decision.TimeUnit;
+import dayworth.value.TimeScale;
+import java.math.BigDecimal;
+import java.util.List;
+import java.util.Optional;
+
+/** How fine the time scale of a case must be. */
+final class Resolution {
+
+  private static final TimeScale FINEST = new TimeScale(TimeScale.MOST_DECIMALS);
+
+  private Resolution() {}
+
+  /**
+   * The coarsest scale on which every time of the case is whole; the finest where a cap in money is
+   * reached within a unit, or where a working day is no decimal part of a week.
+   */
+  static TimeScale of(List<ActivityRow> activities, List<LinkRow> links, TermsTable terms) {
+    TimeScale scale = ofTerms(terms);
+    for (ActivityRow row : activities) {
+      scale =
+          scale
+              .and(of(row.normal()))
+              .and(of(row.crash()))
+              .and(of(row.notBefore().flatMap(Moment::units)));
+    }
+    for (LinkRow row : links) {
+      scale = scale.and(TimeScale.of(row.lag()));
+    }
+    return scale;
+  }
+
+  private static TimeScale ofTerms(TermsTable terms) {
+    TimeScale scale = of(terms.moment("contract_finish").flatMap(Moment::units));
+    if (isPerUnit(terms, "damages_per")) {
+      scale = scale.and(of(terms.number("damages_grace")));
+      scale = scale.and(ofCap(terms, "damages_cap", "damages_rate"));
+    }
+    if (isPerUnit(terms, "bonus_per")) {
+      scale = scale.and(of(terms.number("bonus_cap_units")));
+      scale = scale.and(ofCap(terms, "bonus_cap", "bonus_rate"));
+    }
+    return terms.startDate().isPresent() ? scale.and(ofWorkingDay(terms)) : scale;
+  }
+
+  private static boolean isPerUnit(TermsTable terms, String term) {
+    return terms.per(term).orElse(Per.UNIT) == Per.UNIT;
+  }
+
+  private static TimeScale of(Optional<BigDecimal> units) {
+    return units.map(TimeScale::of).orElse(TimeScale.WHOLE);
+  }
+
+  /** Whether the cap is reached at a whole unit. */
+  private static TimeScale ofCap(TermsTable terms, String cap, String rate) {
+    BigDecimal per = terms.amount(rate);
+    boolean whole = per.signum() == 0 || terms.amount(cap).remainder(per).signum() == 0;
+    return whole ? TimeScale.WHOLE : FINEST;
+  }
+
+  private static TimeScale ofWorkingDay(TermsTable terms) {
+    if (terms.unit() == TimeUnit.WEEK) {
+      return switch (terms.workingDays().size()) {
+        case 1 -> TimeScale.WHOLE;
+        case 2, 5 -> new TimeScale(1);
+        case 4 -> new TimeScale(2);
+        default -> FINEST;
+      };
+    }
+    return terms.unit() == TimeUnit.DAY
+        ? TimeScale.WHOLE
+        : of(terms.number("units_per_working_day"));
+  }
+}
