@@ -1,5 +1,6 @@
 package dayworth.report.picture;
 
+import dayworth.contract.Due;
 import dayworth.decision.CurveAnswer;
 import dayworth.decision.Finish;
 import java.math.BigDecimal;
@@ -110,6 +111,7 @@ final class CurveWording {
         .of()
         .terms()
         .contractFinish()
+        .map(Due::ticks)
         .filter(due -> due > longest || due < shortest)
         .map(
             due ->

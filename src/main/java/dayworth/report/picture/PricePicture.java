@@ -1,5 +1,6 @@
 package dayworth.report.picture;
 
+import dayworth.contract.Due;
 import dayworth.decision.CurveAnswer;
 import java.awt.Color;
 import java.awt.geom.Point2D;
@@ -65,6 +66,7 @@ final class PricePicture implements Picture {
         .of()
         .terms()
         .contractFinish()
+        .map(Due::ticks)
         .filter(due -> due <= answer.rows().get(0).duration())
         .filter(due -> due >= answer.shortest().duration())
         .filter(due -> due != answer.leastTotal().duration());

@@ -4,7 +4,10 @@ import dayworth.casefile.CaseReader;
 import dayworth.casefile.Reading;
 import dayworth.contract.Bonus;
 import dayworth.contract.Damages;
+import dayworth.contract.Due;
+import dayworth.contract.Per;
 import dayworth.contract.Terms;
+import dayworth.contract.TimeRelated;
 import dayworth.decision.Case;
 import dayworth.decision.CurveAnswer;
 import dayworth.decision.CurveQuestion;
@@ -15,6 +18,7 @@ import dayworth.network.Network;
 import dayworth.testing.RandomNetworks;
 import dayworth.value.Money;
 import dayworth.value.TimeScale;
+import java.math.BigDecimal;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
@@ -53,10 +57,14 @@ final class Answers {
     long unit = scale.ticksPerUnit();
     return new Terms(
         scale,
-        Money.of(random.nextInt(3) * 40L),
+        Optional.empty(),
+        new TimeRelated(Money.of(random.nextInt(3) * 40L), Per.UNIT),
         Money.of(random.nextInt(2) * 5000L),
-        random.nextInt(4) == 0 ? Optional.empty() : Optional.of(random.nextInt(60) * unit),
-        new Damages(Money.of(random.nextInt(3) * 90L), random.nextInt(3) * unit, Optional.empty()),
-        new Bonus(Money.of(random.nextInt(3) * 30L), Optional.empty(), Optional.empty()));
+        random.nextInt(4) == 0 ? Optional.empty() : Optional.of(Due.at(random.nextInt(60) * unit)),
+        Damages.perUnit(
+            Money.of(random.nextInt(3) * 90L),
+            BigDecimal.valueOf(random.nextInt(3)),
+            Optional.empty()),
+        new Bonus(Money.of(random.nextInt(3) * 30L), Per.UNIT, Optional.empty(), Optional.empty()));
   }
 }
