@@ -46,6 +46,10 @@ final class MapCells {
     }
   }
 
+  private boolean hasFramedFigure(int column, double top) {
+    return box(column, top).width() >= LEAST_FRAMED;
+  }
+
   private boolean isWide(int column) {
     return columns.right(column) - columns.left(column) >= WIDE;
   }
@@ -69,12 +73,15 @@ final class MapCells {
     }
   }
 
-  /** One frame around neighbours that are all given back. */
+  /** One frame around neighbours that are all given back; without figures their tones show. */
   private void addRelaxed(MapRow row, double top) {
     int column = 0;
     while (column < columns.count()) {
       int end = column;
       while (end < columns.count() && row.isRelaxed(end)) {
+        if (hasFramedFigure(end, top)) {
+          ink.plate(box(end, top));
+        }
         end++;
       }
       if (end > column) {
@@ -116,8 +123,8 @@ final class MapCells {
     boolean overTwo =
         width > box.width() && column + 1 < columns.count() && !row.changes(column + 1);
     double right = overTwo ? box(column + 1, top).right() : box.right();
-    boolean inFrame = row.isRelaxed(column) && box.width() < LEAST_FRAMED;
-    if (inFrame || width > right - box.x() || box.x() < free) {
+    boolean unread = row.isRelaxed(column) && !hasFramedFigure(column, top);
+    if (unread || width > right - box.x() || box.x() < free) {
       return free;
     }
     Color color = row.isRelaxed(column) ? Look.TEAL_INK : Look.INK;

@@ -42,9 +42,12 @@ final class MapInk {
     caps.add(new Box(box.x(), box.y(), box.width(), CAP));
   }
 
-  /** On paper, whatever is bought still: the frame must be seen. */
-  void relaxed(Box box) {
+  /** Paper, so that a figure in a frame can be read. */
+  void plate(Box box) {
     plates.add(box);
+  }
+
+  void relaxed(Box box) {
     relaxed.add(new Box(box.x() + 1, box.y() + 1, box.width() - 2, box.height() - 2));
   }
 

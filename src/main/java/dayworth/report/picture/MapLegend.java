@@ -71,7 +71,10 @@ final class MapLegend {
         ink.bought(box, Look.OCHRE.size() - 1);
         ink.cap(box);
       }
-      case 2 -> ink.relaxed(box);
+      case 2 -> {
+        ink.plate(box);
+        ink.relaxed(box);
+      }
       case 3 -> ink.hatch(box);
       default -> {
         ink.riser(box.x() + MapInk.BAND / 2, box.y(), box.height());
