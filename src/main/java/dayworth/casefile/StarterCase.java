@@ -17,7 +17,7 @@ import java.util.stream.Stream;
 public final class StarterCase {
 
   private static final List<String> FILES =
-      List.of(ActivityTable.FILE, LinkTable.FILE, TermsTable.FILE, "README.txt");
+      List.of(ActivityTable.FILE, LinkTable.FILE, TermsTable.FILE, HolidayTable.FILE, "README.txt");
 
   private final Path target;
 

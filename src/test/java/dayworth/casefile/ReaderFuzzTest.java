@@ -1,49 +1,188 @@
 package dayworth.casefile;
 
+import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dayworth.contract.Terms;
+import dayworth.decision.Case;
+import dayworth.decision.CurveAnswer;
+import dayworth.decision.CurveQuestion;
+import dayworth.decision.FinishTooEarly;
+import dayworth.decision.TimeUnit;
+import dayworth.decision.Watcher;
 import dayworth.engine.Curve;
 import dayworth.engine.PieceWitness;
 import dayworth.engine.stepping.Stepping;
 import dayworth.network.Network;
+import dayworth.report.CurveFiles;
+import dayworth.report.CurveText;
+import dayworth.report.Style;
 import dayworth.value.TimeScale;
 import java.io.IOException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Map;
+import java.util.OptionalLong;
 import java.util.Random;
+import java.util.TreeMap;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
 /** The reader answers whatever the bytes are, and what it calls sound can be computed. */
 class ReaderFuzzTest {
 
-  private static final Path CASE = Path.of("cases", "ferry-berth-core");
-  private static final List<String> FILES = List.of("activities.csv", "links.csv", "terms.csv");
+  private static final Path CORE = Path.of("cases", "ferry-berth-core");
+  private static final Path DATED =
+      Path.of("src", "test", "resources", "demo", "ferry-berth-dated");
+  private static final List<String> CORE_FILES =
+      List.of("activities.csv", "links.csv", "terms.csv");
+  private static final List<String> DATED_FILES = List.of("holidays.csv", "terms.csv");
   private static final int CASES = 2000;
 
   /** What hurts readers of tables most often. */
   private static final List<String> SPLICES =
       List.of(
-          ",", ";", "\"", "\"\"", "\n", "\r\n", "\r", "\t", "-", ".", "0", "999999", "1e9",
-          "\u00fc", "\uFEFF", "A3", "FS", "id", " ", "\u0000", "=1+1");
+          ",",
+          ";",
+          "\"",
+          "\"\"",
+          "\n",
+          "\r\n",
+          "\r",
+          "\t",
+          "-",
+          ".",
+          "0",
+          "999999",
+          "1e9",
+          "\u00fc",
+          "\uFEFF",
+          "A3",
+          "FS",
+          "id",
+          " ",
+          "\u0000",
+          "=1+1",
+          "2027-02-30",
+          "0001-01-01",
+          "2999-12-31",
+          "week",
+          "calendar_day",
+          "whole",
+          "/7");
+
+  private static final List<String> DATES =
+      List.of("2027-03-15", "2027-05-01", "1900-01-01", "2999-12-31", "2027-11-23");
+  private static final List<String> AMOUNTS =
+      List.of("0", "1", "0.0001", "333.33", "1000000000000", "");
+  private static final List<String> COUNTS = List.of("0", "1", "0.001", "7.5", "1000000", "");
+  private static final List<String> PER = List.of("unit", "calendar_day", "week", "");
+  private static final List<String> WRONG = List.of("x", "-1", "2027-02-29", "month", "0000-00-00");
+
+  /** What terms may be, as far out as they may. */
+  private static final Map<String, List<String>> TERMS =
+      new TreeMap<>(
+          Map.ofEntries(
+              Map.entry("time_unit", List.of("day", "week", "hour", "shift")),
+              Map.entry("units_per_working_day", List.of("0.001", "1", "7.5", "24", "1000000")),
+              Map.entry("start_date", DATES),
+              Map.entry(
+                  "working_days",
+                  List.of("Mon Tue Wed Thu Fri", "Sun", "Mon Tue Wed Thu Fri Sat", "Mon Sat Sun")),
+              Map.entry("time_related_cost", AMOUNTS),
+              Map.entry("time_related_per", PER),
+              Map.entry("contract_finish", List.of("2027-11-23", "2999-12-31", "0", "17", "1e6")),
+              Map.entry("damages_rate", AMOUNTS),
+              Map.entry("damages_per", PER),
+              Map.entry("damages_part_week", List.of("whole", "pro_rata")),
+              Map.entry("damages_grace", COUNTS),
+              Map.entry("damages_cap", AMOUNTS),
+              Map.entry("bonus_rate", AMOUNTS),
+              Map.entry("bonus_per", PER),
+              Map.entry("bonus_cap", AMOUNTS),
+              Map.entry("bonus_cap_units", COUNTS)));
 
   @TempDir private Path folder;
 
   @Test
   void theReaderNeverThrowsAndSoundCasesCanBeComputed() throws IOException {
+    changeBytes(CORE, CORE_FILES, CASES);
+  }
+
+  @Test
+  void withDatesItNeverThrowsEither() throws IOException {
+    for (String file : List.of("activities.csv", "links.csv")) {
+      Files.copy(DATED.resolve(file), folder.resolve(file));
+    }
+    changeBytes(DATED, DATED_FILES, CASES / 4);
+  }
+
+  private void changeBytes(Path from, List<String> files, int cases) throws IOException {
     int sound = 0;
-    for (int seed = 0; seed < CASES; seed++) {
+    for (int seed = 0; seed < cases; seed++) {
       Random random = new Random(seed);
-      for (String file : FILES) {
-        byte[] bytes = Files.readAllBytes(CASE.resolve(file));
+      for (String file : files) {
+        byte[] bytes = Files.readAllBytes(from.resolve(file));
         Files.write(folder.resolve(file), changed(bytes, random));
       }
       sound += isSound(seed) ? 1 : 0;
     }
-    assertTrue(sound > CASES / 20, "the changes leave too few cases sound: " + sound);
-    assertTrue(sound < CASES - CASES / 20, "the changes break too few cases: " + sound);
+    assertTrue(sound > cases / 20, "the changes leave too few cases sound: " + sound);
+    assertTrue(sound < cases - cases / 20, "the changes break too few cases: " + sound);
+  }
+
+  @Test
+  void anyTermsTogetherAreReadOrRefused() throws IOException {
+    CaseOnDisk disk =
+        new CaseOnDisk(folder)
+            .with(
+                "activities.csv",
+                """
+                id,normal_duration,normal_cost,crash_duration,crash_cost,predecessors,not_before
+                A,5,100,3,120,,
+                B,20,100,12,300,A,2
+                """)
+            .with("holidays.csv", "date\n2027-03-15\n2027-03-26\n2027-05-01\n");
+    int sound = 0;
+    for (int seed = 0; seed < CASES; seed++) {
+      disk.with("terms.csv", terms(new Random(seed)));
+      boolean isSound = isSound(seed);
+      sound += isSound ? 1 : 0;
+      if (isSound && seed % 5 == 0) {
+        canBeTold(disk.sound());
+      }
+    }
+    assertTrue(sound > CASES / 20, "too few cases are sound: " + sound);
+  }
+
+  private static void canBeTold(Case read) {
+    boolean longDays = read.terms().calendar().filter(d -> d.dayLength().ticks() < 10).isPresent();
+    if (longDays && read.unit() != TimeUnit.DAY) {
+      return; // a row for each of very many days
+    }
+    try {
+      CurveAnswer answer = CurveQuestion.ask(read, OptionalLong.empty(), 0, Watcher.NONE);
+      assertTrue(CurveText.lines(answer, Style.PLAIN, 94).size() > 5);
+      assertEquals(5, CurveFiles.of(answer, "1").size());
+    } catch (FinishTooEarly impossible) {
+      throw new AssertionError(impossible);
+    }
+  }
+
+  private static String terms(Random random) {
+    StringBuilder text = new StringBuilder("term,value\n");
+    TERMS.forEach(
+        (term, values) -> {
+          boolean needed = term.equals("start_date") || term.equals("contract_finish");
+          if (needed ? random.nextInt(8) > 0 : random.nextInt(3) > 0) {
+            List<String> from = random.nextInt(100) == 0 ? WRONG : values;
+            text.append(term).append(',');
+            text.append(from.get(random.nextInt(from.size()))).append('\n');
+          }
+        });
+    return text.toString();
   }
 
   private boolean isSound(int seed) {
@@ -53,6 +192,13 @@ class ReaderFuzzTest {
         Network network = sound.of().network();
         Curve curve = Stepping.curve(network, PieceWitness.NONE);
         assertTrue(curve.shortest() >= 0, "seed " + seed);
+        Terms terms = sound.of().terms();
+        assertTrue(terms.at(curve.longest()).damages().signum() >= 0, "seed " + seed);
+        assertTrue(terms.at(curve.shortest()).bonus().signum() >= 0, "seed " + seed);
+        assertTrue(terms.bends().size() < 10, "seed " + seed);
+        terms
+            .calendar()
+            .ifPresent(dates -> assertTrue(dates.finishDate(curve.longest()).getYear() > 1800));
         return true;
       }
       return false;

@@ -25,7 +25,7 @@ import org.junit.jupiter.api.io.TempDir;
 class StarterCaseTest {
 
   private static final Set<String> FILES =
-      Set.of("README.txt", "activities.csv", "links.csv", "terms.csv");
+      Set.of("README.txt", "activities.csv", "holidays.csv", "links.csv", "terms.csv");
 
   @TempDir private Path folder;
 
@@ -111,7 +111,7 @@ class StarterCaseTest {
     Path target = written("bridge");
     String readme = Files.readString(target.resolve("README.txt"));
     Set<String> words = new TreeSet<>();
-    for (String file : List.of("activities.csv", "links.csv")) {
+    for (String file : List.of("activities.csv", "holidays.csv", "links.csv")) {
       List<String> rows = Files.readAllLines(target.resolve(file));
       List<String> columns = List.of(rows.get(0).split(",", -1));
       words.addAll(columns);
@@ -145,6 +145,7 @@ class StarterCaseTest {
             "currency",
             "time_unit",
             "units_per_working_day",
+            "start_date",
             "working_days",
             "time_related_cost",
             "time_related_per",
@@ -152,12 +153,14 @@ class StarterCaseTest {
             "contract_finish",
             "damages_rate",
             "damages_per",
+            "damages_part_week",
             "damages_grace",
             "damages_cap",
             "bonus_rate",
             "bonus_per",
             "bonus_cap",
-            "bonus_cap_units"),
+            "bonus_cap_units",
+            "date"),
         words);
     for (String word : words) {
       assertTrue(readme.contains("\n  " + word + " "), word);

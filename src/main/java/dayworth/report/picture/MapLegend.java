@@ -41,7 +41,7 @@ final class MapLegend {
         "At its shortest: nothing more to buy",
         "Fewer than at the finish before: given back",
         "Has float",
-        "Critical from here on");
+        "Critical: no float");
   }
 
   double height() {

@@ -116,7 +116,7 @@ class PicturesTest {
                 "At 16 weeks 2 of 6 activities are shortened and 6 are critical",
                 "PLAN",
                 "900, up to 3",
-                "Critical from here on")),
+                "Critical: no float")),
         map.toString());
   }
 
