@@ -58,7 +58,7 @@ final class EarliestStarts {
   }
 
   private long time(Moment moment) {
-    return start[moment.activity()] + offset(moment);
+    return moment.isProjectStart() ? 0 : start[moment.activity()] + offset(moment);
   }
 
   private long offset(Moment moment) {

@@ -90,9 +90,15 @@ public final class RandomNetworks {
     if (from.equals(to)) {
       from = Moment.PROJECT_START;
     }
+    if (!from.isProjectStart() && random.nextInt(5) == 0) {
+      return new Span("early", from, Moment.PROJECT_START, -time(0, 25), price());
+    }
     long free = from.isProjectStart() || random.nextInt(4) == 0 ? time(0, 25) - time(0, 3) : 0;
-    Money rate = Money.of(10L * (1 + random.nextInt(6))).dividedBy(ticksPerUnit);
-    return new Span("span", from, to, free, rate);
+    return new Span("span", from, to, free, price());
+  }
+
+  private Money price() {
+    return Money.of(10L * (1 + random.nextInt(6))).dividedBy(ticksPerUnit);
   }
 
   private Activity activity(int index) {

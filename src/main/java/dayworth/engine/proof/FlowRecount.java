@@ -5,6 +5,7 @@ import dayworth.engine.Flow.Over;
 import dayworth.engine.proof.Verdict.Refuted;
 import dayworth.network.Activity;
 import dayworth.network.Link;
+import dayworth.network.Moment;
 import dayworth.network.Network;
 import dayworth.network.Span;
 import java.util.Locale;
@@ -113,12 +114,16 @@ final class FlowRecount {
     } else if (amount > 0) {
       Span span = network.spans().get(index);
       lengths.addProduct(-span.free(), amount);
-      add(span.to().isFinish() ? atFinish : atStart, span.to().activity(), -amount);
-      if (span.from().isProjectStart()) {
-        leaving.addProduct(-1, amount);
-      } else {
-        add(span.from().isFinish() ? atFinish : atStart, span.from().activity(), amount);
-      }
+      addAt(span.to(), -amount);
+      addAt(span.from(), amount);
+    }
+  }
+
+  private void addAt(Moment moment, long amount) {
+    if (moment.isProjectStart()) {
+      leaving.addProduct(-1, amount);
+    } else {
+      add(moment.isFinish() ? atFinish : atStart, moment.activity(), amount);
     }
   }
 
