@@ -1,5 +1,6 @@
 package dayworth.report;
 
+import dayworth.contract.Terms;
 import dayworth.decision.Case;
 import dayworth.decision.CrossCheck;
 import dayworth.decision.CurveAnswer;
@@ -123,7 +124,7 @@ public final class CurveText {
   /** Finishes from which the total rises both ways and that are not the least. */
   private static String lows(CurveAnswer answer, MoneyLook look) {
     List<String> lows = new ArrayList<>();
-    List<Finish> rows = answer.rows();
+    List<Finish> rows = compared(answer);
     Money least = total(answer.leastTotal());
     BigDecimal left =
         answer.asPlanned().direct().cents().add(answer.asPlanned().other().fixed().cents());
@@ -149,6 +150,21 @@ public final class CurveText {
             + String.join(", ", lows.subList(0, shown))
             + more
             + ".";
+  }
+
+  /**
+   * Where time costs by the date, every hour or shift given to a day that is paid for anyway saves
+   * direct cost; only the ends of days are then compared.
+   */
+  private static List<Finish> compared(CurveAnswer answer) {
+    Terms terms = answer.of().terms();
+    return terms
+        .calendar()
+        .filter(calendar -> terms.timeRelated().per().isByDate())
+        .map(
+            calendar ->
+                answer.rows().stream().filter(row -> calendar.isEndOfDay(row.duration())).toList())
+        .orElse(answer.rows());
   }
 
   private static Money total(Finish finish) {
