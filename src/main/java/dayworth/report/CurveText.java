@@ -29,7 +29,7 @@ public final class CurveText {
     int used = Math.min(width, WIDEST);
     FinishTable finishes = new FinishTable(answer);
     List<String> lines = new ArrayList<>();
-    String sentence = sentence(answer, finishes.look());
+    String sentence = sentence(answer, finishes.look(), used);
     lines.add(style.bold(Wording.answer(sentence, answer.of().currency(), used)));
     lines.add("");
     lines.addAll(finishes.lines(style, used));
@@ -88,16 +88,25 @@ public final class CurveText {
     return text.isEmpty() ? List.of() : Wording.wrap(text, Wording.INDENT, width);
   }
 
-  private static String sentence(CurveAnswer answer, MoneyLook look) {
+  /** Where a date and the working days do not leave room for the currency, they are days. */
+  private static String sentence(CurveAnswer answer, MoneyLook look, int width) {
     Case of = answer.of();
-    Finish least = answer.leastTotal();
-    String duration = Wording.workingDuration(of, least.duration());
+    long least = answer.leastTotal().duration();
     Dates dates = new Dates(of);
-    String finish =
-        "Least total: finish "
-            + (dates.areKnown()
-                ? dates.spokenFinish("on ", least.duration(), " (" + duration + ")")
-                : "in " + duration);
+    String duration = Wording.workingDuration(of, least);
+    if (!dates.areKnown()) {
+      return sentence(answer, look, "in " + duration);
+    }
+    String whole = sentence(answer, look, dates.spokenFinish("on ", least, " (" + duration + ")"));
+    String days = dates.spokenFinish("on ", least, " (" + Wording.duration(of, least) + ")");
+    return whole.length() + 2 + of.currency().length() <= width
+        ? whole
+        : sentence(answer, look, days);
+  }
+
+  private static String sentence(CurveAnswer answer, MoneyLook look, String when) {
+    Finish least = answer.leastTotal();
+    String finish = "Least total: finish " + when;
     BigDecimal better = answer.asPlanned().total().subtract(least.total());
     if (better.signum() > 0) {
       return finish + ", " + look.text(better) + " better than as planned.";
