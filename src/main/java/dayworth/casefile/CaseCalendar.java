@@ -43,10 +43,15 @@ record CaseCalendar(TimeScale scale, Optional<WorkingCalendar> calendar) {
 
   /** The first tick on or after a moment at which work may start. */
   long start(Moment moment) {
-    return moment
-        .date()
-        .map(date -> calendar.orElseThrow().morningOf(date))
-        .orElseGet(() -> scale.ticks(moment.units().orElseThrow()));
+    if (calendar.isEmpty()) {
+      return scale.ticks(moment.units().orElseThrow());
+    }
+    long tick =
+        moment
+            .date()
+            .map(date -> calendar.get().morningOf(date))
+            .orElseGet(() -> calendar.get().counted(scale.ticks(moment.units().orElseThrow())));
+    return Math.max(0, tick);
   }
 
   /** A moment by which something is due. */

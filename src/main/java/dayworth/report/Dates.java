@@ -15,6 +15,9 @@ import java.util.Optional;
 /** The dates of a case as files and people read them; all blank where it has none. */
 final class Dates {
 
+  /** Within so many months a day and a month are one date. */
+  private static final int PLAIN_MONTHS = 11;
+
   private final Optional<WorkingCalendar> calendar;
 
   Dates(Case of) {
@@ -54,13 +57,15 @@ final class Dates {
                     dates -> (int) ChronoUnit.DAYS.between(date, dates.finishDate(ticks))));
   }
 
-  /** Finish dates below each other, without the year if it is the same for all. */
+  /** Finish dates below each other, without the year where none can be taken for another. */
   List<String> column(Collection<Long> ticks) {
     WorkingCalendar dates = calendar.orElseThrow();
     List<LocalDate> finishes = ticks.stream().map(dates::finishDate).toList();
-    boolean oneYear = finishes.stream().map(LocalDate::getYear).distinct().count() == 1;
+    LocalDate first = finishes.stream().min(LocalDate::compareTo).orElseThrow();
+    LocalDate last = finishes.stream().max(LocalDate::compareTo).orElseThrow();
+    boolean plain = last.isBefore(first.plusMonths(PLAIN_MONTHS));
     return finishes.stream()
-        .map(date -> oneYear ? dayAndMonth(date) : dayAndMonth(date) + " " + date.getYear())
+        .map(date -> plain ? dayAndMonth(date) : dayAndMonth(date) + " " + date.getYear())
         .toList();
   }
 

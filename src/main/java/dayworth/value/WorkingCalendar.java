@@ -153,6 +153,11 @@ public final class WorkingCalendar {
     return day.endOf(worked.through(date.minusDays(1)) + 1 - elapsedDays);
   }
 
+  /** Whether a duration uses its last working day up. */
+  public boolean isEndOfDay(long duration) {
+    return day.endOf(day.daysToFinish(duration)) == duration;
+  }
+
   /** The ends of working days from one time to another, both included; ascending. */
   public List<Long> endsOfDays(long from, long to) {
     List<Long> ends = new ArrayList<>();
