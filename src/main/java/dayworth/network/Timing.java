@@ -55,6 +55,15 @@ public final class Timing {
     return plan;
   }
 
+  /** When the plan starts an activity; where it leaves that open, as early as can be. */
+  public long start(int activity) {
+    return plan.isScheduled() ? plan.start(activity) : earlyStart[activity];
+  }
+
+  public long finish(int activity) {
+    return start(activity) + plan.duration(activity);
+  }
+
   public long earlyStart(int activity) {
     return earlyStart[activity];
   }

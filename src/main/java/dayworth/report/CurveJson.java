@@ -44,6 +44,14 @@ final class CurveJson {
         members -> {
           members.number("proved", answer.provedRows());
           members.number("of", answer.rows().size());
+          members.array(
+              "unproved",
+              answer.unproved(),
+              (gap, unproved) -> {
+                gap.number("duration", names.units(unproved.duration()));
+                gap.number("cost", unproved.cost().cents());
+                gap.number("bound", unproved.bound().cents());
+              });
         });
   }
 
@@ -135,8 +143,8 @@ final class CurveJson {
     json.number("units_compressed", names.units(activity.normal() - duration));
     json.number("extra_cost", PlanTable.extraCost(activity, duration).cents());
     if (dates.areKnown()) {
-      json.text("start_date", dates.start(timing.earlyStart(index), timing.earlyFinish(index)));
-      json.text("finish_date", dates.finish(timing.earlyFinish(index)));
+      json.text("start_date", dates.start(timing.start(index), timing.finish(index)));
+      json.text("finish_date", dates.finish(timing.finish(index)));
     }
     json.number("early_start", names.units(timing.earlyStart(index)));
     json.number("early_finish", names.units(timing.earlyFinish(index)));

@@ -180,6 +180,18 @@ public final class CurveText {
     return finish.direct().plus(finish.running()).plus(finish.other().sum());
   }
 
+  /** What is known of the rest, which is the best that was found. */
+  private static String gap(CurveAnswer answer) {
+    if (answer.unproved().isEmpty()) {
+      return "";
+    }
+    BigDecimal most =
+        answer.unproved().stream()
+            .map(finish -> finish.gap().cents())
+            .reduce(BigDecimal.ZERO, BigDecimal::max);
+    return "; the rest is at most " + MoneyLook.of(List.of(most)).text(most) + " too dear";
+  }
+
   private static String proof(CurveAnswer answer) {
     CrossCheck check = answer.crossCheck();
     String proved =
@@ -187,6 +199,7 @@ public final class CurveText {
             + answer.provedRows()
             + " of "
             + Wording.count(answer.rows().size(), "finish", "finishes")
+            + gap(answer)
             + ". ";
     int points = check.comparisons().size();
     int silent = check.unanswered().size();

@@ -121,6 +121,7 @@ class CurveTextTest {
             plain.crashEverything(),
             plain.asked(),
             plain.provedRows(),
+            plain.unproved(),
             plain.crossCheck());
     List<String> lines = CurveText.lines(stopped, Style.PLAIN, 94);
     assertTrue(

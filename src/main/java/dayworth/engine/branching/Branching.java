@@ -66,6 +66,24 @@ public final class Branching {
     }
   }
 
+  /** A bound did not stand up to its recheck. */
+  public static final class BoundRefuted extends RuntimeException {
+
+    private static final long serialVersionUID = 1;
+
+    private final long duration;
+
+    BoundRefuted(long duration, String why) {
+      super(why);
+      this.duration = duration;
+    }
+
+    /** The finish that was to be bounded, ticks. */
+    public long duration() {
+      return duration;
+    }
+  }
+
   private final Network network;
   private final List<Charge> charges;
   private final long[] durations;
@@ -91,7 +109,7 @@ public final class Branching {
    * @param durations ticks, from long to short; for each some plan must exist
    * @param most how many convex problems are solved at most, beyond one for each finish
    * @return one point for each duration
-   * @throws IllegalStateException if a bound does not stand up to its recheck
+   * @throws BoundRefuted if a bound does not stand up to its recheck
    */
   public static List<Point> solve(
       Network network, List<Charge> charges, long[] durations, long most) {
@@ -195,8 +213,7 @@ public final class Branching {
             .orElseThrow(() -> new IllegalStateException("no plan within " + duration));
     if (checker.check(plan, duration, descent.flow(), plan.cost(relaxed))
         instanceof Verdict.Refuted refuted) {
-      throw new IllegalStateException(
-          "the bound for " + duration + " fails: " + refuted.where() + ", " + refuted.why());
+      throw new BoundRefuted(duration, refuted.where() + ": " + refuted.why());
     }
     return plan;
   }
