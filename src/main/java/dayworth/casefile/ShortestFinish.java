@@ -77,7 +77,7 @@ final class ShortestFinish {
     return chain;
   }
 
-  /** Whether its first event is a start; a finish at 0 waits for nothing. */
+  /** Whether its first event is a start; a finish waits for no not_before of its own. */
   private boolean beginsWithStart() {
     int first = last;
     while (before[first] != NONE) {
@@ -92,7 +92,7 @@ final class ShortestFinish {
     int finish = start + 1;
     time[start] = notBefore.applyAsLong(i);
     before[start] = NONE;
-    time[finish] = 0;
+    time[finish] = activity.notFinishedBefore();
     before[finish] = NONE;
     for (int k = 0; k < network.linksInto(i); k++) {
       Link link = network.link(network.linkInto(i, k));

@@ -110,7 +110,7 @@ public final class Timing {
     long[] early = new long[network.size()];
     for (int position = 0; position < early.length; position++) {
       int activity = network.inOrder(position);
-      long start = network.activity(activity).notBefore();
+      long start = network.activity(activity).earliestStart(plan.duration(activity));
       for (int k = 0; k < network.linksInto(activity); k++) {
         Link link = network.link(network.linkInto(activity, k));
         start = Math.max(start, early[link.predecessor()] + between(link, plan));

@@ -180,7 +180,7 @@ class DoubtLawsTest {
     for (int k = 0; k < chain.size(); k++) {
       Activity activity = network.activity(chain.get(k));
       long nextStart = k == 0 ? activity.notBefore() : Long.MIN_VALUE / 4;
-      long nextFinish = k == 0 ? 0 : Long.MIN_VALUE / 4;
+      long nextFinish = k == 0 ? activity.notFinishedBefore() : Long.MIN_VALUE / 4;
       for (Link link : network.links()) {
         if (k > 0 && link.predecessor() == chain.get(k - 1) && link.successor() == chain.get(k)) {
           long bound = (link.relation().fromStart() ? start : finish) + link.lag();
