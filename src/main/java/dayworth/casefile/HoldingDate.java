@@ -25,7 +25,8 @@ final class HoldingDate {
         || Timing.earliest(network, Plan.allNormal(network)).finish() > shortest.ticks()) {
       return;
     }
-    long without = ShortestFinish.without(network, holder).ticks();
+    long byThen = read.work().earliestStart(holder);
+    long without = ShortestFinish.with(network, holder, byThen).ticks();
     if (without < shortest.ticks()) {
       String found =
           read.activities()

@@ -47,9 +47,10 @@ final class ShortestFinish {
     return new ShortestFinish(network, i -> network.activity(i).notBefore());
   }
 
-  /** The same where one activity may start at any time. */
-  static ShortestFinish without(Network network, int activity) {
-    return new ShortestFinish(network, i -> i == activity ? 0 : network.activity(i).notBefore());
+  /** The same where one activity may start at another time. */
+  static ShortestFinish with(Network network, int activity, long notBefore) {
+    return new ShortestFinish(
+        network, i -> i == activity ? notBefore : network.activity(i).notBefore());
   }
 
   /** In ticks. */

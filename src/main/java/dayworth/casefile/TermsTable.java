@@ -41,6 +41,7 @@ final class TermsTable {
                   .with("shift", TimeUnit.SHIFT)),
           Map.entry("units_per_working_day", TimeCell.DURATION),
           Map.entry("start_date", DateCell.DATE),
+          Map.entry("data_date", DateCell.DATE),
           Map.entry("working_days", (CellParser<WorkingDays>) WorkingDays::parse),
           Map.entry("time_related_cost", MoneyCell.AMOUNT),
           Map.entry("time_related_per", PER),
@@ -62,7 +63,6 @@ final class TermsTable {
 
   private static final Set<String> NOT_YET =
       Set.of(
-          "data_date",
           "extension",
           "basis",
           "prepared_for",
@@ -121,6 +121,11 @@ final class TermsTable {
   /** The first day of the project. */
   Optional<LocalDate> startDate() {
     return Optional.ofNullable((LocalDate) values.get("start_date"));
+  }
+
+  /** The day at whose end time begins to count. */
+  Optional<LocalDate> dataDate() {
+    return Optional.ofNullable((LocalDate) values.get("data_date"));
   }
 
   /** The days of the week that are worked; Monday to Friday if nothing else is said. */
@@ -207,6 +212,7 @@ final class TermsTable {
   }
 
   private void requireTogether() {
+    require("data_date", "start_date");
     require("damages_rate", "contract_finish");
     require("bonus_rate", "contract_finish");
     require("damages_grace", "damages_rate");

@@ -3,6 +3,7 @@ package dayworth.decision;
 import dayworth.contract.Terms;
 import dayworth.network.Network;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * A case that was read and found sound.
@@ -11,6 +12,8 @@ import java.util.List;
  * @param title for people; may be empty
  * @param currency an ISO 4217 code or a symbol; may be empty
  * @param unit what a duration of one means
+ * @param network the work to go: all of it, or what a status leaves
+ * @param progress how far the work is; empty where time counts from the start
  * @param warnings doubtful input, sorted; they stand in every result
  * @param inputs the files it was read from, sorted by name
  */
@@ -21,11 +24,40 @@ public record Case(
     TimeUnit unit,
     Network network,
     Terms terms,
+    Optional<Progress> progress,
     List<Notice> warnings,
     List<InputFile> inputs) {
 
   public Case {
     warnings = List.copyOf(warnings);
     inputs = List.copyOf(inputs);
+  }
+
+  /** A case of which nothing has started. */
+  public Case(
+      String name,
+      String title,
+      String currency,
+      TimeUnit unit,
+      Network network,
+      Terms terms,
+      List<Notice> warnings,
+      List<InputFile> inputs) {
+    this(name, title, currency, unit, network, terms, Optional.empty(), warnings, inputs);
+  }
+
+  /** How far an activity is. */
+  public Status status(int activity) {
+    return progress.map(all -> all.statuses().get(activity)).orElseGet(Status.NotStarted::new);
+  }
+
+  /** Whether an activity is still to be done, wholly or in part. */
+  public boolean isToGo(int activity) {
+    return !status(activity).isFinished();
+  }
+
+  /** How many activities are still to be done. */
+  public int toGo() {
+    return network.size() - progress.map(Progress::finished).orElse(0);
   }
 }
