@@ -39,7 +39,9 @@ final class HoldingDate {
           "with it no finish is "
               + (read.calendar().isPresent() ? "before " : "shorter than ")
               + finish(read, shortest.ticks())
-              + ", as planned; without it "
+              + (read.progress().isEmpty()
+                  ? ", as planned; without it "
+                  : ", as it stands; without it ")
               + finish(read, without)
               + "; the chain: "
               + read.named(shortest.chain());

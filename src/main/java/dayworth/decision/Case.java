@@ -2,8 +2,10 @@ package dayworth.decision;
 
 import dayworth.contract.Terms;
 import dayworth.network.Network;
+import dayworth.network.Timing;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.IntStream;
 
 /**
  * A case that was read and found sound.
@@ -54,6 +56,15 @@ public record Case(
   /** Whether an activity is still to be done, wholly or in part. */
   public boolean isToGo(int activity) {
     return !status(activity).isFinished();
+  }
+
+  /** Whether work that is to go is critical; what is finished never is. */
+  public boolean isCritical(Timing timing, int activity) {
+    return isToGo(activity) && timing.isCritical(activity);
+  }
+
+  public int criticalCount(Timing timing) {
+    return (int) IntStream.range(0, network.size()).filter(i -> isCritical(timing, i)).count();
   }
 
   /** How many activities are still to be done. */

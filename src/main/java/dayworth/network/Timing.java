@@ -87,16 +87,6 @@ public final class Timing {
     return totalFloat(activity) == 0;
   }
 
-  public int criticalCount() {
-    int count = 0;
-    for (int i = 0; i < network.size(); i++) {
-      if (isCritical(i)) {
-        count++;
-      }
-    }
-    return count;
-  }
-
   /** How much later than it must the successor comes at early times. */
   public long slack(Link link) {
     return earlyStart[link.successor()] - earlyStart[link.predecessor()] - between(link, plan);

@@ -30,6 +30,7 @@ public final class CurveText {
     List<String> lines = new ArrayList<>();
     String sentence = sentence(answer, finishes.look());
     lines.add(style.bold(Wording.answer(sentence, answer.of().currency(), used)));
+    lines.addAll(prose(Wording.status(answer.of()), used));
     lines.add("");
     lines.addAll(finishes.lines(style, used));
     lines.addAll(prose(ties(answer), used));
@@ -97,13 +98,14 @@ public final class CurveText {
             + (dates.areKnown()
                 ? dates.spokenFinish("on ", least.duration(), " (" + duration + ")")
                 : "in " + duration);
+    String asPlanned = Wording.asPlanned(of);
     BigDecimal better = answer.asPlanned().total().subtract(least.total());
     if (better.signum() > 0) {
-      return finish + ", " + look.text(better) + " better than as planned.";
+      return finish + ", " + look.text(better) + " better than " + asPlanned + ".";
     }
     return least.duration() == answer.asPlanned().duration()
-        ? finish + ", as planned."
-        : finish + ", no better than as planned.";
+        ? finish + ", " + asPlanned + "."
+        : finish + ", no better than " + asPlanned + ".";
   }
 
   private static String ties(CurveAnswer answer) {
