@@ -16,9 +16,14 @@ final class Resolution {
 
   /**
    * The coarsest scale on which every time of the case is whole; the finest where a cap in money is
-   * reached within a unit, or where a working day is no decimal part of a week.
+   * reached within a unit, where a working day is no decimal part of a week, or where what remains
+   * can be compressed to no decimal part of a unit.
    */
-  static TimeScale of(List<ActivityRow> activities, List<LinkRow> links, TermsTable terms) {
+  static TimeScale of(
+      List<ActivityRow> activities,
+      List<LinkRow> links,
+      TermsTable terms,
+      List<ProgressRow> progress) {
     TimeScale scale = ofTerms(terms);
     for (ActivityRow row : activities) {
       scale =
@@ -30,7 +35,26 @@ final class Resolution {
     for (LinkRow row : links) {
       scale = scale.and(TimeScale.of(row.lag()));
     }
+    for (ProgressRow row : progress) {
+      scale = scale.and(of(row.remaining().value())).and(of(row.crash().value()));
+      scale = scale.and(ofProportion(row, activities.get(row.activity())));
+    }
     return scale;
+  }
+
+  /** Whether the crash duration of what remains, in proportion to the whole, is exact. */
+  private static TimeScale ofProportion(ProgressRow row, ActivityRow whole) {
+    if (!row.isInProgress() || row.crash().given() || whole.crash().isEmpty()) {
+      return TimeScale.WHOLE;
+    }
+    BigDecimal product = row.remaining().value().orElseThrow().multiply(whole.crash().get());
+    BigDecimal[] parts =
+        product
+            .movePointRight(TimeScale.MOST_DECIMALS)
+            .divideAndRemainder(whole.normal().orElseThrow());
+    return parts[1].signum() == 0
+        ? TimeScale.of(parts[0].movePointLeft(TimeScale.MOST_DECIMALS))
+        : FINEST;
   }
 
   private static TimeScale ofTerms(TermsTable terms) {

@@ -30,6 +30,7 @@ final class TermCells {
                   .with("shift", TimeUnit.SHIFT)),
           Map.entry("units_per_working_day", TimeCell.DURATION),
           Map.entry("start_date", DateCell.DATE),
+          Map.entry("data_date", DateCell.DATE),
           Map.entry("working_days", (CellParser<WorkingDays>) WorkingDays::parse),
           Map.entry("time_related_cost", MoneyCell.AMOUNT),
           Map.entry("time_related_per", PER),
@@ -51,7 +52,6 @@ final class TermCells {
 
   private static final Set<String> NOT_YET =
       Set.of(
-          "data_date",
           "extension",
           "basis",
           "prepared_for",

@@ -72,6 +72,11 @@ final class TermsTable {
     return Optional.ofNullable((LocalDate) values.get("start_date"));
   }
 
+  /** The day at whose end time begins to count. */
+  Optional<LocalDate> dataDate() {
+    return Optional.ofNullable((LocalDate) values.get("data_date"));
+  }
+
   /** The days of the week that are worked; Monday to Friday if nothing else is said. */
   Set<DayOfWeek> workingDays() {
     WorkingDays days = (WorkingDays) values.getOrDefault("working_days", WorkingDays.USUAL);
@@ -142,6 +147,7 @@ final class TermsTable {
   }
 
   private void requireTogether() {
+    require("data_date", "start_date");
     require("damages_rate", "contract_finish");
     require("bonus_rate", "contract_finish");
     require("damages_grace", "damages_rate");

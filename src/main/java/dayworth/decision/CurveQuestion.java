@@ -206,7 +206,7 @@ public final class CurveQuestion {
     for (int k = 0; k < curve.steps().size(); k++) {
       Step step = curve.steps().get(k);
       Timing after = Timing.by(network, curve.planAfter(k + 1), step.to());
-      facts.add(new StepFacts(step, after.criticalCount(), newlyCritical(before, after)));
+      facts.add(new StepFacts(step, of.criticalCount(after), newlyCritical(before, after)));
       before = after;
     }
     return facts;
@@ -215,7 +215,7 @@ public final class CurveQuestion {
   private List<Integer> newlyCritical(Timing before, Timing after) {
     List<Integer> newly = new ArrayList<>();
     for (int i = 0; i < network.size(); i++) {
-      if (after.isCritical(i) && !before.isCritical(i)) {
+      if (of.isCritical(after, i) && !before.isCritical(i)) {
         newly.add(i);
       }
     }

@@ -66,7 +66,8 @@ final class GivenDurations {
         duration,
         Money.ZERO,
         Money.ZERO,
-        activity.notBefore());
+        activity.notBefore(),
+        activity.notFinishedBefore());
   }
 
   /** A tick of any section outweighs all running cost. */

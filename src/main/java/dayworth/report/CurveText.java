@@ -31,6 +31,7 @@ public final class CurveText {
     List<String> lines = new ArrayList<>();
     String sentence = sentence(answer, finishes.look(), used);
     lines.add(style.bold(Wording.answer(sentence, answer.of().currency(), used)));
+    lines.addAll(prose(Wording.status(answer.of()), used));
     lines.add("");
     lines.addAll(finishes.lines(style, used));
     lines.addAll(prose(ties(answer), used));
@@ -107,13 +108,14 @@ public final class CurveText {
   private static String sentence(CurveAnswer answer, MoneyLook look, String when) {
     Finish least = answer.leastTotal();
     String finish = "Least total: finish " + when;
+    String asPlanned = Wording.asPlanned(answer.of());
     BigDecimal better = answer.asPlanned().total().subtract(least.total());
     if (better.signum() > 0) {
-      return finish + ", " + look.text(better) + " better than as planned.";
+      return finish + ", " + look.text(better) + " better than " + asPlanned + ".";
     }
     return least.duration() == answer.asPlanned().duration()
-        ? finish + ", as planned."
-        : finish + ", no better than as planned.";
+        ? finish + ", " + asPlanned + "."
+        : finish + ", no better than " + asPlanned + ".";
   }
 
   private static String ties(CurveAnswer answer) {

@@ -2,6 +2,7 @@ package dayworth.report;
 
 import dayworth.contract.Due;
 import dayworth.decision.Case;
+import dayworth.decision.Status;
 import dayworth.value.WorkingCalendar;
 import java.time.DayOfWeek;
 import java.time.LocalDate;
@@ -36,6 +37,16 @@ final class Dates {
   /** The start date of work from {@code start} to {@code finish}, for a table cell. */
   String start(long start, long finish) {
     return calendar.map(dates -> dates.startDate(start, finish).toString()).orElse(CsvText.BLANK);
+  }
+
+  /** When an activity started or will, for a table cell. */
+  String start(Status status, long start, long finish) {
+    return status.started().map(LocalDate::toString).orElseGet(() -> start(start, finish));
+  }
+
+  /** When an activity was finished or will be, likewise. */
+  String finish(Status status, long finish) {
+    return status instanceof Status.Finished done ? done.to().toString() : finish(finish);
   }
 
   /** The finish date in words before or behind other words; empty where there are none. */

@@ -84,6 +84,9 @@ final class ObstacleText {
         String when = units(start.ticks());
         String date = new Dates(of).spokenStart(" (", start.ticks(), ")");
         reasons.add(": " + id(start.activity()) + " may not start before " + when + date);
+      } else if (term instanceof Obstacle.NotFinishedBefore finish) {
+        String when = Wording.finish(of, finish.ticks());
+        reasons.add(": " + id(finish.activity()) + " may not finish before " + when);
       }
     }
     return reasons.stream()

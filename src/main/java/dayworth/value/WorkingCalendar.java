@@ -85,9 +85,9 @@ public final class WorkingCalendar {
     return weekdays;
   }
 
-  /** How many holidays fall on worked weekdays from the start on. */
+  /** How many holidays fall on worked weekdays from when time counts. */
   public int holidaysThatCount() {
-    return worked.holidaysThatCount();
+    return dataDate.map(worked::holidaysAfter).orElseGet(worked::holidaysThatCount);
   }
 
   public DayLength dayLength() {

@@ -50,7 +50,6 @@ class FolderRulesTest {
       strings = {
         "sections.csv",
         "running.csv",
-        "progress.csv",
         "measures.csv",
         "packages.csv",
         "labour.csv",

@@ -120,7 +120,6 @@ class TermRulesTest {
   @ParameterizedTest
   @ValueSource(
       strings = {
-        "data_date",
         "extension",
         "basis",
         "prepared_for",

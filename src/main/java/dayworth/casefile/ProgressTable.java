@@ -1,0 +1,105 @@
+package dayworth.casefile;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+
+/** Reads progress.csv: how far each activity is at the end of the data date. */
+final class ProgressTable {
+
+  static final String FILE = "progress.csv";
+  static final String STARTED = "started";
+  static final String FINISHED = "finished";
+  static final String REMAINING = "remaining_duration";
+  static final String CRASH_DURATION = "remaining_crash_duration";
+  static final String CRASH_COST = "remaining_crash_cost";
+
+  private static final List<Column> COLUMNS =
+      List.of(
+          Column.needed("activity"),
+          Column.optional(STARTED),
+          Column.optional(FINISHED),
+          Column.optional(REMAINING).withNumbers(),
+          Column.optional(CRASH_DURATION).withNumbers(),
+          Column.optional(CRASH_COST).withNumbers());
+
+  private final List<ActivityRow> activities;
+
+  /** Otherwise no id can be told right from wrong. */
+  private final boolean idsAreKnown;
+
+  private final Findings findings;
+  private final Map<String, Integer> indexById = new HashMap<>();
+  private final Map<Integer, Integer> lineByActivity = new HashMap<>();
+  private final Nearest nearest;
+
+  private ProgressTable(Optional<List<ActivityRow>> known, Findings findings) {
+    activities = known.orElse(List.of());
+    idsAreKnown = known.isPresent();
+    this.findings = findings;
+    for (int i = 0; i < activities.size(); i++) {
+      indexById.putIfAbsent(activities.get(i).id(), i);
+    }
+    nearest = new Nearest(activities.stream().map(ActivityRow::id).toList());
+  }
+
+  /**
+   * The rows whose activity exists, each activity once; all faults are reported.
+   *
+   * @param known the activities; empty where their ids could not be read
+   */
+  static List<ProgressRow> read(
+      Optional<List<ActivityRow>> known, Optional<String> text, Findings findings) {
+    return text.flatMap(csv -> Table.of(FILE, csv, COLUMNS, findings))
+        .map(table -> new ProgressTable(known, findings).rows(table))
+        .orElse(List.of());
+  }
+
+  private List<ProgressRow> rows(Table table) {
+    RemainingRules rules = new RemainingRules(table, activities, findings);
+    List<ProgressRow> rows = new ArrayList<>();
+    for (Row row : table.rows()) {
+      Cell<String> id = table.needed(row, "activity", (text, style) -> text, findings);
+      Optional<Integer> activity = id.value().flatMap(text -> index(table, row, text));
+      ProgressRow read = row(table, row, activity.orElse(-1));
+      if (activity.isPresent()) {
+        rules.check(row, read);
+        rows.add(read);
+      }
+    }
+    rules.reportMissingColumns();
+    return rows;
+  }
+
+  private Optional<Integer> index(Table table, Row row, String id) {
+    Place place = table.place(row, "activity");
+    Integer index = indexById.get(id);
+    if (index == null) {
+      if (idsAreKnown) {
+        String right = nearest.hint(id, "an id of " + ActivityTable.FILE);
+        findings.problem(place.notice(id + " is no activity", id, right));
+      }
+      return Optional.empty();
+    }
+    Integer earlier = lineByActivity.putIfAbsent(index, row.line());
+    if (earlier != null) {
+      String right = "line " + earlier + " has it";
+      findings.problem(place.notice("a second row of this activity", id, right));
+      return Optional.empty();
+    }
+    return Optional.of(index);
+  }
+
+  private ProgressRow row(Table table, Row row, int activity) {
+    return new ProgressRow(
+        row.line(),
+        activity,
+        table.cell(row, STARTED, DateCell.DATE, findings),
+        table.cell(row, FINISHED, DateCell.DATE, findings),
+        table.cell(row, REMAINING, TimeCell.DURATION, findings),
+        table.cell(row, CRASH_DURATION, TimeCell.DURATION, findings),
+        table.cell(row, CRASH_COST, MoneyCell.AMOUNT, findings));
+  }
+}
