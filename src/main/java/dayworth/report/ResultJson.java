@@ -2,6 +2,7 @@ package dayworth.report;
 
 import dayworth.decision.CheckAnswer;
 import dayworth.decision.CurveAnswer;
+import dayworth.decision.MeetAnswer;
 
 /**
  * The text of result.json: an answer for programs.
@@ -18,6 +19,15 @@ public final class ResultJson {
         json -> {
           CaseJson.writeHead(json, answer.of(), "curve", programVersion);
           new CurveJson(answer).write(json);
+        });
+  }
+
+  public static String ofMeet(MeetAnswer answer, String programVersion) {
+    return JsonText.object(
+        json -> {
+          CaseJson.writeHead(json, answer.of(), "meet", programVersion);
+          new MeetJson(answer).write(json);
+          new CurveJson(answer.curve()).write(json);
         });
   }
 
