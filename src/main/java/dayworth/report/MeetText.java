@@ -120,7 +120,12 @@ public final class MeetText {
     if (answer.wish() instanceof Wish.ByDate by) {
       return Dates.spoken(by.date());
     }
-    return answer.wish() instanceof Wish.In in ? Wording.duration(of, in.ticks()) : "";
+    if (answer.wish() instanceof Wish.In in) {
+      return answer.isMetAsPlanned()
+          ? Wording.duration(of, in.ticks())
+          : Wording.finish(of, in.ticks());
+    }
+    return "";
   }
 
   private String finish() {
