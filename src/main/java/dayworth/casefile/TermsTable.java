@@ -46,6 +46,7 @@ final class TermsTable {
           Map.entry("time_related_per", PER),
           Map.entry("fixed_cost", MoneyCell.AMOUNT),
           Map.entry("contract_finish", Moment.Parser.MOMENT),
+          Map.entry("extension", Moment.Parser.MOMENT),
           Map.entry("damages_rate", MoneyCell.AMOUNT),
           Map.entry("damages_per", PER),
           Map.entry(
@@ -63,7 +64,6 @@ final class TermsTable {
   private static final Set<String> NOT_YET =
       Set.of(
           "data_date",
-          "extension",
           "basis",
           "prepared_for",
           "prepared_by",
@@ -209,6 +209,7 @@ final class TermsTable {
   private void requireTogether() {
     require("damages_rate", "contract_finish");
     require("bonus_rate", "contract_finish");
+    require("extension", "contract_finish");
     require("damages_grace", "damages_rate");
     require("damages_cap", "damages_rate");
     require("bonus_cap", "bonus_rate");

@@ -18,6 +18,7 @@ import java.util.TreeSet;
  * @param contractFinish by when the contract wants completion
  * @param damages charged after the contract finish
  * @param bonus paid before the contract finish
+ * @param extension of time, claimed but not granted
  */
 public record Terms(
     TimeScale scale,
@@ -26,7 +27,8 @@ public record Terms(
     Money fixedCost,
     Optional<Due> contractFinish,
     Damages damages,
-    Bonus bonus) {
+    Bonus bonus,
+    Optional<Extension> extension) {
 
   /**
    * Joins the terms.
@@ -41,6 +43,18 @@ public record Terms(
         || (contractFinish.isPresent() && dueHasDate != calendar.isPresent())) {
       throw new IllegalArgumentException("money by the date needs dates");
     }
+  }
+
+  /** Terms without a claim for more time. */
+  public Terms(
+      TimeScale scale,
+      Optional<WorkingCalendar> calendar,
+      TimeRelated timeRelated,
+      Money fixedCost,
+      Optional<Due> contractFinish,
+      Damages damages,
+      Bonus bonus) {
+    this(scale, calendar, timeRelated, fixedCost, contractFinish, damages, bonus, Optional.empty());
   }
 
   /** No terms at all: only direct cost counts. */
@@ -67,6 +81,29 @@ public record Terms(
         contractFinish
             .map(due -> bonus.forEarliness(counting.lateness(due, finish, bonus.per()).negate()))
             .orElse(Money.ZERO));
+  }
+
+  /** The same terms with another contract finish, and no claim for more time. */
+  public Terms dueBy(Due due) {
+    return new Terms(scale, calendar, timeRelated, fixedCost, Optional.of(due), damages, bonus);
+  }
+
+  /**
+   * For how many of what damages are per they are charged, were there no cap: what they cost at a
+   * rate of 1.
+   */
+  public Money damagesCount(long finish) {
+    Damages one =
+        new Damages(
+            Money.of(1), damages.per(), damages.grace(), Optional.empty(), damages.partWeek());
+    return contractFinish
+        .map(due -> one.forLateness(counting().lateness(due, finish, damages.per())))
+        .orElse(Money.ZERO);
+  }
+
+  /** For how many of what it is per time-related cost runs: what it costs at a rate of 1. */
+  public Money timeRelatedCount(long finish) {
+    return counting().until(finish, timeRelated.per()).at(Money.of(1));
   }
 
   /**

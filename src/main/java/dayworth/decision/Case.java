@@ -1,5 +1,6 @@
 package dayworth.decision;
 
+import dayworth.contract.Due;
 import dayworth.contract.Terms;
 import dayworth.network.Network;
 import java.util.List;
@@ -27,5 +28,10 @@ public record Case(
   public Case {
     warnings = List.copyOf(warnings);
     inputs = List.copyOf(inputs);
+  }
+
+  /** The same case under another contract finish. */
+  public Case dueBy(Due due) {
+    return new Case(name, title, currency, unit, network, terms.dueBy(due), warnings, inputs);
   }
 }

@@ -121,7 +121,6 @@ class TermRulesTest {
   @ValueSource(
       strings = {
         "data_date",
-        "extension",
         "basis",
         "prepared_for",
         "prepared_by",
