@@ -1,6 +1,7 @@
 package dayworth.casefile;
 
 import dayworth.contract.Due;
+import dayworth.contract.Extension;
 import dayworth.decision.TimeUnit;
 import dayworth.value.DayLength;
 import dayworth.value.TimeScale;
@@ -76,6 +77,20 @@ record CaseCalendar(TimeScale scale, Optional<WorkingCalendar> calendar) {
         .date()
         .map(date -> Due.on(date, calendar.get()))
         .orElseGet(() -> Due.after(scale.ticks(moment.units().orElseThrow()), calendar.get()));
+  }
+
+  /** An extension of time: so many working days, or to a date. */
+  Extension extension(Moment moment, Due contractFinish, TermsTable terms) {
+    DayLength day = dayLength(terms, scale);
+    return new Extension(
+        moment
+            .date()
+            .map(date -> Due.on(date, calendar.orElseThrow()))
+            .orElseGet(
+                () ->
+                    contractFinish.later(
+                        moment.units().orElseThrow().longValueExact(), day, calendar)),
+        day);
   }
 
   /** Whether a finish is so late that its date would be beyond the year 9999. */

@@ -127,6 +127,10 @@ public final class CaseReader {
                     terms
                         .at("contract_finish")
                         .notice("after the year 9999", "", "an earlier finish")));
+    terms
+        .moment("contract_finish")
+        .map(times::due)
+        .ifPresent(due -> ExtensionRule.check(due, terms, times, findings));
   }
 
   private void checkSomethingIsToGo(Optional<Progress> progress) {

@@ -2,11 +2,13 @@ package dayworth.casefile;
 
 import dayworth.contract.Bonus;
 import dayworth.contract.Damages;
+import dayworth.contract.Due;
 import dayworth.contract.PartWeek;
 import dayworth.contract.Per;
 import dayworth.contract.Terms;
 import dayworth.contract.TimeRelated;
 import dayworth.value.Money;
+import java.util.Optional;
 
 /** Makes the terms of the contract from the rows of terms.csv. */
 final class ContractTerms {
@@ -14,12 +16,13 @@ final class ContractTerms {
   private ContractTerms() {}
 
   static Terms of(TermsTable terms, CaseCalendar times) {
+    Optional<Due> contractFinish = terms.moment("contract_finish").map(times::due);
     return new Terms(
         times.scale(),
         times.calendar(),
         new TimeRelated(money(terms, "time_related_cost"), per(terms, "time_related_per")),
         money(terms, "fixed_cost"),
-        terms.moment("contract_finish").map(times::due),
+        contractFinish,
         new Damages(
             money(terms, "damages_rate"),
             per(terms, "damages_per"),
@@ -30,7 +33,10 @@ final class ContractTerms {
             money(terms, "bonus_rate"),
             per(terms, "bonus_per"),
             terms.number("bonus_cap").map(Money::of),
-            terms.number("bonus_cap_units")));
+            terms.number("bonus_cap_units")),
+        terms
+            .moment("extension")
+            .map(moment -> times.extension(moment, contractFinish.orElseThrow(), terms)));
   }
 
   private static Money money(TermsTable terms, String term) {

@@ -24,6 +24,7 @@ final class DateRules {
     DateRules rules = new DateRules(terms, findings);
     List.of("time_related_per", "damages_per", "bonus_per").forEach(rules::checkPer);
     rules.checkContractFinish();
+    rules.checkExtension();
     activities.forEach(rules::checkNotBefore);
     if (!holidays.isEmpty() && !terms.isGiven(START)) {
       String right = "a row for " + START + " in " + TermsTable.FILE;
@@ -58,6 +59,26 @@ final class DateRules {
     }
   }
 
+  private void checkExtension() {
+    Optional<Moment> extension = terms.moment("extension");
+    extension
+        .flatMap(Moment::date)
+        .filter(date -> !terms.isGiven(START))
+        .ifPresent(date -> reportDate(terms.at("extension"), date, "working days"));
+    extension
+        .flatMap(Moment::units)
+        .filter(days -> days.signum() == 0 || days.stripTrailingZeros().scale() > 0)
+        .ifPresent(
+            days ->
+                findings.problem(
+                    terms
+                        .at("extension")
+                        .notice(
+                            "not a whole number of working days",
+                            days.toPlainString(),
+                            "1 or more, or a date")));
+  }
+
   private void checkNotBefore(ActivityRow row) {
     row.notBefore()
         .flatMap(Moment::date)
@@ -67,7 +88,11 @@ final class DateRules {
   }
 
   private void reportDate(Place place, LocalDate date) {
-    report(place, "a date needs a start_date", date.toString(), "or a number of time units");
+    reportDate(place, date, "time units");
+  }
+
+  private void reportDate(Place place, LocalDate date, String counted) {
+    report(place, "a date needs a start_date", date.toString(), "or a number of " + counted);
   }
 
   private void report(Place place, String wrong, String found, String other) {

@@ -23,6 +23,10 @@ final class IdleTerms {
       String right = "a week is " + days + (days == 1 ? " working day" : " working days");
       warn(terms, units, right, findings);
     }
+    boolean due = terms.isGiven("damages_rate") || terms.isGiven("bonus_rate");
+    if (terms.isGiven("extension") && !due) {
+      warn(terms, "extension", "neither damages nor bonus depend on the contract finish", findings);
+    }
     String part = "damages_part_week";
     if (terms.isGiven(part) && terms.per("damages_per").orElse(Per.UNIT) != Per.WEEK) {
       warn(terms, part, "it is for damages_per week", findings);

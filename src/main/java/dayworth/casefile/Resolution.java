@@ -67,7 +67,8 @@ final class Resolution {
       scale = scale.and(of(terms.number("bonus_cap_units")));
       scale = scale.and(ofCap(terms, "bonus_cap", "bonus_rate"));
     }
-    return terms.startDate().isPresent() ? scale.and(ofWorkingDay(terms)) : scale;
+    boolean countsDays = terms.startDate().isPresent() || terms.isGiven("extension");
+    return countsDays ? scale.and(ofWorkingDay(terms)) : scale;
   }
 
   private static boolean isPerUnit(TermsTable terms, String term) {

@@ -36,6 +36,7 @@ final class TermCells {
           Map.entry("time_related_per", PER),
           Map.entry("fixed_cost", MoneyCell.AMOUNT),
           Map.entry("contract_finish", Moment.Parser.MOMENT),
+          Map.entry("extension", Moment.Parser.MOMENT),
           Map.entry("damages_rate", MoneyCell.AMOUNT),
           Map.entry("damages_per", PER),
           Map.entry(
@@ -52,7 +53,6 @@ final class TermCells {
 
   private static final Set<String> NOT_YET =
       Set.of(
-          "extension",
           "basis",
           "prepared_for",
           "prepared_by",

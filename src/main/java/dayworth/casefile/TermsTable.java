@@ -150,6 +150,7 @@ final class TermsTable {
     require("data_date", "start_date");
     require("damages_rate", "contract_finish");
     require("bonus_rate", "contract_finish");
+    require("extension", "contract_finish");
     require("damages_grace", "damages_rate");
     require("damages_cap", "damages_rate");
     require("bonus_cap", "bonus_rate");

@@ -11,7 +11,13 @@ import picocli.CommandLine.Spec;
     description = "What one day of earlier finish costs, what it is worth, and the proof.",
     mixinStandardHelpOptions = true,
     versionProvider = Version.class,
-    subcommands = {BeginCommand.class, CheckCommand.class, CurveCommand.class})
+    subcommands = {
+      BeginCommand.class,
+      CheckCommand.class,
+      CurveCommand.class,
+      MeetCommand.class,
+      WeighCommand.class
+    })
 final class Dayworth implements Runnable {
 
   @Spec private CommandSpec spec;

@@ -1,5 +1,6 @@
 package dayworth.contract;
 
+import dayworth.value.DayLength;
 import dayworth.value.WorkingCalendar;
 import java.time.LocalDate;
 import java.util.Optional;
@@ -20,6 +21,20 @@ public record Due(long ticks, Optional<LocalDate> date) {
   /** At the end of a date's working day, or of the last one before it. */
   public static Due on(LocalDate date, WorkingCalendar calendar) {
     return new Due(calendar.endOf(date), Optional.of(date));
+  }
+
+  /**
+   * So many working days later, at least 1.
+   *
+   * @param day how long one is
+   * @param calendar that of the case; empty in a case without dates
+   */
+  public Due later(long workingDays, DayLength day, Optional<WorkingCalendar> calendar) {
+    long moved = Math.addExact(ticks, day.endOf(workingDays));
+    Optional<LocalDate> later =
+        calendar.flatMap(dates -> date.map(from -> dates.later(from, workingDays)));
+    boolean endsDay = calendar.isPresent() && date.map(calendar.get()::endOf).orElse(-1L) == ticks;
+    return endsDay ? on(later.orElseThrow(), calendar.get()) : new Due(moved, later);
   }
 
   /**

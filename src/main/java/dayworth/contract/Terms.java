@@ -19,6 +19,7 @@ import java.util.stream.Stream;
  * @param contractFinish by when the contract wants completion
  * @param damages charged after the contract finish
  * @param bonus paid before the contract finish
+ * @param extension of time, claimed but not granted
  */
 public record Terms(
     TimeScale scale,
@@ -27,7 +28,8 @@ public record Terms(
     Money fixedCost,
     Optional<Due> contractFinish,
     Damages damages,
-    Bonus bonus) {
+    Bonus bonus,
+    Optional<Extension> extension) {
 
   /**
    * Joins the terms.
@@ -42,6 +44,18 @@ public record Terms(
         || (contractFinish.isPresent() && dueHasDate != calendar.isPresent())) {
       throw new IllegalArgumentException("money by the date needs dates");
     }
+  }
+
+  /** Terms without a claim for more time. */
+  public Terms(
+      TimeScale scale,
+      Optional<WorkingCalendar> calendar,
+      TimeRelated timeRelated,
+      Money fixedCost,
+      Optional<Due> contractFinish,
+      Damages damages,
+      Bonus bonus) {
+    this(scale, calendar, timeRelated, fixedCost, contractFinish, damages, bonus, Optional.empty());
   }
 
   /** No terms at all: only direct cost counts. */
@@ -64,6 +78,27 @@ public record Terms(
         fixedCost,
         contractFinish.map(due -> damages.at(finish, due, counting)).orElse(Money.ZERO),
         contractFinish.map(due -> bonus.at(finish, due, counting)).orElse(Money.ZERO));
+  }
+
+  /** The same terms with another contract finish, and no claim for more time. */
+  public Terms dueBy(Due due) {
+    return new Terms(scale, calendar, timeRelated, fixedCost, Optional.of(due), damages, bonus);
+  }
+
+  /**
+   * For how many of what damages are per they are charged, were there no cap: what they cost at a
+   * rate of 1.
+   */
+  public Money damagesCount(long finish) {
+    Damages one =
+        new Damages(
+            Money.of(1), damages.per(), damages.grace(), Optional.empty(), damages.partWeek());
+    return contractFinish.map(due -> one.at(finish, due, counting())).orElse(Money.ZERO);
+  }
+
+  /** For how many of what it is per time-related cost runs: what it costs at a rate of 1. */
+  public Money timeRelatedCount(long finish) {
+    return counting().until(finish, timeRelated.per()).at(Money.of(1));
   }
 
   /**

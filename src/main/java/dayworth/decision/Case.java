@@ -1,5 +1,6 @@
 package dayworth.decision;
 
+import dayworth.contract.Due;
 import dayworth.contract.MomentMoney;
 import dayworth.contract.Terms;
 import dayworth.network.Network;
@@ -84,5 +85,20 @@ public record Case(
   /** How many activities are still to be done. */
   public int toGo() {
     return network.size() - progress.map(Progress::finished).orElse(0);
+  }
+
+  /** The same case under another contract finish. */
+  public Case dueBy(Due due) {
+    return new Case(
+        name,
+        title,
+        currency,
+        unit,
+        network,
+        terms.dueBy(due),
+        momentMoney,
+        progress,
+        warnings,
+        inputs);
   }
 }

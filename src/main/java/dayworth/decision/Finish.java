@@ -23,6 +23,11 @@ public record Finish(
     Optional<Money> pricePerUnit,
     boolean breakpoint) {
 
+  /** What is spent on the work itself: direct and running cost, exact. */
+  public Money spent() {
+    return direct.plus(running);
+  }
+
   /** All the money, each part rounded to cents as it is reported, so that the parts add up. */
   public BigDecimal total() {
     return direct

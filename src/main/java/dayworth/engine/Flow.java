@@ -47,6 +47,16 @@ public final class Flow {
     }
   }
 
+  private Flow(Flow other) {
+    this.scale = other.scale;
+    other.amounts.forEach((over, amount) -> amounts.put(over, amount.clone()));
+  }
+
+  /** A flow of the same amounts that keeps them when this one changes. */
+  public Flow copy() {
+    return new Flow(this);
+  }
+
   private static int size(Over over, Network network) {
     return switch (over) {
       case LINK -> network.links().size();

@@ -3,8 +3,11 @@ package dayworth.network;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Collection;
 import java.util.Collections;
 import java.util.List;
+import java.util.Set;
+import java.util.TreeSet;
 import java.util.function.IntPredicate;
 
 /**
@@ -77,6 +80,58 @@ public final class CriticalChains {
       }
     }
     return found;
+  }
+
+  /**
+   * Chains that together pass the given activities, as far as these are critical: all chains if
+   * they are few, otherwise one for each activity that no chain before it passes.
+   *
+   * @param most how many at most; some activities may then be left out
+   */
+  public List<List<Integer>> passing(Collection<Integer> activities, int most) {
+    if (count().compareTo(BigInteger.valueOf(most)) <= 0) {
+      return first(most);
+    }
+    Set<Integer> wanted = new TreeSet<>(activities);
+    wanted.removeIf(activity -> !timing.isCritical(activity));
+    List<List<Integer>> found = new ArrayList<>();
+    while (!wanted.isEmpty() && found.size() < most) {
+      List<Integer> chain = through(wanted.iterator().next(), wanted);
+      wanted.removeAll(chain);
+      found.add(chain);
+    }
+    return found;
+  }
+
+  /** A chain through an activity that passes wanted ones rather than others where it can. */
+  private List<Integer> through(int activity, Set<Integer> wanted) {
+    List<Integer> chain = new ArrayList<>(List.of(activity));
+    for (List<Integer> before = before(activity); !before.isEmpty(); ) {
+      chain.add(0, rather(before, wanted));
+      before = before(chain.get(0));
+    }
+    for (List<Integer> next = neighbours(activity); !next.isEmpty(); ) {
+      chain.add(rather(next, wanted));
+      next = neighbours(chain.get(chain.size() - 1));
+    }
+    return chain;
+  }
+
+  private static int rather(List<Integer> some, Set<Integer> wanted) {
+    return some.stream().filter(wanted::contains).findFirst().orElse(some.get(0));
+  }
+
+  /** Critical predecessors without slack, in file order. */
+  private List<Integer> before(int activity) {
+    List<Integer> before = new ArrayList<>();
+    for (int k = 0; k < network.linksInto(activity); k++) {
+      Link link = network.link(network.linkInto(activity, k));
+      if (timing.isCritical(link.predecessor()) && timing.slack(link) == 0) {
+        before.add(link.predecessor());
+      }
+    }
+    before.sort(null);
+    return before;
   }
 
   private void countFrom(int activity, boolean[] waits) {

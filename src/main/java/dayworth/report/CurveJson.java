@@ -56,7 +56,7 @@ final class CurveJson {
         });
   }
 
-  private void finish(JsonText json, Finish finish) throws IOException {
+  void finish(JsonText json, Finish finish) throws IOException {
     json.number("duration", names.units(finish.duration()));
     if (dates.areKnown()) {
       json.text("finish_date", dates.finish(finish.duration()));

@@ -50,18 +50,18 @@ public final class CurveText {
 
   /** What is said where a finish is asked for that cannot be had. */
   public static List<String> tooEarly(FinishTooEarly asked, Style style, int width) {
+    return tooEarly(Wording.duration(asked.of(), asked.asked()), asked, style, width);
+  }
+
+  /** The same of a finish that goes by another name than its duration. */
+  static List<String> tooEarly(String name, FinishTooEarly asked, Style style, int width) {
     int used = Math.min(width, WIDEST);
     Case of = asked.of();
     List<String> lines = new ArrayList<>();
     long shortest = asked.curve().shortest();
     String nearest =
         Wording.duration(of, shortest) + new Dates(of).spokenFinish(", ", shortest, "");
-    lines.add(
-        style.bold(
-            Wording.duration(of, asked.asked())
-                + " cannot be had. The nearest is "
-                + nearest
-                + "."));
+    lines.add(style.bold(name + " cannot be had. The nearest is " + nearest + "."));
     lines.add("");
     lines.addAll(prose(new ObstacleText(of, asked.curve()).sentence(), used));
     return lines;
@@ -194,7 +194,7 @@ public final class CurveText {
     return "; the rest is at most " + MoneyLook.of(List.of(most)).text(most) + " too dear";
   }
 
-  private static String proof(CurveAnswer answer) {
+  static String proof(CurveAnswer answer) {
     CrossCheck check = answer.crossCheck();
     String proved =
         "Proved: "

@@ -2,6 +2,8 @@ package dayworth.report;
 
 import dayworth.decision.CheckAnswer;
 import dayworth.decision.CurveAnswer;
+import dayworth.decision.MeetAnswer;
+import dayworth.decision.WeighAnswer;
 
 /**
  * The text of result.json: an answer for programs.
@@ -18,6 +20,23 @@ public final class ResultJson {
         json -> {
           CaseJson.writeHead(json, answer.of(), "curve", programVersion);
           new CurveJson(answer).write(json);
+        });
+  }
+
+  public static String ofMeet(MeetAnswer answer, String programVersion) {
+    return JsonText.object(
+        json -> {
+          CaseJson.writeHead(json, answer.of(), "meet", programVersion);
+          new MeetJson(answer).write(json);
+          new CurveJson(answer.curve()).write(json);
+        });
+  }
+
+  public static String ofWeigh(WeighAnswer answer, String programVersion) {
+    return JsonText.object(
+        json -> {
+          CaseJson.writeHead(json, answer.of(), "weigh", programVersion);
+          new WeighJson(answer).write(json);
         });
   }
 

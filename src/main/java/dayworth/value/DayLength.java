@@ -40,7 +40,7 @@ public record DayLength(long ticks, long days) {
   }
 
   /** The last tick of the first {@code count} working days. */
-  long endOf(long count) {
+  public long endOf(long count) {
     return Math.floorDiv(Math.multiplyExact(count, ticks), days);
   }
 

@@ -85,6 +85,16 @@ public final class Money implements Comparable<Money> {
     return fraction(numerator, denominator.multiply(BigInteger.valueOf(divisor)));
   }
 
+  /**
+   * How many times a divisor this amount is.
+   *
+   * @throws ArithmeticException if the divisor is zero
+   */
+  public Money dividedBy(Money divisor) {
+    return fraction(
+        numerator.multiply(divisor.denominator), denominator.multiply(divisor.numerator));
+  }
+
   /** This amount times {@code numerator / denominator}. */
   public Money times(Money factor) {
     return fraction(numerator.multiply(factor.numerator), denominator.multiply(factor.denominator));

@@ -158,6 +158,11 @@ public final class WorkingCalendar {
     return day.endOf(day.daysToFinish(duration)) == duration;
   }
 
+  /** The date that is so many working days, at least 1, after another, which may be a rest day. */
+  public LocalDate later(LocalDate date, long workingDays) {
+    return worked.date(worked.through(date) + workingDays);
+  }
+
   /** The ends of working days from one time to another, both included; ascending. */
   public List<Long> endsOfDays(long from, long to) {
     List<Long> ends = new ArrayList<>();

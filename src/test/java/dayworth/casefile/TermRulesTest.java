@@ -120,7 +120,6 @@ class TermRulesTest {
   @ParameterizedTest
   @ValueSource(
       strings = {
-        "extension",
         "basis",
         "prepared_for",
         "prepared_by",

@@ -4,13 +4,11 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dayworth.command.RealJar.Run;
 import java.io.IOException;
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.ArrayList;
 import java.util.List;
-import java.util.concurrent.TimeUnit;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -18,42 +16,21 @@ import org.junit.jupiter.api.io.TempDir;
 /** Runs the real jar in an empty folder, as a user would. */
 class ProgramTest {
 
-  private static final Path JAR = Path.of("target", "dayworth.jar").toAbsolutePath();
-  private static final Path CASES = Path.of("cases").toAbsolutePath();
-
   @TempDir private Path folder;
 
-  /** What a run left behind. */
-  private record Run(int status, String out, String err) {}
+  private RealJar jar;
 
   @BeforeEach
   void thereIsAJar() {
-    assertTrue(Files.exists(JAR), "the tests run after the jar is built: mvn verify");
+    jar = new RealJar(folder);
   }
 
   private Run run(String... arguments) throws IOException, InterruptedException {
-    List<String> command = new ArrayList<>();
-    command.add(Path.of(System.getProperty("java.home"), "bin", "java").toString());
-    command.add("-jar");
-    command.add(JAR.toString());
-    command.addAll(List.of(arguments));
-    Path out = folder.resolve("out.txt");
-    Path err = folder.resolve("err.txt");
-    Process process =
-        new ProcessBuilder(command)
-            .directory(folder.toFile())
-            .redirectOutput(out.toFile())
-            .redirectError(err.toFile())
-            .start();
-    assertTrue(process.waitFor(2, TimeUnit.MINUTES), "the program ends");
-    return new Run(
-        process.exitValue(),
-        Files.readString(out, StandardCharsets.UTF_8),
-        Files.readString(err, StandardCharsets.UTF_8));
+    return jar.run(arguments);
   }
 
   private static String demo(String name) {
-    return CASES.resolve(name).toString();
+    return RealJar.demo(name);
   }
 
   /** 16 weeks, 74,800 in all: computed outside this program. */

@@ -1,0 +1,68 @@
+package dayworth.decision;
+
+import dayworth.engine.proof.ProofSheet;
+import dayworth.value.Money;
+import java.math.BigInteger;
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * The cheapest plan for a wish, with its proof: the answer of {@code dayworth meet}.
+ *
+ * @param wish what was wanted
+ * @param curve every finish; the plan asked for is the one that meets the wish
+ * @param bought what is shortened against the plan as it stands, in file order
+ * @param chains critical chains that together pass what was bought, as far as room is for them; all
+ *     critical chains if these are few
+ * @param chainCount how many critical chains there are; exact
+ * @param lastPrice what the last unit bought costs, per unit; empty if none is
+ * @param proof the plan and a flow, arc by arc
+ */
+public record MeetAnswer(
+    Wish wish,
+    CurveAnswer curve,
+    List<Bought> bought,
+    List<List<Integer>> chains,
+    BigInteger chainCount,
+    Optional<Money> lastPrice,
+    ProofSheet proof) {
+
+  public MeetAnswer {
+    bought = List.copyOf(bought);
+    chains = List.copyOf(chains);
+  }
+
+  public Case of() {
+    return curve.of();
+  }
+
+  /** The finish that meets the wish. */
+  public Finish finish() {
+    return curve.asked().finish();
+  }
+
+  /** Whether the plan as it stands finishes as early. */
+  public boolean isMetAsPlanned() {
+    return finish().duration() >= curve.asPlanned().duration();
+  }
+
+  /** Direct and running cost above that of the plan as it stands; below zero if money is saved. */
+  public Money extra() {
+    return finish().spent().minus(curve.asPlanned().spent());
+  }
+
+  /**
+   * An activity that is shortened.
+   *
+   * @param activity index in the network
+   * @param ticks how much is taken out of its normal duration
+   * @param cost what all of it costs; below zero where crashing is cheaper
+   * @param onChains which of the answer's chains pass it, by their index
+   */
+  public record Bought(int activity, long ticks, Money cost, List<Integer> onChains) {
+
+    public Bought {
+      onChains = List.copyOf(onChains);
+    }
+  }
+}

@@ -1,0 +1,32 @@
+package dayworth.decision;
+
+import dayworth.value.Money;
+import java.time.LocalDate;
+
+/** What a plan is wanted for. */
+public sealed interface Wish {
+
+  /**
+   * To finish by a date.
+   *
+   * @param ticks the end of its working day, or of the last one before it
+   */
+  record ByDate(LocalDate date, long ticks) implements Wish {}
+
+  /** To finish within so many ticks. */
+  record In(long ticks) implements Wish {}
+
+  /**
+   * To finish as early as some money allows.
+   *
+   * @param most direct and running cost above that of the plan as it stands; at least 0
+   */
+  record Within(Money most) implements Wish {
+
+    public Within {
+      if (most.signum() < 0) {
+        throw new IllegalArgumentException("money to spend is at least 0");
+      }
+    }
+  }
+}

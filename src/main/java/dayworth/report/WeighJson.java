@@ -1,0 +1,107 @@
+package dayworth.report;
+
+import dayworth.decision.BestByRate;
+import dayworth.decision.Choice;
+import dayworth.decision.Finish;
+import dayworth.decision.WeighAnswer;
+import dayworth.decision.Weighing;
+import dayworth.value.Money;
+import java.io.IOException;
+import java.math.RoundingMode;
+import java.util.Optional;
+
+/** The members of a weighing's result. */
+final class WeighJson {
+
+  /** Ends of ranges are fractions; so many decimals tell more than any contract does. */
+  private static final int RATE_DECIMALS = 6;
+
+  private final WeighAnswer answer;
+  private final CaseJson names;
+  private final Dates dates;
+
+  WeighJson(WeighAnswer answer) {
+    this.answer = answer;
+    this.names = new CaseJson(answer.of().network());
+    this.dates = new Dates(answer.of());
+  }
+
+  void write(JsonText json) throws IOException {
+    json.object("without_extension", members -> weighing(members, answer.granted()));
+    if (answer.claimed().isPresent()) {
+      json.object("with_extension", members -> weighing(members, answer.claimed().get()));
+      json.array(
+          "best_by_extension",
+          answer.byExtension(),
+          (members, extension) -> {
+            members.number("from_working_days", (int) extension.from());
+            if (extension.to().isPresent()) {
+              members.number("to_working_days", extension.to().get().intValue());
+            } else {
+              members.nothing("to_working_days");
+            }
+            finish(members, extension.best());
+          });
+    }
+  }
+
+  private void weighing(JsonText json, Weighing weighing) throws IOException {
+    json.array(
+        "choices", weighing.choices(), (members, choice) -> choice(members, weighing, choice));
+    if (weighing.byDamages().isPresent()) {
+      json.object("by_damages_rate", members -> ranges(members, weighing.byDamages().get()));
+    } else {
+      json.nothing("by_damages_rate");
+    }
+    json.object("by_time_related_cost", members -> ranges(members, weighing.byTimeRelated()));
+    json.object("by_cost_of_shortening", members -> ranges(members, weighing.byCompression()));
+    json.array(
+        "wrong_damages_rates",
+        weighing.wrongRates(),
+        (members, wrong) -> {
+          rate(members, "rate", Optional.of(wrong.rate()));
+          finish(members, wrong.best());
+          members.number("too_much", wrong.tooMuch().cents());
+        });
+    json.object(
+        "proof",
+        members -> {
+          members.number("proved", weighing.curve().provedRows());
+          members.number("of", weighing.curve().rows().size());
+        });
+  }
+
+  private void choice(JsonText json, Weighing weighing, Choice choice) throws IOException {
+    json.text("choice", WeighTable.name(choice.kind()));
+    new CurveJson(weighing.curve()).finish(json, choice.finish());
+    json.number("saved_against_as_it_stands", weighing.saved(choice.finish()));
+  }
+
+  private void ranges(JsonText json, BestByRate best) throws IOException {
+    rate(json, "now", Optional.of(best.now()));
+    json.array(
+        "ranges",
+        best.ranges(),
+        (members, range) -> {
+          rate(members, "from", Optional.of(range.from()));
+          rate(members, "to", range.to());
+          finish(members, range.finish());
+          members.yesNo("damages_at_cap", range.isCapped());
+        });
+  }
+
+  private static void rate(JsonText json, String name, Optional<Money> rate) throws IOException {
+    if (rate.isPresent()) {
+      json.number(name, rate.get().rounded(RATE_DECIMALS, RoundingMode.HALF_UP));
+    } else {
+      json.nothing(name);
+    }
+  }
+
+  private void finish(JsonText json, Finish finish) throws IOException {
+    json.number("duration", names.units(finish.duration()));
+    if (dates.areKnown()) {
+      json.text("finish_date", dates.finish(finish.duration()));
+    }
+  }
+}

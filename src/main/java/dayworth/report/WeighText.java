@@ -1,0 +1,246 @@
+package dayworth.report;
+
+import dayworth.decision.BestByRate;
+import dayworth.decision.Case;
+import dayworth.decision.Finish;
+import dayworth.decision.WeighAnswer;
+import dayworth.decision.WeighAnswer.ByExtension;
+import dayworth.decision.Weighing;
+import dayworth.value.Money;
+import java.math.BigDecimal;
+import java.math.RoundingMode;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/** The short answer of {@code dayworth weigh} for a terminal. */
+public final class WeighText {
+
+  private static final String INDENT = "    ";
+
+  /** What shortening may cost more than estimated, in per cent. */
+  private static final List<Long> DEARER = List.of(10L, 25L, 50L);
+
+  private final WeighAnswer answer;
+  private final Case of;
+  private final Style style;
+  private final int width;
+
+  private WeighText(WeighAnswer answer, Style style, int width) {
+    this.answer = answer;
+    this.of = answer.of();
+    this.style = style;
+    this.width = Math.min(width, CurveText.WIDEST);
+  }
+
+  /**
+   * The lines of the answer; the first says it all.
+   *
+   * @param width columns of the terminal
+   */
+  public static List<String> lines(WeighAnswer answer, Style style, int width) {
+    return new WeighText(answer, style, width).lines();
+  }
+
+  private List<String> lines() {
+    Weighing granted = answer.granted();
+    ChoiceTable table = new ChoiceTable(granted);
+    List<String> lines = new ArrayList<>();
+    String sentence = sentence(granted, table.look());
+    lines.add(style.bold(Wording.answer(sentence, of.currency(), width)));
+    lines.add("");
+    lines.addAll(table.lines(width));
+    if (!table.leftOut().isEmpty()) {
+      lines.add("");
+      prose(lines, table.leftOut());
+    }
+    answer.claimed().ifPresent(claimed -> claimed(lines, claimed));
+    breakEvens(lines, granted);
+    dearer(lines, granted);
+    wrongRates(lines, granted);
+    lines.add("");
+    prose(lines, CurveText.proof(granted.curve()));
+    lines.add("");
+    prose(
+        lines,
+        "Damages, bonus and entitlement depend on the contract and the law that governs it. This"
+            + " is not legal advice: read the contract and take advice from a licensed"
+            + " professional.");
+    return lines;
+  }
+
+  private String sentence(Weighing weighing, MoneyLook look) {
+    BigDecimal saved = weighing.saved(weighing.best());
+    if (saved.signum() <= 0) {
+      return "Carry on as planned: no other finish is cheaper.";
+    }
+    boolean pays = weighing.asItStands().other().damages().signum() > 0;
+    return "Finish "
+        + when(weighing.best(), "on ", "in ")
+        + ": "
+        + look.text(saved)
+        + " better than carrying on"
+        + (pays ? " and paying damages." : ".");
+  }
+
+  /** A finish by its date, or without dates by its duration. */
+  private String when(Finish finish, String beforeDate, String beforeDuration) {
+    Dates dates = new Dates(of);
+    return dates.areKnown()
+        ? dates.spokenFinish(beforeDate, finish.duration(), "")
+        : beforeDuration + Wording.workingDuration(of, finish.duration());
+  }
+
+  private void claimed(List<String> lines, Weighing claimed) {
+    ChoiceTable table = new ChoiceTable(claimed);
+    String due =
+        claimed
+            .curve()
+            .of()
+            .terms()
+            .contractFinish()
+            .map(
+                by ->
+                    by.date().map(Dates::spoken).orElseGet(() -> Wording.duration(of, by.ticks())))
+            .orElseThrow();
+    lines.add("");
+    prose(lines, "If the extension to " + due + ", claimed and not granted, were granted");
+    table.lines(width - Wording.INDENT.length()).forEach(line -> lines.add(Wording.INDENT + line));
+    lines.add("");
+    lines.add("  Which finish is best, by the working days of extension");
+    extensions().forEach(line -> lines.add(INDENT + line));
+  }
+
+  private List<String> extensions() {
+    List<ByExtension> all = answer.byExtension();
+    TextColumns columns = new TextColumns(width - INDENT.length());
+    columns.add("", false, all.stream().map(WeighText::range).toList());
+    Dates dates = new Dates(of);
+    if (dates.areKnown()) {
+      columns.add("", false, dates.column(all.stream().map(e -> e.best().duration()).toList()));
+    }
+    columns.add(
+        "", true, all.stream().map(e -> Wording.duration(of, e.best().duration())).toList());
+    return columns.lines().subList(1, all.size() + 1);
+  }
+
+  private static String range(ByExtension extension) {
+    if (extension.to().isEmpty()) {
+      return extension.from() == 0 ? "any" : extension.from() + " and more";
+    }
+    long to = extension.to().get();
+    return extension.from() == to ? String.valueOf(to) : extension.from() + " to " + to;
+  }
+
+  private void breakEvens(List<String> lines, Weighing weighing) {
+    weighing
+        .byDamages()
+        .ifPresent(
+            best -> {
+              lines.add("");
+              String per = Lateness.one(of, of.terms().damages().per());
+              String title = "Which finish is best, if damages for " + per + " were";
+              lines.addAll(new BreakEvenTable(of, best).lines(title, style, width));
+            });
+    lines.add("");
+    String per = Lateness.one(of, of.terms().timeRelated().per());
+    String title = "Which finish is best, if time-related cost for " + per + " were";
+    lines.addAll(new BreakEvenTable(of, weighing.byTimeRelated()).lines(title, style, width));
+  }
+
+  private void dearer(List<String> lines, Weighing weighing) {
+    lines.add("");
+    prose(lines, holds(weighing));
+    List<String> more = new ArrayList<>();
+    List<Finish> best = new ArrayList<>();
+    List<String> totals = new ArrayList<>();
+    BigDecimal same =
+        weighing.asItStands().direct().cents().add(weighing.asItStands().other().fixed().cents());
+    for (long percent : DEARER) {
+      Money multiple = Money.of(100 + percent).dividedBy(100);
+      Finish then = weighing.byCompression().at(multiple).finish();
+      BigDecimal total = weighing.totalAt(weighing.best(), multiple).cents().subtract(same);
+      BigDecimal least = weighing.totalAt(then, multiple).cents().subtract(same);
+      MoneyLook look = MoneyLook.of(List.of(total, least));
+      more.add(percent + " % more");
+      best.add(then);
+      totals.add(
+          total.compareTo(least) == 0
+              ? "still the best: " + look.text(total)
+              : "best then: " + look.text(least) + ", and this choice " + look.text(total));
+    }
+    TextColumns columns = new TextColumns(width - INDENT.length());
+    columns.add("", false, more);
+    addFinishes(columns, best);
+    columns.add("", false, totals);
+    columns.lines().stream().skip(1).forEach(line -> lines.add(INDENT + line));
+  }
+
+  private void addFinishes(TextColumns columns, List<Finish> finishes) {
+    Dates dates = new Dates(of);
+    if (dates.areKnown()) {
+      columns.add("", false, dates.column(finishes.stream().map(Finish::duration).toList()));
+    }
+    columns.add("", true, finishes.stream().map(f -> Wording.duration(of, f.duration())).toList());
+  }
+
+  private String holds(Weighing weighing) {
+    BestByRate.Range range = weighing.byCompression().present();
+    String name =
+        weighing.best().duration() == range.finish().duration()
+            ? when(range.finish(), "", "")
+            : when(weighing.best(), "", "");
+    Optional<String> less =
+        Optional.of(range.from())
+            .filter(from -> !from.isZero())
+            .map(from -> percent(from.negate().plus(Money.of(1))) + " % less");
+    Optional<String> more = range.to().map(to -> percent(to.minus(Money.of(1))) + " % more");
+    if (less.isEmpty() && more.isEmpty()) {
+      return name + " stays best whatever shortening costs.";
+    }
+    return name
+        + " stays best"
+        + less.map(share -> " if shortening costs up to " + share)
+            .orElse(" if shortening costs less")
+        + more.map(share -> ", and until it costs " + share + " than estimated.")
+            .orElse(", and however much more it costs than estimated.");
+  }
+
+  /** Rounded down to a tenth of a per cent, so that no more is promised than holds. */
+  private static String percent(Money share) {
+    BigDecimal tenths = share.times(100).rounded(1, RoundingMode.FLOOR).stripTrailingZeros();
+    return Wording.grouped(tenths.scale() < 0 ? tenths.setScale(0) : tenths);
+  }
+
+  private void wrongRates(List<String> lines, Weighing weighing) {
+    if (weighing.wrongRates().isEmpty()) {
+      return;
+    }
+    lines.add("");
+    prose(lines, "What this choice costs too much if the damages rate is really another");
+    TextColumns columns = new TextColumns(width - INDENT.length());
+    List<Weighing.WrongRate> rates = weighing.wrongRates();
+    MoneyLook look =
+        MoneyLook.of(
+            rates.stream()
+                .flatMap(r -> List.of(r.rate().cents(), r.tooMuch().cents()).stream())
+                .toList());
+    columns.add("rate", true, rates.stream().map(r -> look.text(r.rate().cents())).toList());
+    columns.add("too much", true, rates.stream().map(r -> look.text(r.tooMuch().cents())).toList());
+    columns.add(
+        "",
+        false,
+        rates.stream()
+            .map(
+                r ->
+                    r.tooMuch().isZero()
+                        ? "still the best"
+                        : "best then: " + when(r.best(), "", ""))
+            .toList());
+    columns.lines().forEach(line -> lines.add(INDENT + line));
+  }
+
+  private void prose(List<String> lines, String text) {
+    lines.addAll(Wording.wrap(text, Wording.INDENT, width));
+  }
+}
