@@ -36,7 +36,8 @@ final class ObstacleText {
       String who = ids.size() == 1 ? ids.get(0) : "every activity of " + cut(ids);
       return start + ": " + Wording.safe(who) + " is at its shortest.";
     }
-    return start + ": " + Wording.safe(sum()) + String.join("", reasons()) + ".";
+    String sum = terms.size() == 1 ? "" : ": " + sum();
+    return start + Wording.safe(sum + String.join("", reasons())) + ".";
   }
 
   private static String cut(List<String> ids) {
