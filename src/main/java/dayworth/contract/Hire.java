@@ -31,6 +31,11 @@ final class Hire implements Charge {
   }
 
   @Override
+  public String name() {
+    return cost.name();
+  }
+
+  @Override
   public List<Moment> moments() {
     return hasBegun() ? List.of(cost.to()) : List.of(cost.from(), cost.to());
   }

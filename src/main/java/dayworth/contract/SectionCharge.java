@@ -19,6 +19,11 @@ final class SectionCharge implements Charge {
   }
 
   @Override
+  public String name() {
+    return section.name();
+  }
+
+  @Override
   public List<Moment> moments() {
     return List.of(Moment.finishOf(section.activity()));
   }

@@ -63,6 +63,13 @@ public record Case(
         inputs);
   }
 
+  /** The network with the convex money that hangs on moments as spans. */
+  public Network pricedNetwork() {
+    return momentMoney.spans().isEmpty()
+        ? network
+        : new Network(network.scale(), network.activities(), network.links(), momentMoney.spans());
+  }
+
   /** How far an activity is. */
   public Status status(int activity) {
     return progress.map(all -> all.statuses().get(activity)).orElseGet(Status.NotStarted::new);

@@ -58,10 +58,7 @@ public final class CurveQuestion {
   }
 
   private CheapestPlans cheapest(OptionalLong at) throws FinishTooEarly {
-    Network priced =
-        money.spans().isEmpty()
-            ? network
-            : new Network(network.scale(), network.activities(), network.links(), money.spans());
+    Network priced = of.pricedNetwork();
     if (money.charges().isEmpty()) {
       ConvexPlans convex = new ConvexPlans(priced, watcher);
       requirePossible(convex.curve(), at);

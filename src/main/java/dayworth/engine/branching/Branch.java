@@ -34,7 +34,7 @@ public record Branch(List<List<Window>> windows) {
   public Relaxation relaxation(Network network, List<Charge> charges, Money fence) {
     List<List<Envelope>> envelopes = new ArrayList<>();
     for (int j = 0; j < charges.size(); j++) {
-      envelopes.add(Envelope.of(charges.get(j), windows.get(j), fence, "charge " + j));
+      envelopes.add(Envelope.of(charges.get(j), windows.get(j), fence));
     }
     return Relaxation.of(network, envelopes);
   }

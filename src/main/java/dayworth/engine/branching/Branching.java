@@ -1,5 +1,6 @@
 package dayworth.engine.branching;
 
+import dayworth.engine.Flow;
 import dayworth.engine.proof.ProofChecker;
 import dayworth.engine.proof.Verdict;
 import dayworth.engine.stepping.Descent;
@@ -90,12 +91,18 @@ public final class Branching {
   private final Money fence;
   private final List<Best> best = new ArrayList<>();
   private final Deque<Open> open = new ArrayDeque<>();
+
+  /** The branches that were not split further, where they are wanted. */
+  private final Optional<List<Leaf>> leaves;
+
   private long solved;
 
-  private Branching(Network network, List<Charge> charges, long[] durations) {
+  private Branching(
+      Network network, List<Charge> charges, long[] durations, Optional<List<Leaf>> leaves) {
     this.network = network;
     this.charges = charges;
     this.durations = durations;
+    this.leaves = leaves;
     this.fence = fence(network, charges, durations[0]);
     Branch whole = Branch.whole(charges, durations[0]);
     List<Integer> rows = IntStream.range(0, durations.length).boxed().toList();
@@ -113,10 +120,47 @@ public final class Branching {
    */
   public static List<Point> solve(
       Network network, List<Charge> charges, long[] durations, long most) {
-    Branching branching = new Branching(network, charges, durations);
+    Branching branching = new Branching(network, charges, durations, Optional.empty());
     branching.run(most + durations.length);
     return branching.points();
   }
+
+  /**
+   * Solves one finish and keeps what proves it: together the leaves hold every plan, and none costs
+   * less in any of them than its bound.
+   *
+   * @return empty if the limit is reached before it is proved
+   * @throws BoundRefuted if a bound does not stand up to its recheck
+   */
+  public static Optional<Proof> prove(
+      Network network, List<Charge> charges, long duration, long most) {
+    List<Leaf> leaves = new ArrayList<>();
+    Branching branching =
+        new Branching(network, charges, new long[] {duration}, Optional.of(leaves));
+    branching.run(most);
+    Point point = branching.points().get(0);
+    return branching.open.isEmpty() ? Optional.of(new Proof(point, leaves)) : Optional.empty();
+  }
+
+  /**
+   * A finish with the branches that prove its plan.
+   *
+   * @param leaves they hold every plan
+   */
+  public record Proof(Point point, List<Leaf> leaves) {
+
+    public Proof {
+      leaves = List.copyOf(leaves);
+    }
+  }
+
+  /**
+   * A branch that was not split further.
+   *
+   * @param plan the cheapest of its convex problem
+   * @param flow proves that
+   */
+  public record Leaf(Relaxation relaxation, Plan plan, Flow flow) {}
 
   /** The exact cost of a plan that says when activities start, charges included. */
   public static Money cost(Network network, List<Charge> charges, Plan plan) {
@@ -175,12 +219,15 @@ public final class Branching {
     Plan plan = Plan.allNormal(network);
     for (int k = 0; k < node.rows().size(); k++) {
       int row = node.rows().get(k);
-      if (best.get(row).beats(node.bounds().get(k))) {
+      if (leaves.isEmpty() && best.get(row).beats(node.bounds().get(k))) {
         continue;
       }
       plan = solve(descent, checker, relaxation.network(), durations[row], plan);
       best.get(row).offer(plan, cost(network, charges, plan), node.branch());
       Money bound = relaxation.cost(plan);
+      if (leaves.isPresent() && best.get(row).beats(bound)) {
+        leaves.get().add(new Leaf(relaxation, plan, descent.flow()));
+      }
       if (!best.get(row).beats(bound)) {
         rows.add(row);
         bounds.add(bound);

@@ -10,6 +10,9 @@ import java.util.List;
  */
 public interface Charge {
 
+  /** For people. */
+  String name();
+
   /** The moments that it hangs on; each another. */
   List<Moment> moments();
 

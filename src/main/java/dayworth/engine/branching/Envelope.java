@@ -29,14 +29,15 @@ public record Envelope(Money fixed, List<Span> spans) {
    *
    * @param fence money per tick beyond the dear side, above every slope within
    */
-  static List<Envelope> of(Charge charge, List<Window> windows, Money fence, String name) {
+  static List<Envelope> of(Charge charge, List<Window> windows, Money fence) {
     List<Charge.Part> parts = charge.within(windows);
     List<Envelope> envelopes = new ArrayList<>();
     for (int k = 0; k < parts.size(); k++) {
       List<Corner> hull = hull(parts.get(k), charge.rises(k), charge.points(k, windows.get(k)));
       Moment moment = charge.moments().get(k);
       envelopes.add(
-          new Envelope(hull.get(0).money(), spans(hull, moment, charge.rises(k), fence, name)));
+          new Envelope(
+              hull.get(0).money(), spans(hull, moment, charge.rises(k), fence, charge.name())));
     }
     return envelopes;
   }

@@ -25,7 +25,12 @@ public record Relaxation(Network network, List<List<Envelope>> envelopes) {
 
   /** What a plan costs here: no more than in truth if it lies in the branch. */
   public Money cost(Plan plan) {
-    MoneySum sum = new MoneySum().add(plan.cost(network));
+    return plan.cost(network).plus(fixed());
+  }
+
+  /** What is added to the cost of the network. */
+  public Money fixed() {
+    MoneySum sum = new MoneySum();
     envelopes.forEach(ofCharge -> ofCharge.forEach(envelope -> sum.add(envelope.fixed())));
     return sum.total();
   }

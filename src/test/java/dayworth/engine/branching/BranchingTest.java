@@ -37,6 +37,11 @@ class BranchingTest {
   private record Staircase(Moment moment, boolean rising, List<Long> table) implements Charge {
 
     @Override
+    public String name() {
+      return "staircase";
+    }
+
+    @Override
     public List<Moment> moments() {
       return List.of(moment);
     }
@@ -64,6 +69,11 @@ class BranchingTest {
 
   /** Hire by begun periods between two moments. */
   private record Periods(Moment from, Moment to, long length, long rate) implements Charge {
+
+    @Override
+    public String name() {
+      return "periods";
+    }
 
     @Override
     public List<Moment> moments() {
