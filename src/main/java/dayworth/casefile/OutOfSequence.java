@@ -1,10 +1,13 @@
 package dayworth.casefile;
 
+import dayworth.decision.Notice;
 import dayworth.decision.Status;
 import dayworth.network.Plan;
 import dayworth.network.Timing;
 import java.util.HashMap;
+import java.util.HashSet;
 import java.util.Map;
+import java.util.Set;
 
 /**
  * Warns of work that has begun, or is finished, before the logic allowed it: what it should have
@@ -17,6 +20,9 @@ final class OutOfSequence {
   private final Timing asItStands;
   private final Findings findings;
   private final Map<Integer, ProgressRow> rows = new HashMap<>();
+
+  /** Two links between the same events are one reason to warn. */
+  private final Set<Notice> warned = new HashSet<>();
 
   private OutOfSequence(ReadCase read, Findings findings) {
     this.read = read;
@@ -69,8 +75,10 @@ final class OutOfSequence {
         row.isInProgress()
             ? "out of sequence: what remains waits for " + before
             : "out of sequence: nothing of it waits for " + before + " any more";
-    findings.warning(
-        row.place(atFinish ? ProgressTable.FINISHED : ProgressTable.STARTED)
-            .notice(wrong, date.text(), right));
+    Place place = row.place(atFinish ? ProgressTable.FINISHED : ProgressTable.STARTED);
+    Notice notice = place.notice(wrong, date.text(), right);
+    if (warned.add(notice)) {
+      findings.warning(notice);
+    }
   }
 }
