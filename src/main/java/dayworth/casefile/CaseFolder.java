@@ -25,12 +25,12 @@ final class CaseFolder {
           LinkTable.FILE,
           TermsTable.FILE,
           HolidayTable.FILE,
-          ProgressTable.FILE);
+          ProgressTable.FILE,
+          SectionTable.FILE,
+          RunningTable.FILE);
 
   private static final Set<String> NOT_YET =
       Set.of(
-          "sections.csv",
-          "running.csv",
           "measures.csv",
           "packages.csv",
           "labour.csv",

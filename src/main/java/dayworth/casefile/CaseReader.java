@@ -46,6 +46,8 @@ public final class CaseReader {
     Optional<String> holidayText = folder.text(HolidayTable.FILE);
     Optional<String> linkText = folder.text(LinkTable.FILE);
     Optional<String> progressText = folder.text(ProgressTable.FILE);
+    Optional<String> runningText = folder.text(RunningTable.FILE);
+    Optional<String> sectionText = folder.text(SectionTable.FILE);
     Optional<String> termText = folder.text(TermsTable.FILE);
     Optional<List<ActivityRow>> known =
         activityText.flatMap(text -> ActivityTable.read(text, findings));
@@ -54,11 +56,15 @@ public final class CaseReader {
     List<LocalDate> holidays = HolidayTable.read(holidayText, findings);
     DateRules.check(known.orElse(List.of()), holidays, terms, findings);
     List<ProgressRow> progress = ProgressTable.read(known, progressText, findings);
+    ActivityIds ids = new ActivityIds(known, findings);
+    List<SectionRow> sections = SectionTable.read(ids, terms, sectionText, findings);
+    List<RunningRow> running = RunningTable.read(ids, terms, runningText, findings);
     ProgressDates.check(progress, folder.has(ProgressTable.FILE), terms, findings);
     if (findings.hasProblems()) {
       return new Reading.Unsound(findings.problems(), findings.warnings());
     }
-    Case read = build(known.orElseThrow(), links, terms, holidays, progress, atLeast);
+    Case read =
+        build(known.orElseThrow(), links, terms, holidays, progress, sections, running, atLeast);
     if (findings.hasProblems()) {
       return new Reading.Unsound(findings.problems(), findings.warnings());
     }
@@ -71,8 +77,10 @@ public final class CaseReader {
       TermsTable terms,
       List<LocalDate> holidays,
       List<ProgressRow> rows,
+      List<SectionRow> sections,
+      List<RunningRow> running,
       TimeScale atLeast) {
-    TimeScale scale = Resolution.of(activities, links, terms, rows).and(atLeast);
+    TimeScale scale = Resolution.of(activities, links, terms, rows, sections).and(atLeast);
     CaseCalendar times = CaseCalendar.of(terms, holidays, scale);
     Network planned =
         new Network(
@@ -81,7 +89,9 @@ public final class CaseReader {
             links.stream().map(row -> link(row, scale)).toList());
     Optional<Progress> progress = CaseProgress.of(activities, rows, terms, times);
     WorkToGo work = WorkToGo.of(planned, progress);
-    checkSize(work.network(), terms, times);
+    MomentMoney money = CaseMoney.of(sections, running, terms, times, progress);
+    checkSize(work.network(), money, terms, times);
+    SectionDoubts.report(sections, running, terms, times, planned, findings);
     checkSomethingIsToGo(progress);
     Doubts.report(
         new ReadCase(
@@ -100,14 +110,16 @@ public final class CaseReader {
         terms.unit(),
         work.network(),
         ContractTerms.of(terms, times),
-        MomentMoney.none(scale),
+        money,
         progress,
         findings.warnings(),
         folder.inputs());
   }
 
-  private void checkSize(Network network, TermsTable terms, CaseCalendar times) {
-    if (Stepping.scaleFor(network).isEmpty()) {
+  private void checkSize(Network network, MomentMoney money, TermsTable terms, CaseCalendar times) {
+    Network priced =
+        new Network(network.scale(), network.activities(), network.links(), money.spans());
+    if (Stepping.scaleFor(priced).isEmpty()) {
       findings.problem(
           Place.whole(ActivityTable.FILE)
               .notice("the costs are too far apart to be exact", "", "smaller or rounder costs"));

@@ -27,22 +27,14 @@ final class ProgressTable {
 
   private final List<ActivityRow> activities;
 
-  /** Otherwise no id can be told right from wrong. */
-  private final boolean idsAreKnown;
-
+  private final ActivityIds ids;
   private final Findings findings;
-  private final Map<String, Integer> indexById = new HashMap<>();
   private final Map<Integer, Integer> lineByActivity = new HashMap<>();
-  private final Nearest nearest;
 
   private ProgressTable(Optional<List<ActivityRow>> known, Findings findings) {
     activities = known.orElse(List.of());
-    idsAreKnown = known.isPresent();
+    ids = new ActivityIds(known, findings);
     this.findings = findings;
-    for (int i = 0; i < activities.size(); i++) {
-      indexById.putIfAbsent(activities.get(i).id(), i);
-    }
-    nearest = new Nearest(activities.stream().map(ActivityRow::id).toList());
   }
 
   /**
@@ -61,8 +53,8 @@ final class ProgressTable {
     RemainingRules rules = new RemainingRules(table, activities, findings);
     List<ProgressRow> rows = new ArrayList<>();
     for (Row row : table.rows()) {
-      Cell<String> id = table.needed(row, "activity", (text, style) -> text, findings);
-      Optional<Integer> activity = id.value().flatMap(text -> index(table, row, text));
+      Optional<Integer> activity =
+          ids.index(table, row, "activity").filter(index -> isFirst(table, row, index));
       ProgressRow read = row(table, row, activity.orElse(-1));
       if (activity.isPresent()) {
         rules.check(row, read);
@@ -73,23 +65,15 @@ final class ProgressTable {
     return rows;
   }
 
-  private Optional<Integer> index(Table table, Row row, String id) {
-    Place place = table.place(row, "activity");
-    Integer index = indexById.get(id);
-    if (index == null) {
-      if (idsAreKnown) {
-        String right = nearest.hint(id, "an id of " + ActivityTable.FILE);
-        findings.problem(place.notice(id + " is no activity", id, right));
-      }
-      return Optional.empty();
-    }
-    Integer earlier = lineByActivity.putIfAbsent(index, row.line());
+  private boolean isFirst(Table table, Row row, int activity) {
+    Integer earlier = lineByActivity.putIfAbsent(activity, row.line());
     if (earlier != null) {
+      String id = activities.get(activity).id();
       String right = "line " + earlier + " has it";
-      findings.problem(place.notice("a second row of this activity", id, right));
-      return Optional.empty();
+      findings.problem(
+          table.place(row, "activity").notice("a second row of this activity", id, right));
     }
-    return Optional.of(index);
+    return earlier == null;
   }
 
   private ProgressRow row(Table table, Row row, int activity) {

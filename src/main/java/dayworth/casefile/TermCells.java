@@ -11,7 +11,8 @@ import java.util.stream.Stream;
 /** The terms that terms.csv may have, each with the parser of its value. */
 final class TermCells {
 
-  private static final WordCell<Per> PER =
+  /** What a rate is per. */
+  static final WordCell<Per> PER =
       WordCell.<Per>of("word")
           .with("unit", Per.UNIT)
           .with("calendar_day", Per.CALENDAR_DAY)

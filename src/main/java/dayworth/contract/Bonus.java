@@ -20,7 +20,11 @@ public record Bonus(Money rate, Per per, Optional<Money> cap, Optional<BigDecima
 
   /** What is paid for a finish. */
   Money at(long finish, Due due, Counting counting) {
-    Count early = counting.lateness(due, finish, per).negate();
+    return forEarliness(counting.lateness(due, finish, per).negate());
+  }
+
+  /** What is paid for being so early, counted in {@code per}. */
+  Money forEarliness(Count early) {
     if (!early.isAboveZero()) {
       return Money.ZERO;
     }

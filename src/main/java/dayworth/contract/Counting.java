@@ -38,6 +38,15 @@ record Counting(TimeScale scale, Optional<WorkingCalendar> calendar) {
     return Count.of(late, stepsPerOne(per));
   }
 
+  /** How late something was that is done. */
+  Count lateness(Due due, Section.Done done, Per per) {
+    long late =
+        per.isByDate()
+            ? ChronoUnit.DAYS.between(date(due), done.date())
+            : Math.subtractExact(done.ticks(), due.ticks());
+    return Count.of(late, stepsPerOne(per));
+  }
+
   /** The last finish that is at most so late; empty where that is beyond every project. */
   Optional<Long> lastAtMost(Due due, Count late, Per per) {
     return steps(late, per, RoundingMode.FLOOR)

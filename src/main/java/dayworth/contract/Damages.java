@@ -27,7 +27,12 @@ public record Damages(
 
   /** What is charged for a finish. */
   Money at(long finish, Due due, Counting counting) {
-    Count beyond = counting.lateness(due, finish, per).plus(Count.of(grace).negate());
+    return forLateness(counting.lateness(due, finish, per));
+  }
+
+  /** What is charged for being so late, counted in {@code per}. */
+  Money forLateness(Count late) {
+    Count beyond = late.plus(Count.of(grace).negate());
     if (!beyond.isAboveZero()) {
       return Money.ZERO;
     }

@@ -39,6 +39,9 @@ public final class MomentMoney {
     this.counting = new Counting(scale, calendar);
     MoneySum always = new MoneySum();
     for (Section section : sections) {
+      if (section.done().isPresent()) {
+        continue;
+      }
       Optional<LinearSection> linear = LinearSection.of(section, counting);
       linear.ifPresentOrElse(
           convex -> {
@@ -111,7 +114,12 @@ public final class MomentMoney {
 
   /** The damages of one section. */
   public Money damagesOf(Section section, Plan plan) {
-    return section.damages().at(finish(section, plan), section.due(), counting);
+    Damages damages = section.damages();
+    return section
+        .done()
+        .map(done -> counting.lateness(section.due(), done, damages.per()))
+        .map(damages::forLateness)
+        .orElseGet(() -> damages.at(finish(section, plan), section.due(), counting));
   }
 
   /** The bonuses of all sections. */
@@ -121,7 +129,12 @@ public final class MomentMoney {
 
   /** The bonus of one section. */
   public Money bonusOf(Section section, Plan plan) {
-    return section.bonus().at(finish(section, plan), section.due(), counting);
+    Bonus bonus = section.bonus();
+    return section
+        .done()
+        .map(done -> counting.lateness(section.due(), done, bonus.per()).negate())
+        .map(bonus::forEarliness)
+        .orElseGet(() -> bonus.at(finish(section, plan), section.due(), counting));
   }
 
   private static long finish(Section section, Plan plan) {
