@@ -3,6 +3,7 @@ package dayworth.casefile;
 import dayworth.network.Activity;
 import dayworth.value.Money;
 import java.math.BigDecimal;
+import java.time.LocalDate;
 import java.util.List;
 import java.util.Optional;
 
@@ -17,6 +18,7 @@ final class Doubts {
           ImpliedLinks::report,
           HoldingDate::report,
           OutOfSequence::report,
+          Doubts::startsBeforeNotBefore,
           StartDate::report,
           IdleTerms::report);
 
@@ -31,6 +33,20 @@ final class Doubts {
       Activity activity = read.network().activity(i);
       if (activity.crashExtra().signum() < 0) {
         warnOfCheaperCrash(read, i, findings);
+      }
+    }
+  }
+
+  private static void startsBeforeNotBefore(ReadCase read, Findings findings) {
+    for (ProgressRow row : read.progress()) {
+      Optional<LocalDate> notBefore =
+          read.activities().get(row.activity()).notBefore().flatMap(Moment::date);
+      if (row.started().value().isPresent()
+          && notBefore.filter(row.started().value().get()::isBefore).isPresent()) {
+        String right = notBefore.get() + ", its not_before, holds nothing any more";
+        findings.warning(
+            row.place(ProgressTable.STARTED)
+                .notice("started before its not_before", row.started().text(), right));
       }
     }
   }

@@ -216,6 +216,19 @@ class ProgressRulesTest {
   }
 
   @Test
+  void aStartBeforeANotBeforeIsDoubtful() throws IOException {
+    String activities = "id,normal_duration,normal_cost,not_before\nDIG,10,1000,2027-03-03\n";
+    progress(HEADER + "DIG,2027-03-02,,4,,\n").with("activities.csv", activities);
+    assertEquals(
+        List.of(
+            "progress.csv:2 started | started before its not_before | 2027-03-02"
+                + " | 2027-03-03, its not_before, holds nothing any more"),
+        new CaseOnDisk(folder).warnings());
+    progress(HEADER + "DIG,2027-03-03,,4,,\n").with("activities.csv", activities);
+    assertEquals(List.of(), new CaseOnDisk(folder).warnings());
+  }
+
+  @Test
   void aRestThatIsCheaperCompressedIsDoubtful() throws IOException {
     expectWarnings(
         "DIG,2027-03-01,,4,2,399\n",

@@ -6,23 +6,34 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dayworth.casefile.CaseReader;
 import dayworth.casefile.Reading;
+import dayworth.engine.Curve;
+import dayworth.engine.PieceWitness;
+import dayworth.engine.stepping.Stepping;
 import dayworth.network.Activity;
+import dayworth.network.Link;
+import dayworth.network.Moment;
+import dayworth.network.Network;
+import dayworth.network.Span;
 import dayworth.report.PlanTable;
+import dayworth.value.Money;
 import dayworth.value.TimeScale;
+import dayworth.value.WorkingCalendar;
 import java.io.IOException;
 import java.io.InputStream;
 import java.math.BigDecimal;
 import java.net.URISyntaxException;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
+import java.time.LocalDate;
+import java.time.temporal.ChronoUnit;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalLong;
 import org.junit.jupiter.api.Test;
 
 /**
  * The ferry berth as it stands on 16 July 2027, without its sections and running costs. Dates and
- * changes of total are those that the makers of the case computed with integer and linear solvers
- * of their own; down to 115 days running costs and sections change nothing there.
+ * changes of total are those of the table that came with the case, computed outside this program.
  */
 class FerryBerthStatusTest {
 
@@ -50,13 +61,6 @@ class FerryBerthStatusTest {
     }
   }
 
-  private static Finish row(CurveAnswer answer, long duration) {
-    return answer.rows().stream()
-        .filter(row -> row.duration() == duration)
-        .findFirst()
-        .orElseThrow();
-  }
-
   @Test
   void everyFinishHasTheDateThatTheMakersOfTheCaseCounted() throws IOException, FinishTooEarly {
     CurveAnswer answer = answer();
@@ -74,16 +78,60 @@ class FerryBerthStatusTest {
     assertEquals("2027-12-06", rows.get(21)[1]);
   }
 
+  /**
+   * With what else runs in the whole case: the barge from M4's start to M6's finish at 7,400 a day,
+   * the crane from C1's start to M8's finish at 1,150, and K3 due on 22 October, 1,500 a calendar
+   * day up to 45,000. K3's finish is tried day by day: work of a fixed length after K3 holds it
+   * back from the end.
+   */
   @Test
-  void totalsChangeAsTheyComputedWhereNothingElseRuns() throws IOException, FinishTooEarly {
+  void totalsChangeAsTheTableSays() throws IOException, FinishTooEarly {
     CurveAnswer answer = answer();
-    BigDecimal first = row(answer, 120).total();
-    for (String[] cells : expected().subList(0, 6)) {
-      BigDecimal change = row(answer, Long.parseLong(cells[0])).total().subtract(first);
-      BigDecimal apart = new BigDecimal(cells[2]).subtract(change).abs();
-      // Both sides round each total to the cent.
-      assertTrue(apart.compareTo(new BigDecimal("0.01")) <= 0, cells[0] + " differs by " + apart);
+    BigDecimal first = leastWithRunning(answer, 120);
+    for (String[] cells : expected()) {
+      BigDecimal change = leastWithRunning(answer, Long.parseLong(cells[0])).subtract(first);
+      assertEquals(new BigDecimal(cells[2]), change, cells[0]);
     }
+  }
+
+  private static BigDecimal leastWithRunning(CurveAnswer answer, long finish) {
+    Case of = answer.of();
+    WorkingCalendar calendar = of.terms().calendar().orElseThrow();
+    List<BigDecimal> totals = new ArrayList<>();
+    for (long handedOver = 78; handedOver <= finish; handedOver++) {
+      Curve curve = Stepping.curve(heldBack(of, finish - handedOver), PieceWitness.NONE);
+      if (curve.shortest() <= finish) {
+        LocalDate date = calendar.finishDate(handedOver);
+        long late = Math.max(0, ChronoUnit.DAYS.between(LocalDate.of(2027, 10, 22), date));
+        BigDecimal section = BigDecimal.valueOf(Math.min(45_000, 1_500 * late));
+        BigDecimal other = of.terms().at(finish).sum().cents();
+        totals.add(curve.costAt(finish).cents().add(other).add(section));
+      }
+    }
+    return totals.stream().min(BigDecimal::compareTo).orElseThrow();
+  }
+
+  /** What is to go with what runs, and K3 at least so many days before the end. */
+  private static Network heldBack(Case of, long days) {
+    Network toGo = of.network();
+    List<Activity> activities = new ArrayList<>(toGo.activities());
+    activities.add(Activity.fixed("after K3", days, Money.ZERO));
+    List<Link> links = new ArrayList<>(toGo.links());
+    links.add(Link.finishToStart(index(of, "K3"), toGo.size()));
+    return new Network(
+        toGo.scale(),
+        activities,
+        links,
+        List.of(runs(of, "M4", "M6", 7_400), runs(of, "C1", "M8", 1_150)));
+  }
+
+  private static Span runs(Case of, String from, String to, long rate) {
+    Moment start = Moment.startOf(index(of, from));
+    return new Span(from, start, Moment.finishOf(index(of, to)), 0, Money.of(rate));
+  }
+
+  private static int index(Case of, String id) {
+    return of.network().indexOf(id).orElseThrow();
   }
 
   /**
@@ -132,8 +180,7 @@ class FerryBerthStatusTest {
             .map(facts -> facts.step())
             .map(step -> step.from() + " to " + step.to() + " " + step.pricePerTick().cents())
             .toList());
-    Activity bearings =
-        answer.of().network().activity(answer.of().network().indexOf("B1").orElseThrow());
+    Activity bearings = answer.of().network().activity(index(answer.of(), "B1"));
     assertEquals(20, bearings.normal());
     assertEquals(15, bearings.crash());
   }
