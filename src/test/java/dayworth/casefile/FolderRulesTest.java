@@ -48,8 +48,6 @@ class FolderRulesTest {
   @ParameterizedTest
   @ValueSource(
       strings = {
-        "sections.csv",
-        "running.csv",
         "measures.csv",
         "packages.csv",
         "labour.csv",
