@@ -74,7 +74,7 @@ final class BreakEvenTable {
   private String range(Range range) {
     String from = text(range.from());
     if (range.to().isEmpty()) {
-      return range.from().isZero() ? "any" : "above " + from;
+      return "above " + from;
     }
     String to = text(range.to().get());
     return range.from().isZero() ? "up to " + to : from + " to " + to;

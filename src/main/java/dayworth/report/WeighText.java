@@ -1,5 +1,6 @@
 package dayworth.report;
 
+import dayworth.contract.Per;
 import dayworth.decision.BestByRate;
 import dayworth.decision.Case;
 import dayworth.decision.Finish;
@@ -11,6 +12,7 @@ import java.math.BigDecimal;
 import java.math.RoundingMode;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 
 /** The short answer of {@code dayworth weigh} for a terminal. */
@@ -50,14 +52,15 @@ public final class WeighText {
     lines.add(style.bold(Wording.answer(sentence, of.currency(), width)));
     lines.add("");
     lines.addAll(table.lines(width));
+    if (!CurveText.ties(granted.curve()).isEmpty()) {
+      prose(lines, CurveText.ties(granted.curve()));
+    }
     if (!table.leftOut().isEmpty()) {
       lines.add("");
       prose(lines, table.leftOut());
     }
+    howFar(lines, granted);
     answer.claimed().ifPresent(claimed -> claimed(lines, claimed));
-    breakEvens(lines, granted);
-    dearer(lines, granted);
-    wrongRates(lines, granted);
     lines.add("");
     prose(lines, CurveText.proof(granted.curve()));
     lines.add("");
@@ -65,7 +68,10 @@ public final class WeighText {
         lines,
         "Damages, bonus and entitlement depend on the contract and the law that governs it. This"
             + " is not legal advice: read the contract and take advice from a licensed"
-            + " professional.");
+            + " professional."
+            + (answer.claimed().isEmpty()
+                ? ""
+                : " Whether an extension of time is due is not judged here."));
     return lines;
   }
 
@@ -104,8 +110,14 @@ public final class WeighText {
                     by.date().map(Dates::spoken).orElseGet(() -> Wording.duration(of, by.ticks())))
             .orElseThrow();
     lines.add("");
-    prose(lines, "If the extension to " + due + ", claimed and not granted, were granted");
-    table.lines(width - Wording.INDENT.length()).forEach(line -> lines.add(Wording.INDENT + line));
+    String granted = "Were the extension to " + due + " granted, which is claimed and is not: ";
+    String better = sentence(claimed, table.look());
+    String start = better.substring(0, 1).toLowerCase(Locale.ROOT);
+    Wording.wrap(granted + start + better.substring(1), Wording.INDENT, width)
+        .forEach(line -> lines.add(style.bold(line)));
+    lines.add("");
+    lines.addAll(table.lines(width));
+    howFar(lines, claimed);
     lines.add("");
     lines.add("  Which finish is best, by the working days of extension");
     extensions().forEach(line -> lines.add(INDENT + line));
@@ -132,20 +144,24 @@ public final class WeighText {
     return extension.from() == to ? String.valueOf(to) : extension.from() + " to " + to;
   }
 
-  private void breakEvens(List<String> lines, Weighing weighing) {
+  private void howFar(List<String> lines, Weighing weighing) {
     weighing
         .byDamages()
-        .ifPresent(
-            best -> {
-              lines.add("");
-              String per = Lateness.one(of, of.terms().damages().per());
-              String title = "Which finish is best, if damages for " + per + " were";
-              lines.addAll(new BreakEvenTable(of, best).lines(title, style, width));
-            });
+        .ifPresent(best -> byRate(lines, best, "damages", of.terms().damages().per()));
+    byRate(lines, weighing.byTimeRelated(), "time-related cost", of.terms().timeRelated().per());
+    dearer(lines, weighing);
+    wrongRates(lines, weighing);
+  }
+
+  private void byRate(List<String> lines, BestByRate best, String money, Per per) {
     lines.add("");
-    String per = Lateness.one(of, of.terms().timeRelated().per());
-    String title = "Which finish is best, if time-related cost for " + per + " were";
-    lines.addAll(new BreakEvenTable(of, weighing.byTimeRelated()).lines(title, style, width));
+    if (best.ranges().size() == 1) {
+      String finish = when(best.present().finish(), "", "");
+      prose(lines, "Whatever the rate of " + money + ", " + finish + " is best.");
+      return;
+    }
+    String title = "Which finish is best, if " + money + " for " + Lateness.one(of, per) + " were";
+    lines.addAll(new BreakEvenTable(of, best).lines(title, style, width));
   }
 
   private void dearer(List<String> lines, Weighing weighing) {
@@ -186,24 +202,21 @@ public final class WeighText {
 
   private String holds(Weighing weighing) {
     BestByRate.Range range = weighing.byCompression().present();
-    String name =
-        weighing.best().duration() == range.finish().duration()
-            ? when(range.finish(), "", "")
-            : when(weighing.best(), "", "");
+    String name = when(weighing.best(), "", "") + " stays best ";
     Optional<String> less =
         Optional.of(range.from())
             .filter(from -> !from.isZero())
-            .map(from -> percent(from.negate().plus(Money.of(1))) + " % less");
+            .map(from -> percent(Money.of(1).minus(from)) + " % less");
     Optional<String> more = range.to().map(to -> percent(to.minus(Money.of(1))) + " % more");
-    if (less.isEmpty() && more.isEmpty()) {
-      return name + " stays best whatever shortening costs.";
+    if (more.isEmpty()) {
+      return name
+          + less.map(share -> "until shortening costs " + share + " than estimated.")
+              .orElse("whatever shortening costs.");
     }
     return name
-        + " stays best"
-        + less.map(share -> " if shortening costs up to " + share)
-            .orElse(" if shortening costs less")
-        + more.map(share -> ", and until it costs " + share + " than estimated.")
-            .orElse(", and however much more it costs than estimated.");
+        + less.map(share -> "while shortening costs from " + share + " to " + more.get())
+            .orElse("until shortening costs " + more.get())
+        + " than estimated.";
   }
 
   /** Rounded down to a tenth of a per cent, so that no more is promised than holds. */
@@ -217,6 +230,10 @@ public final class WeighText {
       return;
     }
     lines.add("");
+    if (weighing.wrongRates().stream().allMatch(wrong -> wrong.tooMuch().isZero())) {
+      prose(lines, "It also stays best without damages, and at half or twice their rate.");
+      return;
+    }
     prose(lines, "What this choice costs too much if the damages rate is really another");
     TextColumns columns = new TextColumns(width - INDENT.length());
     List<Weighing.WrongRate> rates = weighing.wrongRates();
