@@ -14,11 +14,14 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.stream.Stream;
 
 /** The short answer of {@code dayworth weigh} for a terminal. */
 public final class WeighText {
 
   private static final String INDENT = "    ";
+
+  private static final int MOST_EXTENSIONS = 12;
 
   /** What shortening may cost more than estimated, in per cent. */
   private static final List<Long> DEARER = List.of(10L, 25L, 50L);
@@ -124,7 +127,7 @@ public final class WeighText {
   }
 
   private List<String> extensions() {
-    List<ByExtension> all = answer.byExtension();
+    List<ByExtension> all = answer.byExtension().stream().limit(MOST_EXTENSIONS).toList();
     TextColumns columns = new TextColumns(width - INDENT.length());
     columns.add("", false, all.stream().map(WeighText::range).toList());
     Dates dates = new Dates(of);
@@ -133,15 +136,21 @@ public final class WeighText {
     }
     columns.add(
         "", true, all.stream().map(e -> Wording.duration(of, e.best().duration())).toList());
-    return columns.lines().subList(1, all.size() + 1);
+    List<String> lines = new ArrayList<>(columns.lines().subList(1, all.size() + 1));
+    int left = answer.byExtension().size() - all.size();
+    if (left > 0) {
+      lines.add(Wording.count(left, "row is", "rows are") + " left out: see result.json");
+    }
+    return lines;
   }
 
   private static String range(ByExtension extension) {
+    String from = String.format(Locale.ROOT, "%,d", extension.from());
     if (extension.to().isEmpty()) {
-      return extension.from() == 0 ? "any" : extension.from() + " and more";
+      return extension.from() == 0 ? "any" : from + " and more";
     }
-    long to = extension.to().get();
-    return extension.from() == to ? String.valueOf(to) : extension.from() + " to " + to;
+    String to = String.format(Locale.ROOT, "%,d", extension.to().get());
+    return from.equals(to) ? from : from + " to " + to;
   }
 
   private void howFar(List<String> lines, Weighing weighing) {
@@ -167,29 +176,33 @@ public final class WeighText {
   private void dearer(List<String> lines, Weighing weighing) {
     lines.add("");
     prose(lines, holds(weighing));
-    List<String> more = new ArrayList<>();
-    List<Finish> best = new ArrayList<>();
-    List<String> totals = new ArrayList<>();
-    BigDecimal same =
-        weighing.asItStands().direct().cents().add(weighing.asItStands().other().fixed().cents());
-    for (long percent : DEARER) {
-      Money multiple = Money.of(100 + percent).dividedBy(100);
-      Finish then = weighing.byCompression().at(multiple).finish();
-      BigDecimal total = weighing.totalAt(weighing.best(), multiple).cents().subtract(same);
-      BigDecimal least = weighing.totalAt(then, multiple).cents().subtract(same);
-      MoneyLook look = MoneyLook.of(List.of(total, least));
-      more.add(percent + " % more");
-      best.add(then);
-      totals.add(
-          total.compareTo(least) == 0
-              ? "still the best: " + look.text(total)
-              : "best then: " + look.text(least) + ", and this choice " + look.text(total));
+    List<Money> multiples =
+        DEARER.stream().map(percent -> Money.of(100 + percent).dividedBy(100)).toList();
+    List<Finish> best =
+        multiples.stream().map(x -> weighing.byCompression().at(x).finish()).toList();
+    List<BigDecimal> totals = new ArrayList<>();
+    List<BigDecimal> chosen = new ArrayList<>();
+    for (int i = 0; i < multiples.size(); i++) {
+      totals.add(total(weighing, best.get(i), multiples.get(i)));
+      chosen.add(total(weighing, weighing.best(), multiples.get(i)));
     }
+    MoneyLook look = MoneyLook.of(Stream.concat(totals.stream(), chosen.stream()).toList());
     TextColumns columns = new TextColumns(width - INDENT.length());
-    columns.add("", false, more);
+    columns.add("", false, DEARER.stream().map(percent -> percent + " % more").toList());
+    columns.add("this choice", true, chosen.stream().map(look::text).toList());
+    columns.add("least then", true, totals.stream().map(look::text).toList());
     addFinishes(columns, best);
-    columns.add("", false, totals);
-    columns.lines().stream().skip(1).forEach(line -> lines.add(INDENT + line));
+    columns.lines().forEach(line -> lines.add((INDENT + line).stripTrailing()));
+  }
+
+  /** Without the money that is the same in every choice. */
+  private static BigDecimal total(Weighing weighing, Finish finish, Money multiple) {
+    Finish planned = weighing.asItStands();
+    return weighing
+        .totalAt(finish, multiple)
+        .cents()
+        .subtract(planned.direct().cents())
+        .subtract(planned.other().fixed().cents());
   }
 
   private void addFinishes(TextColumns columns, List<Finish> finishes) {
