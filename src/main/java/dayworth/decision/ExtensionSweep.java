@@ -5,8 +5,11 @@ import dayworth.contract.Extension;
 import dayworth.contract.FinishCost;
 import dayworth.contract.Terms;
 import dayworth.value.Money;
+import java.math.BigDecimal;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
 import java.util.TreeSet;
@@ -28,6 +31,8 @@ final class ExtensionSweep {
 
   /** The rows of the curve by their duration. */
   private final TreeMap<Long, Finish> rows = new TreeMap<>();
+
+  private final Map<Long, BigDecimal> beside = new HashMap<>();
 
   private ExtensionSweep(CurveAnswer answer, Extension claimed) {
     this.terms = answer.of().terms();
@@ -63,14 +68,28 @@ final class ExtensionSweep {
   private Finish best(Terms moved) {
     TreeSet<Long> durations = new TreeSet<>(rows.keySet());
     durations.addAll(moved.bends().subSet(rows.firstKey(), rows.lastKey()));
-    Optional<Finish> best = Optional.empty();
+    long best = rows.lastKey();
+    Optional<BigDecimal> least = Optional.empty();
     for (long duration : durations.descendingSet()) {
-      Finish here = under(moved, asItIs(duration));
-      best =
-          best.filter(least -> least.total().compareTo(here.total()) <= 0)
-              .or(() -> Optional.of(here));
+      FinishCost cost = moved.at(duration);
+      BigDecimal total =
+          beside(duration).add(cost.damages().cents()).subtract(cost.bonus().cents());
+      if (least.isEmpty() || total.compareTo(least.get()) < 0) {
+        best = duration;
+        least = Optional.of(total);
+      }
     }
-    return best.orElseThrow();
+    return under(moved, asItIs(best));
+  }
+
+  /** What a finish costs beside the money that hangs on the contract finish. */
+  private BigDecimal beside(long duration) {
+    return beside.computeIfAbsent(
+        duration,
+        ticks -> {
+          FinishCost now = terms.at(ticks);
+          return asItIs(ticks).total().subtract(now.damages().cents()).add(now.bonus().cents());
+        });
   }
 
   /** The finish under the contract finish of the case; between two rows all money is straight. */

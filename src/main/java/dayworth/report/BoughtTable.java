@@ -68,7 +68,9 @@ final class BoughtTable {
   private TextColumns columns(int width, int mostName) {
     TextColumns columns = new TextColumns(width);
     columns.add("", false, column(bought -> id(bought.activity()), "all"));
-    columns.add("", false, column(bought -> name(bought.activity(), mostName), ""));
+    if (shown.stream().anyMatch(bought -> !name(bought.activity(), mostName).isEmpty())) {
+      columns.add("", false, column(bought -> name(bought.activity(), mostName), ""));
+    }
     columns.add(of.unit().word() + "s", true, column(this::fromTo, ""));
     columns.add("bought", true, column(bought -> units(bought.ticks()), units(allTicks())));
     columns.add("a " + of.unit().word(), true, column(bought -> look.text(price(bought)), ""));

@@ -74,7 +74,7 @@ final class BreakEvenTable {
   private String range(Range range) {
     String from = text(range.from());
     if (range.to().isEmpty()) {
-      return range.from().isZero() ? "any" : "above " + from;
+      return "above " + from;
     }
     String to = text(range.to().get());
     return range.from().isZero() ? "up to " + to : from + " to " + to;
@@ -86,8 +86,9 @@ final class BreakEvenTable {
 
   private String note(Range range) {
     List<String> notes = new ArrayList<>();
+    BigDecimal now = best.now().cents();
     if (range.equals(best.present())) {
-      notes.add("the case says " + text(best.now()));
+      notes.add("the case says " + MoneyLook.of(List.of(now)).text(now));
     }
     if (of.terms()
         .contractFinish()
@@ -96,7 +97,7 @@ final class BreakEvenTable {
       notes.add("contract finish");
     }
     if (range.isCapped()) {
-      notes.add("damages at their cap");
+      notes.add("damages capped");
     }
     return String.join(", ", notes);
   }

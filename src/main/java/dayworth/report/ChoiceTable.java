@@ -7,6 +7,7 @@ import dayworth.decision.TimeUnit;
 import dayworth.decision.Weighing;
 import java.math.BigDecimal;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.function.Function;
@@ -29,7 +30,10 @@ final class ChoiceTable {
     this.of = weighing.curve().of();
     this.dates = new Dates(of);
     this.late = new Lateness(of);
-    weighing.choices().forEach(this::share);
+    weighing.choices().stream()
+        .sorted(Comparator.comparing(choice -> choice.kind() == Choice.Kind.MOST_BONUS))
+        .forEach(this::share);
+    shown.sort(Comparator.comparing(Choice::kind));
     List<BigDecimal> amounts = new ArrayList<>();
     for (Choice choice : shown) {
       Finish finish = choice.finish();
@@ -62,6 +66,8 @@ final class ChoiceTable {
       lines.addAll(Wording.wrap(left, Wording.INDENT, width));
     }
     shared.forEach(line -> lines.addAll(Wording.wrap(line, Wording.INDENT, width)));
+    FinishTable.cannotBeMet(weighing.curve())
+        .ifPresent(line -> lines.addAll(Wording.wrap(line, Wording.INDENT, width)));
     return lines;
   }
 
@@ -80,8 +86,8 @@ final class ChoiceTable {
     for (Choice other : shown) {
       if (other.finish().duration() == choice.finish().duration()
           && other.finish().total().compareTo(choice.finish().total()) == 0) {
-        String sentence = spoken(choice.kind()) + " is the same as " + spoken(other.kind()) + ".";
-        shared.add(sentence.substring(0, 1).toUpperCase(Locale.ROOT) + sentence.substring(1));
+        String also = spoken(other.kind()) + " is also " + spoken(choice.kind()) + ".";
+        shared.add(also.substring(0, 1).toUpperCase(Locale.ROOT) + also.substring(1));
         return;
       }
     }
@@ -90,7 +96,8 @@ final class ChoiceTable {
 
   private void addRows() {
     if (dates.areKnown()) {
-      add("finish", dates.column(shown.stream().map(c -> c.finish().duration()).toList()));
+      List<String> finishes = dates.column(shown.stream().map(c -> c.finish().duration()).toList());
+      add("finish", finishes.stream().map(date -> date.replace("  ", " ")).toList());
     }
     add(of.unit() == TimeUnit.DAY ? "working days" : of.unit().word() + "s", f -> units(f));
     if (late.isKnown()) {
@@ -149,7 +156,7 @@ final class ChoiceTable {
       case AS_IT_STANDS -> "carrying on";
       case LEAST_TOTAL -> "the least total";
       case CONTRACT_FINISH -> "the contract finish";
-      case MOST_BONUS -> "the most bonus";
+      case MOST_BONUS -> "the finish with the most bonus";
       case SHORTEST -> "the shortest finish";
     };
   }

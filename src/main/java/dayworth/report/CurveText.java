@@ -118,7 +118,8 @@ public final class CurveText {
         : finish + ", no better than " + asPlanned + ".";
   }
 
-  private static String ties(CurveAnswer answer) {
+  /** Empty where one finish alone has the least total. */
+  static String ties(CurveAnswer answer) {
     int count = answer.least().size();
     if (count < 2) {
       return "";

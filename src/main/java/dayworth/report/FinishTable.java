@@ -64,7 +64,7 @@ final class FinishTable {
       String exact = "Amounts are rounded to whole ones here; curve.csv has the cents.";
       lines.addAll(Wording.wrap(exact, "  ", width));
     }
-    cannotBeMet().ifPresent(line -> lines.addAll(Wording.wrap(line, "  ", width)));
+    cannotBeMet(answer).ifPresent(line -> lines.addAll(Wording.wrap(line, "  ", width)));
     if (sameForAll().signum() != 0) {
       lines.addAll(Wording.wrap(leftOut(), "  ", width));
     }
@@ -142,18 +142,20 @@ final class FinishTable {
         : Optional.empty();
   }
 
-  private Optional<String> cannotBeMet() {
+  /** What is said of a contract finish that no plan meets. */
+  static Optional<String> cannotBeMet(CurveAnswer answer) {
     return answer
         .of()
         .terms()
         .contractFinish()
         .filter(due -> due.ticks() < answer.shortest().duration())
-        .map(due -> "The contract finish" + named(due) + " cannot be met.");
+        .map(due -> "The contract finish" + named(answer, due) + " cannot be met.");
   }
 
-  private String named(Due due) {
+  private static String named(CurveAnswer answer, Due due) {
     return due.date()
         .map(date -> ", " + Dates.spoken(date) + ",")
-        .orElseGet(() -> " of " + units(due.ticks()));
+        .orElseGet(
+            () -> " of " + Wording.grouped(answer.of().network().scale().units(due.ticks())));
   }
 }

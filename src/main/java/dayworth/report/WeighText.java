@@ -1,5 +1,6 @@
 package dayworth.report;
 
+import dayworth.contract.Per;
 import dayworth.decision.BestByRate;
 import dayworth.decision.Case;
 import dayworth.decision.Finish;
@@ -11,12 +12,16 @@ import java.math.BigDecimal;
 import java.math.RoundingMode;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
+import java.util.stream.Stream;
 
 /** The short answer of {@code dayworth weigh} for a terminal. */
 public final class WeighText {
 
   private static final String INDENT = "    ";
+
+  private static final int MOST_EXTENSIONS = 12;
 
   /** What shortening may cost more than estimated, in per cent. */
   private static final List<Long> DEARER = List.of(10L, 25L, 50L);
@@ -50,14 +55,15 @@ public final class WeighText {
     lines.add(style.bold(Wording.answer(sentence, of.currency(), width)));
     lines.add("");
     lines.addAll(table.lines(width));
+    if (!CurveText.ties(granted.curve()).isEmpty()) {
+      prose(lines, CurveText.ties(granted.curve()));
+    }
     if (!table.leftOut().isEmpty()) {
       lines.add("");
       prose(lines, table.leftOut());
     }
+    howFar(lines, granted);
     answer.claimed().ifPresent(claimed -> claimed(lines, claimed));
-    breakEvens(lines, granted);
-    dearer(lines, granted);
-    wrongRates(lines, granted);
     lines.add("");
     prose(lines, CurveText.proof(granted.curve()));
     lines.add("");
@@ -65,7 +71,10 @@ public final class WeighText {
         lines,
         "Damages, bonus and entitlement depend on the contract and the law that governs it. This"
             + " is not legal advice: read the contract and take advice from a licensed"
-            + " professional.");
+            + " professional."
+            + (answer.claimed().isEmpty()
+                ? ""
+                : " Whether an extension of time is due is not judged here."));
     return lines;
   }
 
@@ -104,15 +113,21 @@ public final class WeighText {
                     by.date().map(Dates::spoken).orElseGet(() -> Wording.duration(of, by.ticks())))
             .orElseThrow();
     lines.add("");
-    prose(lines, "If the extension to " + due + ", claimed and not granted, were granted");
-    table.lines(width - Wording.INDENT.length()).forEach(line -> lines.add(Wording.INDENT + line));
+    String granted = "Were the extension to " + due + " granted, which is claimed and is not: ";
+    String better = sentence(claimed, table.look());
+    String start = better.substring(0, 1).toLowerCase(Locale.ROOT);
+    Wording.wrap(granted + start + better.substring(1), Wording.INDENT, width)
+        .forEach(line -> lines.add(style.bold(line)));
+    lines.add("");
+    lines.addAll(table.lines(width));
+    howFar(lines, claimed);
     lines.add("");
     lines.add("  Which finish is best, by the working days of extension");
     extensions().forEach(line -> lines.add(INDENT + line));
   }
 
   private List<String> extensions() {
-    List<ByExtension> all = answer.byExtension();
+    List<ByExtension> all = answer.byExtension().stream().limit(MOST_EXTENSIONS).toList();
     TextColumns columns = new TextColumns(width - INDENT.length());
     columns.add("", false, all.stream().map(WeighText::range).toList());
     Dates dates = new Dates(of);
@@ -121,59 +136,73 @@ public final class WeighText {
     }
     columns.add(
         "", true, all.stream().map(e -> Wording.duration(of, e.best().duration())).toList());
-    return columns.lines().subList(1, all.size() + 1);
+    List<String> lines = new ArrayList<>(columns.lines().subList(1, all.size() + 1));
+    int left = answer.byExtension().size() - all.size();
+    if (left > 0) {
+      lines.add(Wording.count(left, "row is", "rows are") + " left out: see result.json");
+    }
+    return lines;
   }
 
   private static String range(ByExtension extension) {
+    String from = String.format(Locale.ROOT, "%,d", extension.from());
     if (extension.to().isEmpty()) {
-      return extension.from() == 0 ? "any" : extension.from() + " and more";
+      return extension.from() == 0 ? "any" : from + " and more";
     }
-    long to = extension.to().get();
-    return extension.from() == to ? String.valueOf(to) : extension.from() + " to " + to;
+    String to = String.format(Locale.ROOT, "%,d", extension.to().get());
+    return from.equals(to) ? from : from + " to " + to;
   }
 
-  private void breakEvens(List<String> lines, Weighing weighing) {
+  private void howFar(List<String> lines, Weighing weighing) {
     weighing
         .byDamages()
-        .ifPresent(
-            best -> {
-              lines.add("");
-              String per = Lateness.one(of, of.terms().damages().per());
-              String title = "Which finish is best, if damages for " + per + " were";
-              lines.addAll(new BreakEvenTable(of, best).lines(title, style, width));
-            });
+        .ifPresent(best -> byRate(lines, best, "damages", of.terms().damages().per()));
+    byRate(lines, weighing.byTimeRelated(), "time-related cost", of.terms().timeRelated().per());
+    dearer(lines, weighing);
+    wrongRates(lines, weighing);
+  }
+
+  private void byRate(List<String> lines, BestByRate best, String money, Per per) {
     lines.add("");
-    String per = Lateness.one(of, of.terms().timeRelated().per());
-    String title = "Which finish is best, if time-related cost for " + per + " were";
-    lines.addAll(new BreakEvenTable(of, weighing.byTimeRelated()).lines(title, style, width));
+    if (best.ranges().size() == 1) {
+      String finish = when(best.present().finish(), "", "");
+      prose(lines, "Whatever the rate of " + money + ", " + finish + " is best.");
+      return;
+    }
+    String title = "Which finish is best, if " + money + " for " + Lateness.one(of, per) + " were";
+    lines.addAll(new BreakEvenTable(of, best).lines(title, style, width));
   }
 
   private void dearer(List<String> lines, Weighing weighing) {
     lines.add("");
     prose(lines, holds(weighing));
-    List<String> more = new ArrayList<>();
-    List<Finish> best = new ArrayList<>();
-    List<String> totals = new ArrayList<>();
-    BigDecimal same =
-        weighing.asItStands().direct().cents().add(weighing.asItStands().other().fixed().cents());
-    for (long percent : DEARER) {
-      Money multiple = Money.of(100 + percent).dividedBy(100);
-      Finish then = weighing.byCompression().at(multiple).finish();
-      BigDecimal total = weighing.totalAt(weighing.best(), multiple).cents().subtract(same);
-      BigDecimal least = weighing.totalAt(then, multiple).cents().subtract(same);
-      MoneyLook look = MoneyLook.of(List.of(total, least));
-      more.add(percent + " % more");
-      best.add(then);
-      totals.add(
-          total.compareTo(least) == 0
-              ? "still the best: " + look.text(total)
-              : "best then: " + look.text(least) + ", and this choice " + look.text(total));
+    List<Money> multiples =
+        DEARER.stream().map(percent -> Money.of(100 + percent).dividedBy(100)).toList();
+    List<Finish> best =
+        multiples.stream().map(x -> weighing.byCompression().at(x).finish()).toList();
+    List<BigDecimal> totals = new ArrayList<>();
+    List<BigDecimal> chosen = new ArrayList<>();
+    for (int i = 0; i < multiples.size(); i++) {
+      totals.add(total(weighing, best.get(i), multiples.get(i)));
+      chosen.add(total(weighing, weighing.best(), multiples.get(i)));
     }
+    MoneyLook look = MoneyLook.of(Stream.concat(totals.stream(), chosen.stream()).toList());
     TextColumns columns = new TextColumns(width - INDENT.length());
-    columns.add("", false, more);
+    columns.add("", false, DEARER.stream().map(percent -> percent + " % more").toList());
+    columns.add("this choice", true, chosen.stream().map(look::text).toList());
+    columns.add("least then", true, totals.stream().map(look::text).toList());
     addFinishes(columns, best);
-    columns.add("", false, totals);
-    columns.lines().stream().skip(1).forEach(line -> lines.add(INDENT + line));
+    columns.lines().forEach(line -> lines.add((INDENT + line).stripTrailing()));
+  }
+
+  /** Without the money that is the same in every choice. */
+  private static BigDecimal total(Weighing weighing, Finish finish, Money multiple) {
+    Finish planned = weighing.asItStands();
+    return weighing
+        .totalAt(finish, multiple)
+        .cents()
+        .subtract(planned.direct().cents())
+        .subtract(planned.other().fixed().cents());
   }
 
   private void addFinishes(TextColumns columns, List<Finish> finishes) {
@@ -186,24 +215,21 @@ public final class WeighText {
 
   private String holds(Weighing weighing) {
     BestByRate.Range range = weighing.byCompression().present();
-    String name =
-        weighing.best().duration() == range.finish().duration()
-            ? when(range.finish(), "", "")
-            : when(weighing.best(), "", "");
+    String name = when(weighing.best(), "", "") + " stays best ";
     Optional<String> less =
         Optional.of(range.from())
             .filter(from -> !from.isZero())
-            .map(from -> percent(from.negate().plus(Money.of(1))) + " % less");
+            .map(from -> percent(Money.of(1).minus(from)) + " % less");
     Optional<String> more = range.to().map(to -> percent(to.minus(Money.of(1))) + " % more");
-    if (less.isEmpty() && more.isEmpty()) {
-      return name + " stays best whatever shortening costs.";
+    if (more.isEmpty()) {
+      return name
+          + less.map(share -> "until shortening costs " + share + " than estimated.")
+              .orElse("whatever shortening costs.");
     }
     return name
-        + " stays best"
-        + less.map(share -> " if shortening costs up to " + share)
-            .orElse(" if shortening costs less")
-        + more.map(share -> ", and until it costs " + share + " than estimated.")
-            .orElse(", and however much more it costs than estimated.");
+        + less.map(share -> "while shortening costs from " + share + " to " + more.get())
+            .orElse("until shortening costs " + more.get())
+        + " than estimated.";
   }
 
   /** Rounded down to a tenth of a per cent, so that no more is promised than holds. */
@@ -217,6 +243,10 @@ public final class WeighText {
       return;
     }
     lines.add("");
+    if (weighing.wrongRates().stream().allMatch(wrong -> wrong.tooMuch().isZero())) {
+      prose(lines, "It also stays best without damages, and at half or twice their rate.");
+      return;
+    }
     prose(lines, "What this choice costs too much if the damages rate is really another");
     TextColumns columns = new TextColumns(width - INDENT.length());
     List<Weighing.WrongRate> rates = weighing.wrongRates();

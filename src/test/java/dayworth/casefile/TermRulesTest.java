@@ -386,4 +386,71 @@ class TermRulesTest {
     // By hand: 20 / 8 = 2.5 units, reached at 4 + 2.5 = 6.5, or 6500 thousandths.
     assertTrue(read.terms().bends().contains(6500L), read.terms().bends().toString());
   }
+
+  @Test
+  void anExtensionIsWholeWorkingDaysOrALaterDate() throws IOException {
+    expect(
+        "extension,5\n",
+        "terms.csv:2 extension | means nothing without contract_finish | extension"
+            + " | a row for contract_finish");
+    for (String days : List.of("0", "1.5")) {
+      expect(
+          "contract_finish,4\nextension," + days + "\n",
+          "terms.csv:3 extension | not a whole number of working days | "
+              + days
+              + " | 1 or more, or a date");
+    }
+    expect(
+        "contract_finish,4\nextension,-1\n", "terms.csv:3 extension | negative | -1 | 0 or more");
+    expect(
+        "contract_finish,4\nextension,2026-10-01\n",
+        "terms.csv:3 extension | a date needs a start_date | 2026-10-01"
+            + " | a row for start_date in terms.csv, or a number of working days");
+    expect(
+        "start_date,2026-09-07\ncontract_finish,2026-10-02\nextension,2026-10-02\n",
+        "terms.csv:4 extension | not after the contract finish | 2026-10-02"
+            + " | a date after 2026-10-02");
+    // day 4 is Thursday 10 September
+    expect(
+        "start_date,2026-09-07\ncontract_finish,4\nextension,2026-09-09\n",
+        "terms.csv:4 extension | not after the contract finish | 2026-09-09"
+            + " | a date after 2026-09-10");
+    terms("time_unit,week\nstart_date,2026-09-07\nextension,1000000\ncontract_finish,400000\n");
+    assertEquals(
+        List.of("terms.csv:4 extension | after the year 9999 |  | a shorter extension"),
+        new CaseOnDisk(folder).problems());
+  }
+
+  @Test
+  void anExtensionMovesTheContractFinish() throws IOException {
+    // in days, in hours of which 8 are a day, in weeks of 5 days
+    assertEquals(Due.at(9), extended("contract_finish,4\nextension,5\n"));
+    String hours = "time_unit,hour\nunits_per_working_day,8\n";
+    assertEquals(Due.at(44), extended("contract_finish,4\nextension,5\n" + hours));
+    // a tenth of a week is a tick: 4 weeks and 3 of 5 days
+    assertEquals(Due.at(46), extended("contract_finish,4\nextension,3\ntime_unit,week\n"));
+    String start = "start_date,2026-09-07\ndamages_rate,1\n";
+    // Saturday 12: five days done; 2 more end on Tuesday 15, the seventh
+    assertEquals(
+        new Due(7, Optional.of(LocalDate.parse("2026-09-15"))),
+        extended(start + "contract_finish,2026-09-12\nextension,2\n"));
+    // Sunday 20: ten days
+    assertEquals(
+        new Due(10, Optional.of(LocalDate.parse("2026-09-20"))),
+        extended(start + "contract_finish,2026-09-12\nextension,2026-09-20\n"));
+  }
+
+  private Due extended(String rows) throws IOException {
+    return terms(rows).sound().terms().extension().orElseThrow().due();
+  }
+
+  @Test
+  void anExtensionThatMovesNoMoneyIsDoubtful() throws IOException {
+    assertEquals(
+        List.of(
+            "terms.csv:3 extension | changes nothing | "
+                + " | neither damages nor bonus depend on the contract finish"),
+        terms("contract_finish,4\nextension,5\n").warnings());
+    assertEquals(List.of(), terms("contract_finish,4\nextension,5\ndamages_rate,3\n").warnings());
+  }
 }
