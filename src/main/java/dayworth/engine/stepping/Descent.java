@@ -19,6 +19,7 @@ public final class Descent {
   private final EventNetwork events;
   private final Squeeze squeeze;
   private final TieRule ties;
+  private boolean hasBegun;
 
   /**
    * Takes what saves money whatever the finish.
@@ -42,9 +43,12 @@ public final class Descent {
    * @return empty if no plan finishes within it; then none does within a shorter one
    */
   public Optional<Plan> within(long duration, Plan before) {
-    return squeeze.run(BEGIN, END, UNLIMITED, duration, Squeeze.Listener.NONE) == Squeeze.End.HELD
-        ? Optional.empty()
-        : Optional.of(ties.choose(squeeze, before));
+    Squeeze.End end =
+        hasBegun
+            ? squeeze.goOn(BEGIN, END, UNLIMITED, duration, Squeeze.Listener.NONE)
+            : squeeze.run(BEGIN, END, UNLIMITED, duration, Squeeze.Listener.NONE);
+    hasBegun = true;
+    return end == Squeeze.End.HELD ? Optional.empty() : Optional.of(ties.choose(squeeze, before));
   }
 
   /** The flow that proves the last plan. */

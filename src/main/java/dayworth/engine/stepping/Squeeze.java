@@ -106,8 +106,16 @@ final class Squeeze {
    */
   End run(int from, int to, long most, long close, Listener listener) {
     settle();
-    sent = 0;
     join(from);
+    return goOn(from, to, most, close, listener);
+  }
+
+  /**
+   * Goes on from where the last run stopped, which was with the same two events and nothing set
+   * since.
+   */
+  End goOn(int from, int to, long most, long close, Listener listener) {
+    sent = 0;
     while (sent < most) {
       if (!reach(from, to, close) || time(to) - time(from) <= close) {
         return End.CLOSE_ENOUGH;
