@@ -115,7 +115,7 @@ public final class Branching {
    *
    * @param durations ticks, from long to short; for each some plan must exist
    * @param most how many convex problems are solved at most, beyond one for each finish
-   * @return one point for each duration
+   * @return one point for each duration; a plan for a shorter one serves a longer one too
    * @throws BoundRefuted if a bound does not stand up to its recheck
    */
   public static List<Point> solve(
@@ -216,13 +216,12 @@ public final class Branching {
     List<Money> bounds = new ArrayList<>();
     Optional<Branch.Split> split = Optional.empty();
     Money widest = Money.ZERO;
-    Plan plan = Plan.allNormal(network);
     for (int k = 0; k < node.rows().size(); k++) {
       int row = node.rows().get(k);
       if (leaves.isEmpty() && best.get(row).beats(node.bounds().get(k))) {
         continue;
       }
-      plan = solve(descent, checker, relaxation.network(), durations[row], plan);
+      Plan plan = solve(descent, checker, relaxation.network(), durations[row]);
       best.get(row).offer(plan, cost(network, charges, plan), node.branch());
       Money bound = relaxation.cost(plan);
       if (leaves.isPresent() && best.get(row).beats(bound)) {
@@ -251,12 +250,11 @@ public final class Branching {
     }
   }
 
-  private Plan solve(
-      Descent descent, ProofChecker checker, Network relaxed, long duration, Plan before) {
+  private Plan solve(Descent descent, ProofChecker checker, Network relaxed, long duration) {
     solved++;
     Plan plan =
         descent
-            .within(duration, before)
+            .anyWithin(duration)
             .orElseThrow(() -> new IllegalStateException("no plan within " + duration));
     if (checker.check(plan, duration, descent.flow(), plan.cost(relaxed))
         instanceof Verdict.Refuted refuted) {
@@ -275,18 +273,35 @@ public final class Branching {
     }
   }
 
-  /** A plan for a shorter finish serves a longer one too. */
   private List<Point> points() {
+    for (int row = durations.length - 2; row >= 0; row--) {
+      Best shorter = best.get(row + 1);
+      best.get(row).offer(shorter.plan.orElseThrow(), shorter.cost, shorter.branch);
+    }
     List<Point> points = new ArrayList<>();
-    for (int row = durations.length - 1; row >= 0; row--) {
+    Optional<Descent> descent = Optional.empty();
+    Plan before = Plan.allNormal(network);
+    for (int row = 0; row < durations.length; row++) {
       Best of = best.get(row);
-      if (row < durations.length - 1) {
-        Best shorter = best.get(row + 1);
-        of.offer(shorter.plan.orElseThrow(), shorter.cost, shorter.branch);
+      if (row == 0 || !of.branch.equals(best.get(row - 1).branch)) {
+        descent = Optional.of(new Descent(of.branch.relaxation(network, charges, fence).network()));
       }
+      before = leastChanged(descent.orElseThrow(), row, before);
       Money bound = of.leftOpen.map(of.cost::min).orElse(of.cost);
-      points.add(0, new Point(durations[row], of.plan.orElseThrow(), of.cost, bound, of.branch));
+      points.add(new Point(durations[row], before, of.cost, bound, of.branch));
     }
     return points;
+  }
+
+  /**
+   * The best plan's like that changes least against another; the best plan itself where its branch
+   * has none that costs the same in truth.
+   */
+  private Plan leastChanged(Descent descent, int row, Plan before) {
+    Best of = best.get(row);
+    return descent
+        .within(durations[row], before)
+        .filter(plan -> cost(network, charges, plan).equals(of.cost))
+        .orElse(of.plan.orElseThrow());
   }
 }

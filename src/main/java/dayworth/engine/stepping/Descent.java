@@ -43,12 +43,21 @@ public final class Descent {
    * @return empty if no plan finishes within it; then none does within a shorter one
    */
   public Optional<Plan> within(long duration, Plan before) {
+    return comesWithin(duration) ? Optional.of(ties.choose(squeeze, before)) : Optional.empty();
+  }
+
+  /** The same, but any of the equally cheap plans. */
+  public Optional<Plan> anyWithin(long duration) {
+    return comesWithin(duration) ? Optional.of(ties.any(squeeze)) : Optional.empty();
+  }
+
+  private boolean comesWithin(long duration) {
     Squeeze.End end =
         hasBegun
             ? squeeze.goOn(BEGIN, END, UNLIMITED, duration, Squeeze.Listener.NONE)
             : squeeze.run(BEGIN, END, UNLIMITED, duration, Squeeze.Listener.NONE);
     hasBegun = true;
-    return end == Squeeze.End.HELD ? Optional.empty() : Optional.of(ties.choose(squeeze, before));
+    return end != Squeeze.End.HELD;
   }
 
   /** The flow that proves the last plan. */

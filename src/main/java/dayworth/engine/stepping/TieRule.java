@@ -52,6 +52,14 @@ final class TieRule {
     return Plan.scheduled(durations, starts).earliest(events.network);
   }
 
+  /** The plan that the squeeze stands at, without a choice; with spans it says when work starts. */
+  Plan any(Squeeze squeeze) {
+    long[] durations = events.durations(squeeze);
+    return events.network.spans().isEmpty()
+        ? Plan.of(durations)
+        : Plan.scheduled(durations, events.starts(squeeze)).earliest(events.network);
+  }
+
   /** The activities whose duration differs among the cheapest plans. */
   private int[] open(Bodies bodies) {
     int[] open = new int[events.network.size()];
