@@ -6,7 +6,6 @@ import dayworth.network.Network;
 import dayworth.network.Plan;
 import dayworth.value.Money;
 import java.util.Optional;
-import java.util.OptionalLong;
 
 /** Keeps the flow of the piece of a curve on which a wish comes true: it proves that plan. */
 final class FlowCatcher implements PieceWitness {
@@ -28,14 +27,6 @@ final class FlowCatcher implements PieceWitness {
     this.most = most;
   }
 
-  /** The duration that is wished for, in ticks; empty where money is given. */
-  static OptionalLong ticks(Wish wish) {
-    if (wish instanceof Wish.ByDate by) {
-      return OptionalLong.of(by.ticks());
-    }
-    return wish instanceof Wish.In in ? OptionalLong.of(in.ticks()) : OptionalLong.empty();
-  }
-
   @Override
   public void piece(long from, Plan fromPlan, long to, Plan toPlan, Flow flow) {
     if (found) {
@@ -44,7 +35,7 @@ final class FlowCatcher implements PieceWitness {
     found =
         wish instanceof Wish.Within
             ? toPlan.cost(network).compareTo(most) >= 0
-            : to <= ticks(wish).orElseThrow();
+            : to <= wish.duration().orElseThrow();
     if (found || wish instanceof Wish.Within) {
       last = Optional.of(flow.copy());
     }

@@ -43,8 +43,8 @@ public final class MeetQuestion {
     FlowCatcher catcher = new FlowCatcher(network, wish, most);
     Curve curve = Stepping.curve(network, catcher);
     long finish =
-        FlowCatcher.ticks(wish).isPresent()
-            ? Math.min(curve.longest(), FlowCatcher.ticks(wish).getAsLong())
+        wish.duration().isPresent()
+            ? Math.min(curve.longest(), wish.duration().getAsLong())
             : earliestFor(curve, most);
     CurveAnswer answer = CurveQuestion.ask(of, OptionalLong.of(finish), crossChecks, watcher);
     Timing timing = answer.asked().timing();

@@ -3,9 +3,18 @@ package dayworth.decision;
 import dayworth.value.Money;
 import dayworth.value.WorkingCalendar;
 import java.time.LocalDate;
+import java.util.OptionalLong;
 
 /** What a plan is wanted for. */
 public sealed interface Wish {
+
+  /** The duration that is wished for, in ticks; empty where money is given. */
+  default OptionalLong duration() {
+    if (this instanceof ByDate by) {
+      return OptionalLong.of(by.ticks());
+    }
+    return this instanceof In in ? OptionalLong.of(in.ticks()) : OptionalLong.empty();
+  }
 
   /**
    * To finish by a date.

@@ -57,6 +57,9 @@ final class HowFar {
   private void dearer() {
     lines.add("");
     prose(holds());
+    if (weighing.byCompression().ranges().size() == 1) {
+      return;
+    }
     List<Money> multiples =
         DEARER.stream().map(percent -> Money.of(100 + percent).dividedBy(100)).toList();
     List<Finish> best =

@@ -89,7 +89,7 @@ public final class MeetText {
     String name = named();
     if (answer.isMetAsPlanned()) {
       return answer.extra().signum() < 0
-          ? name + " is met as planned, and for " + savedText() + " less than that."
+          ? name + " is met as planned, and for " + savedText() + " less by another plan."
           : name + " is met as planned: nothing has to be bought.";
     }
     if (answer.extra().signum() < 0) {
@@ -105,6 +105,11 @@ public final class MeetText {
     String most = amounts.text(within.most().cents());
     if (gained <= 0) {
       return most + " buys no earlier finish than as planned: " + finish() + ".";
+    }
+    if (answer.extra().signum() <= 0) {
+      String saved =
+          answer.extra().isZero() ? "" : ", for " + savedText() + " less than as planned";
+      return Wording.duration(of, gained) + " cost nothing: " + finish() + saved + ".";
     }
     String which =
         answer.finish().duration() == answer.curve().shortest().duration()
