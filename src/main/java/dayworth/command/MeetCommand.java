@@ -100,7 +100,7 @@ final class MeetCommand extends ProvingCommand {
       LocalDate date = asked.by.get();
       return read.terms()
           .calendar()
-          .map(calendar -> new Wish.ByDate(date, calendar.endOf(date)))
+          .map(calendar -> Wish.ByDate.of(date, calendar))
           .orElseThrow(
               () ->
                   wrongUsage(

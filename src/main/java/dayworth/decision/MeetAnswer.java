@@ -40,9 +40,11 @@ public record MeetAnswer(
     return curve.asked().finish();
   }
 
-  /** Whether the plan as it stands finishes as early. */
+  /**
+   * Whether the plan as it stands meets the wish; of money, whether none buys an earlier finish.
+   */
   public boolean isMetAsPlanned() {
-    return finish().duration() >= curve.asPlanned().duration();
+    return wish.duration().orElse(finish().duration()) >= curve.asPlanned().duration();
   }
 
   /** Direct and running cost above that of the plan as it stands; below zero if money is saved. */

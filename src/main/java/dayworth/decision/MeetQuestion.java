@@ -61,18 +61,12 @@ public final class MeetQuestion {
       return wish instanceof Wish.Within within
           ? earliestFor(
               curve, Plan.allNormal(of.network()).directCost(of.network()).plus(within.most()))
-          : Math.min(curve.longest(), ticks(wish));
+          : Math.min(curve.longest(), wish.duration().orElseThrow());
     }
-    OptionalLong at =
-        wish instanceof Wish.Within ? OptionalLong.empty() : OptionalLong.of(ticks(wish));
-    CurveAnswer answer = CurveQuestion.ask(of, at, 0, watcher);
+    CurveAnswer answer = CurveQuestion.ask(of, wish.duration(), 0, watcher);
     return wish instanceof Wish.Within within
         ? earliestFor(answer, answer.asPlanned().spent().plus(within.most()))
-        : Math.min(answer.rows().get(0).duration(), ticks(wish));
-  }
-
-  private static long ticks(Wish wish) {
-    return wish instanceof Wish.ByDate by ? by.ticks() : ((Wish.In) wish).ticks();
+        : Math.min(answer.rows().get(0).duration(), wish.duration().orElseThrow());
   }
 
   /** The shortest finish that spends no more; the longest one where all do. */

@@ -1,17 +1,35 @@
 package dayworth.decision;
 
 import dayworth.value.Money;
+import dayworth.value.WorkingCalendar;
 import java.time.LocalDate;
+import java.util.OptionalLong;
 
 /** What a plan is wanted for. */
 public sealed interface Wish {
 
+  /** The duration that is wished for, in ticks; empty where money is given. */
+  default OptionalLong duration() {
+    if (this instanceof ByDate by) {
+      return OptionalLong.of(by.ticks());
+    }
+    return this instanceof In in ? OptionalLong.of(in.ticks()) : OptionalLong.empty();
+  }
+
   /**
    * To finish by a date.
    *
-   * @param ticks the end of its working day, or of the last one before it
+   * @param ticks the end of its working day, or of the last one before it; below 0 where there is
+   *     none
    */
-  record ByDate(LocalDate date, long ticks) implements Wish {}
+  record ByDate(LocalDate date, long ticks) implements Wish {
+
+    /** By a date of a calendar. */
+    public static ByDate of(LocalDate date, WorkingCalendar calendar) {
+      boolean tooEarly = date.isBefore(calendar.firstWorkingDay());
+      return new ByDate(date, tooEarly ? -1 : calendar.endOf(date));
+    }
+  }
 
   /** To finish within so many ticks. */
   record In(long ticks) implements Wish {}

@@ -60,7 +60,11 @@ public final class MeetText {
             ? Dates.spoken(by.date())
             : Wording.duration(asked.of(), asked.asked());
     List<String> lines = new ArrayList<>(CurveText.tooEarly(name, asked, style, width));
-    lines.addAll(1, restDay(asked.of(), wish, width));
+    List<String> rest = new ArrayList<>(restDay(asked.of(), wish, width));
+    if (!rest.isEmpty()) {
+      rest.add("");
+    }
+    lines.addAll(2, rest);
     return lines;
   }
 
@@ -74,7 +78,7 @@ public final class MeetText {
             ? "It is no working day: to finish by it is to finish on "
                 + Dates.spoken(of.terms().calendar().get().finishDate(by.ticks()))
                 + ", the working day before."
-            : "It is no working day, and none comes before it.";
+            : "No working day of the project comes by then.";
     return Wording.wrap(said, Wording.INDENT, width);
   }
 
@@ -85,14 +89,14 @@ public final class MeetText {
     String name = named();
     if (answer.isMetAsPlanned()) {
       return answer.extra().signum() < 0
-          ? name + " is met as planned, and for " + savedText() + " less than that."
+          ? name + " is met as planned, and for " + savedText() + " less by another plan."
           : name + " is met as planned: nothing has to be bought.";
     }
     if (answer.extra().signum() < 0) {
-      return name + " can be met for " + savedText() + " less direct cost than as planned.";
+      return name + " can be met for " + savedText() + " less" + cost() + " than as planned.";
     }
     String extra = look.text(answer.extra().cents());
-    return name + " can be met for " + extra + " of extra direct cost, and for no less.";
+    return name + " can be met for " + extra + " of extra" + cost() + ", and for no less.";
   }
 
   private String within(Wish.Within within) {
@@ -102,6 +106,11 @@ public final class MeetText {
     if (gained <= 0) {
       return most + " buys no earlier finish than as planned: " + finish() + ".";
     }
+    if (answer.extra().signum() <= 0) {
+      String saved =
+          answer.extra().isZero() ? "" : ", for " + savedText() + " less than as planned";
+      return Wording.duration(of, gained) + " cost nothing: " + finish() + saved + ".";
+    }
     String which =
         answer.finish().duration() == answer.curve().shortest().duration()
             ? ", the shortest possible"
@@ -109,6 +118,10 @@ public final class MeetText {
     boolean all = answer.extra().equals(within.most());
     String spent = all ? "" : amounts.text(answer.extra().cents()) + " of ";
     return spent + most + " buys " + Wording.duration(of, gained) + ": " + finish() + which + ".";
+  }
+
+  private String cost() {
+    return of.network().spans().isEmpty() ? " direct cost" : " direct and running cost";
   }
 
   private String savedText() {
@@ -204,7 +217,8 @@ public final class MeetText {
   }
 
   private static String total(BigDecimal total) {
-    return Wording.grouped(total.scale() < 2 ? total.setScale(2) : total);
+    BigDecimal needed = total.stripTrailingZeros();
+    return Wording.grouped(needed.scale() < 2 ? needed.setScale(2) : needed);
   }
 
   private void add(List<String> lines, List<String> prose) {

@@ -63,6 +63,13 @@ final class Wording {
     return grouped(units) + " " + working + unit(of, units);
   }
 
+  /** A finish by its date, or without dates by its duration, each with a word before it. */
+  static String when(Case of, long ticks, String beforeDate, String beforeDuration) {
+    return new Dates(of).areKnown()
+        ? new Dates(of).spokenFinish(beforeDate, ticks, "")
+        : beforeDuration + workingDuration(of, ticks);
+  }
+
   /** A count with the word for what is counted. */
   static String count(int count, String one, String many) {
     return String.format(Locale.ROOT, "%,d %s", count, count == 1 ? one : many);

@@ -116,7 +116,7 @@ class MeetCommandTest {
         run.err());
     run = jar.run("meet", dated.toString(), "--by", "2026-09-06");
     assertEquals(1, run.status());
-    assertTrue(run.err().contains("It is no working day, and none comes before it."), run.err());
+    assertTrue(run.err().contains("No working day of the project comes by then."), run.err());
     run = jar.run("meet", dated.toString(), "--by", "2026-09-18", "--no-pictures");
     assertTrue(run.out().startsWith("Fri 18 Sep 2026 is met as planned: nothing"), run.out());
   }

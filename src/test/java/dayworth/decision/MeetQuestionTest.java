@@ -1,6 +1,7 @@
 package dayworth.decision;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
@@ -119,6 +120,24 @@ class MeetQuestionTest {
     MeetAnswer answer = MeetQuestion.ask(of(network), new Wish.In(12), 0, Watcher.NONE);
     assertEquals(List.of(new MeetAnswer.Bought(0, 2, Money.of(200), List.of(0))), answer.bought());
     assertEquals(List.of(List.of(0, 1, 2)), answer.chains());
+  }
+
+  /** Crashing A saves 200 and four days of ten: all that any wish from 15 days on needs. */
+  @Test
+  void savingMoneyIsNoNeed() throws FinishTooEarly {
+    Network network =
+        new Network(
+            TimeScale.WHOLE,
+            List.of(
+                Activity.compressible("A", 10, Money.of(1000), 6, Money.of(800)),
+                Activity.fixed("B", 5, Money.of(300))),
+            List.of(Link.finishToStart(0, 1)));
+    MeetAnswer met = MeetQuestion.ask(of(network), new Wish.In(15), 0, Watcher.NONE);
+    assertTrue(met.isMetAsPlanned());
+    assertEquals(Money.of(-200), met.extra());
+    MeetAnswer free = MeetQuestion.ask(of(network), new Wish.Within(Money.ZERO), 0, Watcher.NONE);
+    assertEquals(11, free.finish().duration());
+    assertFalse(free.isMetAsPlanned());
   }
 
   @Test
