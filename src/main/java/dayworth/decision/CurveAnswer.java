@@ -1,7 +1,9 @@
 package dayworth.decision;
 
+import dayworth.contract.FinishCost;
 import dayworth.engine.Curve;
 import dayworth.network.Timing;
+import dayworth.value.Money;
 import java.util.List;
 import java.util.Optional;
 
@@ -41,6 +43,42 @@ public record CurveAnswer(
     least = List.copyOf(least);
     steps = List.copyOf(steps);
     unproved = List.copyOf(unproved);
+  }
+
+  /**
+   * The latest finish that is worth showing: later than the plan as it stands only if that costs
+   * least in all. Waiting even longer may save hire, but nobody asks for it.
+   */
+  public long latestShown() {
+    return Math.max(asPlanned.duration(), leastTotal().duration());
+  }
+
+  /** The same answer with the rows that are worth showing. */
+  public CurveAnswer shown() {
+    List<Finish> some = rows.stream().filter(row -> row.duration() <= latestShown()).toList();
+    return new CurveAnswer(
+        of,
+        curve,
+        asPlanned,
+        some,
+        least,
+        steps,
+        atContract,
+        crashEverything,
+        asked,
+        provedRows,
+        unproved,
+        crossCheck);
+  }
+
+  /** What a finish is worth: money that hangs on the project's finish alone, without sections. */
+  public FinishCost whole(Finish finish) {
+    return of.terms().at(finish.duration());
+  }
+
+  /** What a finish costs: direct and running cost and section money; its slope is the price. */
+  public Money priced(Finish finish) {
+    return finish.spent().plus(finish.other().sum()).minus(whole(finish).sum());
   }
 
   /** The longest of the finishes with the least total. */

@@ -41,6 +41,7 @@ public final class CurveText {
       lines.add("");
       lines.addAll(prices);
     }
+    lines.addAll(prose(later(answer), used));
     lines.add("");
     lines.addAll(prose(new ObstacleText(answer.of(), answer.curve()).sentence(), used));
     lines.add("");
@@ -119,6 +120,16 @@ public final class CurveText {
   }
 
   /** Empty where one finish alone has the least total. */
+  /** Finishes that are left out of what is shown. */
+  private static String later(CurveAnswer answer) {
+    long longest = answer.rows().get(0).duration();
+    return longest <= answer.latestShown()
+        ? ""
+        : "Later finishes, to "
+            + Wording.duration(answer.of(), longest)
+            + ", save running cost or section money but cost more in all: see curve.csv.";
+  }
+
   static String ties(CurveAnswer answer) {
     int count = answer.least().size();
     if (count < 2) {

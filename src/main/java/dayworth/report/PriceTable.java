@@ -31,6 +31,9 @@ final class PriceTable {
     this.answer = answer;
     long least = answer.leastTotal().duration();
     for (Step step : answer.curve().steps()) {
+      if (step.to() >= answer.latestShown()) {
+        continue;
+      }
       boolean inside = step.to() < least && least < step.from();
       if (inside) {
         parts.add(new Part(step, step.from(), least));
@@ -111,8 +114,8 @@ final class PriceTable {
   }
 
   private boolean hasWorth() {
-    Money first = answer.rows().get(0).other().sum();
-    return answer.rows().stream().anyMatch(row -> !row.other().sum().equals(first));
+    Money first = answer.whole(answer.rows().get(0)).sum();
+    return answer.rows().stream().anyMatch(row -> !answer.whole(row).sum().equals(first));
   }
 
   /** By how much the money that depends on the finish falls, for a unit: least to most. */
@@ -122,7 +125,7 @@ final class PriceTable {
       Finish later = answer.rows().get(i - 1);
       Finish sooner = answer.rows().get(i);
       if (later.duration() <= part.from() && sooner.duration() >= part.to()) {
-        Money fall = later.other().sum().minus(sooner.other().sum());
+        Money fall = answer.whole(later).sum().minus(answer.whole(sooner).sum());
         worths.add(perUnit(fall.dividedBy(later.duration() - sooner.duration())).cents());
       }
     }

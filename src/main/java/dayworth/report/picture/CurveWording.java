@@ -88,7 +88,11 @@ final class CurveWording {
   }
 
   private String firstName() {
-    return startsAsPlanned() ? asPlanned() : "Least direct cost";
+    if (startsAsPlanned()) {
+      return asPlanned();
+    }
+    boolean isAsEarly = answer.asPlanned().duration() == answer.rows().get(0).duration();
+    return isAsEarly ? "Cheapest at that finish" : "Least direct cost";
   }
 
   private String asPlanned() {

@@ -18,9 +18,11 @@ record MoneyLine(Pen pen, Color ink, String name, Function<Finish, BigDecimal> a
 
   /** The parts that the case has, then direct cost, then the total, which is painted last. */
   static List<MoneyLine> of(CurveAnswer answer, Amounts amounts) {
+    boolean runs = answer.rows().stream().anyMatch(row -> !row.running().isZero());
+    String time = runs ? "Time-related, running" : "Time-related cost";
     List<MoneyLine> parts =
         List.of(
-            new MoneyLine(Pen.TIME, Look.SLATE_INK, "Time-related cost", amounts::timeRelated),
+            new MoneyLine(Pen.TIME, Look.SLATE_INK, time, amounts::timeRelated),
             new MoneyLine(Pen.DAMAGES, Look.BRICK, "Damages", amounts::damages),
             new MoneyLine(Pen.BONUS, Look.OLIVE_INK, "Bonus", amounts::bonus));
     List<MoneyLine> lines = new ArrayList<>();

@@ -43,7 +43,8 @@ public final class Pictures {
     return files;
   }
 
-  static Map<String, Picture> drawn(CurveAnswer answer) {
+  static Map<String, Picture> drawn(CurveAnswer whole) {
+    CurveAnswer answer = whole.shown();
     Layout layout = Layout.of(units(answer));
     Map<String, Picture> pictures = new LinkedHashMap<>();
     pictures.put("curve", new CurvePicture(answer, layout));

@@ -1,5 +1,6 @@
 package dayworth.report.picture;
 
+import dayworth.contract.FinishCost;
 import dayworth.decision.CurveAnswer;
 import dayworth.decision.Finish;
 import dayworth.value.Money;
@@ -13,7 +14,7 @@ import java.util.List;
  *
  * @param from the longer finish, ticks
  * @param to the shorter finish, ticks
- * @param price of a unit of time
+ * @param price of a unit of time, what running costs and sections save or cost included
  * @param time cost that a unit earlier saves because less time passes
  * @param damages that a unit earlier saves
  * @param bonus that a unit earlier earns
@@ -28,21 +29,17 @@ record Stretch(
     for (int i = 1; i < answer.rows().size(); i++) {
       Finish from = answer.rows().get(i - 1);
       Finish to = answer.rows().get(i);
+      FinishCost later = answer.whole(from);
+      FinishCost sooner = answer.whole(to);
       long ticks = from.duration() - to.duration();
       stretches.add(
           new Stretch(
               from.duration(),
               to.duration(),
-              perUnit(to.direct().minus(from.direct()), ticks, perUnit),
-              perUnit(
-                  from.other()
-                      .timeRelated()
-                      .plus(from.running())
-                      .minus(to.other().timeRelated().plus(to.running())),
-                  ticks,
-                  perUnit),
-              perUnit(from.other().damages().minus(to.other().damages()), ticks, perUnit),
-              perUnit(to.other().bonus().minus(from.other().bonus()), ticks, perUnit)));
+              perUnit(answer.priced(to).minus(answer.priced(from)), ticks, perUnit),
+              perUnit(later.timeRelated().minus(sooner.timeRelated()), ticks, perUnit),
+              perUnit(later.damages().minus(sooner.damages()), ticks, perUnit),
+              perUnit(sooner.bonus().minus(later.bonus()), ticks, perUnit)));
     }
     return stretches;
   }
