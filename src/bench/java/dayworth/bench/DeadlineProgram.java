@@ -30,6 +30,9 @@ final class DeadlineProgram {
     out.print("\nSubject To\n");
     IntStream.range(0, network.links().size()).forEach(program::linkRow);
     IntStream.range(0, network.size()).filter(program::mayFinishLast).forEach(program::finishRow);
+    IntStream.range(0, network.size())
+        .filter(i -> network.activity(i).notFinishedBefore() > 0)
+        .forEach(program::earliestFinishRow);
     out.print("Bounds\n");
     IntStream.range(0, network.size()).forEach(program::bounds);
     out.print("End\n");
@@ -64,6 +67,12 @@ final class DeadlineProgram {
     out.printf("f%d: s%d", i, i);
     shortening(" - ", i);
     out.printf(" <= %d%n", deadline - network.activity(i).normal());
+  }
+
+  private void earliestFinishRow(int i) {
+    out.printf("e%d: s%d", i, i);
+    shortening(" - ", i);
+    out.printf(" >= %d%n", network.activity(i).notFinishedBefore() - network.activity(i).normal());
   }
 
   private void shortening(String sign, int i) {

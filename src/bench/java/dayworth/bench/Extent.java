@@ -42,6 +42,7 @@ record Extent(long longest, long shortest, int canBecomeCritical) {
       int i = network.inOrder(position);
       Activity activity = network.activity(i);
       start[i] = activity.notBefore();
+      finish[i] = activity.notFinishedBefore();
       for (int k = 0; k < network.linksInto(i); k++) {
         Link link = network.link(network.linkInto(i, k));
         int before = link.predecessor();

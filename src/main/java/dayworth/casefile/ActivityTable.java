@@ -43,7 +43,7 @@ final class ActivityTable {
 
   private ActivityTable(Table table, Findings findings) {
     this.findings = findings;
-    crashRules = new CrashRules(table, findings);
+    crashRules = CrashRules.ofActivities(table, findings);
   }
 
   /** The rows; empty where they have no ids that links could name. */

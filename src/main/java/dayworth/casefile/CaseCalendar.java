@@ -29,7 +29,8 @@ record CaseCalendar(TimeScale scale, Optional<WorkingCalendar> calendar) {
             .map(
                 start ->
                     WorkingCalendar.of(
-                        start, terms.workingDays(), holidays, dayLength(terms, scale))));
+                        start, terms.workingDays(), holidays, dayLength(terms, scale)))
+            .map(calendar -> terms.dataDate().map(calendar::after).orElse(calendar)));
   }
 
   /** A week is so many working days as the case works in a week without holidays. */
@@ -42,12 +43,29 @@ record CaseCalendar(TimeScale scale, Optional<WorkingCalendar> calendar) {
         scale);
   }
 
-  /** The first tick on or after a moment at which work may start. */
+  /** The first tick on or after a moment at which work may start; 0 if that has passed. */
   long start(Moment moment) {
-    return moment
-        .date()
-        .map(date -> calendar.orElseThrow().morningOf(date))
-        .orElseGet(() -> scale.ticks(moment.units().orElseThrow()));
+    return Math.max(
+        0,
+        moment
+            .date()
+            .map(this::startedOn)
+            .orElseGet(() -> counted(scale.ticks(moment.units().orElseThrow()))));
+  }
+
+  /** Ticks from the start as ticks from when time counts. */
+  private long counted(long fromStart) {
+    return calendar.map(dates -> dates.counted(fromStart)).orElse(fromStart);
+  }
+
+  /** When work began that started on a date; a rest day is the morning of the next working day. */
+  long startedOn(LocalDate date) {
+    return calendar.orElseThrow().morningOf(date);
+  }
+
+  /** When work was done that finished on a date; a rest day is the end of the last working day. */
+  long finishedOn(LocalDate date) {
+    return calendar.orElseThrow().endOf(date);
   }
 
   /** A moment by which something is due. */

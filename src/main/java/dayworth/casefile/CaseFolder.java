@@ -20,13 +20,17 @@ import java.util.stream.Stream;
 final class CaseFolder {
 
   private static final List<String> SERVED =
-      List.of(ActivityTable.FILE, LinkTable.FILE, TermsTable.FILE, HolidayTable.FILE);
+      List.of(
+          ActivityTable.FILE,
+          LinkTable.FILE,
+          TermsTable.FILE,
+          HolidayTable.FILE,
+          ProgressTable.FILE,
+          SectionTable.FILE,
+          RunningTable.FILE);
 
   private static final Set<String> NOT_YET =
       Set.of(
-          "sections.csv",
-          "running.csv",
-          "progress.csv",
           "measures.csv",
           "packages.csv",
           "labour.csv",
@@ -87,6 +91,10 @@ final class CaseFolder {
                   findings.warning(
                       Place.whole(name).notice("is left alone", "", "perhaps meant as " + near)));
     }
+  }
+
+  boolean has(String name) {
+    return Files.exists(folder.resolve(name));
   }
 
   /** The text of a file without its byte order mark; empty if there is none or it is faulty. */

@@ -1,6 +1,9 @@
 package dayworth.casefile;
 
+import dayworth.contract.MomentMoney;
 import dayworth.decision.Case;
+import dayworth.decision.Progress;
+import dayworth.decision.WorkToGo;
 import dayworth.engine.stepping.Stepping;
 import dayworth.network.Activity;
 import dayworth.network.Link;
@@ -42,6 +45,9 @@ public final class CaseReader {
     Optional<String> activityText = folder.text(ActivityTable.FILE);
     Optional<String> holidayText = folder.text(HolidayTable.FILE);
     Optional<String> linkText = folder.text(LinkTable.FILE);
+    Optional<String> progressText = folder.text(ProgressTable.FILE);
+    Optional<String> runningText = folder.text(RunningTable.FILE);
+    Optional<String> sectionText = folder.text(SectionTable.FILE);
     Optional<String> termText = folder.text(TermsTable.FILE);
     Optional<List<ActivityRow>> known =
         activityText.flatMap(text -> ActivityTable.read(text, findings));
@@ -49,10 +55,16 @@ public final class CaseReader {
     TermsTable terms = TermsTable.read(termText, findings);
     List<LocalDate> holidays = HolidayTable.read(holidayText, findings);
     DateRules.check(known.orElse(List.of()), holidays, terms, findings);
+    List<ProgressRow> progress = ProgressTable.read(known, progressText, findings);
+    ActivityIds ids = new ActivityIds(known, findings);
+    List<SectionRow> sections = SectionTable.read(ids, terms, sectionText, findings);
+    List<RunningRow> running = RunningTable.read(ids, terms, runningText, findings);
+    ProgressDates.check(progress, folder.has(ProgressTable.FILE), terms, findings);
     if (findings.hasProblems()) {
       return new Reading.Unsound(findings.problems(), findings.warnings());
     }
-    Case read = build(known.orElseThrow(), links, terms, holidays, atLeast);
+    Case read =
+        build(known.orElseThrow(), links, terms, holidays, progress, sections, running, atLeast);
     if (findings.hasProblems()) {
       return new Reading.Unsound(findings.problems(), findings.warnings());
     }
@@ -64,29 +76,50 @@ public final class CaseReader {
       List<LinkRow> links,
       TermsTable terms,
       List<LocalDate> holidays,
+      List<ProgressRow> rows,
+      List<SectionRow> sections,
+      List<RunningRow> running,
       TimeScale atLeast) {
-    TimeScale scale = Resolution.of(activities, links, terms).and(atLeast);
+    TimeScale scale = Resolution.of(activities, links, terms, rows, sections).and(atLeast);
     CaseCalendar times = CaseCalendar.of(terms, holidays, scale);
-    Network network =
+    Network planned =
         new Network(
             scale,
             activities.stream().map(row -> activity(row, times)).toList(),
             links.stream().map(row -> link(row, scale)).toList());
-    checkSize(network, terms, times);
-    Doubts.report(new ReadCase(network, activities, links, terms, times.calendar()), findings);
+    Optional<Progress> progress = CaseProgress.of(activities, rows, terms, times);
+    WorkToGo work = WorkToGo.of(planned, progress);
+    MomentMoney money = CaseMoney.of(sections, running, terms, times, progress);
+    checkSize(work.network(), money, terms, times);
+    SectionDoubts.report(sections, running, terms, times, planned, findings);
+    checkSomethingIsToGo(progress);
+    Doubts.report(
+        new ReadCase(
+            work,
+            activities,
+            work.links().stream().map(links::get).toList(),
+            links,
+            rows,
+            terms,
+            times.calendar()),
+        findings);
     return new Case(
         name,
         terms.text("title").orElse(""),
         terms.text("currency").orElse(""),
         terms.unit(),
-        network,
+        work.network(),
         ContractTerms.of(terms, times),
+        money,
+        progress,
         findings.warnings(),
         folder.inputs());
   }
 
-  private void checkSize(Network network, TermsTable terms, CaseCalendar times) {
-    if (Stepping.scaleFor(network).isEmpty()) {
+  private void checkSize(Network network, MomentMoney money, TermsTable terms, CaseCalendar times) {
+    Network priced =
+        new Network(network.scale(), network.activities(), network.links(), money.spans());
+    if (Stepping.scaleFor(priced).isEmpty()) {
       findings.problem(
           Place.whole(ActivityTable.FILE)
               .notice("the costs are too far apart to be exact", "", "smaller or rounder costs"));
@@ -110,6 +143,13 @@ public final class CaseReader {
         .moment("contract_finish")
         .map(times::due)
         .ifPresent(due -> ExtensionRule.check(due, terms, times, findings));
+  }
+
+  private void checkSomethingIsToGo(Optional<Progress> progress) {
+    if (progress.filter(all -> all.finished() == all.statuses().size()).isPresent()) {
+      String right = "work that is to go: of a finished project nothing can be changed";
+      findings.problem(Place.whole(ProgressTable.FILE).notice("all is finished", "", right));
+    }
   }
 
   private static Activity activity(ActivityRow row, CaseCalendar times) {

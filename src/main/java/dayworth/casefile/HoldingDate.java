@@ -25,7 +25,8 @@ final class HoldingDate {
         || Timing.earliest(network, Plan.allNormal(network)).finish() > shortest.ticks()) {
       return;
     }
-    long without = ShortestFinish.without(network, holder).ticks();
+    long byThen = read.work().earliestStart(holder);
+    long without = ShortestFinish.with(network, holder, byThen).ticks();
     if (without < shortest.ticks()) {
       String found =
           read.activities()
@@ -38,7 +39,9 @@ final class HoldingDate {
           "with it no finish is "
               + (read.calendar().isPresent() ? "before " : "shorter than ")
               + finish(read, shortest.ticks())
-              + ", as planned; without it "
+              + (read.progress().isEmpty()
+                  ? ", as planned; without it "
+                  : ", as it stands; without it ")
               + finish(read, without)
               + "; the chain: "
               + read.named(shortest.chain());

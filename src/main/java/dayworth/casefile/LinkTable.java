@@ -5,10 +5,8 @@ import dayworth.network.Loop;
 import dayworth.network.Relation;
 import java.math.BigDecimal;
 import java.util.ArrayList;
-import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 
@@ -33,23 +31,15 @@ final class LinkTable {
 
   private final List<ActivityRow> activities;
 
-  /** Otherwise no id can be told right from wrong. */
-  private final boolean idsAreKnown;
-
+  private final ActivityIds ids;
   private final Findings findings;
-  private final Map<String, Integer> indexById = new HashMap<>();
-  private final Nearest nearest;
   private final List<LinkRow> links = new ArrayList<>();
   private final Set<Object> seen = new HashSet<>();
 
   private LinkTable(Optional<List<ActivityRow>> known, Findings findings) {
     activities = known.orElse(List.of());
-    idsAreKnown = known.isPresent();
+    ids = new ActivityIds(known, findings);
     this.findings = findings;
-    for (int i = 0; i < activities.size(); i++) {
-      indexById.putIfAbsent(activities.get(i).id(), i);
-    }
-    nearest = new Nearest(activities.stream().map(ActivityRow::id).toList());
   }
 
   /**
@@ -72,7 +62,8 @@ final class LinkTable {
     ActivityRow row = activities.get(successor);
     Place place = new Place(ActivityTable.FILE, row.line(), "predecessors");
     for (String id : row.predecessors()) {
-      index(place, id).ifPresent(from -> add(place, from, successor, Relation.FS, BigDecimal.ZERO));
+      ids.index(place, id)
+          .ifPresent(from -> add(place, from, successor, Relation.FS, BigDecimal.ZERO));
     }
   }
 
@@ -84,8 +75,9 @@ final class LinkTable {
       Cell<Relation> relation = table.needed(row, "relation", RELATION, findings);
       Cell<BigDecimal> lag = table.cell(row, "lag", TimeCell.LAG, findings);
       Optional<Integer> tail =
-          from.value().flatMap(id -> index(table.place(row, "predecessor"), id));
-      Optional<Integer> head = to.value().flatMap(id -> index(table.place(row, "successor"), id));
+          from.value().flatMap(id -> ids.index(table.place(row, "predecessor"), id));
+      Optional<Integer> head =
+          to.value().flatMap(id -> ids.index(table.place(row, "successor"), id));
       if (tail.isPresent() && head.isPresent() && !relation.faulty() && !lag.faulty()) {
         relation
             .value()
@@ -99,16 +91,6 @@ final class LinkTable {
                         lag.value().orElse(BigDecimal.ZERO)));
       }
     }
-  }
-
-  private Optional<Integer> index(Place place, String id) {
-    Optional<Integer> index = Optional.ofNullable(indexById.get(id));
-    if (index.isEmpty() && idsAreKnown) {
-      findings.problem(
-          place.notice(
-              id + " is no activity", id, nearest.hint(id, "an id of " + ActivityTable.FILE)));
-    }
-    return index;
   }
 
   private void add(Place place, int from, int to, Relation relation, BigDecimal lag) {

@@ -1,5 +1,6 @@
 package dayworth.casefile;
 
+import dayworth.decision.WorkToGo;
 import dayworth.network.Network;
 import dayworth.value.WorkingCalendar;
 import java.util.List;
@@ -8,18 +9,28 @@ import java.util.Optional;
 /**
  * A case without problems, with the places its parts come from.
  *
+ * @param work what is to go
  * @param activities those of the network, in its order
- * @param links likewise
+ * @param links those of the network, in its order
+ * @param logic all links, also those of what has happened
+ * @param progress the rows of the status
  * @param calendar empty where there is no start_date
  */
 record ReadCase(
-    Network network,
+    WorkToGo work,
     List<ActivityRow> activities,
     List<LinkRow> links,
+    List<LinkRow> logic,
+    List<ProgressRow> progress,
     TermsTable terms,
     Optional<WorkingCalendar> calendar) {
 
   private static final int MOST_NAMED = 6;
+
+  /** Of the work to go. */
+  Network network() {
+    return work.network();
+  }
 
   Place place(int activity, String column) {
     return new Place(ActivityTable.FILE, activities.get(activity).line(), column);
@@ -27,7 +38,7 @@ record ReadCase(
 
   /** The ids of a chain; of a long one only where it begins and ends. */
   String named(List<Integer> chain) {
-    List<String> ids = chain.stream().map(i -> network.activity(i).id()).toList();
+    List<String> ids = chain.stream().map(i -> activities.get(i).id()).toList();
     int size = ids.size();
     return size <= MOST_NAMED
         ? String.join(", ", ids)

@@ -47,9 +47,10 @@ final class ShortestFinish {
     return new ShortestFinish(network, i -> network.activity(i).notBefore());
   }
 
-  /** The same where one activity may start at any time. */
-  static ShortestFinish without(Network network, int activity) {
-    return new ShortestFinish(network, i -> i == activity ? 0 : network.activity(i).notBefore());
+  /** The same where one activity may start at another time. */
+  static ShortestFinish with(Network network, int activity, long notBefore) {
+    return new ShortestFinish(
+        network, i -> i == activity ? notBefore : network.activity(i).notBefore());
   }
 
   /** In ticks. */
@@ -77,7 +78,7 @@ final class ShortestFinish {
     return chain;
   }
 
-  /** Whether its first event is a start; a finish at 0 waits for nothing. */
+  /** Whether its first event is a start; a finish waits for no not_before of its own. */
   private boolean beginsWithStart() {
     int first = last;
     while (before[first] != NONE) {
@@ -92,7 +93,7 @@ final class ShortestFinish {
     int finish = start + 1;
     time[start] = notBefore.applyAsLong(i);
     before[start] = NONE;
-    time[finish] = 0;
+    time[finish] = activity.notFinishedBefore();
     before[finish] = NONE;
     for (int k = 0; k < network.linksInto(i); k++) {
       Link link = network.link(network.linkInto(i, k));

@@ -11,8 +11,8 @@ import java.util.List;
 import java.util.stream.Stream;
 
 /**
- * A small sound case that uses every column and term, with a page that explains them: what a new
- * case folder begins as.
+ * A small sound case of a job that has not started, using every column and term of one, with a page
+ * that explains them and the status of later: what a new case folder begins as.
  */
 public final class StarterCase {
 

@@ -6,7 +6,6 @@ import dayworth.decision.TimeUnit;
 import java.math.BigDecimal;
 import java.time.DayOfWeek;
 import java.time.LocalDate;
-import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
@@ -14,63 +13,13 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 
-/** Reads terms.csv: each term with its own parser. */
+/** Reads terms.csv: a row a term. */
 final class TermsTable {
 
   static final String FILE = "terms.csv";
 
   private static final List<Column> COLUMNS =
       List.of(Column.needed("term"), Column.needed("value"));
-
-  private static final WordCell<Per> PER =
-      WordCell.<Per>of("word")
-          .with("unit", Per.UNIT)
-          .with("calendar_day", Per.CALENDAR_DAY)
-          .with("week", Per.WEEK);
-
-  private static final Map<String, CellParser<?>> PARSERS =
-      Map.ofEntries(
-          Map.entry("title", (text, style) -> text),
-          Map.entry("currency", (text, style) -> text),
-          Map.entry(
-              "time_unit",
-              WordCell.<TimeUnit>of("time unit")
-                  .with("day", TimeUnit.DAY)
-                  .with("week", TimeUnit.WEEK)
-                  .with("hour", TimeUnit.HOUR)
-                  .with("shift", TimeUnit.SHIFT)),
-          Map.entry("units_per_working_day", TimeCell.DURATION),
-          Map.entry("start_date", DateCell.DATE),
-          Map.entry("working_days", (CellParser<WorkingDays>) WorkingDays::parse),
-          Map.entry("time_related_cost", MoneyCell.AMOUNT),
-          Map.entry("time_related_per", PER),
-          Map.entry("fixed_cost", MoneyCell.AMOUNT),
-          Map.entry("contract_finish", Moment.Parser.MOMENT),
-          Map.entry("extension", Moment.Parser.MOMENT),
-          Map.entry("damages_rate", MoneyCell.AMOUNT),
-          Map.entry("damages_per", PER),
-          Map.entry(
-              "damages_part_week",
-              WordCell.<PartWeek>of("word")
-                  .with("pro_rata", PartWeek.PRO_RATA)
-                  .with("whole", PartWeek.WHOLE)),
-          Map.entry("damages_grace", TimeCell.DURATION),
-          Map.entry("damages_cap", MoneyCell.ABOVE_ZERO),
-          Map.entry("bonus_rate", MoneyCell.AMOUNT),
-          Map.entry("bonus_per", PER),
-          Map.entry("bonus_cap", MoneyCell.ABOVE_ZERO),
-          Map.entry("bonus_cap_units", TimeCell.DURATION));
-
-  private static final Set<String> NOT_YET =
-      Set.of(
-          "data_date",
-          "basis",
-          "prepared_for",
-          "prepared_by",
-          "reference",
-          "valid_until",
-          "on_cost_percent",
-          "proposal_cost");
 
   private final Findings findings;
   private final Map<String, Place> places = new HashMap<>();
@@ -123,6 +72,11 @@ final class TermsTable {
     return Optional.ofNullable((LocalDate) values.get("start_date"));
   }
 
+  /** The day at whose end time begins to count. */
+  Optional<LocalDate> dataDate() {
+    return Optional.ofNullable((LocalDate) values.get("data_date"));
+  }
+
   /** The days of the week that are worked; Monday to Friday if nothing else is said. */
   Set<DayOfWeek> workingDays() {
     WorkingDays days = (WorkingDays) values.getOrDefault("working_days", WorkingDays.USUAL);
@@ -146,7 +100,7 @@ final class TermsTable {
       return;
     }
     table.misfits().forEach(row -> given.add(table.text(row, "term")));
-    Nearest nearest = new Nearest(known());
+    Nearest nearest = new Nearest(TermCells.names());
     NumberStyle style = style(table);
     for (Row row : table.rows()) {
       String term = table.text(row, "term");
@@ -154,10 +108,10 @@ final class TermsTable {
       if (term.isEmpty()) {
         findings.problem(
             new Place(FILE, row.line(), "term").notice("blank", "", "each row needs a term"));
-      } else if (NOT_YET.contains(term)) {
+      } else if (TermCells.isNotYetServed(term)) {
         findings.problem(place.notice("this term is not served yet", term, "take the row out"));
-      } else if (!PARSERS.containsKey(term)) {
-        String right = nearest.hint(term, "one of " + String.join(", ", known()));
+      } else if (!TermCells.isServed(term)) {
+        String right = nearest.hint(term, "one of " + String.join(", ", TermCells.names()));
         nearest.to(term).ifPresent(given::add);
         findings.problem(new Place(FILE, row.line(), "term").notice("no such term", term, right));
       } else if (places.putIfAbsent(term, place) != null) {
@@ -173,18 +127,11 @@ final class TermsTable {
   /** Only the values of terms that are numbers show the file's decimal mark. */
   private static NumberStyle style(Table table) {
     List<Row> numbers =
-        table.rows().stream().filter(row -> isNumber(table.text(row, "term"))).toList();
+        table.rows().stream().filter(row -> TermCells.isNumber(table.text(row, "term"))).toList();
     return table.style().semicolons()
         ? NumberStyle.ofSemicolons(
             numbers, table.header().indexOf("value").stream().boxed().toList())
         : NumberStyle.PLAIN;
-  }
-
-  private static boolean isNumber(String term) {
-    CellParser<?> parser = PARSERS.get(term);
-    return parser instanceof MoneyCell
-        || parser instanceof TimeCell
-        || parser instanceof Moment.Parser;
   }
 
   private void addValue(String term, String text, NumberStyle style) {
@@ -193,20 +140,14 @@ final class TermsTable {
     }
     given.add(term);
     try {
-      values.put(term, PARSERS.get(term).parse(text, style));
+      values.put(term, TermCells.parser(term).parse(text, style));
     } catch (CellFault fault) {
       findings.problem(places.get(term).notice(fault.wrong(), text, fault.right()));
     }
   }
 
-  private static List<String> known() {
-    List<String> known = new ArrayList<>(PARSERS.keySet());
-    known.addAll(NOT_YET);
-    known.sort(null);
-    return known;
-  }
-
   private void requireTogether() {
+    require("data_date", "start_date");
     require("damages_rate", "contract_finish");
     require("bonus_rate", "contract_finish");
     require("extension", "contract_finish");

@@ -1,5 +1,6 @@
 package dayworth.contract;
 
+import dayworth.value.Money;
 import dayworth.value.TimeScale;
 import dayworth.value.WorkingCalendar;
 import java.math.BigInteger;
@@ -34,6 +35,15 @@ record Counting(TimeScale scale, Optional<WorkingCalendar> calendar) {
         per.isByDate()
             ? ChronoUnit.DAYS.between(date(due), dated().finishDate(finish))
             : Math.subtractExact(finish, due.ticks());
+    return Count.of(late, stepsPerOne(per));
+  }
+
+  /** How late something was that is done. */
+  Count lateness(Due due, Section.Done done, Per per) {
+    long late =
+        per.isByDate()
+            ? ChronoUnit.DAYS.between(date(due), done.date())
+            : Math.subtractExact(done.ticks(), due.ticks());
     return Count.of(late, stepsPerOne(per));
   }
 
@@ -78,6 +88,20 @@ record Counting(TimeScale scale, Optional<WorkingCalendar> calendar) {
       case CALENDAR_DAY -> 1;
       case WEEK -> DAYS_PER_WEEK;
     };
+  }
+
+  /** The money for a tick at a rate per unit. */
+  Money perTick(Money rate) {
+    return rate.dividedBy(scale.ticksPerUnit());
+  }
+
+  /** So many units in ticks; empty where that is no whole number of them. */
+  Optional<Long> wholeTicks(Count units) {
+    BigInteger down = units.steps(scale.ticksPerUnit(), RoundingMode.FLOOR);
+    BigInteger up = units.steps(scale.ticksPerUnit(), RoundingMode.CEILING);
+    return down.equals(up) && down.bitLength() < Long.SIZE
+        ? Optional.of(down.longValueExact())
+        : Optional.empty();
   }
 
   private WorkingCalendar dated() {

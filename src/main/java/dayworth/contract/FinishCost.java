@@ -12,6 +12,11 @@ import dayworth.value.Money;
  */
 public record FinishCost(Money timeRelated, Money fixed, Money damages, Money bonus) {
 
+  /** With money of sections. */
+  public FinishCost plus(Money moreDamages, Money moreBonus) {
+    return new FinishCost(timeRelated, fixed, damages.plus(moreDamages), bonus.plus(moreBonus));
+  }
+
   /** The sum, the bonus taken off. */
   public Money sum() {
     return timeRelated.plus(fixed).plus(damages).minus(bonus);

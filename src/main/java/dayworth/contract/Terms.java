@@ -4,9 +4,10 @@ import dayworth.value.Money;
 import dayworth.value.TimeScale;
 import dayworth.value.WorkingCalendar;
 import java.util.Optional;
-import java.util.Set;
 import java.util.SortedSet;
 import java.util.TreeSet;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 
 /**
  * What time is worth under the contract and on the site.
@@ -73,14 +74,10 @@ public record Terms(
   public FinishCost at(long finish) {
     Counting counting = counting();
     return new FinishCost(
-        timeRelated.until(counting.until(finish, timeRelated.per())),
+        timeRelated.until(finish, counting),
         fixedCost,
-        contractFinish
-            .map(due -> damages.forLateness(counting.lateness(due, finish, damages.per())))
-            .orElse(Money.ZERO),
-        contractFinish
-            .map(due -> bonus.forEarliness(counting.lateness(due, finish, bonus.per()).negate()))
-            .orElse(Money.ZERO));
+        contractFinish.map(due -> damages.at(finish, due, counting)).orElse(Money.ZERO),
+        contractFinish.map(due -> bonus.at(finish, due, counting)).orElse(Money.ZERO));
   }
 
   /** The same terms with another contract finish, and no claim for more time. */
@@ -96,9 +93,7 @@ public record Terms(
     Damages one =
         new Damages(
             Money.of(1), damages.per(), damages.grace(), Optional.empty(), damages.partWeek());
-    return contractFinish
-        .map(due -> one.forLateness(counting().lateness(due, finish, damages.per())))
-        .orElse(Money.ZERO);
+    return contractFinish.map(due -> one.at(finish, due, counting())).orElse(Money.ZERO);
   }
 
   /** For how many of what it is per time-related cost runs: what it costs at a rate of 1. */
@@ -115,53 +110,13 @@ public record Terms(
    * chooses a scale fine enough for what it can resolve.
    */
   public SortedSet<Long> bends() {
-    SortedSet<Long> bends = new TreeSet<>();
-    contractFinish.ifPresent(
-        due -> {
-          bends.add(due.ticks());
-          addDamages(due, bends);
-          addBonus(due, bends);
-        });
-    return bends;
-  }
-
-  private void addDamages(Due due, Set<Long> bends) {
-    if (damages.rate().signum() == 0) {
-      return;
-    }
-    Per per = damages.per();
-    Count grace = Count.of(damages.grace());
-    counting().lastAtMost(due, Count.NONE, per).ifPresent(bends::add);
-    counting().lastAtMost(due, grace, per).ifPresent(bends::add);
-    damages.cap().flatMap(cap -> capReached(due, grace, cap)).ifPresent(bends::add);
-  }
-
-  /** A whole week is charged from its first day, a part of one when it is over. */
-  private Optional<Long> capReached(Due due, Count grace, Money cap) {
-    Count charged = Count.reaching(cap, damages.rate());
-    if (damages.countsWholeWeeks()) {
-      Count before = charged.roundedUp().plus(Count.of(-1, 1));
-      return counting().firstBeyond(due, grace.plus(before), damages.per());
-    }
-    return counting().firstAtLeast(due, grace.plus(charged), damages.per());
-  }
-
-  private void addBonus(Due due, Set<Long> bends) {
-    if (bonus.rate().signum() == 0) {
-      return;
-    }
-    Per per = bonus.per();
-    counting().lastAtMost(due, Count.NONE, per).ifPresent(bends::add);
-    bonus
-        .capCount()
-        .map(Count::of)
-        .flatMap(most -> counting().lastAtMost(due, most.negate(), per))
-        .ifPresent(bends::add);
-    bonus
-        .cap()
-        .map(cap -> Count.reaching(cap, bonus.rate()))
-        .flatMap(most -> counting().lastAtMost(due, most.negate(), per))
-        .ifPresent(bends::add);
+    return contractFinish.stream()
+        .flatMap(
+            due ->
+                Stream.concat(
+                    Stream.of(due.ticks()),
+                    Stream.concat(damages.bends(due, counting()), bonus.bends(due, counting()))))
+        .collect(Collectors.toCollection(TreeSet::new));
   }
 
   private Counting counting() {

@@ -12,7 +12,8 @@ public record TimeRelated(Money rate, Per per) {
   /** None. */
   public static final TimeRelated NONE = new TimeRelated(Money.ZERO, Per.UNIT);
 
-  Money until(Count finish) {
-    return finish.at(rate);
+  /** What it comes to at a finish. */
+  Money until(long finish, Counting counting) {
+    return counting.until(finish, per).at(rate);
   }
 }

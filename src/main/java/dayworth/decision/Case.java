@@ -1,9 +1,13 @@
 package dayworth.decision;
 
 import dayworth.contract.Due;
+import dayworth.contract.MomentMoney;
 import dayworth.contract.Terms;
 import dayworth.network.Network;
+import dayworth.network.Timing;
 import java.util.List;
+import java.util.Optional;
+import java.util.stream.IntStream;
 
 /**
  * A case that was read and found sound.
@@ -12,6 +16,10 @@ import java.util.List;
  * @param title for people; may be empty
  * @param currency an ISO 4217 code or a symbol; may be empty
  * @param unit what a duration of one means
+ * @param network the work to go: all of it, or what a status leaves
+ * @param terms what time is worth for the whole
+ * @param momentMoney sections and running costs
+ * @param progress how far the work is; empty where time counts from the start
  * @param warnings doubtful input, sorted; they stand in every result
  * @param inputs the files it was read from, sorted by name
  */
@@ -22,6 +30,8 @@ public record Case(
     TimeUnit unit,
     Network network,
     Terms terms,
+    MomentMoney momentMoney,
+    Optional<Progress> progress,
     List<Notice> warnings,
     List<InputFile> inputs) {
 
@@ -30,8 +40,72 @@ public record Case(
     inputs = List.copyOf(inputs);
   }
 
+  /** A case of which nothing has started, without sections and running costs. */
+  public Case(
+      String name,
+      String title,
+      String currency,
+      TimeUnit unit,
+      Network network,
+      Terms terms,
+      List<Notice> warnings,
+      List<InputFile> inputs) {
+    this(
+        name,
+        title,
+        currency,
+        unit,
+        network,
+        terms,
+        MomentMoney.none(network.scale()),
+        Optional.empty(),
+        warnings,
+        inputs);
+  }
+
+  /** The network with the convex money that hangs on moments as spans. */
+  public Network pricedNetwork() {
+    return momentMoney.spans().isEmpty()
+        ? network
+        : new Network(network.scale(), network.activities(), network.links(), momentMoney.spans());
+  }
+
+  /** How far an activity is. */
+  public Status status(int activity) {
+    return progress.map(all -> all.statuses().get(activity)).orElseGet(Status.NotStarted::new);
+  }
+
+  /** Whether an activity is still to be done, wholly or in part. */
+  public boolean isToGo(int activity) {
+    return !status(activity).isFinished();
+  }
+
+  /** Whether work that is to go is critical; what is finished never is. */
+  public boolean isCritical(Timing timing, int activity) {
+    return isToGo(activity) && timing.isCritical(activity);
+  }
+
+  public int criticalCount(Timing timing) {
+    return (int) IntStream.range(0, network.size()).filter(i -> isCritical(timing, i)).count();
+  }
+
+  /** How many activities are still to be done. */
+  public int toGo() {
+    return network.size() - progress.map(Progress::finished).orElse(0);
+  }
+
   /** The same case under another contract finish. */
   public Case dueBy(Due due) {
-    return new Case(name, title, currency, unit, network, terms.dueBy(due), warnings, inputs);
+    return new Case(
+        name,
+        title,
+        currency,
+        unit,
+        network,
+        terms.dueBy(due),
+        momentMoney,
+        progress,
+        warnings,
+        inputs);
   }
 }

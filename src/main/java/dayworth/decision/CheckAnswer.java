@@ -13,8 +13,8 @@ import java.util.List;
  * @param chainCount how many critical chains there are as planned; exact
  * @param firstChains the first few of them, as activity indices
  * @param nearCritical activities with the least floats above zero, least first
- * @param openStarts activities without a predecessor
- * @param openEnds activities without a successor
+ * @param openStarts activities to go that wait for none to go
+ * @param openEnds activities to go for which none to go waits
  * @param neverCritical compressible activities that no finish on the curve makes critical
  */
 public record CheckAnswer(

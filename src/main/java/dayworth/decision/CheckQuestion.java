@@ -24,7 +24,7 @@ public final class CheckQuestion {
   public static CheckAnswer ask(Case of) {
     Network network = of.network();
     Timing asPlanned = Timing.earliest(network, Plan.allNormal(network));
-    CriticalChains chains = CriticalChains.of(network, asPlanned);
+    CriticalChains chains = CriticalChains.of(network, asPlanned, i -> of.isCritical(asPlanned, i));
     Curve curve = Stepping.curve(network, PieceWitness.NONE);
     return new CheckAnswer(
         of,
@@ -32,15 +32,19 @@ public final class CheckQuestion {
         curve.shortest(),
         chains.count(),
         chains.first(FIRST_CHAINS),
-        nearCritical(network, asPlanned),
-        network.openStarts(),
-        network.openEnds(),
+        nearCritical(of, asPlanned),
+        toGo(of, network.openStarts()),
+        toGo(of, network.openEnds()),
         neverCritical(network, asPlanned, curve.shortest()));
   }
 
-  private static List<Integer> nearCritical(Network network, Timing asPlanned) {
-    return IntStream.range(0, network.size())
-        .filter(i -> !asPlanned.isCritical(i))
+  private static List<Integer> toGo(Case of, List<Integer> activities) {
+    return activities.stream().filter(of::isToGo).toList();
+  }
+
+  private static List<Integer> nearCritical(Case of, Timing asPlanned) {
+    return IntStream.range(0, of.network().size())
+        .filter(i -> of.isToGo(i) && !asPlanned.isCritical(i))
         .boxed()
         .sorted(Comparator.comparingLong(asPlanned::totalFloat))
         .limit(NEAREST)

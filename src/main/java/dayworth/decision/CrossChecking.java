@@ -5,11 +5,10 @@ import dayworth.engine.Step;
 import dayworth.engine.linear.Answer;
 import dayworth.engine.linear.LinearProgramme;
 import dayworth.network.Network;
+import dayworth.value.Money;
 import java.math.BigDecimal;
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.List;
-import java.util.NavigableSet;
 import java.util.Set;
 import java.util.TreeSet;
 
@@ -42,37 +41,42 @@ final class CrossChecking {
     List<CrossCheck.Unanswered> unanswered = new ArrayList<>();
     int atBreakpoints = 0;
     LinearProgramme programme = new LinearProgramme(network);
-    for (long duration : spread(points, most)) {
+    for (long duration : spread(List.copyOf(points.descendingSet()), most)) {
       watcher.now("comparing with the linear programme, now at " + network.scale().text(duration));
       Answer answer = programme.at(duration);
       if (answer instanceof Answer.NotSolved silent) {
         unanswered.add(new CrossCheck.Unanswered(duration, silent.reason()));
       } else {
-        comparisons.add(compare(network, curve, answer, duration));
+        comparisons.add(compare(network, curve.costAt(duration), answer, duration));
         atBreakpoints += breakpoints.contains(duration) ? 1 : 0;
       }
     }
     return new CrossCheck(comparisons, atBreakpoints, points.size(), unanswered);
   }
 
-  private static List<Long> spread(NavigableSet<Long> points, long most) {
-    List<Long> all = new ArrayList<>(points.descendingSet());
+  /** At most so many of the items, from first to last. */
+  static <T> List<T> spread(List<T> all, long most) {
     if (all.size() <= most) {
       return all;
     }
-    Set<Long> chosen = new TreeSet<>(Comparator.reverseOrder());
+    Set<Integer> chosen = new TreeSet<>();
     for (long k = 0; k < most; k++) {
-      chosen.add(all.get((int) (k * (all.size() - 1) / Math.max(1, most - 1))));
+      chosen.add((int) (k * (all.size() - 1) / Math.max(1, most - 1)));
     }
-    return List.copyOf(chosen);
+    return chosen.stream().map(all::get).toList();
   }
 
-  private static CrossCheck.Comparison compare(
-      Network network, Curve curve, Answer answer, long duration) {
+  /**
+   * One deadline, both ways.
+   *
+   * @throws ProofFailed if they differ by more than rounding
+   */
+  static CrossCheck.Comparison compare(
+      Network network, Money stepping, Answer answer, long duration) {
     String where = "the finish at " + network.scale().text(duration);
     if (answer instanceof Answer.Least least) {
       CrossCheck.Comparison comparison =
-          new CrossCheck.Comparison(duration, curve.costAt(duration), least.cost());
+          new CrossCheck.Comparison(duration, stepping, least.cost());
       if (comparison.difference().compareTo(ROUNDING) > 0) {
         throw new ProofFailed(
             where,

@@ -18,7 +18,8 @@ import java.util.Optional;
  *     it cannot be met
  * @param crashEverything every activity at its shortest; its direct cost is rarely worth it
  * @param asked the plan asked for: the longest of the least total, or another
- * @param provedRows how many rows the checker proved; all of them, or there is no answer
+ * @param provedRows how many rows the checker proved to be cheapest
+ * @param unproved the rest, each with what is known of it; empty where all money is convex
  * @param crossCheck the linear programme's agreement
  */
 public record CurveAnswer(
@@ -32,12 +33,14 @@ public record CurveAnswer(
     Finish crashEverything,
     AskedPlan asked,
     int provedRows,
+    List<Unproved> unproved,
     CrossCheck crossCheck) {
 
   public CurveAnswer {
     rows = List.copyOf(rows);
     least = List.copyOf(least);
     steps = List.copyOf(steps);
+    unproved = List.copyOf(unproved);
   }
 
   /** The longest of the finishes with the least total. */

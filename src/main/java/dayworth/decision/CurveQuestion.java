@@ -1,6 +1,8 @@
 package dayworth.decision;
 
 import dayworth.contract.Due;
+import dayworth.contract.FinishCost;
+import dayworth.contract.MomentMoney;
 import dayworth.contract.Terms;
 import dayworth.engine.Curve;
 import dayworth.engine.Step;
@@ -12,9 +14,12 @@ import dayworth.network.Timing;
 import dayworth.value.Money;
 import java.math.BigDecimal;
 import java.util.ArrayList;
+import java.util.Iterator;
 import java.util.List;
+import java.util.NavigableSet;
 import java.util.Optional;
 import java.util.OptionalLong;
+import java.util.SortedSet;
 import java.util.TreeSet;
 
 /** What does each finish cost, and which costs least in all? */
@@ -23,16 +28,19 @@ public final class CurveQuestion {
   private final Case of;
   private final Network network;
   private final Terms terms;
+  private final MomentMoney money;
+  private final Watcher watcher;
+  private final CheapestPlans cheapest;
   private final Curve curve;
 
-  private final Watcher watcher;
-
-  private CurveQuestion(Case of, Watcher watcher) {
+  private CurveQuestion(Case of, OptionalLong at, Watcher watcher) throws FinishTooEarly {
     this.of = of;
     this.watcher = watcher;
     this.network = of.network();
     this.terms = of.terms();
-    this.curve = Stepping.curve(network, new ProvingWitness(network, watcher));
+    this.money = of.momentMoney();
+    this.cheapest = cheapest(at);
+    this.curve = cheapest.curve();
   }
 
   /**
@@ -46,21 +54,48 @@ public final class CurveQuestion {
    */
   public static CurveAnswer ask(Case of, OptionalLong at, long crossChecks, Watcher watcher)
       throws FinishTooEarly {
-    return new CurveQuestion(of, watcher).answer(at, crossChecks);
+    return new CurveQuestion(of, at, watcher).answer(at, crossChecks);
   }
 
-  private CurveAnswer answer(OptionalLong at, long crossChecks) throws FinishTooEarly {
-    if (at.isPresent() && at.getAsLong() < curve.shortest()) {
-      throw new FinishTooEarly(of, curve, at.getAsLong());
+  private CheapestPlans cheapest(OptionalLong at) throws FinishTooEarly {
+    Network priced = of.pricedNetwork();
+    if (money.charges().isEmpty()) {
+      ConvexPlans convex = new ConvexPlans(priced, watcher);
+      requirePossible(convex.curve(), at);
+      return convex;
     }
-    ProofChecker.stops(network, curve.obstacles(), curve.shortest())
+    Curve bare = new ConvexPlans(network, watcher).curve();
+    requirePossible(bare, at);
+    return new BranchedPlans(
+        priced,
+        money.charges(),
+        bare,
+        (longest, shortest) -> {
+          NavigableSet<Long> durations = durations(longest, shortest);
+          at.ifPresent(asked -> durations.add(Math.min(asked, longest)));
+          return durations.descendingSet();
+        },
+        watcher);
+  }
+
+  private void requirePossible(Curve possible, OptionalLong at) throws FinishTooEarly {
+    if (at.isPresent() && at.getAsLong() < possible.shortest()) {
+      throw new FinishTooEarly(of, possible, at.getAsLong());
+    }
+    ProofChecker.stops(network, possible.obstacles(), possible.shortest())
         .ifPresent(
             refuted -> {
               throw new ProofFailed(refuted.where(), refuted.why());
             });
-    List<Finish> rows = rows();
+  }
+
+  private CurveAnswer answer(OptionalLong at, long crossChecks) {
+    NavigableSet<Long> durations = durations(curve.longest(), curve.shortest());
+    curve.steps().forEach(step -> durations.add(step.to()));
+    List<Finish> rows = finishes(durations.descendingSet());
     List<Finish> least = least(rows);
     long asked = at.orElse(least.get(0).duration());
+    Plan plan = plans(new TreeSet<>(List.of(asked))).get(0);
     return new CurveAnswer(
         of,
         curve,
@@ -74,31 +109,29 @@ public final class CurveQuestion {
             .filter(due -> due >= curve.shortest())
             .map(this::finish),
         of(Plan.allCrash(network)),
-        new CurveAnswer.AskedPlan(
-            finish(asked), Timing.by(network, Stepping.planWithin(network, asked), asked)),
-        rows.size(),
-        CrossChecking.of(network, curve, crossChecks, watcher));
+        new CurveAnswer.AskedPlan(finish(asked), Timing.by(network, plan, asked)),
+        rows.size() - cheapest.unproved().size(),
+        cheapest.unproved(),
+        cheapest.crossCheck(crossChecks, watcher));
   }
 
   /**
-   * A row for each whole unit, each breakpoint, each end of a working day and each bend of the
-   * money, longest first. Between two neighbours all money is linear or, where it goes by the date,
-   * the same from just above the one to the other; so no finish between them costs less in all.
+   * Each whole unit, each end of a working day and each bend of the money, and both ends. Between
+   * two neighbours all money is linear or, where it goes by the date, the same from just above the
+   * one to the other; so with the curve's breakpoints no finish between them costs less in all.
    */
-  private List<Finish> rows() {
-    TreeSet<Long> durations = new TreeSet<>();
-    durations.add(curve.longest());
-    curve.steps().forEach(step -> durations.add(step.to()));
+  private NavigableSet<Long> durations(long longest, long shortest) {
+    TreeSet<Long> durations = new TreeSet<>(List.of(longest, shortest));
     long unit = network.scale().ticksPerUnit();
-    for (long whole = curve.longest() / unit * unit; whole >= curve.shortest(); whole -= unit) {
+    for (long whole = longest / unit * unit; whole >= shortest; whole -= unit) {
       durations.add(whole);
     }
     terms
         .calendar()
-        .map(calendar -> calendar.endsOfDays(curve.shortest(), curve.longest()))
+        .map(calendar -> calendar.endsOfDays(shortest, longest))
         .ifPresent(durations::addAll);
-    durations.addAll(terms.bends().subSet(curve.shortest(), curve.longest()));
-    return durations.descendingSet().stream().map(this::finish).toList();
+    durations.addAll(terms.bends().subSet(shortest, longest));
+    return durations;
   }
 
   private static List<Finish> least(List<Finish> rows) {
@@ -108,6 +141,37 @@ public final class CurveQuestion {
 
   /** The cheapest finish within a duration; longer than the curve's first it needs no more. */
   private Finish finish(long duration) {
+    return finishes(new TreeSet<>(List.of(duration))).get(0);
+  }
+
+  private List<Finish> finishes(SortedSet<Long> durations) {
+    if (money.isNone()) {
+      return durations.stream()
+          .map(duration -> finish(duration, curve.costAt(duration), Money.ZERO, terms.at(duration)))
+          .toList();
+    }
+    List<Finish> finishes = new ArrayList<>();
+    Iterator<Plan> plans = cheapest.plans(durations).iterator();
+    for (long duration : durations) {
+      Plan plan = plans.next();
+      finishes.add(
+          finish(duration, plan.directCost(network), money.runningOf(plan), other(duration, plan)));
+    }
+    return finishes;
+  }
+
+  private List<Plan> plans(SortedSet<Long> durations) {
+    return money.isNone()
+        ? durations.stream().map(duration -> Stepping.planWithin(network, duration)).toList()
+        : cheapest.plans(durations);
+  }
+
+  private FinishCost other(long duration, Plan plan) {
+    FinishCost whole = terms.at(duration);
+    return money.isNone() ? whole : whole.plus(money.damagesOf(plan), money.bonusOf(plan));
+  }
+
+  private Finish finish(long duration, Money direct, Money running, FinishCost other) {
     boolean breakpoint = duration == curve.longest();
     Optional<Money> price = Optional.empty();
     for (Step step : curve.steps()) {
@@ -116,14 +180,21 @@ public final class CurveQuestion {
         price = Optional.of(step.pricePerTick().times(network.scale().ticksPerUnit()));
       }
     }
-    return new Finish(
-        duration, curve.costAt(duration), Money.ZERO, terms.at(duration), price, breakpoint);
+    return new Finish(duration, direct, running, other, price, breakpoint);
   }
 
-  private Finish of(Plan plan) {
-    long finish = Timing.earliest(network, plan).finish();
+  /** What given durations cost when all is done as early as that allows. */
+  private Finish of(Plan durations) {
+    Plan plan = GivenDurations.schedule(of, durations);
+    long finish = Timing.earliest(network, durations).finish();
+    Money running = money.isNone() ? Money.ZERO : money.runningOf(plan);
     return new Finish(
-        finish, plan.directCost(network), Money.ZERO, terms.at(finish), Optional.empty(), false);
+        finish,
+        durations.directCost(network),
+        running,
+        other(finish, plan),
+        Optional.empty(),
+        false);
   }
 
   private List<StepFacts> steps() {
@@ -132,7 +203,7 @@ public final class CurveQuestion {
     for (int k = 0; k < curve.steps().size(); k++) {
       Step step = curve.steps().get(k);
       Timing after = Timing.by(network, curve.planAfter(k + 1), step.to());
-      facts.add(new StepFacts(step, after.criticalCount(), newlyCritical(before, after)));
+      facts.add(new StepFacts(step, of.criticalCount(after), newlyCritical(before, after)));
       before = after;
     }
     return facts;
@@ -141,7 +212,7 @@ public final class CurveQuestion {
   private List<Integer> newlyCritical(Timing before, Timing after) {
     List<Integer> newly = new ArrayList<>();
     for (int i = 0; i < network.size(); i++) {
-      if (after.isCritical(i) && !before.isCritical(i)) {
+      if (of.isCritical(after, i) && !before.isCritical(i)) {
         newly.add(i);
       }
     }

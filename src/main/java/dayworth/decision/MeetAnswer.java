@@ -1,6 +1,5 @@
 package dayworth.decision;
 
-import dayworth.engine.proof.ProofSheet;
 import dayworth.value.Money;
 import java.math.BigInteger;
 import java.util.List;
@@ -25,7 +24,7 @@ public record MeetAnswer(
     List<List<Integer>> chains,
     BigInteger chainCount,
     Optional<Money> lastPrice,
-    ProofSheet proof) {
+    PlanProof proof) {
 
   public MeetAnswer {
     bought = List.copyOf(bought);

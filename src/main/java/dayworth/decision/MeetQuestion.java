@@ -1,10 +1,8 @@
 package dayworth.decision;
 
 import dayworth.engine.Curve;
+import dayworth.engine.PieceWitness;
 import dayworth.engine.Step;
-import dayworth.engine.proof.ProofChecker;
-import dayworth.engine.proof.ProofSheet;
-import dayworth.engine.proof.Verdict;
 import dayworth.engine.stepping.Stepping;
 import dayworth.network.Activity;
 import dayworth.network.CriticalChains;
@@ -37,36 +35,47 @@ public final class MeetQuestion {
    */
   public static MeetAnswer ask(Case of, Wish wish, long crossChecks, Watcher watcher)
       throws FinishTooEarly {
-    Network network = of.network();
     watcher.now("looking for the cheapest plan");
-    Money most = most(network, wish);
-    FlowCatcher catcher = new FlowCatcher(network, wish, most);
-    Curve curve = Stepping.curve(network, catcher);
-    long finish =
-        wish.duration().isPresent()
-            ? Math.min(curve.longest(), wish.duration().getAsLong())
-            : earliestFor(curve, most);
+    long finish = finish(of, wish, watcher);
     CurveAnswer answer = CurveQuestion.ask(of, OptionalLong.of(finish), crossChecks, watcher);
     Timing timing = answer.asked().timing();
-    requireProved(network, timing.plan(), finish, catcher, answer.asked().finish().spent());
-    List<Integer> shortened = shortened(network, timing.plan());
-    CriticalChains critical = CriticalChains.of(network, timing);
+    List<Integer> shortened = shortened(of.network(), timing.plan());
+    CriticalChains critical =
+        CriticalChains.of(of.network(), timing, i -> of.isCritical(timing, i));
     List<List<Integer>> chains = critical.passing(shortened, MOST_CHAINS);
+    watcher.now("writing the proof sheet");
     return new MeetAnswer(
         wish,
         answer,
-        shortened.stream().map(i -> bought(network.activity(i), i, timing, chains)).toList(),
+        shortened.stream().map(i -> bought(of.network().activity(i), i, timing, chains)).toList(),
         chains,
         critical.count(),
-        lastPrice(curve, finish),
-        ProofSheet.of(network, timing.plan(), finish, catcher.flow()));
+        lastPrice(answer.curve(), finish),
+        PlanProving.of(of, timing.plan(), finish));
   }
 
-  /** What direct and running cost may come to in all; nothing where time is wished for. */
-  private static Money most(Network network, Wish wish) {
+  /** When to finish; where time is wished for, no later than money gains by waiting. */
+  private static long finish(Case of, Wish wish, Watcher watcher) throws FinishTooEarly {
+    if (of.momentMoney().isNone()) {
+      Curve curve = Stepping.curve(of.network(), PieceWitness.NONE);
+      return wish instanceof Wish.Within within
+          ? earliestFor(
+              curve, Plan.allNormal(of.network()).directCost(of.network()).plus(within.most()))
+          : Math.min(curve.longest(), wish.duration().orElseThrow());
+    }
+    CurveAnswer answer = CurveQuestion.ask(of, wish.duration(), 0, watcher);
     return wish instanceof Wish.Within within
-        ? Plan.allNormal(network).directCost(network).plus(within.most())
-        : Money.ZERO;
+        ? earliestFor(answer, answer.asPlanned().spent().plus(within.most()))
+        : Math.min(answer.rows().get(0).duration(), wish.duration().orElseThrow());
+  }
+
+  /** The shortest finish that spends no more; the longest one where all do. */
+  private static long earliestFor(CurveAnswer answer, Money most) {
+    return answer.rows().stream()
+        .filter(row -> row.spent().compareTo(most) <= 0)
+        .mapToLong(Finish::duration)
+        .min()
+        .orElse(answer.rows().get(0).duration());
   }
 
   /** The first tick whose plan on the curve costs no more than there is to spend. */
@@ -92,15 +101,6 @@ public final class MeetQuestion {
         .filter(step -> step.to() <= finish && finish < step.from())
         .map(step -> step.pricePerTick().times(curve.network().scale().ticksPerUnit()))
         .findFirst();
-  }
-
-  private static void requireProved(
-      Network network, Plan plan, long finish, FlowCatcher catcher, Money claimed) {
-    if (new ProofChecker(network).check(plan, finish, catcher.flow(), claimed)
-        instanceof Verdict.Refuted refuted) {
-      throw new ProofFailed(
-          "the plan for " + network.scale().text(finish) + ", " + refuted.where(), refuted.why());
-    }
   }
 
   private static List<Integer> shortened(Network network, Plan plan) {

@@ -1,8 +1,11 @@
 package dayworth.decision;
 
+import dayworth.engine.Change;
 import dayworth.engine.Curve;
+import dayworth.engine.Step;
 import dayworth.engine.stepping.Stepping;
 import dayworth.network.Network;
+import dayworth.network.Plan;
 import dayworth.network.Timing;
 import java.util.List;
 
@@ -26,6 +29,7 @@ public final class PlansAlong {
       return answer.asked().timing();
     }
     Network network = answer.of().network();
+    boolean isConvex = answer.of().momentMoney().charges().isEmpty();
     Curve curve = answer.curve();
     if (finish == curve.longest()) {
       return Timing.by(network, curve.firstPlan(), finish);
@@ -35,6 +39,22 @@ public final class PlansAlong {
         return Timing.by(network, curve.planAfter(k + 1), finish);
       }
     }
-    return Timing.by(network, Stepping.planWithin(network, finish), finish);
+    Plan plan = isConvex ? Stepping.planWithin(curve.network(), finish) : between(curve, finish);
+    return Timing.by(network, plan, finish);
+  }
+
+  /** Along a piece that was joined from several the plan moves evenly. */
+  private static Plan between(Curve curve, long finish) {
+    int k = 0;
+    while (curve.steps().get(k).to() > finish) {
+      k++;
+    }
+    Step step = curve.steps().get(k);
+    long[] durations = curve.planAfter(k).toArray();
+    for (Change change : step.changes()) {
+      durations[change.activity()] -=
+          Math.floorDiv(change.shortened() * (step.from() - finish), step.ticks());
+    }
+    return Plan.of(durations);
   }
 }

@@ -26,6 +26,8 @@ public final class Flow {
     BACK_OVER_CRASH,
     /** Project start to the activity's start, over its not-before time. */
     FROM_PROJECT,
+    /** Project start to the activity's finish, over its not-finished-before time. */
+    FROM_PROJECT_TO_FINISH,
     /** The activity's finish to the project finish. */
     TO_PROJECT,
     /** A link, by its index. */

@@ -23,4 +23,7 @@ public sealed interface Obstacle {
 
   /** The chain begins with an activity that may not start earlier. */
   record NotBefore(int activity, long ticks) implements Obstacle {}
+
+  /** The chain begins with an activity that may not finish earlier. */
+  record NotFinishedBefore(int activity, long ticks) implements Obstacle {}
 }

@@ -15,6 +15,7 @@ import dayworth.value.Money;
  * @param normalCost direct cost at the normal duration
  * @param crashCost direct cost at the crash duration; {@code normalCost} if it cannot be compressed
  * @param notBefore earliest start in ticks after the project start; 0 for none
+ * @param notFinishedBefore earliest finish in ticks after the project start; 0 for none
  */
 public record Activity(
     String id,
@@ -24,17 +25,31 @@ public record Activity(
     long crash,
     Money normalCost,
     Money crashCost,
-    long notBefore) {
+    long notBefore,
+    long notFinishedBefore) {
 
   public Activity {
-    if (crash < 0 || normal < crash || notBefore < 0) {
+    if (crash < 0 || normal < crash || notBefore < 0 || notFinishedBefore < 0) {
       throw new IllegalArgumentException(
-          "activity " + id + ": 0 <= crash <= normal and not before >= 0 must hold");
+          "activity " + id + ": 0 <= crash <= normal and earliest times >= 0 must hold");
     }
     if (crash == normal && !normalCost.equals(crashCost)) {
       throw new IllegalArgumentException(
           "activity " + id + ": a duration has one cost, so equal durations cost the same");
     }
+  }
+
+  /** An activity whose finish waits for its start alone. */
+  public Activity(
+      String id,
+      String name,
+      String group,
+      long normal,
+      long crash,
+      Money normalCost,
+      Money crashCost,
+      long notBefore) {
+    this(id, name, group, normal, crash, normalCost, crashCost, notBefore, 0);
   }
 
   /** An activity that takes what it takes. */
@@ -46,6 +61,11 @@ public record Activity(
   public static Activity compressible(
       String id, long normal, Money normalCost, long crash, Money crashCost) {
     return new Activity(id, "", "", normal, crash, normalCost, crashCost, 0);
+  }
+
+  /** The earliest start for a duration: the finish may be what has to wait. */
+  long earliestStart(long duration) {
+    return Math.max(notBefore, notFinishedBefore - duration);
   }
 
   public boolean isCompressible() {

@@ -8,6 +8,7 @@ import java.util.Collections;
 import java.util.List;
 import java.util.Set;
 import java.util.TreeSet;
+import java.util.function.IntPredicate;
 
 /**
  * The chains of critical activities from one that waits for nothing to one that nothing waits for.
@@ -21,30 +22,37 @@ public final class CriticalChains {
 
   private final Network network;
   private final Timing timing;
+  private final IntPredicate isCritical;
   private final BigInteger[] chainsFrom;
   private final List<Integer> starts = new ArrayList<>();
 
-  private CriticalChains(Network network, Timing timing) {
+  private CriticalChains(Network network, Timing timing, IntPredicate isCritical) {
     this.network = network;
     this.timing = timing;
+    this.isCritical = isCritical;
     this.chainsFrom = new BigInteger[network.size()];
     Arrays.fill(chainsFrom, BigInteger.ZERO);
     boolean[] waits = new boolean[network.size()];
     for (int position = network.size() - 1; position >= 0; position--) {
       int activity = network.inOrder(position);
-      if (timing.isCritical(activity)) {
+      if (isCritical.test(activity)) {
         countFrom(activity, waits);
       }
     }
     for (int i = 0; i < network.size(); i++) {
-      if (timing.isCritical(i) && !waits[i]) {
+      if (isCritical.test(i) && !waits[i]) {
         starts.add(i);
       }
     }
   }
 
-  public static CriticalChains of(Network network, Timing timing) {
-    return new CriticalChains(network, timing);
+  /**
+   * The chains of a plan.
+   *
+   * @param isCritical which activities, by index, can be on them
+   */
+  public static CriticalChains of(Network network, Timing timing, IntPredicate isCritical) {
+    return new CriticalChains(network, timing, isCritical);
   }
 
   public BigInteger count() {
@@ -141,7 +149,7 @@ public final class CriticalChains {
     List<Integer> next = new ArrayList<>();
     for (int k = 0; k < network.linksOutOf(activity); k++) {
       Link link = network.link(network.linkOutOf(activity, k));
-      if (timing.isCritical(link.successor()) && timing.slack(link) == 0) {
+      if (isCritical.test(link.successor()) && timing.slack(link) == 0) {
         next.add(link.successor());
       }
     }

@@ -4,7 +4,7 @@ package dayworth.network;
  * The earliest start of every activity of a scheduled plan that keeps its durations and lets no
  * span cost more.
  *
- * <p>Every bound says that a start comes at least so much after another: the links, the not-before
+ * <p>Every bound says that a start comes at least so much after another: the links, the earliest
  * times, and for each span that its earlier moment comes at most so long before its later one. The
  * least starts that keep all of them are found by passes in topological order until nothing moves
  * (Bellman 1958, "On a routing problem"); the plan itself keeps them, so the passes end. As no
@@ -37,7 +37,7 @@ final class EarliestStarts {
   private void followLinks() {
     for (int position = 0; position < start.length; position++) {
       int i = network.inOrder(position);
-      moveTo(i, network.activity(i).notBefore());
+      moveTo(i, network.activity(i).earliestStart(plan.duration(i)));
       for (int k = 0; k < network.linksInto(i); k++) {
         Link link = network.link(network.linkInto(i, k));
         long apart =
@@ -58,7 +58,7 @@ final class EarliestStarts {
   }
 
   private long time(Moment moment) {
-    return start[moment.activity()] + offset(moment);
+    return moment.isProjectStart() ? 0 : start[moment.activity()] + offset(moment);
   }
 
   private long offset(Moment moment) {

@@ -7,7 +7,8 @@ import dayworth.value.Money;
  * max(0, t(to) − t(from) − free).
  *
  * <p>Plant that is hired from a start to a finish is one with {@code free} zero; damages for a
- * section run from the project's start, and what is free is the section's due time.
+ * section run from the project's start, and what is free is the section's due time. One that runs
+ * to the project's start charges for coming early: rate × max(0, −free − t(from)).
  *
  * @param name for people
  * @param free ticks that cost nothing; may be negative
@@ -19,9 +20,8 @@ public record Span(String name, Moment from, Moment to, long free, Money rate) {
     if (rate.signum() <= 0) {
       throw new IllegalArgumentException("span " + name + ": the rate must be above zero");
     }
-    if (to.isProjectStart() || to.equals(from)) {
-      throw new IllegalArgumentException(
-          "span " + name + ": it ends at another moment than the project's start or its own");
+    if (to.equals(from)) {
+      throw new IllegalArgumentException("span " + name + ": its two moments are the same");
     }
   }
 }

@@ -55,6 +55,15 @@ public final class Timing {
     return plan;
   }
 
+  /** When the plan starts an activity; where it leaves that open, as early as can be. */
+  public long start(int activity) {
+    return plan.isScheduled() ? plan.start(activity) : earlyStart[activity];
+  }
+
+  public long finish(int activity) {
+    return start(activity) + plan.duration(activity);
+  }
+
   public long earlyStart(int activity) {
     return earlyStart[activity];
   }
@@ -87,16 +96,6 @@ public final class Timing {
     return totalFloat(activity) == 0;
   }
 
-  public int criticalCount() {
-    int count = 0;
-    for (int i = 0; i < network.size(); i++) {
-      if (isCritical(i)) {
-        count++;
-      }
-    }
-    return count;
-  }
-
   /** How much later than it must the successor comes at early times. */
   public long slack(Link link) {
     return earlyStart[link.successor()] - earlyStart[link.predecessor()] - between(link, plan);
@@ -110,7 +109,7 @@ public final class Timing {
     long[] early = new long[network.size()];
     for (int position = 0; position < early.length; position++) {
       int activity = network.inOrder(position);
-      long start = network.activity(activity).notBefore();
+      long start = network.activity(activity).earliestStart(plan.duration(activity));
       for (int k = 0; k < network.linksInto(activity); k++) {
         Link link = network.link(network.linkInto(activity, k));
         start = Math.max(start, early[link.predecessor()] + between(link, plan));

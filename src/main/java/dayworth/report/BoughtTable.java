@@ -94,7 +94,7 @@ final class BoughtTable {
   private String level() {
     BigInteger count = answer.chainCount();
     boolean one = count.equals(BigInteger.ONE);
-    int critical = answer.curve().asked().timing().criticalCount();
+    int critical = of.criticalCount(answer.curve().asked().timing());
     BigInteger left = count.subtract(BigInteger.valueOf(answer.chains().size()));
     return Wording.grouped(new BigDecimal(count))
         + (one ? " chain takes " : " chains take ")

@@ -1,6 +1,7 @@
 package dayworth.report;
 
 import dayworth.decision.Case;
+import dayworth.decision.Progress;
 import dayworth.network.Network;
 import java.io.IOException;
 import java.math.BigDecimal;
@@ -35,6 +36,10 @@ final class CaseJson {
             members.text("start_date", of.terms().calendar().get().startDate().toString());
           }
         });
+    if (of.progress().isPresent()) {
+      Progress progress = of.progress().get();
+      json.object("status", members -> new StatusJson(of, progress).write(members));
+    }
     json.array(
         "inputs",
         of.inputs(),

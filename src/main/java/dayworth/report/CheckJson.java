@@ -30,7 +30,7 @@ final class CheckJson {
     if (dates.areKnown()) {
       json.text("shortest_date", dates.finish(answer.shortest()));
     }
-    json.number("critical_activities", answer.asPlanned().criticalCount());
+    json.number("critical_activities", answer.of().criticalCount(answer.asPlanned()));
     json.number("critical_chains", new BigDecimal(answer.chainCount()));
     json.array(
         "first_chains",

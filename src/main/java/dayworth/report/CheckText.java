@@ -42,6 +42,10 @@ public final class CheckText {
     List<String> lines = new ArrayList<>();
     lines.add(style.bold(text.sentence()));
     lines.add("");
+    String status = Wording.status(text.of);
+    if (!status.isEmpty()) {
+      text.add(lines, status);
+    }
     lines.addAll(text.facts());
     return lines;
   }
@@ -62,7 +66,7 @@ public final class CheckText {
     long finish = answer.asPlanned().finish();
     return "The case is sound"
         + (with.isEmpty() ? "" : ", with " + String.join(" and ", with))
-        + ". As planned: "
+        + (of.progress().isPresent() ? ". As it stands: " : ". As planned: ")
         + (dates.areKnown()
             ? dates.spokenFinish("", finish, "")
             : Wording.workingDuration(of, finish))
@@ -90,7 +94,8 @@ public final class CheckText {
     int waits = (int) network.links().stream().mapToLong(Link::lag).filter(l -> l != 0).count();
     add(
         lines,
-        Wording.count(network.size(), "activity", "activities")
+        Wording.count(of.toGo(), "activity", "activities")
+            + (of.progress().isPresent() ? " to go" : "")
             + String.format(Locale.ROOT, ", %,d can be shortened; ", compressible)
             + Wording.count(network.links().size(), "link", "links")
             + (waits == 0 ? "" : String.format(Locale.ROOT, ", %,d of them with a wait", waits)));
@@ -109,7 +114,8 @@ public final class CheckText {
     int holidays = calendar.holidaysThatCount();
     return Wording.workingDuration(of, answer.asPlanned().finish())
         + " from "
-        + Dates.spoken(calendar.startDate())
+        + Dates.spoken(
+            calendar.dataDate().isEmpty() ? calendar.startDate() : calendar.firstWorkingDay())
         + ", "
         + Dates.weekdays(calendar.weekdays())
         + (finer ? ", " + perDay + " " + Wording.unit(of, perDay) + " a working day" : "")
@@ -137,7 +143,7 @@ public final class CheckText {
     long least = Long.MAX_VALUE;
     long most = 0;
     for (int i = 0; i < network.size(); i++) {
-      long slack = answer.asPlanned().totalFloat(i);
+      long slack = of.isToGo(i) ? answer.asPlanned().totalFloat(i) : 0;
       most = Math.max(most, slack);
       least = slack > 0 ? Math.min(least, slack) : least;
     }
@@ -166,7 +172,8 @@ public final class CheckText {
           Wording.safe(id(never.activity()))
               + " can never become critical: the longest chain through it takes "
               + Wording.duration(of, never.longestThrough())
-              + " as planned"
+              + " "
+              + Wording.asPlanned(of)
               + first
               + (lines.size() > 1
                   ? ""

@@ -4,6 +4,7 @@ import dayworth.contract.Due;
 import dayworth.decision.CrossCheck;
 import dayworth.decision.CurveAnswer;
 import dayworth.decision.Finish;
+import dayworth.decision.Status;
 import dayworth.decision.StepFacts;
 import dayworth.engine.Change;
 import dayworth.network.Activity;
@@ -44,6 +45,14 @@ final class CurveJson {
         members -> {
           members.number("proved", answer.provedRows());
           members.number("of", answer.rows().size());
+          members.array(
+              "unproved",
+              answer.unproved(),
+              (gap, unproved) -> {
+                gap.number("duration", names.units(unproved.duration()));
+                gap.number("cost", unproved.cost().cents());
+                gap.number("bound", unproved.bound().cents());
+              });
         });
   }
 
@@ -134,17 +143,25 @@ final class CurveJson {
     json.number("duration", names.units(duration));
     json.number("units_compressed", names.units(activity.normal() - duration));
     json.number("extra_cost", PlanTable.extraCost(activity, duration).cents());
+    Status status = answer.of().status(index);
     if (dates.areKnown()) {
-      json.text("start_date", dates.start(timing.earlyStart(index), timing.earlyFinish(index)));
-      json.text("finish_date", dates.finish(timing.earlyFinish(index)));
+      long start = timing.start(index);
+      json.text("start_date", dates.start(status, start, timing.finish(index)));
+      json.text("finish_date", dates.finish(status, timing.finish(index)));
     }
+    if (!status.isFinished()) {
+      times(json, timing, index);
+    }
+    json.yesNo("critical", answer.of().isCritical(timing, index));
+  }
+
+  private void times(JsonText json, Timing timing, int index) throws IOException {
     json.number("early_start", names.units(timing.earlyStart(index)));
     json.number("early_finish", names.units(timing.earlyFinish(index)));
     json.number("late_start", names.units(timing.lateStart(index)));
     json.number("late_finish", names.units(timing.lateFinish(index)));
     json.number("total_float", names.units(timing.totalFloat(index)));
     json.number("free_float", names.units(timing.freeFloat(index)));
-    json.yesNo("critical", timing.isCritical(index));
   }
 
   private void crossCheck(JsonText json) throws IOException {

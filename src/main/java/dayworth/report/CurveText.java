@@ -1,5 +1,6 @@
 package dayworth.report;
 
+import dayworth.contract.Terms;
 import dayworth.decision.Case;
 import dayworth.decision.CrossCheck;
 import dayworth.decision.CurveAnswer;
@@ -28,8 +29,9 @@ public final class CurveText {
     int used = Math.min(width, WIDEST);
     FinishTable finishes = new FinishTable(answer);
     List<String> lines = new ArrayList<>();
-    String sentence = sentence(answer, finishes.look());
+    String sentence = sentence(answer, finishes.look(), used);
     lines.add(style.bold(Wording.answer(sentence, answer.of().currency(), used)));
+    lines.addAll(prose(Wording.status(answer.of()), used));
     lines.add("");
     lines.addAll(finishes.lines(style, used));
     lines.addAll(prose(ties(answer), used));
@@ -87,23 +89,33 @@ public final class CurveText {
     return text.isEmpty() ? List.of() : Wording.wrap(text, Wording.INDENT, width);
   }
 
-  private static String sentence(CurveAnswer answer, MoneyLook look) {
+  /** Where a date and the working days do not leave room for the currency, they are days. */
+  private static String sentence(CurveAnswer answer, MoneyLook look, int width) {
     Case of = answer.of();
-    Finish least = answer.leastTotal();
-    String duration = Wording.workingDuration(of, least.duration());
+    long least = answer.leastTotal().duration();
     Dates dates = new Dates(of);
-    String finish =
-        "Least total: finish "
-            + (dates.areKnown()
-                ? dates.spokenFinish("on ", least.duration(), " (" + duration + ")")
-                : "in " + duration);
+    String duration = Wording.workingDuration(of, least);
+    if (!dates.areKnown()) {
+      return sentence(answer, look, "in " + duration);
+    }
+    String whole = sentence(answer, look, dates.spokenFinish("on ", least, " (" + duration + ")"));
+    String days = dates.spokenFinish("on ", least, " (" + Wording.duration(of, least) + ")");
+    return whole.length() + 2 + of.currency().length() <= width
+        ? whole
+        : sentence(answer, look, days);
+  }
+
+  private static String sentence(CurveAnswer answer, MoneyLook look, String when) {
+    Finish least = answer.leastTotal();
+    String finish = "Least total: finish " + when;
+    String asPlanned = Wording.asPlanned(answer.of());
     BigDecimal better = answer.asPlanned().total().subtract(least.total());
     if (better.signum() > 0) {
-      return finish + ", " + look.text(better) + " better than as planned.";
+      return finish + ", " + look.text(better) + " better than " + asPlanned + ".";
     }
     return least.duration() == answer.asPlanned().duration()
-        ? finish + ", as planned."
-        : finish + ", no better than as planned.";
+        ? finish + ", " + asPlanned + "."
+        : finish + ", no better than " + asPlanned + ".";
   }
 
   /** Empty where one finish alone has the least total. */
@@ -124,7 +136,7 @@ public final class CurveText {
   /** Finishes from which the total rises both ways and that are not the least. */
   private static String lows(CurveAnswer answer, MoneyLook look) {
     List<String> lows = new ArrayList<>();
-    List<Finish> rows = answer.rows();
+    List<Finish> rows = compared(answer);
     Money least = total(answer.leastTotal());
     BigDecimal left =
         answer.asPlanned().direct().cents().add(answer.asPlanned().other().fixed().cents());
@@ -152,8 +164,35 @@ public final class CurveText {
             + ".";
   }
 
+  /**
+   * Where time costs by the date, every hour or shift given to a day that is paid for anyway saves
+   * direct cost; only the ends of days are then compared.
+   */
+  private static List<Finish> compared(CurveAnswer answer) {
+    Terms terms = answer.of().terms();
+    return terms
+        .calendar()
+        .filter(calendar -> terms.timeRelated().per().isByDate())
+        .map(
+            calendar ->
+                answer.rows().stream().filter(row -> calendar.isEndOfDay(row.duration())).toList())
+        .orElse(answer.rows());
+  }
+
   private static Money total(Finish finish) {
     return finish.direct().plus(finish.running()).plus(finish.other().sum());
+  }
+
+  /** What is known of the rest, which is the best that was found. */
+  private static String gap(CurveAnswer answer) {
+    if (answer.unproved().isEmpty()) {
+      return "";
+    }
+    BigDecimal most =
+        answer.unproved().stream()
+            .map(finish -> finish.gap().cents())
+            .reduce(BigDecimal.ZERO, BigDecimal::max);
+    return "; the rest is at most " + MoneyLook.of(List.of(most)).text(most) + " too dear";
   }
 
   static String proof(CurveAnswer answer) {
@@ -163,6 +202,7 @@ public final class CurveText {
             + answer.provedRows()
             + " of "
             + Wording.count(answer.rows().size(), "finish", "finishes")
+            + gap(answer)
             + ". ";
     int points = check.comparisons().size();
     int silent = check.unanswered().size();

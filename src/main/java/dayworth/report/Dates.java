@@ -2,6 +2,7 @@ package dayworth.report;
 
 import dayworth.contract.Due;
 import dayworth.decision.Case;
+import dayworth.decision.Status;
 import dayworth.value.WorkingCalendar;
 import java.time.DayOfWeek;
 import java.time.LocalDate;
@@ -14,6 +15,9 @@ import java.util.Optional;
 
 /** The dates of a case as files and people read them; all blank where it has none. */
 final class Dates {
+
+  /** Within so many months a day and a month are one date. */
+  private static final int PLAIN_MONTHS = 11;
 
   private final Optional<WorkingCalendar> calendar;
 
@@ -35,6 +39,16 @@ final class Dates {
     return calendar.map(dates -> dates.startDate(start, finish).toString()).orElse(CsvText.BLANK);
   }
 
+  /** When an activity started or will, for a table cell. */
+  String start(Status status, long start, long finish) {
+    return status.started().map(LocalDate::toString).orElseGet(() -> start(start, finish));
+  }
+
+  /** When an activity was finished or will be, likewise. */
+  String finish(Status status, long finish) {
+    return status instanceof Status.Finished done ? done.to().toString() : finish(finish);
+  }
+
   /** The finish date in words before or behind other words; empty where there are none. */
   String spokenFinish(String before, long ticks, String after) {
     return calendar.map(dates -> before + spoken(dates.finishDate(ticks)) + after).orElse("");
@@ -54,13 +68,15 @@ final class Dates {
                     dates -> (int) ChronoUnit.DAYS.between(date, dates.finishDate(ticks))));
   }
 
-  /** Finish dates below each other, without the year if it is the same for all. */
+  /** Finish dates below each other, without the year where none can be taken for another. */
   List<String> column(Collection<Long> ticks) {
     WorkingCalendar dates = calendar.orElseThrow();
     List<LocalDate> finishes = ticks.stream().map(dates::finishDate).toList();
-    boolean oneYear = finishes.stream().map(LocalDate::getYear).distinct().count() == 1;
+    LocalDate first = finishes.stream().min(LocalDate::compareTo).orElseThrow();
+    LocalDate last = finishes.stream().max(LocalDate::compareTo).orElseThrow();
+    boolean plain = last.isBefore(first.plusMonths(PLAIN_MONTHS));
     return finishes.stream()
-        .map(date -> oneYear ? dayAndMonth(date) : dayAndMonth(date) + " " + date.getYear())
+        .map(date -> plain ? dayAndMonth(date) : dayAndMonth(date) + " " + date.getYear())
         .toList();
   }
 

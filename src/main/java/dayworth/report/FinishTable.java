@@ -23,7 +23,7 @@ final class FinishTable {
   FinishTable(CurveAnswer answer) {
     this.answer = answer;
     this.dates = new Dates(answer.of());
-    rows.add(new Row("as planned", answer.asPlanned()));
+    rows.add(new Row(Wording.asPlanned(answer.of()), answer.asPlanned()));
     rows.add(new Row("least total", answer.leastTotal()));
     answer.atContract().ifPresent(finish -> rows.add(new Row("contract finish", finish)));
     rows.add(new Row("shortest", answer.shortest()));
@@ -124,7 +124,9 @@ final class FinishTable {
     boolean fixed = !answer.asPlanned().other().fixed().isZero();
     String amount = MoneyLook.of(List.of(sameForAll())).text(sameForAll());
     return amount
-        + (fixed ? " of direct cost as planned and fixed cost" : " of direct cost as planned")
+        + " of direct cost "
+        + Wording.asPlanned(answer.of())
+        + (fixed ? " and fixed cost" : "")
         + " is the same in every row and is left out.";
   }
 

@@ -1,6 +1,7 @@
 package dayworth.report;
 
 import dayworth.decision.MeetAnswer;
+import dayworth.decision.PlanProof;
 import dayworth.decision.Wish;
 import dayworth.engine.proof.ProofSheet;
 import dayworth.network.Activity;
@@ -75,11 +76,16 @@ final class MeetJson {
   }
 
   private void proof(JsonText json) throws IOException {
-    ProofTable table = new ProofTable(network);
     json.number("plan_cost", answer.proof().planCost());
     json.number("bound", answer.proof().bound());
     json.number("rounding", answer.proof().rounding());
-    json.array("rows", answer.proof().rows(), (members, row) -> row(members, table, row));
+    json.array("blocks", answer.proof().blocks(), MeetJson::block);
+  }
+
+  private static void block(JsonText json, PlanProof.Block block) throws IOException {
+    ProofTable table = new ProofTable(block.network());
+    json.text("branch", block.branch());
+    json.array("rows", block.sheet().rows(), (members, row) -> row(members, table, row));
   }
 
   private static void row(JsonText json, ProofTable table, ProofSheet.Row row) throws IOException {

@@ -5,8 +5,8 @@ import dayworth.decision.CurveAnswer;
 import dayworth.decision.Finish;
 import dayworth.decision.FinishTooEarly;
 import dayworth.decision.MeetAnswer;
+import dayworth.decision.PlanProof;
 import dayworth.decision.Wish;
-import dayworth.engine.proof.ProofSheet;
 import dayworth.value.Money;
 import java.math.BigDecimal;
 import java.util.ArrayList;
@@ -121,7 +121,7 @@ public final class MeetText {
   }
 
   private String cost() {
-    return of.network().spans().isEmpty() ? " direct cost" : " direct and running cost";
+    return of.momentMoney().running().isEmpty() ? " direct cost" : " direct and running cost";
   }
 
   private String savedText() {
@@ -199,7 +199,7 @@ public final class MeetText {
   }
 
   private String sheet(String folder) {
-    ProofSheet sheet = answer.proof();
+    PlanProof sheet = answer.proof();
     String rounding =
         sheet.rounding().signum() == 0
             ? ""
@@ -212,6 +212,7 @@ public final class MeetText {
             + ", bound "
             + total(sheet.bound())
             + rounding
+            + (sheet.branchCount() > 1 ? ", the least of " + sheet.branchCount() + " branches" : "")
             + ")");
   }
 

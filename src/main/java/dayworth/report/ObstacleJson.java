@@ -30,6 +30,9 @@ final class ObstacleJson {
     } else if (obstacle instanceof Obstacle.NotBefore start) {
       json.text("term", "not_before");
       json.text("activity", id(start.activity()));
+    } else if (obstacle instanceof Obstacle.NotFinishedBefore finish) {
+      json.text("term", "not_finished_before");
+      json.text("activity", id(finish.activity()));
     }
     json.number("units", network.scale().units(obstacle.ticks()));
   }

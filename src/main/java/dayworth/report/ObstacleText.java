@@ -36,7 +36,8 @@ final class ObstacleText {
       String who = ids.size() == 1 ? ids.get(0) : "every activity of " + cut(ids);
       return start + ": " + Wording.safe(who) + " is at its shortest.";
     }
-    return start + ": " + Wording.safe(sum()) + String.join("", reasons()) + ".";
+    String sum = terms.size() == 1 ? "" : ": " + sum();
+    return start + Wording.safe(sum + String.join("", reasons())) + ".";
   }
 
   private static String cut(List<String> ids) {
@@ -84,6 +85,9 @@ final class ObstacleText {
         String when = units(start.ticks());
         String date = new Dates(of).spokenStart(" (", start.ticks(), ")");
         reasons.add(": " + id(start.activity()) + " may not start before " + when + date);
+      } else if (term instanceof Obstacle.NotFinishedBefore finish) {
+        String when = Wording.finish(of, finish.ticks());
+        reasons.add(": " + id(finish.activity()) + " may not finish before " + when);
       }
     }
     return reasons.stream()

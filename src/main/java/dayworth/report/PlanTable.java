@@ -1,13 +1,21 @@
 package dayworth.report;
 
+import dayworth.decision.Case;
 import dayworth.decision.CurveAnswer;
+import dayworth.decision.Status;
 import dayworth.network.Activity;
 import dayworth.network.Network;
 import dayworth.network.Timing;
 import dayworth.value.Money;
 import dayworth.value.TimeScale;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.stream.Stream;
 
-/** The text of plan.csv: the plan asked for, an activity a row, at its early times. */
+/**
+ * The text of plan.csv: the plan asked for, an activity a row, at its early times; what is finished
+ * has its dates alone.
+ */
 public final class PlanTable {
 
   private PlanTable() {}
@@ -41,29 +49,43 @@ public final class PlanTable {
   }
 
   private static void row(CsvText csv, CurveAnswer answer, Dates dates, int index) {
-    Network network = answer.of().network();
+    Case of = answer.of();
     Timing timing = answer.asked().timing();
-    TimeScale scale = network.scale();
-    Activity activity = network.activity(index);
+    TimeScale scale = of.network().scale();
+    Activity activity = of.network().activity(index);
+    Status status = of.status(index);
+    long start = timing.start(index);
+    long finish = timing.finish(index);
     long duration = timing.plan().duration(index);
-    csv.row(
-        activity.id(),
-        activity.name(),
-        scale.text(duration),
-        CsvText.BLANK,
-        scale.text(activity.normal() - duration),
-        CsvText.money(extraCost(activity, duration)),
-        scale.text(timing.earlyStart(index)),
-        scale.text(timing.earlyFinish(index)),
-        dates.start(timing.earlyStart(index), timing.earlyFinish(index)),
-        dates.finish(timing.earlyFinish(index)),
-        scale.text(timing.earlyStart(index)),
-        scale.text(timing.earlyFinish(index)),
-        scale.text(timing.lateStart(index)),
-        scale.text(timing.lateFinish(index)),
-        scale.text(timing.totalFloat(index)),
-        scale.text(timing.freeFloat(index)),
-        CsvText.yesNo(timing.isCritical(index)));
+    List<String> cells =
+        new ArrayList<>(
+            List.of(
+                activity.id(),
+                activity.name(),
+                scale.text(duration),
+                CsvText.BLANK,
+                scale.text(activity.normal() - duration),
+                CsvText.money(extraCost(activity, duration)),
+                status.started().isPresent() ? CsvText.BLANK : scale.text(start),
+                status.isFinished() ? CsvText.BLANK : scale.text(finish),
+                dates.start(status, start, finish),
+                dates.finish(status, finish)));
+    times(timing, index)
+        .map(ticks -> status.isFinished() ? CsvText.BLANK : scale.text(ticks))
+        .forEach(cells::add);
+    cells.add(CsvText.yesNo(of.isCritical(timing, index)));
+    csv.row(cells.toArray(String[]::new));
+  }
+
+  /** Early and late times and floats, in the order of the columns. */
+  private static Stream<Long> times(Timing timing, int index) {
+    return Stream.of(
+        timing.earlyStart(index),
+        timing.earlyFinish(index),
+        timing.lateStart(index),
+        timing.lateFinish(index),
+        timing.totalFloat(index),
+        timing.freeFloat(index));
   }
 
   /** What an activity costs above its normal cost; exact. */

@@ -1,6 +1,7 @@
 package dayworth.report;
 
 import dayworth.decision.MeetAnswer;
+import dayworth.decision.PlanProof;
 import dayworth.engine.proof.Arc;
 import dayworth.engine.proof.ProofSheet;
 import dayworth.network.Network;
@@ -9,9 +10,6 @@ import java.util.Optional;
 
 /** The text of proof.csv: a plan and the flow that proves it, arc by arc. */
 public final class ProofTable {
-
-  /** One block proves a plan where all money is straight. */
-  private static final String ONLY_BRANCH = "1";
 
   private final Network network;
 
@@ -32,21 +30,25 @@ public final class ProofTable {
             "capacity",
             "plan_cost",
             "bound");
-    ProofTable table = new ProofTable(answer.of().network());
-    for (ProofSheet.Row row : answer.proof().rows()) {
+    answer.proof().blocks().forEach(block -> addBlock(csv, block));
+    return csv.toString();
+  }
+
+  private static void addBlock(CsvText csv, PlanProof.Block block) {
+    ProofTable table = new ProofTable(block.network());
+    for (ProofSheet.Row row : block.sheet().rows()) {
       csv.row(
           row.arc().map(arc -> table.event(arc.from())).orElse(CsvText.BLANK),
           row.arc().map(arc -> table.event(arc.to())).orElse(CsvText.BLANK),
           table.kind(row),
           table.owner(row),
-          ONLY_BRANCH,
+          block.branch(),
           cell(row.length()),
           cell(row.flow()),
           cell(row.capacity()),
           cell(row.planCost()),
           cell(row.bound()));
     }
-    return csv.toString();
   }
 
   String event(Arc.Event event) {
@@ -59,6 +61,7 @@ public final class ProofTable {
   String kind(ProofSheet.Row row) {
     return switch (row.kind()) {
       case FIXED -> "fixed";
+      case OTHER -> "other";
       case ROUNDING -> "rounding";
       case ARC -> kind(row.arc().orElseThrow());
     };
@@ -71,6 +74,7 @@ public final class ProofTable {
       case BACK_OVER_NORMAL -> "not longer";
       case BACK_OVER_CRASH -> "slope back";
       case FROM_PROJECT -> "begin";
+      case FROM_PROJECT_TO_FINISH -> "not finished before";
       case TO_PROJECT -> "end";
       case LINK -> "link " + network.link(arc.index()).relation();
       case SPAN -> "running";
@@ -82,6 +86,9 @@ public final class ProofTable {
   String owner(ProofSheet.Row row) {
     if (row.activity() >= 0) {
       return network.activity(row.activity()).id();
+    }
+    if (!row.name().isEmpty()) {
+      return row.name();
     }
     return row.arc()
         .filter(arc -> arc.over() == Arc.Over.SPAN)

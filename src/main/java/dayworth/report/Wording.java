@@ -19,6 +19,26 @@ final class Wording {
     return text.replaceAll("\\p{Cntrl}", "?");
   }
 
+  /** The plan with every activity its normal way; with a status it is what things have come to. */
+  static String asPlanned(Case of) {
+    return of.progress().isPresent() ? "as it stands" : "as planned";
+  }
+
+  /** What is done at the data date; empty for a case without one. */
+  static String status(Case of) {
+    return of.progress()
+        .map(
+            done ->
+                String.format(
+                    Locale.ROOT,
+                    "%,d finished, %,d in progress at the end of %s; everything below is of the"
+                        + " work to go.",
+                    done.finished(),
+                    done.inProgress(),
+                    Dates.spoken(done.dataDate())))
+        .orElse("");
+  }
+
   /** The unit's name for so many of it. */
   static String unit(Case of, BigDecimal units) {
     String word = of.unit().word();

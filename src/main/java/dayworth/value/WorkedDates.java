@@ -57,6 +57,11 @@ final class WorkedDates {
     return holidays.length;
   }
 
+  /** How many of them come after a date. */
+  int holidaysAfter(LocalDate date) {
+    return holidays.length - countOf(holidays, holiday -> holiday <= date.toEpochDay());
+  }
+
   /** How many working days there are up to and with a date; 0 before the first. */
   long through(LocalDate date) {
     long day = date.toEpochDay();

@@ -85,9 +85,9 @@ public final class WorkingCalendar {
     return weekdays;
   }
 
-  /** How many holidays fall on worked weekdays from the start on. */
+  /** How many holidays fall on worked weekdays from when time counts. */
   public int holidaysThatCount() {
-    return worked.holidaysThatCount();
+    return dataDate.map(worked::holidaysAfter).orElseGet(worked::holidaysThatCount);
   }
 
   public DayLength dayLength() {
@@ -151,6 +151,11 @@ public final class WorkingCalendar {
   /** The end of the first working day on or after a date. */
   public long endOfNext(LocalDate date) {
     return day.endOf(worked.through(date.minusDays(1)) + 1 - elapsedDays);
+  }
+
+  /** Whether a duration uses its last working day up. */
+  public boolean isEndOfDay(long duration) {
+    return day.endOf(day.daysToFinish(duration)) == duration;
   }
 
   /** The date that is so many working days, at least 1, after another, which may be a rest day. */

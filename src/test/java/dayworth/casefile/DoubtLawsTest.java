@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertTimeout;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dayworth.decision.Notice;
+import dayworth.decision.WorkToGo;
 import dayworth.engine.Curve;
 import dayworth.engine.PieceWitness;
 import dayworth.engine.stepping.Stepping;
@@ -62,7 +63,13 @@ class DoubtLawsTest {
               network.scale().units(link.lag())));
     }
     return new ReadCase(
-        network, rows, links, TermsTable.read(Optional.empty(), none), Optional.empty());
+        WorkToGo.of(network, Optional.empty()),
+        rows,
+        links,
+        links,
+        List.of(),
+        TermsTable.read(Optional.empty(), none),
+        Optional.empty());
   }
 
   private static Set<Integer> implied(Network network) {
@@ -180,7 +187,7 @@ class DoubtLawsTest {
     for (int k = 0; k < chain.size(); k++) {
       Activity activity = network.activity(chain.get(k));
       long nextStart = k == 0 ? activity.notBefore() : Long.MIN_VALUE / 4;
-      long nextFinish = k == 0 ? 0 : Long.MIN_VALUE / 4;
+      long nextFinish = k == 0 ? activity.notFinishedBefore() : Long.MIN_VALUE / 4;
       for (Link link : network.links()) {
         if (k > 0 && link.predecessor() == chain.get(k - 1) && link.successor() == chain.get(k)) {
           long bound = (link.relation().fromStart() ? start : finish) + link.lag();
@@ -205,7 +212,7 @@ class DoubtLawsTest {
           Stepping.curve(network, PieceWitness.NONE).shortest(), shortest.ticks(), "seed " + seed);
       assertEquals(shortest.ticks(), longest(network, shortest), "seed " + seed);
       for (int i = 0; i < network.size(); i++) {
-        boolean holds = ShortestFinish.without(network, i).ticks() < shortest.ticks();
+        boolean holds = ShortestFinish.with(network, i, 0).ticks() < shortest.ticks();
         assertTrue(!holds || shortest.origin() == i, "seed " + seed + ", activity " + i);
       }
     }

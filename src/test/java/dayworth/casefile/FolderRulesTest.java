@@ -48,9 +48,6 @@ class FolderRulesTest {
   @ParameterizedTest
   @ValueSource(
       strings = {
-        "sections.csv",
-        "running.csv",
-        "progress.csv",
         "measures.csv",
         "packages.csv",
         "labour.csv",

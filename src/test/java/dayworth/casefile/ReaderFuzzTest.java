@@ -5,6 +5,8 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dayworth.contract.Terms;
 import dayworth.decision.Case;
+import dayworth.decision.CheckAnswer;
+import dayworth.decision.CheckQuestion;
 import dayworth.decision.CurveAnswer;
 import dayworth.decision.CurveQuestion;
 import dayworth.decision.FinishTooEarly;
@@ -14,6 +16,7 @@ import dayworth.engine.Curve;
 import dayworth.engine.PieceWitness;
 import dayworth.engine.stepping.Stepping;
 import dayworth.network.Network;
+import dayworth.report.CheckText;
 import dayworth.report.CurveFiles;
 import dayworth.report.CurveText;
 import dayworth.report.Style;
@@ -36,9 +39,12 @@ class ReaderFuzzTest {
   private static final Path CORE = Path.of("cases", "ferry-berth-core");
   private static final Path DATED =
       Path.of("src", "test", "resources", "demo", "ferry-berth-dated");
+  private static final Path STATUS =
+      Path.of("src", "test", "resources", "demo", "ferry-berth-status");
   private static final List<String> CORE_FILES =
       List.of("activities.csv", "links.csv", "terms.csv");
   private static final List<String> DATED_FILES = List.of("holidays.csv", "terms.csv");
+  private static final List<String> STATUS_FILES = List.of("progress.csv", "terms.csv");
   private static final int CASES = 2000;
 
   /** What hurts readers of tables most often. */
@@ -68,6 +74,8 @@ class ReaderFuzzTest {
           "2027-02-30",
           "0001-01-01",
           "2999-12-31",
+          "2027-07-16",
+          "2027-07-19",
           "week",
           "calendar_day",
           "whole",
@@ -119,6 +127,93 @@ class ReaderFuzzTest {
     changeBytes(DATED, DATED_FILES, CASES / 4);
   }
 
+  @Test
+  void withAStatusItNeverThrowsEither() throws IOException {
+    for (String file : List.of("activities.csv", "links.csv", "holidays.csv")) {
+      Files.copy(STATUS.resolve(file), folder.resolve(file));
+    }
+    changeBytes(STATUS, STATUS_FILES, CASES / 4);
+  }
+
+  /** Rows of a status, right and wrong, in any order. */
+  @Test
+  void anyStatusIsReadOrRefused() throws IOException {
+    CaseOnDisk disk =
+        new CaseOnDisk(folder)
+            .with(
+                "activities.csv",
+                """
+                id,normal_duration,normal_cost,crash_duration,crash_cost,predecessors,not_before
+                A,5,100,3,120,,
+                B,20,100,12,300,A,2
+                C,7.5,100,,,A,2027-03-20
+                D,3,0,1,90,B;C,
+                E,0,0,,,D,
+                """)
+            .with(
+                "links.csv",
+                """
+                predecessor,successor,relation,lag
+                A,D,FF,9
+                B,C,SS,2.5
+                C,E,SF,4
+                """);
+    int sound = 0;
+    int told = 0;
+    for (int seed = 0; seed < CASES / 2; seed++) {
+      Random random = new Random(seed);
+      disk.with("terms.csv", "term,value\nstart_date,2027-03-01\n" + statusTerms(random));
+      disk.with("progress.csv", status(random));
+      if (isSound(seed)) {
+        sound++;
+        canBeTold(disk.sound());
+        told += disk.sound().progress().isPresent() ? 1 : 0;
+      }
+    }
+    assertTrue(told > CASES / 40, "too few cases are sound: " + sound);
+    assertTrue(sound < CASES / 2 - CASES / 40, "too few are refused: " + sound);
+  }
+
+  private static String statusTerms(Random random) {
+    String data = random.nextInt(50) == 0 ? "" : "data_date,2027-03-" + day(random, 10, 21) + "\n";
+    return switch (random.nextInt(4)) {
+      case 0 -> data + "time_unit,week\nworking_days,Mon Tue Wed Thu Fri Sat\n";
+      case 1 -> data + "time_unit,hour\nunits_per_working_day,7.5\ncontract_finish,2027-03-09\n";
+      case 2 -> data + "contract_finish,30\ndamages_rate,10\ndamages_per,calendar_day\n";
+      default -> data;
+    };
+  }
+
+  private static String status(Random random) {
+    StringBuilder text = new StringBuilder("activity,started,finished,remaining_duration");
+    boolean crash = random.nextInt(3) == 0;
+    text.append(crash ? ",remaining_crash_duration,remaining_crash_cost\n" : "\n");
+    for (String id : List.of("A", "B", "C", "D", "E")) {
+      text.append(row(id, random));
+      if (crash) {
+        text.append(random.nextInt(3) == 0 ? ",0,50" : ",,");
+      }
+      text.append('\n');
+    }
+    return text.toString();
+  }
+
+  private static String row(String id, Random random) {
+    int state = random.nextInt(id.equals("E") ? 2 : 4);
+    String started = state == 0 ? "" : "2027-03-" + day(random, 1, 10);
+    String finished = state == 1 ? "2027-03-" + day(random, 8, 12) : "";
+    String rest = state > 1 ? List.of("0", "1", "2.5", "3.333", "30").get(random.nextInt(5)) : "";
+    if (random.nextInt(80) == 0) {
+      rest = WRONG.get(random.nextInt(WRONG.size()));
+    }
+    return String.join(",", id, started, finished, rest);
+  }
+
+  private static String day(Random random, int first, int last) {
+    int day = first + random.nextInt(last - first + 1);
+    return (day < 10 ? "0" : "") + day;
+  }
+
   private void changeBytes(Path from, List<String> files, int cases) throws IOException {
     int sound = 0;
     for (int seed = 0; seed < cases; seed++) {
@@ -164,6 +259,9 @@ class ReaderFuzzTest {
     }
     try {
       CurveAnswer answer = CurveQuestion.ask(read, OptionalLong.empty(), 0, Watcher.NONE);
+      CheckAnswer facts = CheckQuestion.ask(read);
+      assertTrue(CheckText.lines(facts, Style.PLAIN, 94).size() > 3);
+      assertTrue(facts.firstChains().stream().flatMap(List::stream).allMatch(read::isToGo));
       assertTrue(CurveText.lines(answer, Style.PLAIN, 94).size() > 5);
       assertEquals(5, CurveFiles.of(answer, "1").size());
     } catch (FinishTooEarly impossible) {

@@ -162,6 +162,15 @@ class StarterCaseTest {
             "bonus_cap_units",
             "date"),
         words);
+    words.addAll(
+        List.of(
+            "data_date",
+            "activity",
+            "started",
+            "finished",
+            "remaining_duration",
+            "remaining_crash_duration",
+            "remaining_crash_cost"));
     for (String word : words) {
       assertTrue(readme.contains("\n  " + word + " "), word);
     }

@@ -120,7 +120,6 @@ class TermRulesTest {
   @ParameterizedTest
   @ValueSource(
       strings = {
-        "data_date",
         "basis",
         "prepared_for",
         "prepared_by",

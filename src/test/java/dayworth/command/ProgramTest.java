@@ -54,6 +54,34 @@ class ProgramTest {
     }
   }
 
+  /**
+   * The dates are worked at the case's own test; with cents there would be no room for the total.
+   * K3 takes no time: Tuesday 26 October ends day 156, and K4 starts on the 27th.
+   */
+  @Test
+  void aCaseWithDatesIsAnsweredInDates() throws IOException, InterruptedException {
+    Path dated = Path.of("src", "test", "resources", "demo", "ferry-berth-dated");
+    Run run = run("curve", dated.toAbsolutePath().toString());
+    assertEquals(0, run.status(), run.err());
+    assertTrue(
+        run.out()
+            .startsWith(
+                "Least total: finish on Thu 18 Nov 2027 (173 days), 204,978.57 better than as planned."),
+        run.out());
+    assertTrue(
+        run.out()
+            .contains(
+                "> least total        173  Thu 18 Nov        68,950       693,643        0"
+                    + "  -12,500    750,093"),
+        run.out());
+    assertTrue(run.out().contains("rounded to whole ones"), run.out());
+    assertTrue(run.out().lines().allMatch(line -> line.length() <= 94), run.out());
+    Path output = folder.resolve("output").resolve("ferry-berth-dated");
+    String plan = Files.readString(output.resolve("plan.csv"));
+    assertTrue(plan.contains(",0,,0,0.00,156,156,2027-10-26,2027-10-26,"), plan);
+    assertTrue(plan.contains("cycle,12,,0,0.00,156,168,2027-10-27,2027-11-11,"), plan);
+  }
+
   @Test
   void thePlanOfAnotherFinishCanBeAsked() throws IOException, InterruptedException {
     Run run = run("curve", demo("starter"), "--at", "17.5", "--out", "here");

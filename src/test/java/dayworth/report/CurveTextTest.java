@@ -1,14 +1,36 @@
 package dayworth.report;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dayworth.contract.Bonus;
+import dayworth.contract.Damages;
+import dayworth.contract.Per;
+import dayworth.contract.Terms;
+import dayworth.contract.TimeRelated;
+import dayworth.decision.Case;
 import dayworth.decision.CurveAnswer;
+import dayworth.decision.CurveQuestion;
+import dayworth.decision.FinishTooEarly;
 import dayworth.decision.Notice;
+import dayworth.decision.TimeUnit;
+import dayworth.decision.Watcher;
 import dayworth.engine.Curve;
 import dayworth.engine.Obstacle;
+import dayworth.network.Activity;
+import dayworth.network.Network;
+import dayworth.value.DayLength;
+import dayworth.value.Money;
+import dayworth.value.TimeScale;
+import dayworth.value.WorkingCalendar;
+import java.time.DayOfWeek;
+import java.time.LocalDate;
+import java.util.EnumSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalLong;
 import org.junit.jupiter.api.Test;
 
 /** Every figure is worked by hand at {@link SeriesAnswer}. */
@@ -99,6 +121,7 @@ class CurveTextTest {
             plain.crashEverything(),
             plain.asked(),
             plain.provedRows(),
+            plain.unproved(),
             plain.crossCheck());
     List<String> lines = CurveText.lines(stopped, Style.PLAIN, 94);
     assertTrue(
@@ -110,6 +133,48 @@ class CurveTextTest {
         lines.contains(
             "  2 finishes share the least total; the longest is 8 days, the shortest 7 days."),
         lines.toString());
+  }
+
+  /**
+   * Two shifts a day, 10 a shift, 15 a calendar day: 6 shifts 100 + 45, 5: 110 + 45, 4: 120 + 30,
+   * 3: 130 + 30, 2: 140 + 15. From day to day the total only rises: 145, 150, 155.
+   */
+  @Test
+  void aTotalThatTurnsWithinADayIsNotSpokenOf() throws FinishTooEarly {
+    WorkingCalendar calendar =
+        WorkingCalendar.of(
+            LocalDate.parse("2026-09-07"),
+            EnumSet.allOf(DayOfWeek.class),
+            List.of(),
+            new DayLength(2, 1));
+    Case of =
+        new Case(
+            "shifts",
+            "",
+            "",
+            TimeUnit.SHIFT,
+            new Network(
+                TimeScale.WHOLE,
+                List.of(Activity.compressible("A", 6, Money.of(100), 2, Money.of(140))),
+                List.of()),
+            new Terms(
+                TimeScale.WHOLE,
+                Optional.of(calendar),
+                new TimeRelated(Money.of(15), Per.CALENDAR_DAY),
+                Money.ZERO,
+                Optional.empty(),
+                Damages.NONE,
+                Bonus.NONE),
+            List.of(),
+            List.of());
+    CurveAnswer answer = CurveQuestion.ask(of, OptionalLong.empty(), 0, Watcher.NONE);
+    assertEquals(
+        List.of("145.00", "155.00", "150.00", "160.00", "155.00"),
+        answer.rows().stream().map(row -> row.total().toPlainString()).toList());
+    String text = String.join("\n", CurveText.lines(answer, Style.PLAIN, 94));
+    assertTrue(
+        text.startsWith("Least total: finish on Wed 9 Sep 2026 (6 shifts), as planned."), text);
+    assertFalse(text.contains("also turns"), text);
   }
 
   @Test

@@ -26,11 +26,14 @@ class DatesTest {
         Dates.weekdays(EnumSet.of(DayOfWeek.MONDAY, DayOfWeek.TUESDAY, DayOfWeek.THURSDAY)));
   }
 
-  /** From Monday 7 September 2026: day 1 that Monday, day 84 Thursday 31 December, then 2027. */
+  /**
+   * Day 1 is Monday 7 September 2026, day 85 Friday 1 January 2027; 48 weeks after the Monday, on
+   * day 241, it is 9 August.
+   */
   @Test
-  void theYearStandsWhereItDiffers() {
+  void theYearStandsWhereADayCouldBeOfTwoYears() {
     Dates dates = new Dates(SeriesAnswer.DATED);
-    assertEquals(List.of("Thu 31 Dec", "Mon  7 Sep"), dates.column(List.of(84L, 1L)));
-    assertEquals(List.of("Fri  1 Jan 2027", "Mon  7 Sep 2026"), dates.column(List.of(85L, 1L)));
+    assertEquals(List.of("Fri  1 Jan", "Mon  7 Sep"), dates.column(List.of(85L, 1L)));
+    assertEquals(List.of("Mon  9 Aug 2027", "Mon  7 Sep 2026"), dates.column(List.of(241L, 1L)));
   }
 }

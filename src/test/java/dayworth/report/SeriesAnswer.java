@@ -120,6 +120,7 @@ final class SeriesAnswer {
         finish(7, 235, 175, 0, Optional.empty(), false),
         new CurveAnswer.AskedPlan(eight, Timing.earliest(NETWORK, atEight)),
         4,
+        List.of(),
         new CrossCheck(
             List.of(
                 new CrossCheck.Comparison(10, Money.of(160), new BigDecimal("160.00")),

@@ -47,7 +47,8 @@ public final class BruteForce {
   private long finish() {
     long[] start = new long[network.size()];
     for (int i = 0; i < start.length; i++) {
-      start[i] = network.activity(i).notBefore();
+      long waits = network.activity(i).notFinishedBefore() - duration[i];
+      start[i] = Math.max(network.activity(i).notBefore(), waits);
     }
     boolean moved = true;
     while (moved) {

@@ -36,6 +36,7 @@ public final class OutsideSolver {
   private final MPConstraint[] works;
   private final MPConstraint[] ends;
   private final MPConstraint[] links;
+  private final MPConstraint[] earliestFinishes;
 
   private OutsideSolver(Network network, double deadline) {
     this.network = network;
@@ -44,6 +45,7 @@ public final class OutsideSolver {
     this.works = new MPConstraint[network.size()];
     this.ends = new MPConstraint[network.size()];
     this.links = new MPConstraint[network.links().size()];
+    this.earliestFinishes = new MPConstraint[network.size()];
     this.projectFinish = solver.makeNumVar(0, deadline, "finish");
     for (int i = 0; i < network.size(); i++) {
       Activity activity = network.activity(i);
@@ -51,6 +53,9 @@ public final class OutsideSolver {
       finishes[i] = solver.makeNumVar(-MPSolver.infinity(), MPSolver.infinity(), "f" + i);
       works[i] =
           require(starts[i], finishes[i], (double) activity.crash(), (double) activity.normal());
+      earliestFinishes[i] =
+          solver.makeConstraint((double) activity.notFinishedBefore(), MPSolver.infinity());
+      earliestFinishes[i].setCoefficient(finishes[i], 1);
       ends[i] = require(finishes[i], projectFinish, 0, MPSolver.infinity());
     }
     for (int j = 0; j < links.length; j++) {
@@ -122,6 +127,8 @@ public final class OutsideSolver {
       double price = activity.slope().toDouble() + outside.works[i].dualValue();
       OutsideProof.spread(activity, i, scaled(price, scale), flow);
       flow.set(Over.FROM_PROJECT, i, scaled(outside.starts[i].reducedCost(), scale));
+      long fromProject = scaled(outside.earliestFinishes[i].dualValue(), scale);
+      flow.set(Over.FROM_PROJECT_TO_FINISH, i, fromProject);
       flow.set(Over.TO_PROJECT, i, scaled(outside.ends[i].dualValue(), scale));
     }
     for (int j = 0; j < outside.links.length; j++) {

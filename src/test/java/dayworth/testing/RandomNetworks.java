@@ -19,7 +19,7 @@ import java.util.Set;
  *
  * <p>They are small on purpose and full of what goes wrong: ties of slopes, slopes of zero, crash
  * cheaper than normal, activities that cannot be compressed or take no time, lags below zero, all
- * four relations, times with decimals, starts that must wait.
+ * four relations, times with decimals, starts and finishes that must wait.
  */
 public final class RandomNetworks {
 
@@ -29,7 +29,7 @@ public final class RandomNetworks {
     PLAIN,
     /** All that {@link #EVERYTHING} has, but whole durations, lags and times. */
     WHOLE,
-    /** All relations, lags, decimals, not-before times, slopes of zero and below. */
+    /** All relations, lags, decimals, earliest starts and finishes, slopes of zero and below. */
     EVERYTHING,
     /** Everything, and up to four spans: hire, sections, or between any two moments. */
     WITH_SPANS
@@ -90,9 +90,15 @@ public final class RandomNetworks {
     if (from.equals(to)) {
       from = Moment.PROJECT_START;
     }
+    if (!from.isProjectStart() && random.nextInt(5) == 0) {
+      return new Span("early", from, Moment.PROJECT_START, -time(0, 25), price());
+    }
     long free = from.isProjectStart() || random.nextInt(4) == 0 ? time(0, 25) - time(0, 3) : 0;
-    Money rate = Money.of(10L * (1 + random.nextInt(6))).dividedBy(ticksPerUnit);
-    return new Span("span", from, to, free, rate);
+    return new Span("span", from, to, free, price());
+  }
+
+  private Money price() {
+    return Money.of(10L * (1 + random.nextInt(6))).dividedBy(ticksPerUnit);
   }
 
   private Activity activity(int index) {
@@ -101,11 +107,13 @@ public final class RandomNetworks {
     long most = Math.min(normal, time(0, 8));
     Money normalCost = Money.of(random.nextInt(1000));
     long notBefore = kind != Kind.PLAIN && random.nextInt(8) == 0 ? time(0, 20) : 0;
+    long finish = kind != Kind.PLAIN && random.nextInt(8) == 0 ? time(0, 30) : 0;
     if (most == 0 || random.nextInt(5) == 0) {
-      return new Activity(id, "", "", normal, normal, normalCost, normalCost, notBefore);
+      return new Activity(id, "", "", normal, normal, normalCost, normalCost, notBefore, finish);
     }
     Money crashCost = normalCost.plus(extra(most));
-    return new Activity(id, "", "", normal, normal - most, normalCost, crashCost, notBefore);
+    long crash = normal - most;
+    return new Activity(id, "", "", normal, crash, normalCost, crashCost, notBefore, finish);
   }
 
   /** Half of all prices come from a few round ones for each unit, so that many are equal. */

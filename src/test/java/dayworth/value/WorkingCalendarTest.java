@@ -127,6 +127,8 @@ class WorkingCalendarTest {
     assertEquals(150, calendar.endOf(date("2026-09-13")));
     assertEquals(List.of(75L, 150L, 225L), calendar.endsOfDays(10, 225));
     assertEquals(List.of(75L), calendar.endsOfDays(75, 149));
+    assertTrue(calendar.isEndOfDay(150));
+    assertFalse(calendar.isEndOfDay(149));
   }
 
   @Test

@@ -18,12 +18,12 @@ import org.ojalgo.optimisation.Optimisation;
  * <p>Written from the activities and links themselves (Kelley 1961, "Critical-path planning and
  * scheduling: mathematical basis"). Variables: the start s of each activity, at least its
  * not-before time, and the shortening y of each compressible one, from 0 to normal − crash; its
- * finish is s + normal − y, so work is contiguous and never stretched. One row for each link:
- * successor's event − predecessor's event ≥ lag. One row for each finish ≤ deadline, except where a
- * link with a lag of at least 0 leads from that finish to an event of another activity, whose own
- * finish then comes no earlier. A span has a variable z ≥ 0 for the ticks that it is charged for,
- * and a row z ≥ later moment − earlier moment − free. Least: Σ slope × y + Σ rate × z; slopes may
- * be zero or negative.
+ * finish is s + normal − y, so work is contiguous and never stretched; a row keeps it from being
+ * before a not-finished-before time. One row for each link: successor's event − predecessor's event
+ * ≥ lag. One row for each finish ≤ deadline, except where a link with a lag of at least 0 leads
+ * from that finish to an event of another activity, whose own finish then comes no earlier. A span
+ * has a variable z ≥ 0 for the ticks that it is charged for, and a row z ≥ later moment − earlier
+ * moment − free. Least: Σ slope × y + Σ rate × z; slopes may be zero or negative.
  *
  * <p><b>Error.</b> In terms of events the rows are differences of two unknowns, a totally
  * unimodular system, so every corner is a whole number of ticks, and a simplex solver answers with
@@ -135,6 +135,7 @@ public final class LinearProgramme {
     return start >= activity.notBefore()
         && duration >= activity.crash()
         && duration <= activity.normal()
+        && finish >= activity.notFinishedBefore()
         && finish <= deadline;
   }
 

@@ -52,6 +52,9 @@ final class Tableau {
       if (!isFollowed(i)) {
         addFinish(i);
       }
+      if (network.activity(i).notFinishedBefore() > 0) {
+        addEarliestFinish(i);
+      }
     }
     this.solver = newSolver();
     this.result = Optimisation.Result.of(Optimisation.State.UNEXPLORED);
@@ -144,6 +147,15 @@ final class Tableau {
     shortenings.get(activity).ifPresent(y -> row.set(y, 1));
   }
 
+  /** start + normal − shortening ≥ the not-finished-before time. */
+  private void addEarliestFinish(int activity) {
+    long least =
+        network.activity(activity).notFinishedBefore() - network.activity(activity).normal();
+    Expression row = model.addExpression().lower(scaled(least));
+    row.set(starts.get(activity), 1);
+    shortenings.get(activity).ifPresent(y -> row.set(y, -1));
+  }
+
   /** Whether another activity's finish comes no earlier than this one's because of a link. */
   private boolean isFollowed(int activity) {
     for (int k = 0; k < network.linksOutOf(activity); k++) {
@@ -167,7 +179,7 @@ final class Tableau {
   private int bitsOfTime() {
     long longest = 0;
     for (Activity activity : network.activities()) {
-      longest = Math.max(longest, activity.notBefore());
+      longest = Math.max(longest, Math.max(activity.notBefore(), activity.notFinishedBefore()));
     }
     for (Activity activity : network.activities()) {
       longest += activity.normal();

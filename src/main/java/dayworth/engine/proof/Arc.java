@@ -27,6 +27,8 @@ public record Arc(
     BACK_OVER_CRASH,
     /** An activity's start, from the project's start on. */
     FROM_PROJECT,
+    /** An activity's finish, from the project's start on. */
+    FROM_PROJECT_TO_FINISH,
     /** The project's finish, from an activity's finish on. */
     TO_PROJECT,
     /** A link and its lag. */

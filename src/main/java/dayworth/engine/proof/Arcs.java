@@ -52,6 +52,13 @@ final class Arcs {
     Money slope = activity.slope();
     Money cheaper = slope.negate();
     add(Event.PROJECT_START, start, Over.FROM_PROJECT, i, activity.notBefore(), Optional.empty());
+    add(
+        Event.PROJECT_START,
+        finish,
+        Over.FROM_PROJECT_TO_FINISH,
+        i,
+        activity.notFinishedBefore(),
+        Optional.empty());
     if (slope.signum() > 0) {
       add(start, finish, Over.SLOPE, i, activity.normal(), Optional.of(slope));
     } else if (slope.signum() < 0) {

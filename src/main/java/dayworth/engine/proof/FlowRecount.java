@@ -5,6 +5,7 @@ import dayworth.engine.Flow.Over;
 import dayworth.engine.proof.Verdict.Refuted;
 import dayworth.network.Activity;
 import dayworth.network.Link;
+import dayworth.network.Moment;
 import dayworth.network.Network;
 import dayworth.network.Span;
 import java.util.Locale;
@@ -62,16 +63,21 @@ final class FlowRecount {
     through(i, Over.CRASH, activity.crash(), all);
     back(i, Over.BACK_OVER_NORMAL, activity.normal(), all);
     back(i, Over.BACK_OVER_CRASH, activity.crash(), limits.backOverCrash(i));
-    long in = amount(i, Over.FROM_PROJECT, all);
-    if (in != 0) {
-      lengths.addProduct(activity.notBefore(), in);
-      leaving.addProduct(1, in);
-      add(atStart, i, in);
-    }
+    fromProject(i, Over.FROM_PROJECT, activity.notBefore(), atStart);
+    fromProject(i, Over.FROM_PROJECT_TO_FINISH, activity.notFinishedBefore(), atFinish);
     long out = amount(i, Over.TO_PROJECT, all);
     if (out != 0) {
       reaching.addProduct(1, out);
       add(atFinish, i, -out);
+    }
+  }
+
+  private void fromProject(int activity, Over over, long earliest, long[] event) {
+    long amount = amount(activity, over, Long.MAX_VALUE);
+    if (amount != 0) {
+      lengths.addProduct(earliest, amount);
+      leaving.addProduct(1, amount);
+      add(event, activity, amount);
     }
   }
 
@@ -113,12 +119,16 @@ final class FlowRecount {
     } else if (amount > 0) {
       Span span = network.spans().get(index);
       lengths.addProduct(-span.free(), amount);
-      add(span.to().isFinish() ? atFinish : atStart, span.to().activity(), -amount);
-      if (span.from().isProjectStart()) {
-        leaving.addProduct(-1, amount);
-      } else {
-        add(span.from().isFinish() ? atFinish : atStart, span.from().activity(), amount);
-      }
+      addAt(span.to(), -amount);
+      addAt(span.from(), amount);
+    }
+  }
+
+  private void addAt(Moment moment, long amount) {
+    if (moment.isProjectStart()) {
+      leaving.addProduct(-1, amount);
+    } else {
+      add(moment.isFinish() ? atFinish : atStart, moment.activity(), amount);
     }
   }
 

@@ -27,8 +27,8 @@ import java.util.Optional;
  *       |c|(d − C) ≥ x(d − C) = x(−C − (s − f)) as d − C ≥ 0.
  *   <li>crash, s to f, w = C: x(C − d) ≤ 0. Back over normal, f to s, w = −N: x(d − N) ≤ 0.
  *   <li>link, w its lag: x(lag − (t_v − t_u)) ≤ 0.
- *   <li>project start to s, w the not-before time: x(w − s) ≤ 0. f to project finish, w = 0: x(f −
- *       F) ≤ 0.
+ *   <li>project start to s, w the not-before time: x(w − s) ≤ 0; to f, w the not-finished-before
+ *       time: x(w − f) ≤ 0. f to project finish, w = 0: x(f − F) ≤ 0.
  *   <li>span of rate r, its later moment to its earlier one, w = minus what is free, x ≤ r: it
  *       costs r·max(0, t(to) − t(from) − free) ≥ x(w − (t(from) − t(to))).
  * </ul>

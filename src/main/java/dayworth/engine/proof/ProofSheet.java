@@ -10,6 +10,7 @@ import java.math.BigDecimal;
 import java.math.RoundingMode;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 
 /**
@@ -41,6 +42,7 @@ public record ProofSheet(List<Row> rows) {
    *
    * @param arc where it runs; empty for money that hangs on no arc
    * @param activity index of the activity whose money it is; -1 for none
+   * @param name of what else the money is for; empty for an activity or an arc
    * @param length time units
    * @param flow money per time unit
    * @param capacity the most that may flow; empty where there is no limit
@@ -51,6 +53,7 @@ public record ProofSheet(List<Row> rows) {
       Kind kind,
       Optional<Arc> arc,
       int activity,
+      String name,
       Optional<BigDecimal> length,
       Optional<BigDecimal> flow,
       Optional<BigDecimal> capacity,
@@ -61,6 +64,8 @@ public record ProofSheet(List<Row> rows) {
   public enum Kind {
     /** What an activity costs the cheapest way it can be done. */
     FIXED,
+    /** Other money of the plan: sections and running costs. */
+    OTHER,
     /** An arc of the network. */
     ARC,
     /** What is lost by writing decimals. */
@@ -74,18 +79,78 @@ public record ProofSheet(List<Row> rows) {
    * @throws IllegalArgumentException if the two do not prove each other
    */
   public static ProofSheet of(Network network, Plan plan, long finish, Flow flow) {
+    return of(network, plan, finish, flow, Money.ZERO);
+  }
+
+  /**
+   * The same with money that every plan pays alike.
+   *
+   * @throws IllegalArgumentException if the two do not prove each other
+   */
+  public static ProofSheet of(Network network, Plan plan, long finish, Flow flow, Money alike) {
     List<Arc> arcs = Arcs.of(network, finish, flow);
     for (int decimals = FEWEST_DECIMALS; decimals <= MOST_DECIMALS; decimals += 3) {
-      List<Row> rows = new Writer(network, plan, decimals).rows(arcs, flow);
+      Writer writer = new Writer(network, plan, decimals);
+      List<Row> rows = writer.rows(arcs, flow);
+      if (!alike.isZero()) {
+        Optional<BigDecimal> cost = Optional.of(writer.number(alike, RoundingMode.CEILING));
+        rows.add(0, money(Kind.FIXED, -1, "", cost, cost));
+      }
       BigDecimal gap = sum(rows, Row::planCost).subtract(sum(rows, Row::bound));
       if (gap.signum() >= 0 && gap.compareTo(HALF_A_CENT) < 0) {
         if (gap.signum() > 0) {
-          rows.add(money(Kind.ROUNDING, -1, Optional.empty(), Optional.of(DecimalFlow.plain(gap))));
+          rows.add(
+              money(Kind.ROUNDING, -1, "", Optional.empty(), Optional.of(DecimalFlow.plain(gap))));
         }
         return new ProofSheet(rows);
       }
     }
     throw new IllegalArgumentException("the plan and the flow do not prove each other");
+  }
+
+  /** What a plan pays alone, with nothing that bounds it. */
+  public static ProofSheet ofPlan(Network network, Plan plan, Map<String, Money> other) {
+    Writer writer = new Writer(network, plan, FEWEST_DECIMALS);
+    List<Row> rows = new ArrayList<>();
+    for (int i = 0; i < network.size(); i++) {
+      Activity activity = network.activity(i);
+      long shortened = activity.normal() - plan.duration(i);
+      Money cost = activity.normalCost().plus(activity.slope().times(shortened));
+      if (!cost.isZero()) {
+        BigDecimal number = writer.number(cost, RoundingMode.HALF_UP);
+        rows.add(money(Kind.FIXED, i, "", Optional.of(number), Optional.empty()));
+      }
+    }
+    other.forEach(
+        (name, cost) ->
+            rows.add(
+                money(
+                    Kind.OTHER,
+                    -1,
+                    name,
+                    Optional.of(writer.number(cost, RoundingMode.HALF_UP)),
+                    Optional.empty())));
+    return new ProofSheet(rows);
+  }
+
+  /** The bounds alone. */
+  public ProofSheet withoutPlan() {
+    return new ProofSheet(
+        rows.stream()
+            .filter(row -> row.bound().isPresent())
+            .map(
+                row ->
+                    new Row(
+                        row.kind(),
+                        row.arc(),
+                        row.activity(),
+                        row.name(),
+                        row.length(),
+                        row.flow(),
+                        row.capacity(),
+                        Optional.empty(),
+                        row.bound()))
+            .toList());
   }
 
   /** The total of the column that the plan pays. */
@@ -117,11 +182,16 @@ public record ProofSheet(List<Row> rows) {
   }
 
   private static Row money(
-      Kind kind, int activity, Optional<BigDecimal> planCost, Optional<BigDecimal> bound) {
+      Kind kind,
+      int activity,
+      String name,
+      Optional<BigDecimal> planCost,
+      Optional<BigDecimal> bound) {
     return new Row(
         kind,
         Optional.empty(),
         activity,
+        name,
         Optional.empty(),
         Optional.empty(),
         Optional.empty(),
@@ -139,7 +209,7 @@ public record ProofSheet(List<Row> rows) {
         Money least = activity.normalCost().min(activity.crashCost());
         if (!least.isZero()) {
           Optional<BigDecimal> cost = Optional.of(number(least, RoundingMode.CEILING));
-          rows.add(money(Kind.FIXED, i, cost, cost));
+          rows.add(money(Kind.FIXED, i, "", cost, cost));
         }
       }
       List<BigDecimal> amounts = DecimalFlow.of(arcs, network, flow.scale().perUnit(), decimals);
@@ -159,6 +229,7 @@ public record ProofSheet(List<Row> rows) {
           Kind.ARC,
           Optional.of(arc),
           arc.over().isOfActivity() ? arc.index() : -1,
+          "",
           Optional.of(length),
           Optional.of(amount),
           arc.capacity().map(most -> number(perUnit(most), RoundingMode.FLOOR)),

@@ -56,7 +56,9 @@ final class ScheduleCheck {
   private void placeEarliest() {
     for (int position = 0; position < start.length; position++) {
       int activity = network.inOrder(position);
-      long earliest = network.activity(activity).notBefore();
+      long finish = network.activity(activity).notFinishedBefore();
+      long earliest =
+          Math.max(network.activity(activity).notBefore(), finish - plan.duration(activity));
       for (int k = 0; k < network.linksInto(activity); k++) {
         Link link = network.link(network.linkInto(activity, k));
         long event = from(link) + link.lag();
@@ -71,6 +73,10 @@ final class ScheduleCheck {
     for (int i = 0; i < start.length; i++) {
       if (start[i] < network.activity(i).notBefore()) {
         return refuted(i, "starts at " + start[i], "at least " + network.activity(i).notBefore());
+      }
+      long earliest = network.activity(i).notFinishedBefore();
+      if (start[i] + plan.duration(i) < earliest) {
+        return refuted(i, "finishes at " + (start[i] + plan.duration(i)), "at least " + earliest);
       }
       if (start[i] + plan.duration(i) > finish) {
         return refuted(i, "finishes at " + (start[i] + plan.duration(i)), "at most " + finish);

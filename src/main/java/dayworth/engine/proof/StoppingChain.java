@@ -2,7 +2,6 @@ package dayworth.engine.proof;
 
 import dayworth.engine.Obstacle;
 import dayworth.engine.proof.Verdict.Refuted;
-import dayworth.network.Activity;
 import dayworth.network.Link;
 import dayworth.network.Network;
 import java.util.List;
@@ -14,9 +13,10 @@ import java.util.Optional;
  * <p>Each term bounds a difference of event times in every plan there is: an activity's finish
  * comes at least its crash duration after its start, its start at least minus its normal duration
  * after its finish, a link's second event at least its lag after its first, a start at least the
- * not-before time after the project start. If each term begins at the event where the one before it
- * ended, the sum bounds the project's duration. Between two terms a link without a lag may go
- * unnamed, for it adds nothing, and so may the step from the project start to an activity's start.
+ * not-before time, and a finish at least the not-finished-before time, after the project start. If
+ * each term begins at the event where the one before it ended, the sum bounds the project's
+ * duration. Between two terms a link without a lag may go unnamed, for it adds nothing, and so may
+ * the step from the project start to an activity's start.
  */
 final class StoppingChain {
 
@@ -77,8 +77,11 @@ final class StoppingChain {
     if (obstacle instanceof Obstacle.CannotBeLonger longest) {
       return isKnown(longest.activity()) ? Optional.of(backwards(longest)) : Optional.empty();
     }
+    if (obstacle instanceof Obstacle.NotFinishedBefore wait) {
+      return isKnown(wait.activity()) ? Optional.of(toFinish(wait.activity())) : Optional.empty();
+    }
     Obstacle.NotBefore wait = (Obstacle.NotBefore) obstacle;
-    return isKnown(wait.activity()) ? Optional.of(fromProject(wait)) : Optional.empty();
+    return isKnown(wait.activity()) ? Optional.of(toStart(wait.activity())) : Optional.empty();
   }
 
   private Term linkTerm(int index) {
@@ -98,11 +101,14 @@ final class StoppingChain {
     return new Term(Place.activity(network, i), finish(i), start(i), -normal);
   }
 
-  private Term fromProject(Obstacle.NotBefore obstacle) {
-    int i = obstacle.activity();
-    Activity activity = network.activity(i);
-    return new Term(
-        Place.activity(network, i), Event.PROJECT_START, start(i), activity.notBefore());
+  private Term toStart(int i) {
+    long earliest = network.activity(i).notBefore();
+    return new Term(Place.activity(network, i), Event.PROJECT_START, start(i), earliest);
+  }
+
+  private Term toFinish(int i) {
+    long earliest = network.activity(i).notFinishedBefore();
+    return new Term(Place.activity(network, i), Event.PROJECT_START, finish(i), earliest);
   }
 
   private boolean connects(Event here, Event next) {

@@ -90,7 +90,10 @@ final class Bodies {
   }
 
   private static boolean isLogic(Over over) {
-    return over == Over.LINK || over == Over.FROM_PROJECT || over == Over.TO_PROJECT;
+    return switch (over) {
+      case LINK, FROM_PROJECT, FROM_PROJECT_TO_FINISH, TO_PROJECT -> true;
+      default -> false;
+    };
   }
 
   private boolean hasFlow(int arc) {

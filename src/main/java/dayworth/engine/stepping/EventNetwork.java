@@ -171,7 +171,7 @@ final class EventNetwork {
     if (!from.isProjectStart() && !from.isFinish()) {
       through[from.activity()] += amount;
     }
-    if (!to.isFinish()) {
+    if (!to.isProjectStart() && !to.isFinish()) {
       through[to.activity()] -= amount;
     }
   }

@@ -222,6 +222,12 @@ final class EventNetworkBuilder {
     if (earliest + normal.startToEnd(i) >= least && !startFollows(i)) {
       arc(Over.FROM_PROJECT, i, EventNetwork.BEGIN, startEvent[i], earliest, UNLIMITED);
     }
+    long earliestFinish = activity.notFinishedBefore();
+    if (earliestFinish + normal.finishToEnd(i) >= least
+        && earliestFinish > earliest + activity.crash()) {
+      long length = earliestFinish - (finishEvent[i] == startEvent[i] ? activity.normal() : 0);
+      arc(Over.FROM_PROJECT_TO_FINISH, i, EventNetwork.BEGIN, finishEvent[i], length, UNLIMITED);
+    }
     if (normal.finishFromBegin(i) >= least && !finishFollows(i)) {
       long length = finishEvent[i] == startEvent[i] ? activity.normal() : 0;
       arc(Over.TO_PROJECT, i, finishEvent[i], EventNetwork.END, length, UNLIMITED);

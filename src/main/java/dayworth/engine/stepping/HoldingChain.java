@@ -38,6 +38,7 @@ final class HoldingChain {
     int index = events.index(arc);
     switch (events.over(arc)) {
       case FROM_PROJECT -> begin(index);
+      case FROM_PROJECT_TO_FINISH -> beginAtFinish(index);
       case CRASH -> cross(false);
       case BACK_OVER_NORMAL -> cross(true);
       case LINK -> follow(index);
@@ -53,6 +54,13 @@ final class HoldingChain {
     if (notBefore > 0) {
       terms.add(new Obstacle.NotBefore(first, notBefore));
     }
+  }
+
+  private void beginAtFinish(int first) {
+    activity = first;
+    atStart = false;
+    long earliest = events.network.activity(first).notFinishedBefore();
+    terms.add(new Obstacle.NotFinishedBefore(first, earliest));
   }
 
   private void follow(int index) {

@@ -79,7 +79,7 @@ final class Reach {
   private void fromBegin(int i) {
     Activity activity = network.activity(i);
     long start = activity.notBefore();
-    long finish = Long.MIN_VALUE;
+    long finish = activity.notFinishedBefore();
     for (int k = 0; k < network.linksInto(i); k++) {
       Link link = network.link(network.linkInto(i, k));
       int from = link.predecessor();

@@ -112,7 +112,7 @@ public final class Stepping {
   }
 
   /** Takes what saves money whatever the finish, as far as the network lets it. */
-  private static Squeeze squeezeWhatPays(EventNetwork events) {
+  static Squeeze squeezeWhatPays(EventNetwork events) {
     Squeeze squeeze = new Squeeze(events.net, events.lateTimes());
     for (int i = 0; i < events.network.size(); i++) {
       int arc = events.has(i) ? events.cheaperArc[i] : -1;

@@ -26,9 +26,9 @@ final class CurveWording {
     BigDecimal better = answer.asPlanned().total().subtract(least.total());
     String finish = "Finishing in " + words.time(least.duration()) + " costs least";
     if (better.signum() > 0) {
-      return finish + ": " + words.money(better) + " less than as planned";
+      return finish + ": " + words.money(better) + " less than " + words.asPlanned();
     }
-    return finish + (startsAsPlanned() ? ", as planned" : ", no less than as planned");
+    return finish + (startsAsPlanned() ? ", " : ", no less than ") + words.asPlanned();
   }
 
   String note() {
@@ -54,7 +54,8 @@ final class CurveWording {
     }
     if (!startsAsPlanned()) {
       Finish planned = answer.asPlanned();
-      said.add("As planned: " + words.time(planned.duration()) + ", total " + total(planned) + ".");
+      said.add(
+          asPlanned() + ": " + words.time(planned.duration()) + ", total " + total(planned) + ".");
     }
     contractOutside().ifPresent(said::add);
     waste().ifPresent(said::add);
@@ -87,7 +88,11 @@ final class CurveWording {
   }
 
   private String firstName() {
-    return startsAsPlanned() ? "As planned" : "Least direct cost";
+    return startsAsPlanned() ? asPlanned() : "Least direct cost";
+  }
+
+  private String asPlanned() {
+    return words.asPlanned().replace("as ", "As ");
   }
 
   private boolean startsAsPlanned() {
@@ -115,9 +120,11 @@ final class CurveWording {
         .filter(due -> due > longest || due < shortest)
         .map(
             due ->
-                "The contract finish, "
-                    + words.time(due)
-                    + (due > longest ? ", is later than all of these." : ", cannot be met."));
+                due < 0
+                    ? "The contract finish has passed."
+                    : "The contract finish, "
+                        + words.time(due)
+                        + (due > longest ? ", is later than all of these." : ", cannot be met."));
   }
 
   private Optional<String> waste() {

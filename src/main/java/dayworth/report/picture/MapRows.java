@@ -28,11 +28,11 @@ record MapRows(List<MapRow> shown, int quiet, int crowded) {
     List<MapRow> told = new ArrayList<>();
     for (int i = 0; i < network.size(); i++) {
       MapRow row = new MapRow(i, network.activity(i), timings);
-      if (row.isTold()) {
+      if (row.isTold() && answer.of().isToGo(i)) {
         told.add(row);
       }
     }
-    int quiet = network.size() - told.size();
+    int quiet = answer.of().toGo() - told.size();
     int crowded = Math.max(0, told.size() - MOST);
     if (crowded > 0) {
       told.sort(

@@ -38,10 +38,10 @@ final class MapWording {
         + " "
         + Words.count(shortened, "of", "of")
         + " "
-        + Words.count(network.size(), "activity", "activities")
+        + Words.count(answer.of().toGo(), "activity", "activities")
         + (shortened == 1 ? " is" : " are")
         + " shortened and "
-        + Words.count(least.criticalCount(), "is", "are")
+        + Words.count(answer.of().criticalCount(least), "is", "are")
         + " critical";
   }
 

@@ -43,7 +43,8 @@ final class MoneyAxis {
     double low = all.stream().mapToDouble(Range::low).min().orElse(0);
     double high = all.stream().mapToDouble(Range::high).max().orElse(0);
     Range gap = widestGap(all);
-    boolean cuts = gap.size() > WORTH_CUTTING * (high - low);
+    // Where all amounts are one, nothing would be left beside the cut.
+    boolean cuts = gap.size() > WORTH_CUTTING * (high - low) && gap.size() < high - low;
     double room = ROOM * (high - low - (cuts ? gap.size() : 0));
     Range cut = cuts ? roundedInside(gap, room) : new Range(low, low);
     double lowest = low < 0 ? low - room : low;

@@ -1,6 +1,7 @@
 package dayworth.report.picture;
 
 import dayworth.decision.Case;
+import dayworth.decision.Progress;
 import dayworth.value.TimeScale;
 import java.math.BigDecimal;
 import java.math.RoundingMode;
@@ -17,13 +18,16 @@ final class Words {
   private final String unit;
   private final TimeScale scale;
   private final String project;
+  private final String asPlanned;
 
   Words(Case of) {
     this.currency = safe(of.currency());
     this.unit = of.unit().word();
     this.scale = of.network().scale();
     String title = safe(of.title());
-    this.project = title.isEmpty() ? safe(of.name()) : title;
+    String name = title.isEmpty() ? safe(of.name()) : title;
+    this.project = withoutStop(name) + of.progress().map(Words::toGo).orElse("");
+    this.asPlanned = of.progress().isPresent() ? "as it stands" : "as planned";
   }
 
   /**
@@ -55,7 +59,20 @@ final class Words {
 
   /** What the case is called, without a full stop at its end. */
   String project() {
-    return project.endsWith(".") ? project.substring(0, project.length() - 1) : project;
+    return project;
+  }
+
+  private static String withoutStop(String name) {
+    return name.endsWith(".") ? name.substring(0, name.length() - 1) : name;
+  }
+
+  private static String toGo(Progress progress) {
+    return ", work to go after " + progress.dataDate();
+  }
+
+  /** The plan with every activity its normal way. */
+  String asPlanned() {
+    return asPlanned;
   }
 
   /** An amount without its currency: whole, but with cents where it is small and has them. */

@@ -176,7 +176,7 @@ class ProofCheckerTest {
   @Test
   void provesWhatAnOutsideSolverFindsOnRandomNetworks() {
     int proved = 0;
-    for (long seed = 1; seed <= 400; seed++) {
+    for (long seed = 1; seed <= 500; seed++) {
       Network network = RandomNetworks.of(seed);
       Optional<SlopeScale> scale = scale(network);
       if (scale.isEmpty() || !scale.get().exact() || scale.get().perUnit() > 1_000_000) {

@@ -8,9 +8,13 @@ import dayworth.engine.Obstacle.AtShortest;
 import dayworth.engine.Obstacle.CannotBeLonger;
 import dayworth.engine.Obstacle.Lag;
 import dayworth.engine.Obstacle.NotBefore;
+import dayworth.engine.Obstacle.NotFinishedBefore;
+import dayworth.engine.PieceWitness;
+import dayworth.engine.stepping.Stepping;
 import dayworth.network.Activity;
 import dayworth.network.Link;
 import dayworth.network.Network;
+import dayworth.network.Relation;
 import dayworth.value.Money;
 import dayworth.value.TimeScale;
 import java.util.ArrayList;
@@ -78,5 +82,28 @@ class StoppingChainTest {
     assertTrue(ProofChecker.stops(network, List.of(new AtShortest(7, 9)), 9).isPresent());
     List<Obstacle> twice = List.of(new AtShortest(0, 3), new NotBefore(1, 0));
     assertEquals("activity M", ProofChecker.stops(network, twice, 3).orElseThrow().where());
+  }
+
+  /** By hand: M is done at 9 at the earliest, begins no later than at 7, so N, SS 1, ends at 13. */
+  @Test
+  void aFinishThatHasToWaitBeginsAChain() {
+    Money none = Money.ZERO;
+    Network network =
+        new Network(
+            TimeScale.WHOLE,
+            List.of(
+                new Activity("M", "", "", 2, 2, none, none, 0, 9), Activity.fixed("N", 5, none)),
+            List.of(new Link(0, 1, Relation.SS, 1)));
+    List<Obstacle> obstacles =
+        List.of(
+            new NotFinishedBefore(0, 9),
+            new CannotBeLonger(0, -2),
+            new Lag(0, 1),
+            new AtShortest(1, 5));
+    assertEquals(obstacles, Stepping.curve(network, PieceWitness.NONE).obstacles());
+    assertEquals(Optional.empty(), ProofChecker.stops(network, obstacles, 13));
+    List<Obstacle> early = List.of(new NotFinishedBefore(0, 8));
+    assertEquals("activity M", ProofChecker.stops(network, early, 8).orElseThrow().where());
+    assertTrue(ProofChecker.stops(network, List.of(new NotFinishedBefore(7, 9)), 9).isPresent());
   }
 }

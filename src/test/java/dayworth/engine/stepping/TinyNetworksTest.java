@@ -79,7 +79,8 @@ class TinyNetworksTest {
         a.crash(),
         a.normalCost().times(7),
         a.crashCost().times(7),
-        a.notBefore());
+        a.notBefore(),
+        a.notFinishedBefore());
   }
 
   @Test

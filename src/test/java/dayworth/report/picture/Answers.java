@@ -35,6 +35,12 @@ final class Answers {
     return ask(((Reading.Sound) reading).of());
   }
 
+  /** The ferry berth as it stands on 16 July 2027. */
+  static CurveAnswer ofStatus() {
+    Path folder = Path.of("src", "test", "resources", "demo", "ferry-berth-status");
+    return ask(((Reading.Sound) CaseReader.read(folder, TimeScale.WHOLE)).of());
+  }
+
   /** A network drawn from a seed, under terms drawn from the same seed. */
   static CurveAnswer ofSeed(long seed) {
     Network network = RandomNetworks.of(seed);

@@ -5,7 +5,11 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dayworth.contract.Bonus;
+import dayworth.contract.Damages;
+import dayworth.contract.Due;
 import dayworth.contract.Terms;
+import dayworth.contract.TimeRelated;
 import dayworth.decision.CurveAnswer;
 import dayworth.network.Activity;
 import dayworth.network.Link;
@@ -16,9 +20,11 @@ import java.awt.Graphics2D;
 import java.awt.image.BufferedImage;
 import java.io.ByteArrayInputStream;
 import java.io.IOException;
+import java.math.BigDecimal;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import javax.imageio.ImageIO;
 import javax.xml.parsers.DocumentBuilderFactory;
 import javax.xml.parsers.ParserConfigurationException;
@@ -72,6 +78,41 @@ class PicturesTest {
     picture.paint(sheet);
     graphics.dispose();
     return sheet.written();
+  }
+
+  /** One finish, one amount: 8 days late at 10. The axis of money has that and zero. */
+  @Test
+  void aSingleFinishThatCostsSomethingIsDrawn() throws IOException {
+    Network network =
+        new Network(TimeScale.WHOLE, List.of(Activity.fixed("A", 10, Money.ZERO)), List.of());
+    Terms terms =
+        new Terms(
+            TimeScale.WHOLE,
+            Optional.empty(),
+            TimeRelated.NONE,
+            Money.ZERO,
+            Optional.of(Due.at(2)),
+            Damages.perUnit(Money.of(10), BigDecimal.ZERO, Optional.empty()),
+            Bonus.NONE);
+    Map<String, byte[]> files =
+        Pictures.of(Answers.ask(Answers.of("one", "", "EUR", network, terms)));
+    assertTrue(texts(files, "curve").contains("total EUR 80"), texts(files, "curve").toString());
+  }
+
+  /** By hand: 120 days cost 637,500 and 99 days 521,507.14 of money that depends on the finish. */
+  @Test
+  void aStatusIsToldAndWhatIsFinishedIsLeftOut() throws IOException {
+    Map<String, byte[]> files = Pictures.of(Answers.ofStatus());
+    List<String> curve = texts(files, "curve");
+    assertTrue(
+        curve.contains(
+            "Finishing in 99 working days costs least: EUR 115,993 less than as it stands"),
+        curve.toString());
+    assertTrue(curve.contains("As it stands"), curve.toString());
+    String map = String.join(" ", texts(files, "compression-map"));
+    assertTrue(map.contains("of 33 activities"), map);
+    assertTrue(map.contains("work to go after 2027-07-16"), map);
+    assertFalse(map.contains("A1 Marine works permit"), map);
   }
 
   /**

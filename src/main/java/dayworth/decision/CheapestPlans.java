@@ -1,0 +1,29 @@
+package dayworth.decision;
+
+import dayworth.engine.Curve;
+import dayworth.network.Plan;
+import java.util.List;
+import java.util.SortedSet;
+
+/** The cheapest plans of a case, with all money that hangs on when activities start and finish. */
+sealed interface CheapestPlans permits ConvexPlans, BranchedPlans {
+
+  /**
+   * The curve of that money; where it is not convex a piece reaches from one finish that was solved
+   * to the next.
+   */
+  Curve curve();
+
+  /**
+   * The plan for each of several finishes.
+   *
+   * @param durations ticks, from long to short
+   */
+  List<Plan> plans(SortedSet<Long> durations);
+
+  /** Compares with the linear programme. */
+  CrossCheck crossCheck(long most, Watcher watcher);
+
+  /** How many of the finishes are not proved to be cheapest. */
+  List<Unproved> unproved();
+}

@@ -1,0 +1,89 @@
+package dayworth.decision;
+
+import dayworth.contract.MomentMoney;
+import dayworth.engine.branching.Branching;
+import dayworth.engine.proof.ProofChecker;
+import dayworth.engine.proof.ProofSheet;
+import dayworth.engine.proof.Verdict;
+import dayworth.engine.stepping.Descent;
+import dayworth.network.Network;
+import dayworth.network.Plan;
+import dayworth.value.Money;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+
+/** Writes what proves the plan of one finish. */
+final class PlanProving {
+
+  /** Convex problems for the one finish. */
+  private static final long PROBLEMS = 20_000;
+
+  private PlanProving() {}
+
+  /**
+   * The proof.
+   *
+   * @param plan the cheapest that finishes within {@code finish}
+   * @throws ProofFailed if it is not
+   */
+  static PlanProof of(Case of, Plan plan, long finish) {
+    return of.momentMoney().charges().isEmpty()
+        ? convex(of.pricedNetwork(), plan, finish, of.momentMoney().fixed())
+        : branched(of, plan, finish);
+  }
+
+  private static PlanProof convex(Network network, Plan plan, long finish, Money alike) {
+    Descent descent = new Descent(network);
+    descent.within(finish, plan);
+    if (new ProofChecker(network).check(plan, finish, descent.flow(), plan.cost(network))
+        instanceof Verdict.Refuted refuted) {
+      throw new ProofFailed(
+          "the plan for " + network.scale().text(finish) + ", " + refuted.where(), refuted.why());
+    }
+    ProofSheet sheet = ProofSheet.of(network, plan, finish, descent.flow(), alike);
+    return new PlanProof(List.of(new PlanProof.Block("1", network, sheet)));
+  }
+
+  private static PlanProof branched(Case of, Plan plan, long finish) {
+    Network priced = of.pricedNetwork();
+    MomentMoney money = of.momentMoney();
+    Branching.Proof proof =
+        Branching.prove(priced, money.charges(), finish, PROBLEMS)
+            .orElseThrow(
+                () ->
+                    new ProofFailed(
+                        "the plan for " + priced.scale().text(finish),
+                        "more than " + PROBLEMS + " branches are needed"));
+    Money cost = Branching.cost(priced, money.charges(), plan);
+    if (!cost.equals(proof.point().cost())) {
+      throw new ProofFailed(
+          "the plan for " + priced.scale().text(finish),
+          "costs " + cost.cents() + ", and another " + proof.point().cost().cents());
+    }
+    List<PlanProof.Block> blocks = new ArrayList<>();
+    ProofSheet paid = ProofSheet.ofPlan(of.network(), plan, other(money, plan));
+    blocks.add(new PlanProof.Block("plan", of.network(), paid));
+    for (Branching.Leaf leaf : proof.leaves()) {
+      Network relaxed = leaf.relaxation().network();
+      Money alike = leaf.relaxation().fixed().plus(money.fixed());
+      ProofSheet sheet = ProofSheet.of(relaxed, leaf.plan(), finish, leaf.flow(), alike);
+      blocks.add(new PlanProof.Block(String.valueOf(blocks.size()), relaxed, sheet.withoutPlan()));
+    }
+    return new PlanProof(blocks);
+  }
+
+  private static Map<String, Money> other(MomentMoney money, Plan plan) {
+    Map<String, Money> other = new LinkedHashMap<>();
+    money.running().forEach(cost -> other.put(cost.name(), money.of(cost, plan)));
+    money
+        .sections()
+        .forEach(
+            section ->
+                other.put(
+                    section.name(),
+                    money.damagesOf(section, plan).minus(money.bonusOf(section, plan))));
+    return other;
+  }
+}

@@ -1,0 +1,292 @@
+package dayworth.engine.branching;
+
+import dayworth.engine.Flow;
+import dayworth.engine.proof.ProofChecker;
+import dayworth.engine.proof.Verdict;
+import dayworth.engine.stepping.Descent;
+import dayworth.network.Activity;
+import dayworth.network.Network;
+import dayworth.network.Plan;
+import dayworth.network.Span;
+import dayworth.value.Money;
+import dayworth.value.MoneySum;
+import java.util.ArrayDeque;
+import java.util.ArrayList;
+import java.util.Deque;
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.IntStream;
+
+/**
+ * The cheapest plan for each of many finishes where some money is not convex.
+ *
+ * <p><b>Problem.</b> Direct cost and spans, which are convex in the times of events, plus charges,
+ * which need not be.
+ *
+ * <p><b>Method.</b> Branch and bound (Land and Doig 1960, "An automatic method of solving discrete
+ * programming problems") on when the charges' moments come, for all finishes at once. In a branch
+ * each charge is replaced by its {@link Envelope}; the convex problem is solved by {@link Descent}
+ * for the finishes that are still open, and its bound is rechecked from the flow ({@link
+ * ProofChecker}). Its plans are possible, so their true cost bounds the answer from above. A finish
+ * for which the branch's bound is no lower than the best plan's cost is closed in it; for the rest
+ * the branch is split where an envelope is furthest from its charge (Falk and Soland 1969, "An
+ * algorithm for separable nonconvex programming problems").
+ *
+ * <p><b>Invariant.</b> The windows of a branch's halves make up its own, so every plan lies in a
+ * closed branch or in an open one; the bound of a finish is the least of both. <b>Limits.</b> The
+ * number of convex problems is bounded; a finish that is still open then keeps a gap.
+ */
+public final class Branching {
+
+  /** Finishes for which a branch is still to be solved, and what it costs there at least. */
+  private record Open(Branch branch, List<Integer> rows, List<Money> bounds) {}
+
+  /** The best that is known of one finish. */
+  private static final class Best {
+    private Optional<Plan> plan = Optional.empty();
+    private Money cost = Money.ZERO;
+    private Branch branch;
+
+    /** What branches that were not gone on with cost at least; empty if there are none. */
+    private Optional<Money> leftOpen = Optional.empty();
+
+    private Best(Branch branch) {
+      this.branch = branch;
+    }
+
+    private boolean beats(Money bound) {
+      return plan.isPresent() && cost.minus(bound).compareTo(Point.ROUNDING) < 0;
+    }
+
+    private void offer(Plan other, Money otherCost, Branch from) {
+      if (plan.isEmpty() || otherCost.compareTo(cost) < 0) {
+        plan = Optional.of(other);
+        cost = otherCost;
+        branch = from;
+      }
+    }
+  }
+
+  /** A bound did not stand up to its recheck. */
+  public static final class BoundRefuted extends RuntimeException {
+
+    private static final long serialVersionUID = 1;
+
+    private final long duration;
+
+    BoundRefuted(long duration, String why) {
+      super(why);
+      this.duration = duration;
+    }
+
+    /** The finish that was to be bounded, ticks. */
+    public long duration() {
+      return duration;
+    }
+  }
+
+  private final Network network;
+  private final List<Charge> charges;
+  private final long[] durations;
+  private final Money fence;
+  private final List<Best> best = new ArrayList<>();
+  private final Deque<Open> open = new ArrayDeque<>();
+
+  /** The branches that were not split further, where they are wanted. */
+  private final Optional<List<Leaf>> leaves;
+
+  private long solved;
+
+  private Branching(
+      Network network, List<Charge> charges, long[] durations, Optional<List<Leaf>> leaves) {
+    this.network = network;
+    this.charges = charges;
+    this.durations = durations;
+    this.leaves = leaves;
+    this.fence = fence(network, charges, durations[0]);
+    Branch whole = Branch.whole(charges, durations[0]);
+    List<Integer> rows = IntStream.range(0, durations.length).boxed().toList();
+    rows.forEach(row -> best.add(new Best(whole)));
+    open.add(new Open(whole, rows, rows.stream().map(row -> Money.ZERO).toList()));
+  }
+
+  /**
+   * Solves every finish.
+   *
+   * @param durations ticks, from long to short; for each some plan must exist
+   * @param most how many convex problems are solved at most, beyond one for each finish
+   * @return one point for each duration
+   * @throws BoundRefuted if a bound does not stand up to its recheck
+   */
+  public static List<Point> solve(
+      Network network, List<Charge> charges, long[] durations, long most) {
+    Branching branching = new Branching(network, charges, durations, Optional.empty());
+    branching.run(most + durations.length);
+    return branching.points();
+  }
+
+  /**
+   * Solves one finish and keeps what proves it: together the leaves hold every plan, and none costs
+   * less in any of them than its bound.
+   *
+   * @return empty if the limit is reached before it is proved
+   * @throws BoundRefuted if a bound does not stand up to its recheck
+   */
+  public static Optional<Proof> prove(
+      Network network, List<Charge> charges, long duration, long most) {
+    List<Leaf> leaves = new ArrayList<>();
+    Branching branching =
+        new Branching(network, charges, new long[] {duration}, Optional.of(leaves));
+    branching.run(most);
+    Point point = branching.points().get(0);
+    return branching.open.isEmpty() ? Optional.of(new Proof(point, leaves)) : Optional.empty();
+  }
+
+  /**
+   * A finish with the branches that prove its plan.
+   *
+   * @param leaves they hold every plan
+   */
+  public record Proof(Point point, List<Leaf> leaves) {
+
+    public Proof {
+      leaves = List.copyOf(leaves);
+    }
+  }
+
+  /**
+   * A branch that was not split further.
+   *
+   * @param plan the cheapest of its convex problem
+   * @param flow proves that
+   */
+  public record Leaf(Relaxation relaxation, Plan plan, Flow flow) {}
+
+  /** The exact cost of a plan that says when activities start, charges included. */
+  public static Money cost(Network network, List<Charge> charges, Plan plan) {
+    MoneySum sum = new MoneySum().add(plan.cost(network));
+    charges.forEach(charge -> sum.add(at(charge, plan)));
+    return sum.total();
+  }
+
+  /**
+   * Money per tick that makes leaving a window dearer than anything within: all that compression,
+   * spans and charges can come to.
+   */
+  public static Money fence(Network network, List<Charge> charges, long longest) {
+    MoneySum sum = new MoneySum().add(Money.of(1));
+    for (Activity activity : network.activities()) {
+      Money extra = activity.crashExtra();
+      sum.add(extra.max(extra.negate()));
+    }
+    for (Span span : network.spans()) {
+      sum.add(span.rate(), longest + Math.abs(span.free()), 1);
+    }
+    for (Charge charge : charges) {
+      sum.add(extreme(charge, longest, true).minus(extreme(charge, longest, false)));
+    }
+    return sum.total();
+  }
+
+  private static Money extreme(Charge charge, long longest, boolean dearest) {
+    long[] times = new long[charge.moments().size()];
+    for (int k = 0; k < times.length; k++) {
+      times[k] = charge.rises(k) == dearest ? longest : 0;
+    }
+    return charge.at(times);
+  }
+
+  static Money at(Charge charge, Plan plan) {
+    return charge.at(charge.moments().stream().mapToLong(plan::time).toArray());
+  }
+
+  private void run(long most) {
+    while (!open.isEmpty() && solved < most) {
+      goOn(open.remove());
+    }
+    open.forEach(this::leave);
+  }
+
+  /** Solves a branch for the finishes that are open in it, and splits it for those that remain. */
+  private void goOn(Open node) {
+    Relaxation relaxation = node.branch().relaxation(network, charges, fence);
+    Descent descent = new Descent(relaxation.network());
+    ProofChecker checker = new ProofChecker(relaxation.network());
+    List<Integer> rows = new ArrayList<>();
+    List<Money> bounds = new ArrayList<>();
+    Optional<Branch.Split> split = Optional.empty();
+    Money widest = Money.ZERO;
+    Plan plan = Plan.allNormal(network);
+    for (int k = 0; k < node.rows().size(); k++) {
+      int row = node.rows().get(k);
+      if (leaves.isEmpty() && best.get(row).beats(node.bounds().get(k))) {
+        continue;
+      }
+      plan = solve(descent, checker, relaxation.network(), durations[row], plan);
+      best.get(row).offer(plan, cost(network, charges, plan), node.branch());
+      Money bound = relaxation.cost(plan);
+      if (leaves.isPresent() && best.get(row).beats(bound)) {
+        leaves.get().add(new Leaf(relaxation, plan, descent.flow()));
+      }
+      if (!best.get(row).beats(bound)) {
+        rows.add(row);
+        bounds.add(bound);
+        for (int j = 0; j < charges.size(); j++) {
+          Money gap = at(charges.get(j), plan).minus(relaxation.chargeAt(j, plan));
+          if (gap.compareTo(widest) > 0) {
+            widest = gap;
+            split = node.branch().splitFor(j, charges.get(j), plan);
+          }
+        }
+      }
+    }
+    if (rows.isEmpty()) {
+      return;
+    }
+    if (split.isEmpty()) {
+      throw new IllegalStateException("a branch has a gap and nothing to split");
+    }
+    for (Branch half : node.branch().halves(split.get())) {
+      open.add(new Open(half, rows, bounds));
+    }
+  }
+
+  private Plan solve(
+      Descent descent, ProofChecker checker, Network relaxed, long duration, Plan before) {
+    solved++;
+    Plan plan =
+        descent
+            .within(duration, before)
+            .orElseThrow(() -> new IllegalStateException("no plan within " + duration));
+    if (checker.check(plan, duration, descent.flow(), plan.cost(relaxed))
+        instanceof Verdict.Refuted refuted) {
+      throw new BoundRefuted(duration, refuted.where() + ": " + refuted.why());
+    }
+    return plan;
+  }
+
+  private void leave(Open node) {
+    for (int k = 0; k < node.rows().size(); k++) {
+      Best of = best.get(node.rows().get(k));
+      Money bound = node.bounds().get(k);
+      if (!of.beats(bound)) {
+        of.leftOpen = Optional.of(of.leftOpen.map(bound::min).orElse(bound));
+      }
+    }
+  }
+
+  /** A plan for a shorter finish serves a longer one too. */
+  private List<Point> points() {
+    List<Point> points = new ArrayList<>();
+    for (int row = durations.length - 1; row >= 0; row--) {
+      Best of = best.get(row);
+      if (row < durations.length - 1) {
+        Best shorter = best.get(row + 1);
+        of.offer(shorter.plan.orElseThrow(), shorter.cost, shorter.branch);
+      }
+      Money bound = of.leftOpen.map(of.cost::min).orElse(of.cost);
+      points.add(0, new Point(durations[row], of.plan.orElseThrow(), of.cost, bound, of.branch));
+    }
+    return points;
+  }
+}
