@@ -47,9 +47,16 @@ public record BestByRate(Money now, List<Range> ranges) {
     return ranges.stream().filter(range -> range.holds(number)).findFirst().orElseThrow();
   }
 
-  /** By the damages rate, whatever it is per. */
+  /**
+   * By the damages rate, whatever it is per.
+   *
+   * @throws IllegalArgumentException if the case has none: then no row stands where grace ends
+   */
   static BestByRate byDamages(CurveAnswer answer) {
     Terms terms = answer.of().terms();
+    if (terms.damages().rate().isZero()) {
+      throw new IllegalArgumentException("the case has no damages rate");
+    }
     Lines lines = new Lines();
     for (Finish row : answer.rows()) {
       Money without = total(row).minus(terms.at(row.duration()).damages());

@@ -77,8 +77,10 @@ final class HowFar {
     columns.add("least then", true, totals.stream().map(look::text).toList());
     addFinishes(columns, best);
     columns.lines().forEach(line -> lines.add(INDENT + line));
-    if (!of.network().spans().isEmpty()) {
-      prose("Plans are taken as they are; with running cost another plan may be cheaper then.");
+    if (!of.momentMoney().isNone()) {
+      prose(
+          "Each finish keeps its plan here; where running cost or sections weigh in, another plan may"
+              + " be cheaper then.");
     }
   }
 

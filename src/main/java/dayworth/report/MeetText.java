@@ -121,7 +121,7 @@ public final class MeetText {
   }
 
   private String cost() {
-    return of.network().spans().isEmpty() ? " direct cost" : " direct and running cost";
+    return of.momentMoney().running().isEmpty() ? " direct cost" : " direct and running cost";
   }
 
   private String savedText() {
