@@ -153,9 +153,8 @@ public final class CurveQuestion {
     List<Finish> finishes = new ArrayList<>();
     Iterator<Plan> plans = cheapest.plans(durations).iterator();
     for (long duration : durations) {
-      Plan plan = plans.next();
-      finishes.add(
-          finish(duration, plan.directCost(network), money.runningOf(plan), other(duration, plan)));
+      Finish counted = PlanCost.of(of, plans.next(), duration);
+      finishes.add(finish(duration, counted.direct(), counted.running(), counted.other()));
     }
     return finishes;
   }
@@ -164,11 +163,6 @@ public final class CurveQuestion {
     return money.isNone()
         ? durations.stream().map(duration -> Stepping.planWithin(network, duration)).toList()
         : cheapest.plans(durations);
-  }
-
-  private FinishCost other(long duration, Plan plan) {
-    FinishCost whole = terms.at(duration);
-    return money.isNone() ? whole : whole.plus(money.damagesOf(plan), money.bonusOf(plan));
   }
 
   private Finish finish(long duration, Money direct, Money running, FinishCost other) {
@@ -185,16 +179,8 @@ public final class CurveQuestion {
 
   /** What given durations cost when all is done as early as that allows. */
   private Finish of(Plan durations) {
-    Plan plan = GivenDurations.schedule(of, durations);
     long finish = Timing.earliest(network, durations).finish();
-    Money running = money.isNone() ? Money.ZERO : money.runningOf(plan);
-    return new Finish(
-        finish,
-        durations.directCost(network),
-        running,
-        other(finish, plan),
-        Optional.empty(),
-        false);
+    return PlanCost.of(of, GivenDurations.schedule(of, durations), finish);
   }
 
   private List<StepFacts> steps() {

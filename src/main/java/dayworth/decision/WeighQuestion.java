@@ -58,6 +58,7 @@ public final class WeighQuestion {
         .atContract()
         .filter(finish -> finish.duration() < curve.asPlanned().duration())
         .ifPresent(finish -> choices.add(new Choice(Choice.Kind.CONTRACT_FINISH, finish)));
+    choices.addAll(SectionChoices.of(curve));
     curve.rows().stream()
         .filter(row -> row.other().bonus().signum() > 0)
         .max(

@@ -1,5 +1,6 @@
 package dayworth.report;
 
+import dayworth.contract.Section;
 import dayworth.decision.Case;
 import dayworth.decision.Choice;
 import dayworth.decision.Finish;
@@ -56,8 +57,7 @@ final class ChoiceTable {
     columns.add("", false, names);
     for (int c = 0; c < shown.size(); c++) {
       int choice = c;
-      columns.add(
-          header(shown.get(c).kind()), true, cells.stream().map(row -> row.get(choice)).toList());
+      columns.add(header(shown.get(c)), true, cells.stream().map(row -> row.get(choice)).toList());
     }
     List<String> lines = new ArrayList<>();
     columns.lines().forEach(line -> lines.add(Wording.INDENT + line));
@@ -65,6 +65,8 @@ final class ChoiceTable {
       String left = "No room for: " + String.join(", ", columns.dropped());
       lines.addAll(Wording.wrap(left, Wording.INDENT, width));
     }
+    sections()
+        .forEach(line -> lines.addAll(Wording.wrap(Wording.safe(line), Wording.INDENT, width)));
     shared.forEach(line -> lines.addAll(Wording.wrap(line, Wording.INDENT, width)));
     FinishTable.cannotBeMet(weighing.curve())
         .ifPresent(line -> lines.addAll(Wording.wrap(line, Wording.INDENT, width)));
@@ -86,7 +88,7 @@ final class ChoiceTable {
     for (Choice other : shown) {
       if (other.finish().duration() == choice.finish().duration()
           && other.finish().total().compareTo(choice.finish().total()) == 0) {
-        String also = spoken(other.kind()) + " is also " + spoken(choice.kind()) + ".";
+        String also = spoken(other) + " is also " + spoken(choice) + ".";
         shared.add(also.substring(0, 1).toUpperCase(Locale.ROOT) + also.substring(1));
         return;
       }
@@ -141,8 +143,9 @@ final class ChoiceTable {
     return planned.direct().cents().add(planned.other().fixed().cents());
   }
 
-  private static String header(Choice.Kind kind) {
-    return switch (kind) {
+  private String header(Choice choice) {
+    return switch (choice.kind()) {
+      case SECTION_DATE -> "section " + (sectionNames().indexOf(choice.section()) + 1);
       case AS_IT_STANDS -> "carry on";
       case LEAST_TOTAL -> "least total";
       case CONTRACT_FINISH -> "contract";
@@ -151,8 +154,22 @@ final class ChoiceTable {
     };
   }
 
-  private static String spoken(Choice.Kind kind) {
-    return switch (kind) {
+  private List<String> sectionNames() {
+    return of.momentMoney().sections().stream().map(Section::name).toList();
+  }
+
+  /** Which section a column is for. */
+  private List<String> sections() {
+    return shown.stream()
+        .filter(choice -> choice.kind() == Choice.Kind.SECTION_DATE)
+        .map(choice -> header(choice) + " on time: " + choice.section() + ".")
+        .map(line -> line.substring(0, 1).toUpperCase(Locale.ROOT) + line.substring(1))
+        .toList();
+  }
+
+  private static String spoken(Choice choice) {
+    return switch (choice.kind()) {
+      case SECTION_DATE -> "the cheapest with " + choice.section() + " on time";
       case AS_IT_STANDS -> "carrying on";
       case LEAST_TOTAL -> "the least total";
       case CONTRACT_FINISH -> "the contract finish";

@@ -72,7 +72,7 @@ final class WeighJson {
   }
 
   private void choice(JsonText json, Weighing weighing, Choice choice) throws IOException {
-    json.text("choice", WeighTable.name(choice.kind()));
+    json.text("choice", WeighTable.name(choice));
     new CurveJson(weighing.curve()).finish(json, choice.finish());
     json.number("saved_against_as_it_stands", weighing.saved(choice.finish()));
   }

@@ -51,7 +51,7 @@ public final class WeighTable {
     BigDecimal time = finish.other().timeRelated().cents();
     csv.row(
         extension,
-        name(choice.kind()),
+        name(choice),
         weighing.curve().of().network().scale().text(finish.duration()),
         dates.finish(finish.duration()),
         late.units(finish).map(BigDecimal::toPlainString).orElse(CsvText.BLANK),
@@ -70,8 +70,9 @@ public final class WeighTable {
   }
 
   /** A kind of choice as files name it. */
-  static String name(Choice.Kind kind) {
-    return kind.name().toLowerCase(Locale.ROOT);
+  static String name(Choice choice) {
+    String kind = choice.kind().name().toLowerCase(Locale.ROOT);
+    return choice.section().isEmpty() ? kind : kind + ": " + choice.section();
   }
 
   private static String text(BigDecimal amount) {

@@ -102,6 +102,12 @@ public final class Stepping {
     return recorder.planHere();
   }
 
+  /** The earliest that any plan can finish an activity, ticks. */
+  public static long earliestFinish(Network network, int activity) {
+    return new Reach(network, network.activities().stream().mapToLong(Activity::crash).toArray())
+        .finishFromBegin(activity);
+  }
+
   /** Breakpoints and prices alone, without plans: what a benchmark of the method measures. */
   public static Prices prices(Network network, SlopeScale scale) {
     EventNetwork events = EventNetwork.of(network, scale);

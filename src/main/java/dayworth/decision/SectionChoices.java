@@ -1,0 +1,100 @@
+package dayworth.decision;
+
+import dayworth.contract.Section;
+import dayworth.engine.branching.Branching;
+import dayworth.engine.branching.Charge;
+import dayworth.engine.stepping.Stepping;
+import dayworth.network.Moment;
+import dayworth.network.Network;
+import dayworth.network.Plan;
+import dayworth.network.Span;
+import dayworth.value.Money;
+import java.math.BigDecimal;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * What it costs in all to have a section on time that the least total leaves late.
+ *
+ * <p>A finish with the section on time costs at least what the same finish costs without that. So
+ * the finishes are tried from the cheapest on, until the next one costs more without the section
+ * than the best one found costs with it.
+ */
+final class SectionChoices {
+
+  /** Convex problems for each finish that is tried. */
+  private static final long PROBLEMS = 2_000;
+
+  private final Case of;
+  private final List<Finish> cheapestFirst;
+
+  private SectionChoices(CurveAnswer curve) {
+    this.of = curve.of();
+    this.cheapestFirst = curve.rows().stream().sorted(Comparator.comparing(Finish::total)).toList();
+  }
+
+  /**
+   * A choice for each section that can be had on time and is late at the least total.
+   *
+   * @param curve its plan asked for is that of the least total
+   */
+  static List<Choice> of(CurveAnswer curve) {
+    SectionChoices choices = new SectionChoices(curve);
+    List<Choice> found = new ArrayList<>();
+    for (Section section : curve.of().momentMoney().sections()) {
+      if (section.done().isEmpty()
+          && !isOnTime(section, curve.asked().timing().plan())
+          && choices.canBeOnTime(section)) {
+        choices
+            .onTime(section)
+            .ifPresent(
+                finish -> found.add(new Choice(Choice.Kind.SECTION_DATE, finish, section.name())));
+      }
+    }
+    return found;
+  }
+
+  private static boolean isOnTime(Section section, Plan plan) {
+    return plan.time(Moment.finishOf(section.activity())) <= section.due().ticks();
+  }
+
+  private boolean canBeOnTime(Section section) {
+    return Stepping.earliestFinish(of.network(), section.activity()) <= section.due().ticks();
+  }
+
+  private Optional<Finish> onTime(Section section) {
+    Optional<Finish> best = Optional.empty();
+    for (Finish row : cheapestFirst) {
+      BigDecimal least = row.total();
+      if (best.filter(found -> found.total().compareTo(least) <= 0).isPresent()) {
+        return best;
+      }
+      Plan plan = plan(section, row);
+      Finish with = PlanCost.of(of, plan, row.duration());
+      if (isOnTime(section, plan)
+          && best.filter(found -> found.total().compareTo(with.total()) <= 0).isEmpty()) {
+        best = Optional.of(with);
+      }
+    }
+    return best;
+  }
+
+  /** The cheapest plan of a finish where each tick that the section is late outweighs all else. */
+  private Plan plan(Section section, Finish row) {
+    Network priced = of.pricedNetwork();
+    List<Charge> charges = of.momentMoney().charges();
+    Money fence = Branching.fence(priced, charges, row.duration());
+    List<Span> spans = new ArrayList<>(priced.spans());
+    spans.add(
+        new Span(
+            section.name(),
+            Moment.PROJECT_START,
+            Moment.finishOf(section.activity()),
+            section.due().ticks(),
+            fence));
+    Network fenced = new Network(priced.scale(), priced.activities(), priced.links(), spans);
+    return Branching.solve(fenced, charges, new long[] {row.duration()}, PROBLEMS).get(0).plan();
+  }
+}
