@@ -13,6 +13,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
 import java.util.TreeSet;
+import java.util.function.Function;
 
 /**
  * The best finish for every extension of time in whole working days, from none on.
@@ -29,6 +30,9 @@ final class ExtensionSweep {
   private final Terms terms;
   private final Extension claimed;
 
+  /** Whether all other money is straight between two rows; if not, rows alone are looked at. */
+  private final boolean isStraight;
+
   /** The rows of the curve by their duration. */
   private final TreeMap<Long, Finish> rows = new TreeMap<>();
 
@@ -37,6 +41,7 @@ final class ExtensionSweep {
   private ExtensionSweep(CurveAnswer answer, Extension claimed) {
     this.terms = answer.of().terms();
     this.claimed = claimed;
+    this.isStraight = answer.of().momentMoney().charges().isEmpty();
     answer.rows().forEach(row -> rows.put(row.duration(), row));
   }
 
@@ -67,7 +72,9 @@ final class ExtensionSweep {
   /** The longest of the finishes that cost least. */
   private Finish best(Terms moved) {
     TreeSet<Long> durations = new TreeSet<>(rows.keySet());
-    durations.addAll(moved.bends().subSet(rows.firstKey(), rows.lastKey()));
+    if (isStraight) {
+      durations.addAll(moved.bends().subSet(rows.firstKey(), rows.lastKey()));
+    }
     long best = rows.lastKey();
     Optional<BigDecimal> least = Optional.empty();
     for (long duration : durations.descendingSet()) {
@@ -100,14 +107,27 @@ final class ExtensionSweep {
     if (span == 0) {
       return sooner;
     }
+    FinishCost here = terms.at(duration);
     Money share = Money.of(duration - sooner.duration()).dividedBy(span);
     return new Finish(
         duration,
         between(sooner.direct(), later.direct(), share),
         between(sooner.running(), later.running(), share),
-        terms.at(duration),
+        new FinishCost(
+            here.timeRelated(),
+            here.fixed(),
+            here.damages().plus(ofSections(sooner, later, share, FinishCost::damages)),
+            here.bonus().plus(ofSections(sooner, later, share, FinishCost::bonus))),
         later.pricePerUnit(),
         false);
+  }
+
+  private Money ofSections(
+      Finish sooner, Finish later, Money share, Function<FinishCost, Money> kind) {
+    return between(
+        kind.apply(sooner.other()).minus(kind.apply(terms.at(sooner.duration()))),
+        kind.apply(later.other()).minus(kind.apply(terms.at(later.duration()))),
+        share);
   }
 
   private static Money between(Money sooner, Money later, Money share) {

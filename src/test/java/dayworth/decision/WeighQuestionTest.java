@@ -7,7 +7,9 @@ import dayworth.contract.Bonus;
 import dayworth.contract.Damages;
 import dayworth.contract.Due;
 import dayworth.contract.Extension;
+import dayworth.contract.MomentMoney;
 import dayworth.contract.Per;
+import dayworth.contract.Section;
 import dayworth.contract.Terms;
 import dayworth.contract.TimeRelated;
 import dayworth.network.Activity;
@@ -174,5 +176,54 @@ class WeighQuestionTest {
     // 72 - 65
     assertEquals(new BigDecimal("7.00"), claimed.saved(claimed.best()));
     assertTrue(ask(5, 7, damages(22, 0), Bonus.NONE, 0).byExtension().isEmpty());
+  }
+
+  /**
+   * In tenths of a day, A's section due on day 5 at 3 a day, time 5, damages 22 after day 7.5.
+   * Extended by 2, to 9.5: 10 days cost 50 + 3 + 11 = 64, 9.5 days 10 + 47.5 + 1.5 = 59, 9 days 20
+   * + 45 = 65. By 1, to 8.5: 8.5 days 30 + 42.5 = 72.5, 9 days 20 + 45 + 11 = 76. By 0: 8 days 40 +
+   * 40 + 11 = 91, 7.5 days 55 + 37.5 = 92.5. By 3 nothing is late: 10 days 53, 9.5 days 59.
+   */
+  @Test
+  void betweenTwoRowsSectionsCountToo() {
+    TimeScale tenths = new TimeScale(1);
+    Network network =
+        new Network(
+            tenths,
+            List.of(
+                Activity.compressible("A", 60, Money.of(100), 40, Money.of(140)),
+                Activity.compressible("B", 40, Money.of(50), 30, Money.of(80))),
+            List.of(Link.finishToStart(0, 1)));
+    Terms terms =
+        new Terms(
+            tenths,
+            Optional.empty(),
+            new TimeRelated(Money.of(5), Per.UNIT),
+            Money.ZERO,
+            Optional.of(Due.at(75)),
+            damages(22, 0),
+            Bonus.NONE,
+            Optional.of(new Extension(Due.at(95), new DayLength(10, 1))));
+    Section deck = new Section("deck", 0, Due.at(50), damages(3, 0), Bonus.NONE);
+    MomentMoney money = new MomentMoney(tenths, Optional.empty(), List.of(deck), List.of());
+    Case of =
+        new Case(
+            "deck",
+            "",
+            "",
+            TimeUnit.DAY,
+            network,
+            terms,
+            money,
+            Optional.empty(),
+            List.of(),
+            List.of());
+    WeighAnswer answer = WeighQuestion.ask(of, Watcher.NONE);
+    assertEquals(
+        List.of("80 241.00", "85 222.50", "95 209.00", "100 203.00"),
+        answer.byExtension().stream()
+            .map(e -> e.best().duration() + " " + e.best().total())
+            .toList());
+    assertEquals(95, answer.claimed().orElseThrow().best().duration());
   }
 }
