@@ -4,12 +4,9 @@ import dayworth.contract.MomentMoney;
 import dayworth.decision.Case;
 import dayworth.decision.Progress;
 import dayworth.decision.WorkToGo;
-import dayworth.engine.stepping.Stepping;
 import dayworth.network.Activity;
 import dayworth.network.Link;
 import dayworth.network.Network;
-import dayworth.network.Plan;
-import dayworth.network.Timing;
 import dayworth.value.Money;
 import dayworth.value.TimeScale;
 import java.math.BigDecimal;
@@ -90,8 +87,8 @@ public final class CaseReader {
     Optional<Progress> progress = CaseProgress.of(activities, rows, terms, times);
     WorkToGo work = WorkToGo.of(planned, progress);
     MomentMoney money = CaseMoney.of(sections, running, terms, times, progress);
-    checkSize(work.network(), money, terms, times);
-    SectionDoubts.report(sections, running, terms, times, planned, findings);
+    CaseSize.check(work.network(), money, terms, times, sections, findings);
+    SectionDoubts.report(sections, running, rows, terms, times, planned, findings);
     checkSomethingIsToGo(progress);
     Doubts.report(
         new ReadCase(
@@ -100,6 +97,7 @@ public final class CaseReader {
             work.links().stream().map(links::get).toList(),
             links,
             rows,
+            sections,
             terms,
             times.calendar()),
         findings);
@@ -114,35 +112,6 @@ public final class CaseReader {
         progress,
         findings.warnings(),
         folder.inputs());
-  }
-
-  private void checkSize(Network network, MomentMoney money, TermsTable terms, CaseCalendar times) {
-    Network priced =
-        new Network(network.scale(), network.activities(), network.links(), money.spans());
-    if (Stepping.scaleFor(priced).isEmpty()) {
-      findings.problem(
-          Place.whole(ActivityTable.FILE)
-              .notice("the costs are too far apart to be exact", "", "smaller or rounder costs"));
-    }
-    if (times.isBeyondDates(Timing.earliest(network, Plan.allNormal(network)).finish())) {
-      findings.problem(
-          terms
-              .at("start_date")
-              .notice("the project ends after the year 9999", "", "shorter durations"));
-    }
-    terms
-        .moment("contract_finish")
-        .filter(moment -> times.isBeyondDates(times.due(moment).ticks()))
-        .ifPresent(
-            moment ->
-                findings.problem(
-                    terms
-                        .at("contract_finish")
-                        .notice("after the year 9999", "", "an earlier finish")));
-    terms
-        .moment("contract_finish")
-        .map(times::due)
-        .ifPresent(due -> ExtensionRule.check(due, terms, times, findings));
   }
 
   private void checkSomethingIsToGo(Optional<Progress> progress) {

@@ -28,7 +28,10 @@ final class IdleTerms {
       warn(terms, "extension", "neither damages nor bonus depend on the contract finish", findings);
     }
     String part = "damages_part_week";
-    if (terms.isGiven(part) && terms.per("damages_per").orElse(Per.UNIT) != Per.WEEK) {
+    boolean byWeek =
+        terms.per("damages_per").orElse(Per.UNIT) == Per.WEEK
+            || read.sections().stream().anyMatch(section -> section.damagesPer() == Per.WEEK);
+    if (terms.isGiven(part) && !byWeek) {
       warn(terms, part, "it is for damages_per week", findings);
     }
   }

@@ -14,6 +14,7 @@ import java.util.Optional;
  * @param links those of the network, in its order
  * @param logic all links, also those of what has happened
  * @param progress the rows of the status
+ * @param sections the rows of sections.csv
  * @param calendar empty where there is no start_date
  */
 record ReadCase(
@@ -22,6 +23,7 @@ record ReadCase(
     List<LinkRow> links,
     List<LinkRow> logic,
     List<ProgressRow> progress,
+    List<SectionRow> sections,
     TermsTable terms,
     Optional<WorkingCalendar> calendar) {
 

@@ -15,12 +15,15 @@ final class SectionDoubts {
   static void report(
       List<SectionRow> sections,
       List<RunningRow> running,
+      List<ProgressRow> progress,
       TermsTable terms,
       CaseCalendar times,
       Network network,
       Findings findings) {
     sections.forEach(row -> warnOfTwoCharges(row, terms, times, findings));
-    running.forEach(row -> warnOfNoChain(row, network, findings));
+    running.stream()
+        .filter(row -> !hasBegun(row, progress))
+        .forEach(row -> warnOfNoChain(row, network, findings));
   }
 
   /** A day of lateness would be charged twice. */
@@ -41,6 +44,12 @@ final class SectionDoubts {
                             "due with the whole, and both charge damages",
                             "",
                             "one of the two, unless the contract says both")));
+  }
+
+  /** It then runs on whatever leads where. */
+  private static boolean hasBegun(RunningRow row, List<ProgressRow> progress) {
+    return progress.stream()
+        .anyMatch(status -> status.activity() == row.from() && status.started().given());
   }
 
   private static void warnOfNoChain(RunningRow row, Network network, Findings findings) {

@@ -112,11 +112,15 @@ final class SectionTable {
     require(row, row.damagesCap(), "damages_cap", row.damagesRate(), "damages_rate");
     require(row, row.bonusCap(), "bonus_cap", row.bonusRate(), "bonus_rate");
     require(row, row.bonusCapUnits(), "bonus_cap_units", row.bonusRate(), "bonus_rate");
-    if (!row.damagesRate().given() && !row.bonusRate().given()) {
+    if (isNothing(row.damagesRate()) && isNothing(row.bonusRate())) {
       findings.warning(
           row.place("damages_rate")
-              .notice("changes nothing", "", "a damages_rate or a bonus_rate"));
+              .notice("changes nothing", "", "a damages_rate or a bonus_rate above 0"));
     }
+  }
+
+  private static boolean isNothing(Cell<BigDecimal> rate) {
+    return !rate.given() || rate.value().filter(amount -> amount.signum() == 0).isPresent();
   }
 
   private void require(

@@ -33,7 +33,10 @@ final class SectionCharge implements Charge {
     return true;
   }
 
-  /** Ends of working days, where money by the date rises, and the bends of money by the tick. */
+  /**
+   * Ends of working days, where money by the date rises, and the bends of money by the tick. A
+   * bonus limit that is reached between two ticks bends at both.
+   */
   @Override
   public long[] points(int k, Window window) {
     TreeSet<Long> points = new TreeSet<>();
@@ -41,7 +44,14 @@ final class SectionCharge implements Charge {
         .calendar()
         .ifPresent(dates -> points.addAll(dates.endsOfDays(window.least(), window.most())));
     section.damages().bends(section.due(), counting).forEach(points::add);
-    section.bonus().bends(section.due(), counting).forEach(points::add);
+    section
+        .bonus()
+        .bends(section.due(), counting)
+        .forEach(
+            bend -> {
+              points.add(bend);
+              points.add(bend + 1);
+            });
     TreeSet<Long> inside = new TreeSet<>(points.subSet(window.least(), window.most()));
     inside.add(window.least());
     inside.add(window.most());

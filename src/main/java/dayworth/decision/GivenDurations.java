@@ -1,14 +1,12 @@
 package dayworth.decision;
 
 import dayworth.contract.MomentMoney;
-import dayworth.contract.RunningCost;
 import dayworth.contract.Section;
 import dayworth.engine.branching.Branching;
 import dayworth.network.Activity;
-import dayworth.network.Moment;
+import dayworth.network.Link;
 import dayworth.network.Network;
 import dayworth.network.Plan;
-import dayworth.network.Span;
 import dayworth.network.Timing;
 import dayworth.value.Money;
 import java.util.ArrayList;
@@ -18,6 +16,9 @@ import java.util.stream.IntStream;
 /**
  * When activities start if their durations are given: the whole and each section at their earliest
  * finish, and among such plans the one with the least running cost.
+ *
+ * <p>What holds a section at its earliest finish is work after it that fills the time until the
+ * whole must be finished.
  */
 final class GivenDurations {
 
@@ -37,24 +38,27 @@ final class GivenDurations {
         new MomentMoney(
             network.scale(), of.terms().calendar(), List.of(), of.momentMoney().running());
     Timing earliest = Timing.earliest(network, durations);
-    List<Span> spans = new ArrayList<>(running.spans());
-    Money fence = fence(all.running(), earliest.finish());
-    for (Section section : all.sections()) {
-      long finish = earliest.earlyFinish(section.activity());
-      Moment moment = Moment.finishOf(section.activity());
-      spans.add(new Span(section.name(), Moment.PROJECT_START, moment, finish, fence));
+    List<Activity> fixed = new ArrayList<>();
+    for (int i = 0; i < network.size(); i++) {
+      fixed.add(lasting(network.activity(i), durations.duration(i)));
     }
-    List<Activity> fixed =
-        IntStream.range(0, network.size())
-            .mapToObj(i -> lasting(network.activity(i), durations.duration(i)))
-            .toList();
-    return Branching.solve(
-            new Network(network.scale(), fixed, network.links(), spans),
-            running.charges(),
-            new long[] {earliest.finish()},
-            PROBLEMS)
-        .get(0)
-        .plan();
+    List<Link> links = new ArrayList<>(network.links());
+    for (Section section : all.sections()) {
+      long after = earliest.finish() - earliest.earlyFinish(section.activity());
+      links.add(Link.finishToStart(section.activity(), fixed.size()));
+      fixed.add(Activity.fixed("after " + section.name(), after, Money.ZERO));
+    }
+    Plan plan =
+        Branching.solve(
+                new Network(network.scale(), fixed, links, running.spans()),
+                running.charges(),
+                new long[] {earliest.finish()},
+                PROBLEMS)
+            .get(0)
+            .plan();
+    return Plan.scheduled(
+        IntStream.range(0, network.size()).mapToLong(plan::duration).toArray(),
+        IntStream.range(0, network.size()).mapToLong(plan::start).toArray());
   }
 
   private static Activity lasting(Activity activity, long duration) {
@@ -68,14 +72,5 @@ final class GivenDurations {
         Money.ZERO,
         activity.notBefore(),
         activity.notFinishedBefore());
-  }
-
-  /** A tick of any section outweighs all running cost. */
-  private static Money fence(List<RunningCost> running, long finish) {
-    Money sum = Money.of(1);
-    for (RunningCost cost : running) {
-      sum = sum.plus(cost.rate().times(finish + 1));
-    }
-    return sum;
   }
 }

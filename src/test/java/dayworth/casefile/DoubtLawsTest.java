@@ -68,6 +68,7 @@ class DoubtLawsTest {
         links,
         links,
         List.of(),
+        List.of(),
         TermsTable.read(Optional.empty(), none),
         Optional.empty());
   }

@@ -1,5 +1,6 @@
 package dayworth.engine.branching;
 
+import dayworth.engine.stepping.Stepping;
 import dayworth.network.Network;
 import dayworth.network.Plan;
 import dayworth.value.Money;
@@ -27,14 +28,23 @@ public record Branch(List<List<Window>> windows) {
   }
 
   /**
-   * The convex problem of this branch.
+   * The convex problem of this branch. Where the slopes of its envelopes do not fit one scale, they
+   * are rounded down to what {@link SlopeGrain} allows: the envelopes stay below their charges.
    *
    * @param fence money per tick outside the windows
    */
   public Relaxation relaxation(Network network, List<Charge> charges, Money fence) {
+    Relaxation exact = relaxation(network, charges, fence, SlopeGrain.NONE);
+    return Stepping.scaleFor(exact.network()).isPresent()
+        ? exact
+        : relaxation(network, charges, fence, SlopeGrain.within(windows));
+  }
+
+  private Relaxation relaxation(
+      Network network, List<Charge> charges, Money fence, SlopeGrain grain) {
     List<List<Envelope>> envelopes = new ArrayList<>();
     for (int j = 0; j < charges.size(); j++) {
-      envelopes.add(Envelope.of(charges.get(j), windows.get(j), fence));
+      envelopes.add(Envelope.of(charges.get(j), windows.get(j), fence, grain));
     }
     return Relaxation.of(network, envelopes);
   }

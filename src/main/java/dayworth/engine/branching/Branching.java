@@ -4,12 +4,15 @@ import dayworth.engine.Flow;
 import dayworth.engine.proof.ProofChecker;
 import dayworth.engine.proof.Verdict;
 import dayworth.engine.stepping.Descent;
+import dayworth.engine.stepping.Stepping;
 import dayworth.network.Activity;
+import dayworth.network.Moment;
 import dayworth.network.Network;
 import dayworth.network.Plan;
 import dayworth.network.Span;
 import dayworth.value.Money;
 import dayworth.value.MoneySum;
+import java.math.RoundingMode;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
 import java.util.Deque;
@@ -170,8 +173,34 @@ public final class Branching {
   }
 
   /**
+   * Whether every branch has a scale for its slopes; otherwise the amounts are too large to be
+   * exact.
+   *
+   * @param longest ticks; no duration that is asked for may be longer
+   */
+  public static boolean fits(Network network, List<Charge> charges, long longest) {
+    if (charges.isEmpty()) {
+      return Stepping.scaleFor(network).isPresent();
+    }
+    Money fence = fence(network, charges, longest);
+    Branch whole = Branch.whole(charges, longest);
+    SlopeGrain grain = SlopeGrain.within(whole.windows());
+    Money steepest = fence.plus(Money.of(1).dividedBy(grain.perUnit()));
+    List<Span> spans = new ArrayList<>(network.spans());
+    for (Charge charge : charges) {
+      for (Moment moment : charge.moments()) {
+        spans.add(new Span(charge.name(), Moment.PROJECT_START, moment, longest, steepest));
+      }
+    }
+    Network fenced = new Network(network.scale(), network.activities(), network.links(), spans);
+    return Stepping.scaleFor(fenced)
+        .filter(scale -> scale.perUnit() >= grain.perUnit())
+        .isPresent();
+  }
+
+  /**
    * Money per tick that makes leaving a window dearer than anything within: all that compression,
-   * spans and charges can come to.
+   * spans and charges can come to, in whole units.
    */
   public static Money fence(Network network, List<Charge> charges, long longest) {
     MoneySum sum = new MoneySum().add(Money.of(1));
@@ -185,7 +214,7 @@ public final class Branching {
     for (Charge charge : charges) {
       sum.add(extreme(charge, longest, true).minus(extreme(charge, longest, false)));
     }
-    return sum.total();
+    return Money.of(sum.total().rounded(0, RoundingMode.CEILING));
   }
 
   private static Money extreme(Charge charge, long longest, boolean dearest) {

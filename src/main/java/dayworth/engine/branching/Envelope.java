@@ -28,8 +28,9 @@ public record Envelope(Money fixed, List<Span> spans) {
    * The envelopes of a charge's parts.
    *
    * @param fence money per tick beyond the dear side, above every slope within
+   * @param grain what slopes within are rounded down to
    */
-  static List<Envelope> of(Charge charge, List<Window> windows, Money fence) {
+  static List<Envelope> of(Charge charge, List<Window> windows, Money fence, SlopeGrain grain) {
     List<Charge.Part> parts = charge.within(windows);
     List<Envelope> envelopes = new ArrayList<>();
     for (int k = 0; k < parts.size(); k++) {
@@ -37,7 +38,8 @@ public record Envelope(Money fixed, List<Span> spans) {
       Moment moment = charge.moments().get(k);
       envelopes.add(
           new Envelope(
-              hull.get(0).money(), spans(hull, moment, charge.rises(k), fence, charge.name())));
+              hull.get(0).money(),
+              spans(hull, moment, charge.rises(k), slopes(hull, fence, grain), charge.name())));
     }
     return envelopes;
   }
@@ -63,17 +65,26 @@ public record Envelope(Money fixed, List<Span> spans) {
     return hull;
   }
 
+  /** The slope from each corner on. */
+  private static List<Money> slopes(List<Corner> hull, Money fence, SlopeGrain grain) {
+    List<Money> slopes = new ArrayList<>();
+    for (int i = 0; i + 1 < hull.size(); i++) {
+      slopes.add(grain.roundedDown(slope(hull.get(i), hull.get(i + 1))));
+    }
+    slopes.add(fence);
+    return slopes;
+  }
+
   private static List<Span> spans(
-      List<Corner> hull, Moment moment, boolean rises, Money fence, String name) {
+      List<Corner> hull, Moment moment, boolean rises, List<Money> slopes, String name) {
     List<Span> spans = new ArrayList<>();
     Money slope = Money.ZERO;
     for (int i = 0; i < hull.size(); i++) {
-      Money steeper = i + 1 < hull.size() ? slope(hull.get(i), hull.get(i + 1)) : fence;
-      Money rate = steeper.minus(slope);
+      Money rate = slopes.get(i).minus(slope);
       if (rate.signum() > 0) {
         spans.add(span(moment, rises, hull.get(i).time(), rate, name));
       }
-      slope = steeper;
+      slope = slopes.get(i);
     }
     return spans;
   }
