@@ -5,6 +5,7 @@ import dayworth.engine.stepping.Descent;
 import dayworth.engine.stepping.Stepping;
 import dayworth.network.Network;
 import dayworth.network.Plan;
+import dayworth.network.Timing;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.SortedSet;
@@ -38,7 +39,7 @@ final class ConvexPlans implements CheapestPlans {
     Plan before = Plan.allNormal(network);
     for (long duration : durations) {
       before = descent.within(duration, before).orElseThrow();
-      plans.add(before);
+      plans.add(Timing.earliest(network, before).scheduled());
     }
     return plans;
   }

@@ -48,14 +48,12 @@ final class GivenDurations {
       links.add(Link.finishToStart(section.activity(), fixed.size()));
       fixed.add(Activity.fixed("after " + section.name(), after, Money.ZERO));
     }
-    Plan plan =
-        Branching.solve(
-                new Network(network.scale(), fixed, links, running.spans()),
-                running.charges(),
-                new long[] {earliest.finish()},
-                PROBLEMS)
+    Network lasting = new Network(network.scale(), fixed, links, running.spans());
+    Plan solved =
+        Branching.solve(lasting, running.charges(), new long[] {earliest.finish()}, PROBLEMS)
             .get(0)
             .plan();
+    Plan plan = Timing.earliest(lasting, solved).scheduled();
     return Plan.scheduled(
         IntStream.range(0, network.size()).mapToLong(plan::duration).toArray(),
         IntStream.range(0, network.size()).mapToLong(plan::start).toArray());

@@ -1,5 +1,7 @@
 package dayworth.network;
 
+import java.util.Arrays;
+
 /**
  * When each activity of a plan can and must be done: the forward and the backward pass for all four
  * relations, work being contiguous. All times in ticks after the project start.
@@ -58,6 +60,13 @@ public final class Timing {
   /** When the plan starts an activity; where it leaves that open, as early as can be. */
   public long start(int activity) {
     return plan.isScheduled() ? plan.start(activity) : earlyStart[activity];
+  }
+
+  /** The plan with its starts: its own where it says them, else as early as can be. */
+  public Plan scheduled() {
+    long[] starts = new long[network.size()];
+    Arrays.setAll(starts, this::start);
+    return Plan.scheduled(plan.toArray(), starts);
   }
 
   public long finish(int activity) {

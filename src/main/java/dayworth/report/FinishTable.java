@@ -77,12 +77,26 @@ final class FinishTable {
     columns.add(answer.of().unit().word() + "s", true, column(f -> units(f.duration())));
     addDates(columns);
     columns.add("extra direct", true, column(f -> look.text(extraDirect(f))));
-    money(columns, look, "running", f -> f.running().cents());
-    money(columns, look, "time-related", f -> f.other().timeRelated().cents());
+    addTime(columns, look);
     money(columns, look, "damages", f -> f.other().damages().cents());
     money(columns, look, "bonus", f -> f.other().bonus().cents().negate());
     columns.add("total", true, column(f -> look.text(f.total().subtract(sameForAll()))));
     return columns;
+  }
+
+  /** Beside dates there is room for one column only; the two are apart in curve.csv. */
+  private void addTime(TextColumns columns, MoneyLook look) {
+    boolean runs = rows.stream().anyMatch(row -> !row.finish().running().isZero());
+    if (runs && dates.areKnown()) {
+      money(
+          columns,
+          look,
+          "time, running",
+          f -> f.other().timeRelated().cents().add(f.running().cents()));
+    } else {
+      money(columns, look, "running", f -> f.running().cents());
+      money(columns, look, "time-related", f -> f.other().timeRelated().cents());
+    }
   }
 
   /** Dates stand close to the durations, their header to the left. */

@@ -90,7 +90,10 @@ public final class MeetText {
     if (answer.isMetAsPlanned()) {
       return answer.extra().signum() < 0
           ? name + " is met as planned, and for " + savedText() + " less by another plan."
-          : name + " is met as planned: nothing has to be bought.";
+          : name
+              + (answer.bought().isEmpty()
+                  ? " is met as planned: nothing has to be bought."
+                  : " is met as planned; what follows pays by itself.");
     }
     if (answer.extra().signum() < 0) {
       return name + " can be met for " + savedText() + " less" + cost() + " than as planned.";
