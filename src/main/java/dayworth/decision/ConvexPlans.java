@@ -31,6 +31,7 @@ final class ConvexPlans implements CheapestPlans {
     return curve;
   }
 
+  /** Where no money hangs on moments after all, each activity starts as early as it can. */
   @Override
   public List<Plan> plans(SortedSet<Long> durations) {
     Descent descent = new Descent(network);
@@ -38,7 +39,7 @@ final class ConvexPlans implements CheapestPlans {
     Plan before = Plan.allNormal(network);
     for (long duration : durations) {
       before = descent.within(duration, before).orElseThrow();
-      plans.add(before);
+      plans.add(before.isScheduled() ? before : GivenDurations.early(network, before));
     }
     return plans;
   }

@@ -34,10 +34,13 @@ final class GivenDurations {
       return durations;
     }
     Network network = of.network();
+    if (all.running().isEmpty()) {
+      return early(network, durations);
+    }
+    Timing earliest = Timing.earliest(network, durations);
     MomentMoney running =
         new MomentMoney(
             network.scale(), of.terms().calendar(), List.of(), of.momentMoney().running());
-    Timing earliest = Timing.earliest(network, durations);
     List<Activity> fixed = new ArrayList<>();
     for (int i = 0; i < network.size(); i++) {
       fixed.add(lasting(network.activity(i), durations.duration(i)));
@@ -59,6 +62,14 @@ final class GivenDurations {
     return Plan.scheduled(
         IntStream.range(0, network.size()).mapToLong(plan::duration).toArray(),
         IntStream.range(0, network.size()).mapToLong(plan::start).toArray());
+  }
+
+  /** All as early as the durations allow. */
+  static Plan early(Network network, Plan durations) {
+    Timing earliest = Timing.earliest(network, durations);
+    return Plan.scheduled(
+        durations.toArray(),
+        IntStream.range(0, network.size()).mapToLong(earliest::earlyStart).toArray());
   }
 
   private static Activity lasting(Activity activity, long duration) {

@@ -36,8 +36,7 @@ final class ProvingWitness implements PieceWitness {
   }
 
   private void require(Plan plan, long finish, FlowBound bound) {
-    if (checker.check(plan, finish, bound, plan.directCost(network))
-        instanceof Verdict.Refuted refuted) {
+    if (checker.check(plan, finish, bound, plan.cost(network)) instanceof Verdict.Refuted refuted) {
       throw new ProofFailed(
           "the finish at " + network.scale().text(finish) + ", " + refuted.where(), refuted.why());
     }
