@@ -6,6 +6,7 @@ import dayworth.network.Moment;
 import dayworth.value.Money;
 import java.util.List;
 import java.util.TreeSet;
+import java.util.stream.Stream;
 
 /** A section's damages less its bonus, as a charge for its finish. */
 final class SectionCharge implements Charge {
@@ -34,8 +35,8 @@ final class SectionCharge implements Charge {
   }
 
   /**
-   * Ends of working days, where money by the date rises, and the bends of money by the tick. A
-   * bonus limit that is reached between two ticks bends at both.
+   * Ends of working days, where money by the date rises, and the bends of money by the tick: one
+   * that lies between two ticks bends at both.
    */
   @Override
   public long[] points(int k, Window window) {
@@ -43,15 +44,11 @@ final class SectionCharge implements Charge {
     counting
         .calendar()
         .ifPresent(dates -> points.addAll(dates.endsOfDays(window.least(), window.most())));
-    section.damages().bends(section.due(), counting).forEach(points::add);
-    section
-        .bonus()
-        .bends(section.due(), counting)
-        .forEach(
-            bend -> {
-              points.add(bend);
-              points.add(bend + 1);
-            });
+    Stream.concat(
+            section.damages().bends(section.due(), counting),
+            section.bonus().bends(section.due(), counting))
+        .flatMap(bend -> Stream.of(bend, bend + 1))
+        .forEach(points::add);
     TreeSet<Long> inside = new TreeSet<>(points.subSet(window.least(), window.most()));
     inside.add(window.least());
     inside.add(window.most());

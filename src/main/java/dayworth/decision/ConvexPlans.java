@@ -32,6 +32,7 @@ final class ConvexPlans implements CheapestPlans {
     return curve;
   }
 
+  /** Where no money hangs on moments after all, each activity starts as early as it can. */
   @Override
   public List<Plan> plans(SortedSet<Long> durations) {
     Descent descent = new Descent(network);

@@ -34,10 +34,13 @@ final class GivenDurations {
       return durations;
     }
     Network network = of.network();
+    if (all.running().isEmpty()) {
+      return Timing.earliest(network, durations).scheduled();
+    }
+    Timing earliest = Timing.earliest(network, durations);
     MomentMoney running =
         new MomentMoney(
             network.scale(), of.terms().calendar(), List.of(), of.momentMoney().running());
-    Timing earliest = Timing.earliest(network, durations);
     List<Activity> fixed = new ArrayList<>();
     for (int i = 0; i < network.size(); i++) {
       fixed.add(lasting(network.activity(i), durations.duration(i)));

@@ -174,6 +174,80 @@ class ReaderFuzzTest {
     assertTrue(sound < CASES / 2 - CASES / 40, "too few are refused: " + sound);
   }
 
+  /** Sections and running costs, right and wrong, as far out as they may be. */
+  @Test
+  void anySectionsAndRunningCostsAreReadOrRefused() throws IOException {
+    CaseOnDisk disk =
+        new CaseOnDisk(folder)
+            .with(
+                "activities.csv",
+                """
+                id,normal_duration,normal_cost,crash_duration,crash_cost,predecessors
+                A,5,100,3,120,
+                B,8,100,5,300.01,A
+                C,4,100,,,A
+                """);
+    int sound = 0;
+    for (int seed = 0; seed < CASES / 4; seed++) {
+      Random random = new Random(seed);
+      boolean dated = random.nextInt(4) > 0;
+      disk.with(
+          "terms.csv", dated ? "term,value\nstart_date,2027-03-01\n" : "term,value\ntitle,T\n");
+      List<String> per = dated ? PER : List.of("unit", "");
+      disk.with("sections.csv", sections(random, per));
+      disk.with("running.csv", running(random, per));
+      if (isSound(seed)) {
+        sound++;
+        canBeTold(disk.sound());
+      }
+    }
+    assertTrue(sound > CASES / 40, "too few cases are sound: " + sound);
+    assertTrue(sound < CASES / 4 - CASES / 40, "too few are refused: " + sound);
+  }
+
+  private static String sections(Random random, List<String> per) {
+    StringBuilder text =
+        new StringBuilder(
+            "section,activity,due,damages_rate,damages_per,damages_grace,damages_cap,bonus_rate\n");
+    for (int k = random.nextInt(3); k > 0; k--) {
+      String due = List.of("0", "4", "7.5", "2027-03-06", "2027-03-12").get(random.nextInt(5));
+      String rate = any(random, AMOUNTS);
+      String grace = rate.isEmpty() ? "" : any(random, COUNTS);
+      String cap = rate.isEmpty() ? "" : any(random, AMOUNTS);
+      String row =
+          String.join(
+              ",",
+              "S" + k,
+              id(random),
+              due,
+              rate,
+              any(random, per),
+              grace,
+              cap,
+              any(random, AMOUNTS));
+      text.append(row).append('\n');
+    }
+    return text.toString();
+  }
+
+  private static String running(Random random, List<String> per) {
+    StringBuilder text = new StringBuilder("name,from_activity,to_activity,rate,per\n");
+    for (int k = random.nextInt(3); k > 0; k--) {
+      String rate = any(random, AMOUNTS.subList(0, 5));
+      text.append(String.join(",", "R" + k, id(random), id(random), rate, any(random, per)));
+      text.append('\n');
+    }
+    return text.toString();
+  }
+
+  private static String id(Random random) {
+    return random.nextInt(40) == 0 ? "X" : any(random, List.of("A", "B", "C"));
+  }
+
+  private static String any(Random random, List<String> from) {
+    return random.nextInt(60) == 0 ? any(random, WRONG) : from.get(random.nextInt(from.size()));
+  }
+
   private static String statusTerms(Random random) {
     String data = random.nextInt(50) == 0 ? "" : "data_date,2027-03-" + day(random, 10, 21) + "\n";
     return switch (random.nextInt(4)) {

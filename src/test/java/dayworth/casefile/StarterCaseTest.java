@@ -170,7 +170,14 @@ class StarterCaseTest {
             "finished",
             "remaining_duration",
             "remaining_crash_duration",
-            "remaining_crash_cost"));
+            "remaining_crash_cost",
+            "section",
+            "due",
+            "name",
+            "from_activity",
+            "to_activity",
+            "rate",
+            "per"));
     for (String word : words) {
       assertTrue(readme.contains("\n  " + word + " "), word);
     }

@@ -15,6 +15,7 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.OptionalLong;
 import java.util.stream.Collectors;
+import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
@@ -88,6 +89,28 @@ class DemoCasesTest {
     assertEquals(1, answer.least().size());
     assertEquals(String.valueOf(duration), units(answer, answer.leastTotal().duration()));
     assertEquals(0, total.compareTo(answer.leastTotal().total()));
+  }
+
+  /**
+   * With its sections and running costs; change of the total from 120 working days to go on. The
+   * table was computed outside this program.
+   */
+  @Test
+  void theFerryBerthUnderWayChangesAsTheTableSays() throws IOException, FinishTooEarly {
+    CurveAnswer answer = answer("ferry-berth-status");
+    List<Finish> rows = answer.rows().stream().filter(row -> row.duration() <= 120).toList();
+    BigDecimal first = rows.get(0).total();
+    List<String> found =
+        rows.stream()
+            .map(
+                row -> row.duration() + "," + date(answer, row) + "," + row.total().subtract(first))
+            .toList();
+    assertEquals(rows("ferry-berth-status", "expected-change.csv"), found);
+    assertEquals(List.of(), answer.unproved());
+  }
+
+  private static String date(CurveAnswer answer, Finish row) {
+    return answer.of().terms().calendar().orElseThrow().finishDate(row.duration()).toString();
   }
 
   private static String units(CurveAnswer answer, long ticks) {

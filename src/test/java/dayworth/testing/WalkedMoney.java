@@ -94,7 +94,20 @@ public final class WalkedMoney {
     return day;
   }
 
-  private LocalDate firstDay() {
+  /** Working days are crossed off while all of each fits before the time. */
+  public LocalDate startDate(long time) {
+    WorkingCalendar calendar = terms.calendar().orElseThrow();
+    LocalDate day = firstDay();
+    long left = time * calendar.dayLength().days();
+    while (!isWorked(day) || left >= calendar.dayLength().ticks()) {
+      left -= isWorked(day) ? calendar.dayLength().ticks() : 0;
+      day = day.plusDays(1);
+    }
+    return day;
+  }
+
+  /** The start date, or the day after the data date. */
+  public LocalDate firstDay() {
     WorkingCalendar calendar = terms.calendar().orElseThrow();
     return calendar.dataDate().isPresent()
         ? calendar.dataDate().get().plusDays(1)
