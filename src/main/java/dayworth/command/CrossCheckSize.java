@@ -1,6 +1,6 @@
 package dayworth.command;
 
-import dayworth.network.Network;
+import dayworth.decision.Case;
 import picocli.CommandLine.ITypeConverter;
 import picocli.CommandLine.TypeConversionException;
 
@@ -16,11 +16,15 @@ record CrossCheckSize(long most) {
 
   /**
    * What about ten seconds allow: a first deadline takes about 1.2 k³ seconds and each further one
-   * 0.025 k², k being thousands of activities (measured; see DEVELOPERS.md).
+   * 0.025 k², k being thousands of activities (measured; see DEVELOPERS.md). Where money is not
+   * convex each finish may be a first deadline, as it is another branch's programme.
    */
-  static long usual(Network network) {
-    double k = network.size() / 1000.0;
-    return network.size() > TOO_LARGE ? 0 : (long) ((9.5 - 1.2 * k * k * k) / (0.025 * k * k));
+  static long usual(Case of) {
+    int size = of.network().size();
+    double k = size / 1000.0;
+    double first = 1.2 * k * k * k;
+    double further = of.momentMoney().charges().isEmpty() ? 0.025 * k * k : first + 0.02;
+    return size > TOO_LARGE ? 0 : (long) ((9.5 - first) / further);
   }
 
   /** Reads the option's value. */

@@ -44,9 +44,7 @@ abstract class ProvingCommand extends CaseCommand {
 
   /** How many points to compare with the linear programme at most. */
   final long crossChecks(Case read) {
-    return crosscheck
-        .map(CrossCheckSize::most)
-        .orElseGet(() -> CrossCheckSize.usual(read.network()));
+    return crosscheck.map(CrossCheckSize::most).orElseGet(() -> CrossCheckSize.usual(read));
   }
 
   /** The scale that a duration given as an option needs. */
