@@ -1,7 +1,7 @@
 package dayworth.casefile;
 
 import dayworth.contract.MomentMoney;
-import dayworth.engine.branching.Branching;
+import dayworth.engine.branching.ChargedMoney;
 import dayworth.engine.stepping.Stepping;
 import dayworth.network.Network;
 import dayworth.network.Plan;
@@ -47,7 +47,7 @@ final class CaseSize {
     }
     Network priced =
         new Network(network.scale(), network.activities(), network.links(), money.spans());
-    if (!Branching.fits(priced, money.charges(), TIMES_AS_PLANNED * asPlanned)) {
+    if (!ChargedMoney.fits(priced, money.charges(), TIMES_AS_PLANNED * asPlanned)) {
       String file = money.running().isEmpty() ? SectionTable.FILE : RunningTable.FILE;
       tooFarApart(file, "smaller or rounder rates and costs");
     }

@@ -1,8 +1,8 @@
 package dayworth.decision;
 
 import dayworth.engine.branching.Branch;
-import dayworth.engine.branching.Branching;
 import dayworth.engine.branching.Charge;
+import dayworth.engine.branching.ChargedMoney;
 import dayworth.engine.branching.Point;
 import dayworth.engine.branching.Relaxation;
 import dayworth.engine.linear.Answer;
@@ -37,7 +37,7 @@ final class BranchChecking {
     for (Point point : sample) {
       byBranch.computeIfAbsent(point.branch(), b -> new ArrayList<>()).add(point);
     }
-    Money fence = Branching.fence(network, charges, points.get(0).duration());
+    Money fence = ChargedMoney.fence(network, charges, points.get(0).duration());
     List<CrossCheck.Comparison> comparisons = new ArrayList<>();
     List<CrossCheck.Unanswered> unanswered = new ArrayList<>();
     byBranch.forEach(

@@ -4,14 +4,12 @@ import dayworth.contract.MomentMoney;
 import dayworth.contract.Section;
 import dayworth.engine.branching.Branching;
 import dayworth.network.Activity;
-import dayworth.network.Link;
 import dayworth.network.Network;
 import dayworth.network.Plan;
 import dayworth.network.Timing;
 import dayworth.value.Money;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.stream.IntStream;
 
 /**
  * When activities start if their durations are given: the whole and each section at their earliest
@@ -45,21 +43,17 @@ final class GivenDurations {
     for (int i = 0; i < network.size(); i++) {
       fixed.add(lasting(network.activity(i), durations.duration(i)));
     }
-    List<Link> links = new ArrayList<>(network.links());
+    HeldSections held =
+        new HeldSections(new Network(network.scale(), fixed, network.links(), running.spans()));
     for (Section section : all.sections()) {
-      long after = earliest.finish() - earliest.earlyFinish(section.activity());
-      links.add(Link.finishToStart(section.activity(), fixed.size()));
-      fixed.add(Activity.fixed("after " + section.name(), after, Money.ZERO));
+      held.with(section, earliest.finish() - earliest.earlyFinish(section.activity()));
     }
-    Network lasting = new Network(network.scale(), fixed, links, running.spans());
+    Network lasting = held.network();
     Plan solved =
         Branching.solve(lasting, running.charges(), new long[] {earliest.finish()}, PROBLEMS)
             .get(0)
             .plan();
-    Plan plan = Timing.earliest(lasting, solved).scheduled();
-    return Plan.scheduled(
-        IntStream.range(0, network.size()).mapToLong(plan::duration).toArray(),
-        IntStream.range(0, network.size()).mapToLong(plan::start).toArray());
+    return held.ofBase(Timing.earliest(lasting, solved).scheduled());
   }
 
   private static Activity lasting(Activity activity, long duration) {

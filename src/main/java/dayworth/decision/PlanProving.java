@@ -2,6 +2,7 @@ package dayworth.decision;
 
 import dayworth.contract.MomentMoney;
 import dayworth.engine.branching.Branching;
+import dayworth.engine.branching.ChargedMoney;
 import dayworth.engine.proof.ProofChecker;
 import dayworth.engine.proof.ProofSheet;
 import dayworth.engine.proof.Verdict;
@@ -56,7 +57,7 @@ final class PlanProving {
                     new ProofFailed(
                         "the plan for " + priced.scale().text(finish),
                         "more than " + PROBLEMS + " branches are needed"));
-    Money cost = Branching.cost(priced, money.charges(), plan);
+    Money cost = ChargedMoney.cost(priced, money.charges(), plan);
     if (!cost.equals(proof.point().cost())) {
       throw new ProofFailed(
           "the plan for " + priced.scale().text(finish),

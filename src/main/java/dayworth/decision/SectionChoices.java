@@ -2,13 +2,11 @@ package dayworth.decision;
 
 import dayworth.contract.Section;
 import dayworth.engine.branching.Branching;
-import dayworth.engine.branching.Charge;
 import dayworth.engine.stepping.Stepping;
 import dayworth.network.Moment;
 import dayworth.network.Network;
 import dayworth.network.Plan;
-import dayworth.network.Span;
-import dayworth.value.Money;
+import dayworth.network.Timing;
 import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.Comparator;
@@ -71,30 +69,29 @@ final class SectionChoices {
       if (best.filter(found -> found.total().compareTo(least) <= 0).isPresent()) {
         return best;
       }
-      Plan plan = plan(section, row);
-      Finish with = PlanCost.of(of, plan, row.duration());
-      if (isOnTime(section, plan)
-          && best.filter(found -> found.total().compareTo(with.total()) <= 0).isEmpty()) {
-        best = Optional.of(with);
+      Optional<Finish> with = onTime(section, row.duration());
+      if (with.isPresent()
+          && best.filter(found -> found.total().compareTo(with.get().total()) <= 0).isEmpty()) {
+        best = with;
       }
     }
     return best;
   }
 
-  /** The cheapest plan of a finish where each tick that the section is late outweighs all else. */
-  private Plan plan(Section section, Finish row) {
-    Network priced = of.pricedNetwork();
-    List<Charge> charges = of.momentMoney().charges();
-    Money fence = Branching.fence(priced, charges, row.duration());
-    List<Span> spans = new ArrayList<>(priced.spans());
-    spans.add(
-        new Span(
-            section.name(),
-            Moment.PROJECT_START,
-            Moment.finishOf(section.activity()),
-            section.due().ticks(),
-            fence));
-    Network fenced = new Network(priced.scale(), priced.activities(), priced.links(), spans);
-    return Branching.solve(fenced, charges, new long[] {row.duration()}, PROBLEMS).get(0).plan();
+  /** The cheapest plan for a finish with the section on time; empty if there is none. */
+  private Optional<Finish> onTime(Section section, long finish) {
+    HeldSections held =
+        new HeldSections(of.pricedNetwork())
+            .with(section, Math.max(0, finish - section.due().ticks()));
+    Network network = held.network();
+    if (Stepping.shortest(network) > finish) {
+      return Optional.empty();
+    }
+    Plan plan =
+        Branching.solve(network, of.momentMoney().charges(), new long[] {finish}, PROBLEMS)
+            .get(0)
+            .plan();
+    return Optional.of(
+        PlanCost.of(of, held.ofBase(Timing.earliest(network, plan).scheduled()), finish));
   }
 }

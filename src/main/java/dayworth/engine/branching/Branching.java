@@ -4,15 +4,9 @@ import dayworth.engine.Flow;
 import dayworth.engine.proof.ProofChecker;
 import dayworth.engine.proof.Verdict;
 import dayworth.engine.stepping.Descent;
-import dayworth.engine.stepping.Stepping;
-import dayworth.network.Activity;
-import dayworth.network.Moment;
 import dayworth.network.Network;
 import dayworth.network.Plan;
-import dayworth.network.Span;
 import dayworth.value.Money;
-import dayworth.value.MoneySum;
-import java.math.RoundingMode;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
 import java.util.Deque;
@@ -43,32 +37,6 @@ public final class Branching {
 
   /** Finishes for which a branch is still to be solved, and what it costs there at least. */
   private record Open(Branch branch, List<Integer> rows, List<Money> bounds) {}
-
-  /** The best that is known of one finish. */
-  private static final class Best {
-    private Optional<Plan> plan = Optional.empty();
-    private Money cost = Money.ZERO;
-    private Branch branch;
-
-    /** What branches that were not gone on with cost at least; empty if there are none. */
-    private Optional<Money> leftOpen = Optional.empty();
-
-    private Best(Branch branch) {
-      this.branch = branch;
-    }
-
-    private boolean beats(Money bound) {
-      return plan.isPresent() && cost.minus(bound).compareTo(Point.ROUNDING) < 0;
-    }
-
-    private void offer(Plan other, Money otherCost, Branch from) {
-      if (plan.isEmpty() || otherCost.compareTo(cost) < 0) {
-        plan = Optional.of(other);
-        cost = otherCost;
-        branch = from;
-      }
-    }
-  }
 
   /** A bound did not stand up to its recheck. */
   public static final class BoundRefuted extends RuntimeException {
@@ -106,7 +74,7 @@ public final class Branching {
     this.charges = charges;
     this.durations = durations;
     this.leaves = leaves;
-    this.fence = fence(network, charges, durations[0]);
+    this.fence = ChargedMoney.fence(network, charges, durations[0]);
     Branch whole = Branch.whole(charges, durations[0]);
     List<Integer> rows = IntStream.range(0, durations.length).boxed().toList();
     rows.forEach(row -> best.add(new Best(whole)));
@@ -165,70 +133,6 @@ public final class Branching {
    */
   public record Leaf(Relaxation relaxation, Plan plan, Flow flow) {}
 
-  /** The exact cost of a plan that says when activities start, charges included. */
-  public static Money cost(Network network, List<Charge> charges, Plan plan) {
-    MoneySum sum = new MoneySum().add(plan.cost(network));
-    charges.forEach(charge -> sum.add(at(charge, plan)));
-    return sum.total();
-  }
-
-  /**
-   * Whether every branch has a scale for its slopes; otherwise the amounts are too large to be
-   * exact.
-   *
-   * @param longest ticks; no duration that is asked for may be longer
-   */
-  public static boolean fits(Network network, List<Charge> charges, long longest) {
-    if (charges.isEmpty()) {
-      return Stepping.scaleFor(network).isPresent();
-    }
-    Money fence = fence(network, charges, longest);
-    Branch whole = Branch.whole(charges, longest);
-    SlopeGrain grain = SlopeGrain.within(whole.windows());
-    Money steepest = fence.plus(Money.of(1).dividedBy(grain.perUnit()));
-    List<Span> spans = new ArrayList<>(network.spans());
-    for (Charge charge : charges) {
-      for (Moment moment : charge.moments()) {
-        spans.add(new Span(charge.name(), Moment.PROJECT_START, moment, longest, steepest));
-      }
-    }
-    Network fenced = new Network(network.scale(), network.activities(), network.links(), spans);
-    return Stepping.scaleFor(fenced)
-        .filter(scale -> scale.perUnit() >= grain.perUnit())
-        .isPresent();
-  }
-
-  /**
-   * Money per tick that makes leaving a window dearer than anything within: all that compression,
-   * spans and charges can come to, in whole units.
-   */
-  public static Money fence(Network network, List<Charge> charges, long longest) {
-    MoneySum sum = new MoneySum().add(Money.of(1));
-    for (Activity activity : network.activities()) {
-      Money extra = activity.crashExtra();
-      sum.add(extra.max(extra.negate()));
-    }
-    for (Span span : network.spans()) {
-      sum.add(span.rate(), longest + Math.abs(span.free()), 1);
-    }
-    for (Charge charge : charges) {
-      sum.add(extreme(charge, longest, true).minus(extreme(charge, longest, false)));
-    }
-    return Money.of(sum.total().rounded(0, RoundingMode.CEILING));
-  }
-
-  private static Money extreme(Charge charge, long longest, boolean dearest) {
-    long[] times = new long[charge.moments().size()];
-    for (int k = 0; k < times.length; k++) {
-      times[k] = charge.rises(k) == dearest ? longest : 0;
-    }
-    return charge.at(times);
-  }
-
-  static Money at(Charge charge, Plan plan) {
-    return charge.at(charge.moments().stream().mapToLong(plan::time).toArray());
-  }
-
   private void run(long most) {
     while (!open.isEmpty() && solved < most) {
       goOn(open.remove());
@@ -251,7 +155,7 @@ public final class Branching {
         continue;
       }
       Plan plan = solve(descent, checker, relaxation.network(), durations[row]);
-      best.get(row).offer(plan, cost(network, charges, plan), node.branch());
+      best.get(row).offer(plan, ChargedMoney.cost(network, charges, plan), node.branch());
       Money bound = relaxation.cost(plan);
       if (leaves.isPresent() && best.get(row).beats(bound)) {
         leaves.get().add(new Leaf(relaxation, plan, descent.flow()));
@@ -260,7 +164,7 @@ public final class Branching {
         rows.add(row);
         bounds.add(bound);
         for (int j = 0; j < charges.size(); j++) {
-          Money gap = at(charges.get(j), plan).minus(relaxation.chargeAt(j, plan));
+          Money gap = ChargedMoney.at(charges.get(j), plan).minus(relaxation.chargeAt(j, plan));
           if (gap.compareTo(widest) > 0) {
             widest = gap;
             split = node.branch().splitFor(j, charges.get(j), plan);
@@ -330,7 +234,7 @@ public final class Branching {
     Best of = best.get(row);
     return descent
         .within(durations[row], before)
-        .filter(plan -> cost(network, charges, plan).equals(of.cost))
+        .filter(plan -> ChargedMoney.cost(network, charges, plan).equals(of.cost))
         .orElse(of.plan.orElseThrow());
   }
 }

@@ -102,6 +102,12 @@ public final class Stepping {
     return recorder.planHere();
   }
 
+  /** The shortest that any plan can make the project, ticks. */
+  public static long shortest(Network network) {
+    return new Reach(network, network.activities().stream().mapToLong(Activity::crash).toArray())
+        .longest();
+  }
+
   /** The earliest that any plan can finish an activity, ticks. */
   public static long earliestFinish(Network network, int activity) {
     return new Reach(network, network.activities().stream().mapToLong(Activity::crash).toArray())

@@ -120,7 +120,7 @@ class BranchingTest {
       for (Point point : Branching.solve(network, charges, durations, UNLIMITED)) {
         String where = "seed " + seed + " at " + point.duration();
         assertTrue(point.isProved(), where);
-        assertEquals(point.cost(), Branching.cost(network, charges, point.plan()), where);
+        assertEquals(point.cost(), ChargedMoney.cost(network, charges, point.plan()), where);
         assertEquals(Money.of(leastCost(network, charges, point.duration())), point.cost(), where);
         withGap += point.branch().equals(Branch.whole(charges, durations[0])) ? 0 : 1;
       }
