@@ -1,12 +1,14 @@
 package dayworth.decision;
 
 import dayworth.engine.Curve;
+import dayworth.engine.Flow;
 import dayworth.engine.stepping.Descent;
 import dayworth.engine.stepping.Stepping;
 import dayworth.network.Network;
 import dayworth.network.Plan;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.SortedSet;
 
 /** Where all money is convex the curve is exact everywhere, and stepping proves it as a whole. */
@@ -14,6 +16,7 @@ final class ConvexPlans implements CheapestPlans {
 
   private final Network network;
   private final Curve curve;
+  private final Optional<List<List<Flow.Entry>>> flows;
 
   /**
    * Finds and proves the curve.
@@ -23,7 +26,9 @@ final class ConvexPlans implements CheapestPlans {
    */
   ConvexPlans(Network network, Watcher watcher) {
     this.network = network;
-    this.curve = Stepping.curve(network, new ProvingWitness(network, watcher));
+    ProvingWitness witness = new ProvingWitness(network, watcher);
+    this.curve = Stepping.curve(network, witness);
+    this.flows = witness.flows();
   }
 
   @Override
@@ -51,5 +56,10 @@ final class ConvexPlans implements CheapestPlans {
   @Override
   public List<Unproved> unproved() {
     return List.of();
+  }
+
+  @Override
+  public Optional<List<List<Flow.Entry>>> flows() {
+    return flows;
   }
 }

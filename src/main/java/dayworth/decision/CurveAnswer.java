@@ -21,6 +21,7 @@ import java.util.Optional;
  * @param provedRows how many rows the checker proved to be cheapest
  * @param unproved the rest, each with what is known of it; empty where all money is convex
  * @param crossCheck the linear programme's agreement
+ * @param evidence what rechecks it
  */
 public record CurveAnswer(
     Case of,
@@ -34,7 +35,8 @@ public record CurveAnswer(
     AskedPlan asked,
     int provedRows,
     List<Unproved> unproved,
-    CrossCheck crossCheck) {
+    CrossCheck crossCheck,
+    Evidence evidence) {
 
   public CurveAnswer {
     rows = List.copyOf(rows);

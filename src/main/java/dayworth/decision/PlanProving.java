@@ -1,6 +1,7 @@
 package dayworth.decision;
 
 import dayworth.contract.MomentMoney;
+import dayworth.engine.Flow;
 import dayworth.engine.branching.Branching;
 import dayworth.engine.proof.ProofChecker;
 import dayworth.engine.proof.ProofSheet;
@@ -42,8 +43,13 @@ final class PlanProving {
       throw new ProofFailed(
           "the plan for " + network.scale().text(finish) + ", " + refuted.where(), refuted.why());
     }
-    ProofSheet sheet = ProofSheet.of(network, plan, finish, descent.flow(), alike);
-    return new PlanProof(List.of(new PlanProof.Block("1", network, sheet)));
+    return convex(network, plan, finish, alike, descent.flow());
+  }
+
+  /** The proof by a flow that stood up to its check. */
+  static PlanProof convex(Network network, Plan plan, long finish, Money alike, Flow flow) {
+    ProofSheet sheet = ProofSheet.of(network, plan, finish, flow, alike);
+    return new PlanProof(List.of(new PlanProof.Block("1", network, sheet)), flow.entries());
   }
 
   private static PlanProof branched(Case of, Plan plan, long finish) {
@@ -71,7 +77,7 @@ final class PlanProving {
       ProofSheet sheet = ProofSheet.of(relaxed, leaf.plan(), finish, leaf.flow(), alike);
       blocks.add(new PlanProof.Block(String.valueOf(blocks.size()), relaxed, sheet.withoutPlan()));
     }
-    return new PlanProof(blocks);
+    return new PlanProof(blocks, List.of());
   }
 
   private static Map<String, Money> other(MomentMoney money, Plan plan) {
