@@ -68,9 +68,7 @@ final class PlanProving {
           "the plan for " + priced.scale().text(finish),
           "costs " + cost.cents() + ", and another " + proof.point().cost().cents());
     }
-    List<PlanProof.Block> blocks = new ArrayList<>();
-    ProofSheet paid = ProofSheet.ofPlan(of.network(), plan, other(money, plan));
-    blocks.add(new PlanProof.Block("plan", of.network(), paid));
+    List<PlanProof.Block> blocks = new ArrayList<>(paid(of, plan).blocks());
     for (Branching.Leaf leaf : proof.leaves()) {
       Network relaxed = leaf.relaxation().network();
       Money alike = leaf.relaxation().fixed().plus(money.fixed());
@@ -78,6 +76,12 @@ final class PlanProving {
       blocks.add(new PlanProof.Block(String.valueOf(blocks.size()), relaxed, sheet.withoutPlan()));
     }
     return new PlanProof(blocks, List.of());
+  }
+
+  /** The first block alone where money is not convex: what the plan pays. */
+  static PlanProof paid(Case of, Plan plan) {
+    ProofSheet paid = ProofSheet.ofPlan(of.network(), plan, other(of.momentMoney(), plan));
+    return new PlanProof(List.of(new PlanProof.Block("plan", of.network(), paid)), List.of());
   }
 
   private static Map<String, Money> other(MomentMoney money, Plan plan) {

@@ -1,0 +1,105 @@
+package dayworth.report;
+
+import dayworth.decision.ClaimRefuted;
+import dayworth.decision.Fault;
+import java.math.BigDecimal;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+
+/**
+ * Adds up the branches of a proof sheet as its reader would: length × flow, capacities, what runs
+ * into each event and out of it, and that no branch allows less than the plan costs.
+ */
+final class BlockCheck {
+
+  private static final String PLAN = "proof_sheet.plan_cost";
+
+  private final List<Fault> faults = new ArrayList<>();
+
+  private BlockCheck() {}
+
+  /**
+   * What does not add up.
+   *
+   * @param sheet the member proof_sheet, its first block being the plan's
+   * @throws ClaimRefuted if something is missing
+   */
+  static List<Fault> of(JsonPlace sheet) throws ClaimRefuted {
+    BlockCheck check = new BlockCheck();
+    BigDecimal least = null;
+    BigDecimal rounding = BigDecimal.ZERO;
+    List<JsonPlace> blocks = sheet.get("blocks").items();
+    for (int k = 1; k < blocks.size(); k++) {
+      JsonPlace block = blocks.get(k);
+      if (!block.get("branch").text().equals(String.valueOf(k))) {
+        check.wrong(block.get("branch"), String.valueOf(k));
+      }
+      BigDecimal bound = check.bound(block);
+      least = least == null ? bound : least.min(bound);
+      rounding = rounding.max(check.sum(block, "rounding"));
+    }
+    if (least == null) {
+      throw sheet.get("blocks").wrong("a block for each branch");
+    }
+    check.equal(sheet.get("bound"), least);
+    check.equal(sheet.get("rounding"), rounding);
+    BigDecimal paid = sheet.get("plan_cost").number();
+    // Both are written in decimals; what that may lose is stated to be below half a cent.
+    if (paid.subtract(least).abs().compareTo(new BigDecimal("0.005")) >= 0) {
+      check.faults.add(new Fault(PLAN, paid.toString(), least + ", the least bound of a branch"));
+    }
+    return check.faults;
+  }
+
+  private BigDecimal sum(JsonPlace block, String kind) throws ClaimRefuted {
+    BigDecimal sum = BigDecimal.ZERO;
+    for (JsonPlace row : block.get("rows").items()) {
+      if (row.get("kind").text().equals(kind)) {
+        sum = sum.add(row.get("bound").number());
+      }
+    }
+    return sum;
+  }
+
+  private BigDecimal bound(JsonPlace block) throws ClaimRefuted {
+    BigDecimal sum = BigDecimal.ZERO;
+    Map<String, BigDecimal> left = new LinkedHashMap<>();
+    for (JsonPlace row : block.get("rows").items()) {
+      BigDecimal bound = row.get("bound").number();
+      sum = sum.add(bound);
+      Optional<JsonPlace> flow = row.find("flow");
+      if (flow.isPresent()) {
+        BigDecimal amount = flow.get().number();
+        equal(row.get("bound"), row.get("length").number().multiply(amount));
+        Optional<JsonPlace> capacity = row.find("capacity");
+        if (amount.signum() < 0
+            || (capacity.isPresent() && amount.compareTo(capacity.get().number()) > 0)) {
+          wrong(flow.get(), "from 0 to its capacity");
+        }
+        left.merge(row.get("event_from").text(), amount.negate(), BigDecimal::add);
+        left.merge(row.get("event_to").text(), amount, BigDecimal::add);
+      }
+    }
+    left.forEach(
+        (event, rest) -> {
+          if (rest.signum() != 0) {
+            String found = rest + " more into " + event + " than out of it";
+            faults.add(new Fault(block.place() + ".rows", found, "as much"));
+          }
+        });
+    return sum;
+  }
+
+  private void equal(JsonPlace found, BigDecimal right) throws ClaimRefuted {
+    if (found.number().compareTo(right) != 0) {
+      wrong(found, right.toString());
+    }
+  }
+
+  private void wrong(JsonPlace found, String right) {
+    faults.add(new Fault(found.place(), found.value().shown(), right));
+  }
+}
