@@ -2,12 +2,16 @@ package dayworth.report;
 
 import dayworth.decision.ClaimRefuted;
 import dayworth.decision.Fault;
+import dayworth.network.Activity;
+import dayworth.network.Network;
+import dayworth.value.Money;
 import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalInt;
 
 /**
  * Adds up the branches of a proof sheet as its reader would: length × flow, capacities, what runs
@@ -15,20 +19,27 @@ import java.util.Optional;
  */
 final class BlockCheck {
 
+  private static final BigDecimal LAST_DIGIT = new BigDecimal("0.000001");
+
   private static final String PLAN = "proof_sheet.plan_cost";
 
   private final List<Fault> faults = new ArrayList<>();
 
-  private BlockCheck() {}
+  private final Network network;
+
+  private BlockCheck(Network network) {
+    this.network = network;
+  }
 
   /**
    * What does not add up.
    *
+   * @param network of the case
    * @param sheet the member proof_sheet, its first block being the plan's
    * @throws ClaimRefuted if something is missing
    */
-  static List<Fault> of(JsonPlace sheet) throws ClaimRefuted {
-    BlockCheck check = new BlockCheck();
+  static List<Fault> of(Network network, JsonPlace sheet) throws ClaimRefuted {
+    BlockCheck check = new BlockCheck(network);
     BigDecimal least = null;
     BigDecimal rounding = BigDecimal.ZERO;
     List<JsonPlace> blocks = sheet.get("blocks").items();
@@ -70,6 +81,7 @@ final class BlockCheck {
     for (JsonPlace row : block.get("rows").items()) {
       BigDecimal bound = row.get("bound").number();
       sum = sum.add(bound);
+      ofCase(row);
       Optional<JsonPlace> flow = row.find("flow");
       if (flow.isPresent()) {
         BigDecimal amount = flow.get().number();
@@ -91,6 +103,43 @@ final class BlockCheck {
           }
         });
     return sum;
+  }
+
+  /** What a row about an activity says of the activity itself. */
+  private void ofCase(JsonPlace row) throws ClaimRefuted {
+    OptionalInt index = network.indexOf(row.get("activity").text());
+    if (index.isEmpty()) {
+      return;
+    }
+    Activity activity = network.activity(index.getAsInt());
+    switch (row.get("kind").text()) {
+      case "fixed" -> price(row.get("bound"), activity.normalCost().min(activity.crashCost()));
+      case "slope" -> {
+        equal(row.get("length"), network.scale().units(activity.normal()));
+        price(row.get("capacity"), perUnit(activity.slope()));
+      }
+      case "slope back" -> {
+        equal(row.get("length"), network.scale().units(-activity.crash()));
+        price(row.get("capacity"), perUnit(activity.slope().negate()));
+      }
+      case "not shorter" -> equal(row.get("length"), network.scale().units(activity.crash()));
+      case "not longer" -> equal(row.get("length"), network.scale().units(-activity.normal()));
+      default -> {
+        // The other arcs have their length from links and from the branch.
+      }
+    }
+  }
+
+  private Money perUnit(Money perTick) {
+    return perTick.times(network.scale().ticksPerUnit());
+  }
+
+  /** Fractions without a last digit are written with six decimals or more. */
+  private void price(JsonPlace found, Money right) throws ClaimRefuted {
+    Money apart = Money.of(found.number()).minus(right);
+    if (apart.max(apart.negate()).compareTo(Money.of(LAST_DIGIT)) >= 0) {
+      wrong(found, right.toString());
+    }
   }
 
   private void equal(JsonPlace found, BigDecimal right) throws ClaimRefuted {

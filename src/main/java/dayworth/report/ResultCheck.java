@@ -25,6 +25,10 @@ final class ResultCheck {
   /** A case keeps its result when its folder gets another name. */
   private static final String NAME = "case.name";
 
+  /** Of branches the case tells only in part. */
+  private static final Set<String> BRANCHED =
+      Set.of(NAME, "proof_sheet.blocks", "proof_sheet.bound", "proof_sheet.rounding");
+
   private final JsonPlace all;
   private final String command;
   private final String programVersion;
@@ -61,19 +65,26 @@ final class ResultCheck {
     ClaimReader reader = new ClaimReader(of, all);
     MeetAnswer answer = Recount.meet(of, reader.curve(), reader.wish(), reader.proofFlow());
     boolean isConvex = of.momentMoney().charges().isEmpty();
-    compare(
-        ResultJson.ofMeet(answer, programVersion),
-        isConvex
-            ? Set.of(NAME)
-            : Set.of(NAME, "proof_sheet.blocks", "proof_sheet.bound", "proof_sheet.rounding"));
+    String right = ResultJson.ofMeet(answer, programVersion);
     if (isConvex) {
+      compare(right, Set.of(NAME));
       checked.add("the proof sheet, from its flow");
     } else {
-      faults.addAll(BlockCheck.of(all.get("proof_sheet")));
-      checked.add("each branch of the proof sheet: it balances, and allows no less than the plan");
-      unchecked.add("that the branches of the proof sheet together leave no plan out");
+      compare(right, BRANCHED);
+      branches(right);
     }
     tell(answer.curve());
+  }
+
+  /** What the plan pays is counted; the branches are added up as they stand. */
+  private void branches(String right) throws ClaimRefuted {
+    JsonPlace sheet = all.get("proof_sheet");
+    faults.addAll(BlockCheck.of(of.network(), sheet));
+    JsonPlace ought = new JsonPlace("", parsed(right)).get("proof_sheet").get("blocks");
+    faults.addAll(
+        ResultComparison.ofPart(sheet.get("blocks").items().get(0), ought.items().get(0).value()));
+    checked.add("each branch of the proof sheet: it balances, and allows no less than the plan");
+    unchecked.add("that the branches leave no plan out, their lags, and how each prices sections");
   }
 
   private void tell(CurveAnswer answer) {
@@ -91,9 +102,12 @@ final class ResultCheck {
     }
     int asked = answer.crossCheck().comparisons().size();
     if (asked > 0) {
-      unchecked.add(
-          "that the linear programme said what is written of it at "
-              + Wording.count(asked, "point", "points"));
+      String points = Wording.count(asked, "point", "points");
+      if (of.momentMoney().charges().isEmpty()) {
+        checked.add("what is told of the linear programme, which agrees at " + points);
+      } else {
+        unchecked.add("what the two ways found in single branches, at " + points);
+      }
     }
   }
 

@@ -29,6 +29,13 @@ final class ResultComparison {
     return comparison.faults;
   }
 
+  /** The same for a part that stands at a place. */
+  static List<Fault> ofPart(JsonPlace found, JsonValue right) {
+    ResultComparison comparison = new ResultComparison(Set.of());
+    comparison.compare(found.place(), found.value(), right);
+    return comparison.faults;
+  }
+
   private void compare(String place, JsonValue found, JsonValue right) {
     if (leftOut.contains(place)) {
       return;
