@@ -52,6 +52,12 @@ final class CaseFolder {
     this.findings = findings;
   }
 
+  /** Digests of all files of the contract that a result can hang on, also of unsound ones. */
+  List<InputFile> digests() {
+    Stream.concat(SERVED.stream(), NOT_YET.stream()).sorted().forEach(this::text);
+    return inputs;
+  }
+
   /** The files that were read, by name. */
   List<InputFile> inputs() {
     return inputs;

@@ -2,6 +2,7 @@ package dayworth.casefile;
 
 import dayworth.contract.MomentMoney;
 import dayworth.decision.Case;
+import dayworth.decision.InputFile;
 import dayworth.decision.Progress;
 import dayworth.decision.WorkToGo;
 import dayworth.network.Activity;
@@ -35,6 +36,11 @@ public final class CaseReader {
    */
   public static Reading read(Path path, TimeScale atLeast) {
     return new CaseReader(path).read(atLeast);
+  }
+
+  /** The files of the contract in a folder with their digests, sound or not. */
+  public static List<InputFile> inputs(Path path) {
+    return new CaseReader(path).folder.digests();
   }
 
   private Reading read(TimeScale atLeast) {

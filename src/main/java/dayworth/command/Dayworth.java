@@ -16,7 +16,8 @@ import picocli.CommandLine.Spec;
       CheckCommand.class,
       CurveCommand.class,
       MeetCommand.class,
-      WeighCommand.class
+      WeighCommand.class,
+      VerifyCommand.class
     })
 final class Dayworth implements Runnable {
 

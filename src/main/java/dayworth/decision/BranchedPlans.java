@@ -2,6 +2,7 @@ package dayworth.decision;
 
 import dayworth.engine.Change;
 import dayworth.engine.Curve;
+import dayworth.engine.Flow;
 import dayworth.engine.Step;
 import dayworth.engine.branching.Branching;
 import dayworth.engine.branching.Charge;
@@ -13,6 +14,7 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.SortedSet;
 import java.util.function.BiFunction;
 
@@ -171,5 +173,11 @@ final class BranchedPlans implements CheapestPlans {
         .filter(point -> !point.isProved())
         .map(point -> new Unproved(point.duration(), point.cost(), point.bound()))
         .toList();
+  }
+
+  /** No one flow proves a finish: that takes a flow for each branch. */
+  @Override
+  public Optional<List<List<Flow.Entry>>> flows() {
+    return Optional.empty();
   }
 }

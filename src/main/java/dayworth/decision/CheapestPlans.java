@@ -1,8 +1,10 @@
 package dayworth.decision;
 
 import dayworth.engine.Curve;
+import dayworth.engine.Flow;
 import dayworth.network.Plan;
 import java.util.List;
+import java.util.Optional;
 import java.util.SortedSet;
 
 /** The cheapest plans of a case, with all money that hangs on when activities start and finish. */
@@ -26,4 +28,10 @@ sealed interface CheapestPlans permits ConvexPlans, BranchedPlans {
 
   /** How many of the finishes are not proved to be cheapest. */
   List<Unproved> unproved();
+
+  /**
+   * The flow that proves each piece of the curve, the first one its longest finish; empty if there
+   * is none or they are too many to be carried.
+   */
+  Optional<List<List<Flow.Entry>>> flows();
 }

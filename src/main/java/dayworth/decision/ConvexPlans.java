@@ -1,6 +1,7 @@
 package dayworth.decision;
 
 import dayworth.engine.Curve;
+import dayworth.engine.Flow;
 import dayworth.engine.stepping.Descent;
 import dayworth.engine.stepping.Stepping;
 import dayworth.network.Network;
@@ -8,6 +9,7 @@ import dayworth.network.Plan;
 import dayworth.network.Timing;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.SortedSet;
 
 /** Where all money is convex the curve is exact everywhere, and stepping proves it as a whole. */
@@ -15,6 +17,7 @@ final class ConvexPlans implements CheapestPlans {
 
   private final Network network;
   private final Curve curve;
+  private final Optional<List<List<Flow.Entry>>> flows;
 
   /**
    * Finds and proves the curve.
@@ -24,7 +27,9 @@ final class ConvexPlans implements CheapestPlans {
    */
   ConvexPlans(Network network, Watcher watcher) {
     this.network = network;
-    this.curve = Stepping.curve(network, new ProvingWitness(network, watcher));
+    ProvingWitness witness = new ProvingWitness(network, watcher);
+    this.curve = Stepping.curve(network, witness);
+    this.flows = witness.flows();
   }
 
   @Override
@@ -53,5 +58,10 @@ final class ConvexPlans implements CheapestPlans {
   @Override
   public List<Unproved> unproved() {
     return List.of();
+  }
+
+  @Override
+  public Optional<List<List<Flow.Entry>>> flows() {
+    return flows;
   }
 }

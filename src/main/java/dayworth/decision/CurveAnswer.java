@@ -23,6 +23,7 @@ import java.util.Optional;
  * @param provedRows how many rows the checker proved to be cheapest
  * @param unproved the rest, each with what is known of it; empty where all money is convex
  * @param crossCheck the linear programme's agreement
+ * @param evidence what rechecks it
  */
 public record CurveAnswer(
     Case of,
@@ -36,7 +37,8 @@ public record CurveAnswer(
     AskedPlan asked,
     int provedRows,
     List<Unproved> unproved,
-    CrossCheck crossCheck) {
+    CrossCheck crossCheck,
+    Evidence evidence) {
 
   public CurveAnswer {
     rows = List.copyOf(rows);
@@ -68,7 +70,8 @@ public record CurveAnswer(
         asked,
         provedRows,
         unproved,
-        crossCheck);
+        crossCheck,
+        evidence);
   }
 
   /** What a finish is worth: money that hangs on the project's finish alone, without sections. */

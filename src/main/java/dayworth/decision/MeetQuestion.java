@@ -38,32 +38,50 @@ public final class MeetQuestion {
     watcher.now("looking for the cheapest plan");
     long finish = finish(of, wish, watcher);
     CurveAnswer answer = CurveQuestion.ask(of, OptionalLong.of(finish), crossChecks, watcher);
+    watcher.now("writing the proof sheet");
+    return answer(wish, answer, PlanProving.of(of, answer.asked().timing().plan(), finish));
+  }
+
+  /** Counts the answer from the plan asked for and its proof. */
+  static MeetAnswer answer(Wish wish, CurveAnswer answer, PlanProof proof) {
+    Case of = answer.of();
     Timing timing = answer.asked().timing();
     List<Integer> shortened = shortened(of.network(), timing.plan());
     CriticalChains critical =
         CriticalChains.of(of.network(), timing, i -> of.isCritical(timing, i));
     List<List<Integer>> chains = critical.passing(shortened, MOST_CHAINS);
-    watcher.now("writing the proof sheet");
     return new MeetAnswer(
         wish,
         answer,
         shortened.stream().map(i -> bought(of.network().activity(i), i, timing, chains)).toList(),
         chains,
         critical.count(),
-        lastPrice(answer.curve(), finish),
-        PlanProving.of(of, timing.plan(), finish));
+        lastPrice(answer.curve(), timing.finish()),
+        proof);
   }
 
   /** When to finish; where time is wished for, no later than money gains by waiting. */
   private static long finish(Case of, Wish wish, Watcher watcher) throws FinishTooEarly {
-    if (of.momentMoney().isNone()) {
-      Curve curve = Stepping.curve(of.network(), PieceWitness.NONE);
-      return wish instanceof Wish.Within within
-          ? earliestFor(
-              curve, Plan.allNormal(of.network()).directCost(of.network()).plus(within.most()))
-          : Math.min(curve.longest(), wish.duration().orElseThrow());
-    }
-    CurveAnswer answer = CurveQuestion.ask(of, wish.duration(), 0, watcher);
+    return of.momentMoney().isNone()
+        ? finish(of, Stepping.curve(of.network(), PieceWitness.NONE), wish)
+        : finishByRows(CurveQuestion.ask(of, wish.duration(), 0, watcher), wish);
+  }
+
+  /** When to finish, by a curve that is known. */
+  static long finish(CurveAnswer answer, Wish wish) {
+    return answer.of().momentMoney().isNone()
+        ? finish(answer.of(), answer.curve(), wish)
+        : finishByRows(answer, wish);
+  }
+
+  private static long finish(Case of, Curve curve, Wish wish) {
+    return wish instanceof Wish.Within within
+        ? earliestFor(
+            curve, Plan.allNormal(of.network()).directCost(of.network()).plus(within.most()))
+        : Math.min(curve.longest(), wish.duration().orElseThrow());
+  }
+
+  private static long finishByRows(CurveAnswer answer, Wish wish) {
     return wish instanceof Wish.Within within
         ? earliestFor(answer, answer.asPlanned().spent().plus(within.most()))
         : Math.min(answer.rows().get(0).duration(), wish.duration().orElseThrow());

@@ -1,5 +1,6 @@
 package dayworth.decision;
 
+import dayworth.engine.Flow;
 import dayworth.engine.proof.ProofSheet;
 import dayworth.network.Network;
 import java.math.BigDecimal;
@@ -8,11 +9,14 @@ import java.util.List;
 /**
  * What proves a plan, for a spreadsheet: one block where all money is convex; otherwise a block for
  * the plan's cost and one for each final branch, whose bounds are none of them below it.
+ *
+ * @param flow what the one block is written from; empty where there are branches
  */
-public record PlanProof(List<Block> blocks) {
+public record PlanProof(List<Block> blocks, List<Flow.Entry> flow) {
 
   public PlanProof {
     blocks = List.copyOf(blocks);
+    flow = List.copyOf(flow);
   }
 
   /**

@@ -1,6 +1,7 @@
 package dayworth.decision;
 
 import dayworth.contract.MomentMoney;
+import dayworth.engine.Flow;
 import dayworth.engine.branching.Branching;
 import dayworth.engine.branching.ChargedMoney;
 import dayworth.engine.proof.ProofChecker;
@@ -43,8 +44,13 @@ final class PlanProving {
       throw new ProofFailed(
           "the plan for " + network.scale().text(finish) + ", " + refuted.where(), refuted.why());
     }
-    ProofSheet sheet = ProofSheet.of(network, plan, finish, descent.flow(), alike);
-    return new PlanProof(List.of(new PlanProof.Block("1", network, sheet)));
+    return convex(network, plan, finish, alike, descent.flow());
+  }
+
+  /** The proof by a flow that stood up to its check. */
+  static PlanProof convex(Network network, Plan plan, long finish, Money alike, Flow flow) {
+    ProofSheet sheet = ProofSheet.of(network, plan, finish, flow, alike);
+    return new PlanProof(List.of(new PlanProof.Block("1", network, sheet)), flow.entries());
   }
 
   private static PlanProof branched(Case of, Plan plan, long finish) {
@@ -63,16 +69,20 @@ final class PlanProving {
           "the plan for " + priced.scale().text(finish),
           "costs " + cost.cents() + ", and another " + proof.point().cost().cents());
     }
-    List<PlanProof.Block> blocks = new ArrayList<>();
-    ProofSheet paid = ProofSheet.ofPlan(of.network(), plan, other(money, plan));
-    blocks.add(new PlanProof.Block("plan", of.network(), paid));
+    List<PlanProof.Block> blocks = new ArrayList<>(paid(of, plan).blocks());
     for (Branching.Leaf leaf : proof.leaves()) {
       Network relaxed = leaf.relaxation().network();
       Money alike = leaf.relaxation().fixed().plus(money.fixed());
       ProofSheet sheet = ProofSheet.of(relaxed, leaf.plan(), finish, leaf.flow(), alike);
       blocks.add(new PlanProof.Block(String.valueOf(blocks.size()), relaxed, sheet.withoutPlan()));
     }
-    return new PlanProof(blocks);
+    return new PlanProof(blocks, List.of());
+  }
+
+  /** The first block alone where money is not convex: what the plan pays. */
+  static PlanProof paid(Case of, Plan plan) {
+    ProofSheet paid = ProofSheet.ofPlan(of.network(), plan, other(of.momentMoney(), plan));
+    return new PlanProof(List.of(new PlanProof.Block("plan", of.network(), paid)), List.of());
   }
 
   private static Map<String, Money> other(MomentMoney money, Plan plan) {

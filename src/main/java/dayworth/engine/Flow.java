@@ -2,7 +2,9 @@ package dayworth.engine;
 
 import dayworth.network.Network;
 import dayworth.value.SlopeScale;
+import java.util.ArrayList;
 import java.util.EnumMap;
+import java.util.List;
 import java.util.Map;
 
 /**
@@ -50,6 +52,34 @@ public final class Flow {
   private Flow(Flow other) {
     this.scale = other.scale;
     other.amounts.forEach((over, amount) -> amounts.put(over, amount.clone()));
+  }
+
+  /**
+   * What runs over one constraint.
+   *
+   * @param amount units of the slope scale
+   */
+  public record Entry(Over over, int index, long amount) {}
+
+  /** A flow of what its entries say and nothing else. */
+  public static Flow of(SlopeScale scale, Network network, List<Entry> entries) {
+    Flow flow = new Flow(scale, network);
+    entries.forEach(entry -> flow.set(entry.over(), entry.index(), entry.amount()));
+    return flow;
+  }
+
+  /** What is not zero, by kind and then by index. */
+  public List<Entry> entries() {
+    List<Entry> entries = new ArrayList<>();
+    amounts.forEach(
+        (over, all) -> {
+          for (int index = 0; index < all.length; index++) {
+            if (all[index] != 0) {
+              entries.add(new Entry(over, index, all[index]));
+            }
+          }
+        });
+    return entries;
   }
 
   /** A flow of the same amounts that keeps them when this one changes. */

@@ -10,8 +10,8 @@ import java.util.List;
 /** The members that every result begins with, and what is written of a case's activities. */
 final class CaseJson {
 
-  private static final String FORMAT = "dayworth result";
-  private static final int FORMAT_VERSION = 1;
+  static final String FORMAT = "dayworth result";
+  static final int FORMAT_VERSION = 1;
 
   private final Network network;
 

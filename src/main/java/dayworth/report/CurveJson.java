@@ -54,6 +54,7 @@ final class CurveJson {
                 gap.number("bound", unproved.bound().cents());
               });
         });
+    json.object("evidence", members -> new EvidenceJson(answer).write(members));
   }
 
   void finish(JsonText json, Finish finish) throws IOException {

@@ -28,6 +28,8 @@ final class MeetJson {
     json.object("asked", this::asked);
     json.object("met", this::met);
     json.object("proof_sheet", this::proof);
+    EvidenceJson evidence = new EvidenceJson(answer.curve());
+    json.object("proof_flow", members -> evidence.flow(members, answer.proof().flow()));
   }
 
   private void asked(JsonText json) throws IOException {

@@ -1,5 +1,6 @@
 package dayworth.report;
 
+import dayworth.decision.Case;
 import dayworth.decision.CheckAnswer;
 import dayworth.decision.CurveAnswer;
 import dayworth.decision.MeetAnswer;
@@ -46,5 +47,10 @@ public final class ResultJson {
           CaseJson.writeHead(json, answer.of(), "check", programVersion);
           new CheckJson(answer).write(json);
         });
+  }
+
+  /** What every result begins with. */
+  static String ofHead(Case of, String command, String programVersion) {
+    return JsonText.object(json -> CaseJson.writeHead(json, of, command, programVersion));
   }
 }

@@ -122,7 +122,8 @@ class CurveTextTest {
             plain.asked(),
             plain.provedRows(),
             plain.unproved(),
-            plain.crossCheck());
+            plain.crossCheck(),
+            plain.evidence());
     List<String> lines = CurveText.lines(stopped, Style.PLAIN, 94);
     assertTrue(
         lines.contains(

@@ -10,6 +10,7 @@ import dayworth.contract.TimeRelated;
 import dayworth.decision.Case;
 import dayworth.decision.CrossCheck;
 import dayworth.decision.CurveAnswer;
+import dayworth.decision.Evidence;
 import dayworth.decision.Finish;
 import dayworth.decision.InputFile;
 import dayworth.decision.Notice;
@@ -33,7 +34,9 @@ import java.time.DayOfWeek;
 import java.time.LocalDate;
 import java.util.EnumSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.TreeMap;
 
 /**
  * An answer worked by hand. A (6 days for 100, 4 for 140: 20 a day) comes before =B (4 for 50, 3
@@ -127,7 +130,13 @@ final class SeriesAnswer {
                 new CrossCheck.Comparison(9, Money.of(180), new BigDecimal("180.00"))),
             1,
             2,
-            List.of()));
+            List.of()),
+        new Evidence(
+            1,
+            Optional.empty(),
+            new TreeMap<>(Map.of(8L, atEight)),
+            Plan.allNormal(NETWORK),
+            Plan.allCrash(NETWORK)));
   }
 
   private static Finish finish(

@@ -95,6 +95,15 @@ public final class ProofChecker {
   }
 
   /**
+   * Checks whether a plan can be carried out within {@code finish} ticks, whatever it costs.
+   *
+   * @return what makes it impossible; empty if it is possible
+   */
+  public static Optional<Refuted> possible(Network network, Plan plan, long finish) {
+    return ScheduleCheck.fault(network, plan, finish);
+  }
+
+  /**
    * Checks the chain that is said to stop the project from being shorter.
    *
    * @param shortest ticks that its terms must add up to
