@@ -5,8 +5,11 @@ import dayworth.value.TimeScale;
 import java.awt.Color;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
+import java.util.stream.Collectors;
 
 /** The axis of finishes: the longest on the left, so that reading to the right is buying time. */
 final class FinishAxis {
@@ -81,9 +84,20 @@ final class FinishAxis {
     double y = plot.bottom();
     sheet.line(Pen.AXIS, plot.x(), y, plot.right(), y);
     figures(sheet, named, y, y + TICK, y + 18);
-    String caption = "Finish, in " + words.many() + ": each step to the right buys time";
+    String caption =
+        "Finish, in " + words.many() + ": each step to the right buys time" + dates(named);
     sheet.text(
         Type.AXIS, Look.QUIET, Sheet.Anchor.MIDDLE, plot.x() + plot.width() / 2, y + 36, caption);
+  }
+
+  /** The dates of the figures that are named. */
+  private String dates(long named) {
+    Set<Long> durations = new LinkedHashSet<>(List.of(longest, named, shortest));
+    String dates =
+        durations.stream()
+            .flatMap(at -> words.date(at).map(date -> words.figure(at) + " is " + date).stream())
+            .collect(Collectors.joining(", "));
+    return dates.isEmpty() ? "" : ". " + dates;
   }
 
   private void figures(Sheet sheet, long named, double from, double to, double baseline) {

@@ -3,11 +3,14 @@ package dayworth.report.picture;
 import dayworth.decision.Case;
 import dayworth.decision.Progress;
 import dayworth.value.TimeScale;
+import dayworth.value.WorkingCalendar;
 import java.math.BigDecimal;
 import java.math.RoundingMode;
 import java.text.DecimalFormat;
 import java.text.DecimalFormatSymbols;
+import java.time.format.DateTimeFormatter;
 import java.util.Locale;
+import java.util.Optional;
 
 /** How figures are said in pictures: grouped, with their unit or currency. */
 final class Words {
@@ -16,7 +19,11 @@ final class Words {
 
   private final String currency;
   private final String unit;
+  private static final DateTimeFormatter DATE =
+      DateTimeFormatter.ofPattern("EEE d MMM uuuu", Locale.ENGLISH);
+
   private final TimeScale scale;
+  private final Optional<WorkingCalendar> calendar;
   private final String project;
   private final String asPlanned;
 
@@ -24,6 +31,7 @@ final class Words {
     this.currency = safe(of.currency());
     this.unit = of.unit().word();
     this.scale = of.network().scale();
+    this.calendar = of.terms().calendar();
     String title = safe(of.title());
     String name = title.isEmpty() ? safe(of.name()) : title;
     this.project = withoutStop(name) + of.progress().map(Words::toGo).orElse("");
@@ -100,6 +108,11 @@ final class Words {
   /** A duration without its unit. */
   String figure(long ticks) {
     return grouped("#,##0.###", scale.units(ticks));
+  }
+
+  /** The date of a finish; empty in a case without dates. */
+  Optional<String> date(long ticks) {
+    return calendar.map(dates -> DATE.format(dates.finishDate(ticks)));
   }
 
   /** A duration with its unit. */
