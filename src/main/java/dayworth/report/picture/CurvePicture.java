@@ -11,6 +11,9 @@ import java.util.Optional;
 /** Money against the finish, with the points that are spoken of named on the line. */
 final class CurvePicture implements Picture {
 
+  /** Of the name of a section. */
+  private static final double SECTION_WIDTH = 190;
+
   private static final double PLOT_HEIGHT = 340;
   private static final double BELOW = 56;
   private static final double RING = 4.5;
@@ -40,6 +43,7 @@ final class CurvePicture implements Picture {
     flags = new Flags(layout.width());
     FinishAxis places = new FinishAxis(answer, layout, layout.plot(0, PLOT_HEIGHT), words);
     addFlags(places);
+    addSectionFlags(places);
     plot = layout.plot(heading.height() + flags.height(), PLOT_HEIGHT);
     finishes = new FinishAxis(answer, layout, plot, words);
     List<MoneyAxis.Range> ranges = new ArrayList<>();
@@ -84,6 +88,7 @@ final class CurvePicture implements Picture {
   private List<Finish> flagged() {
     List<Finish> flagged = new ArrayList<>(List.of(answer.leastTotal()));
     contract().ifPresent(flagged::add);
+    SectionMark.of(answer).forEach(mark -> flagged.add(mark.finish()));
     return flagged;
   }
 
@@ -105,6 +110,15 @@ final class CurvePicture implements Picture {
             due ->
                 flags.add(
                     Pen.LEADER, named("Contract finish", due, Look.INK), places.x(due.duration())));
+  }
+
+  private void addSectionFlags(FinishAxis places) {
+    for (SectionMark mark : SectionMark.of(answer)) {
+      String name = Type.LABEL.fit(Words.safe(mark.name()), SECTION_WIDTH);
+      long at = mark.finish().duration();
+      Label label = new Label(Look.INK, 1, List.of(name, "on time from " + words.time(at)));
+      flags.add(Pen.LEADER, label, places.x(at));
+    }
   }
 
   private Label named(String name, Finish finish, java.awt.Color ink) {
@@ -139,8 +153,11 @@ final class CurvePicture implements Picture {
       boolean drawn = !line.stopsAtZero() || isNearMoney(line, i);
       if (drawn) {
         Finish row = answer.rows().get(i);
-        points.add(
-            new Point2D.Double(finishes.x(row.duration()), money.y(line.amount().apply(row))));
+        double x = finishes.x(row.duration());
+        if (line.isStaircase() && !points.isEmpty()) {
+          points.add(new Point2D.Double(x, points.get(points.size() - 1).y));
+        }
+        points.add(new Point2D.Double(x, money.y(line.amount().apply(row))));
       }
     }
     return points;
