@@ -33,7 +33,9 @@ public final class NoticeText {
       String gap = " ".repeat(width - place.length() + 2);
       lines.add(Wording.INDENT + place + gap + Wording.safe(problem.wrong()));
       if (!detail(problem).isEmpty()) {
-        lines.add(" ".repeat(width + 4) + detail(problem));
+        String indent = " ".repeat(width + 4);
+        int widest = Math.max(CurveText.WIDEST, indent.length() + LEAST_PLACE_WIDTH);
+        lines.addAll(Wording.wrap(detail(problem), indent, widest));
       }
     }
     lines.add("");
