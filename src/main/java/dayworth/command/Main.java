@@ -12,7 +12,22 @@ public final class Main {
   public static void main(String[] arguments) {
     // Pictures are painted into files; a screen is neither needed nor looked for.
     System.setProperty("java.awt.headless", "true");
-    System.exit(run(arguments));
+    System.exit(runSafely(arguments));
+  }
+
+  /** Want of memory or of the runtime's own parts is no exception, and still no stack trace. */
+  private static int runSafely(String... arguments) {
+    try {
+      return run(arguments);
+    } catch (OutOfMemoryError failure) {
+      System.err.println(
+          "dayworth: the case needs more memory: start it with java -Xmx4g -jar ...");
+      return Exit.INTERNAL;
+    } catch (Error failure) {
+      System.err.println(
+          "dayworth: the Java runtime fails: " + failure + ". Try --no-pictures, or another JDK.");
+      return Exit.INTERNAL;
+    }
   }
 
   static int run(String... arguments) {
