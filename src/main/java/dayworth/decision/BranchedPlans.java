@@ -56,28 +56,35 @@ final class BranchedPlans implements CheapestPlans {
     this.network = network;
     this.charges = charges;
     watcher.now("seeking the cheapest plan whatever the finish");
-    long longest = unhurried(bare);
+    Point free = unhurried(bare);
+    long longest = Math.max(finish(free.plan()), bare.shortest());
     watcher.now("branching over the finishes");
     List<Point> solved = solve(rows.apply(longest, bare.shortest()));
     int first = 0;
     while (first + 1 < solved.size() && solved.get(first + 1).cost().equals(solved.get(0).cost())) {
       first++;
     }
-    points = solved.subList(first, solved.size());
+    points = new ArrayList<>(solved.subList(first, solved.size()));
+    if (!free.isProved()) {
+      points.set(0, points.get(0).boundedBy(free.bound()));
+    }
     points.forEach(point -> planOf.put(point.duration(), point.plan()));
     curve = curve(bare);
   }
 
-  /** When the cheapest plan of all finishes. */
-  private long unhurried(Curve bare) {
+  /** The cheapest plan of all. */
+  private Point unhurried(Curve bare) {
     long asPlanned = Timing.earliest(network, Plan.allNormal(network)).finish();
     long far = Math.max(bare.longest(), asPlanned) * TIMES_AS_PLANNED;
-    Plan plan = solve(new long[] {far}).get(0).plan();
+    return solve(new long[] {far}).get(0);
+  }
+
+  private static long finish(Plan plan) {
     long finish = 0;
     for (int i = 0; i < plan.size(); i++) {
       finish = Math.max(finish, plan.start(i) + plan.duration(i));
     }
-    return Math.max(finish, bare.shortest());
+    return finish;
   }
 
   private List<Point> solve(SortedSet<Long> durations) {

@@ -21,7 +21,7 @@ import java.util.List;
 final class GivenDurations {
 
   /** Convex problems for the one finish. */
-  private static final long PROBLEMS = 2_000;
+  private static final long PROBLEMS = 20_000;
 
   private GivenDurations() {}
 

@@ -2,6 +2,7 @@ package dayworth.decision;
 
 import dayworth.contract.Section;
 import dayworth.engine.branching.Branching;
+import dayworth.engine.branching.Point;
 import dayworth.engine.stepping.Stepping;
 import dayworth.network.Moment;
 import dayworth.network.Network;
@@ -46,7 +47,7 @@ final class SectionChoices {
           && !isOnTime(section, curve.asked().timing().plan())
           && choices.canBeOnTime(section)) {
         choices
-            .onTime(section)
+            .proved(section)
             .ifPresent(
                 finish -> found.add(new Choice(Choice.Kind.SECTION_DATE, finish, section.name())));
       }
@@ -60,6 +61,20 @@ final class SectionChoices {
 
   private boolean canBeOnTime(Section section) {
     return Stepping.earliestFinish(of.network(), section.activity()) <= section.due().ticks();
+  }
+
+  /** Empty also where the limit on branches leaves open what is cheapest: then none is named. */
+  private Optional<Finish> proved(Section section) {
+    try {
+      return onTime(section);
+    } catch (NotProved open) {
+      return Optional.empty();
+    }
+  }
+
+  private static final class NotProved extends RuntimeException {
+
+    private static final long serialVersionUID = 1;
   }
 
   private Optional<Finish> onTime(Section section) {
@@ -87,10 +102,12 @@ final class SectionChoices {
     if (Stepping.shortest(network) > finish) {
       return Optional.empty();
     }
-    Plan plan =
-        Branching.solve(network, of.momentMoney().charges(), new long[] {finish}, PROBLEMS)
-            .get(0)
-            .plan();
+    Point point =
+        Branching.solve(network, of.momentMoney().charges(), new long[] {finish}, PROBLEMS).get(0);
+    if (!point.isProved()) {
+      throw new NotProved();
+    }
+    Plan plan = point.plan();
     return Optional.of(
         PlanCost.of(of, held.ofBase(Timing.earliest(network, plan).scheduled()), finish));
   }

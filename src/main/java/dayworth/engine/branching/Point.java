@@ -17,6 +17,11 @@ public record Point(long duration, Plan plan, Money cost, Money bound, Branch br
   /** Bounds on a rounded scale are less than half a cent low. */
   static final Money ROUNDING = Money.of(1).dividedBy(200);
 
+  /** The same point where no more than another bound is known. */
+  public Point boundedBy(Money other) {
+    return new Point(duration, plan, cost, bound.min(other), branch);
+  }
+
   /** Whether the plan is proved to be cheapest. */
   public boolean isProved() {
     return cost.minus(bound).compareTo(ROUNDING) < 0;
