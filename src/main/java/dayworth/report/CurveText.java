@@ -194,6 +194,17 @@ public final class CurveText {
     return finish.direct().plus(finish.running()).plus(finish.other().sum());
   }
 
+  /** Where money is not convex, what is compared is the branch that a finish's plan lies in. */
+  private static String whereCompared(CurveAnswer answer) {
+    CrossCheck check = answer.crossCheck();
+    return answer.of().momentMoney().charges().isEmpty()
+        ? Wording.count(check.atBreakpoints(), "breakpoint", "breakpoints")
+            + " and "
+            + Wording.count(check.between(), "point", "points")
+            + " between them"
+        : "the branches of " + Wording.count(check.comparisons().size(), "finish", "finishes");
+  }
+
   /** What is known of the rest, which is the best that was found. */
   private static String gap(CurveAnswer answer) {
     if (answer.unproved().isEmpty()) {
@@ -230,10 +241,7 @@ public final class CurveText {
         + (largest.signum() == 0
             ? "The linear programme agrees at "
             : "The linear programme was compared at ")
-        + Wording.count(check.atBreakpoints(), "breakpoint", "breakpoints")
-        + " and "
-        + Wording.count(check.between(), "point", "points")
-        + " between them"
+        + whereCompared(answer)
         + sampled
         + "; largest difference "
         + largest.toPlainString()
