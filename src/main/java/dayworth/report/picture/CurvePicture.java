@@ -28,6 +28,7 @@ final class CurvePicture implements Picture {
   private final Flags flags;
   private final List<Double> flagEnds = new ArrayList<>();
   private final List<MoneyLine> lines;
+  private final List<SectionMark> sections;
   private final Box plot;
   private final FinishAxis finishes;
   private final MoneyAxis money;
@@ -40,6 +41,7 @@ final class CurvePicture implements Picture {
     wording = new CurveWording(answer, words, amounts);
     heading = new Heading(layout, wording.title(), wording.note());
     lines = MoneyLine.of(answer, amounts);
+    sections = SectionMark.of(answer);
     flags = new Flags(layout.width());
     FinishAxis places = new FinishAxis(answer, layout, layout.plot(0, PLOT_HEIGHT), words);
     addFlags(places);
@@ -88,7 +90,7 @@ final class CurvePicture implements Picture {
   private List<Finish> flagged() {
     List<Finish> flagged = new ArrayList<>(List.of(answer.leastTotal()));
     contract().ifPresent(flagged::add);
-    SectionMark.of(answer).forEach(mark -> flagged.add(mark.finish()));
+    sections.forEach(mark -> flagged.add(mark.finish()));
     return flagged;
   }
 
@@ -113,7 +115,7 @@ final class CurvePicture implements Picture {
   }
 
   private void addSectionFlags(FinishAxis places) {
-    for (SectionMark mark : SectionMark.of(answer)) {
+    for (SectionMark mark : sections) {
       String name = Type.LABEL.fit(Words.safe(mark.name()), SECTION_WIDTH);
       long at = mark.finish().duration();
       Label label = new Label(Look.INK, 1, List.of(name, "on time from " + words.time(at)));
