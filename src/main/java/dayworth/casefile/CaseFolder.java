@@ -27,16 +27,12 @@ final class CaseFolder {
           HolidayTable.FILE,
           ProgressTable.FILE,
           SectionTable.FILE,
-          RunningTable.FILE);
+          RunningTable.FILE,
+          MeasureTable.FILE,
+          PackageTable.FILE);
 
   private static final Set<String> NOT_YET =
-      Set.of(
-          "measures.csv",
-          "packages.csv",
-          "labour.csv",
-          "patterns.csv",
-          "pay.csv",
-          "output_loss.csv");
+      Set.of("labour.csv", "patterns.csv", "pay.csv", "output_loss.csv");
 
   /** Only other commands use these. */
   private static final Set<String> LEFT_ALONE = Set.of("ranges.csv", "notes.md");

@@ -98,6 +98,17 @@ public final class Ways {
     return true;
   }
 
+  /** Every activity by its shortest way; of several the cheapest. */
+  public Plan shortest() {
+    long[] durations = new long[network.size()];
+    int[] measures = new int[network.size()];
+    for (int i = 0; i < durations.length; i++) {
+      durations[i] = all.get(first[i]).duration();
+      measures[i] = all.get(first[i]).measure();
+    }
+    return Plan.of(durations).using(measures);
+  }
+
   /** Measures that are left out, by their index. */
   public List<Dominated> dominated() {
     return List.copyOf(dominated);

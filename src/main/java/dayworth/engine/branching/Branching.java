@@ -12,6 +12,7 @@ import java.util.ArrayList;
 import java.util.Deque;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.BooleanSupplier;
 import java.util.stream.IntStream;
 
 /**
@@ -71,6 +72,8 @@ public final class Branching {
   /** How many relaxations are solved at most. */
   private long mostNodes;
 
+  private BooleanSupplier isOver = () -> false;
+
   private Branching(
       Network network, List<Charge> charges, long[] durations, Optional<List<Leaf>> leaves) {
     this.network = network;
@@ -95,7 +98,18 @@ public final class Branching {
    */
   public static List<Point> solve(
       Network network, List<Charge> charges, long[] durations, long most) {
+    return solve(network, charges, durations, most, () -> false);
+  }
+
+  /**
+   * The same, stopped early where somebody says that it is over; what is open then keeps a gap.
+   *
+   * @throws BoundRefuted if a bound does not stand up to its recheck
+   */
+  public static List<Point> solve(
+      Network network, List<Charge> charges, long[] durations, long most, BooleanSupplier isOver) {
     Branching branching = new Branching(network, charges, durations, Optional.empty());
+    branching.isOver = isOver;
     branching.run(most + durations.length);
     return branching.points();
   }
@@ -139,7 +153,7 @@ public final class Branching {
 
   private void run(long most) {
     mostNodes = most;
-    while (!open.isEmpty() && solved < most) {
+    while (!open.isEmpty() && solved < most && !isOver.getAsBoolean()) {
       goOn(open.remove());
     }
     open.forEach(this::leave);
@@ -163,7 +177,7 @@ public final class Branching {
         rows.add(node.rows().get(k));
       }
     }
-    WayBranch ways = new WayBranch(network, charges, node.branch(), relaxation);
+    WayBranch ways = new WayBranch(network, charges, node.branch(), relaxation, isOver);
     List<Optional<Money>> bounds =
         ways.solve(
             rows.stream().map(row -> new WayBranch.Row(durations[row], best.get(row))).toList(),

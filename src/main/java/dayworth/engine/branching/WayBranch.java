@@ -12,6 +12,7 @@ import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.BooleanSupplier;
 
 /**
  * One branch of a network whose activities have ways to choose from: searched by {@link WaySearch}
@@ -24,6 +25,7 @@ final class WayBranch {
   private final Branch branch;
   private final Relaxation relaxation;
   private final WaySearch search;
+  private final BooleanSupplier isOver;
 
   /** The split for what is furthest from the truth. */
   private Optional<List<Branch>> halves = Optional.empty();
@@ -40,7 +42,13 @@ final class WayBranch {
    */
   record Row(long duration, Best best) {}
 
-  WayBranch(Network network, List<Charge> charges, Branch branch, Relaxation relaxation) {
+  WayBranch(
+      Network network,
+      List<Charge> charges,
+      Branch branch,
+      Relaxation relaxation,
+      BooleanSupplier isOver) {
+    this.isOver = isOver;
     this.network = network;
     this.charges = charges;
     this.branch = branch;
@@ -98,7 +106,7 @@ final class WayBranch {
     if (isSplitFor(search.planAt(root))) {
       return Optional.of(least);
     }
-    WaySearch.Outcome outcome = search.search(root, incumbent(row), most);
+    WaySearch.Outcome outcome = search.search(root, incumbent(row), most, isOver);
     nodes += outcome.nodes();
     outcome.unresolved().ifPresent(this::splitFor);
     return outcome.bound().map(this::money).filter(bound -> !row.best().beats(bound));

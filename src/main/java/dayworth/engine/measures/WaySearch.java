@@ -4,6 +4,7 @@ import dayworth.engine.Flow;
 import dayworth.engine.Ways;
 import dayworth.engine.proof.WayBound;
 import dayworth.engine.stepping.Narrowing;
+import dayworth.engine.stepping.Stepping;
 import dayworth.network.Network;
 import dayworth.network.Plan;
 import dayworth.value.SlopeScale;
@@ -12,6 +13,7 @@ import java.util.ArrayDeque;
 import java.util.Arrays;
 import java.util.Deque;
 import java.util.Optional;
+import java.util.function.BooleanSupplier;
 
 /**
  * The cheapest choice of ways for one finish after the other.
@@ -111,6 +113,16 @@ public final class WaySearch {
     Arrays.setAll(hull, opening::hull);
   }
 
+  /** Whether the amounts of a network are small enough to be exact. */
+  public static boolean fits(Network network) {
+    Ways ways = Ways.of(network);
+    if (ways.isPlain()) {
+      return true;
+    }
+    Network relaxed = HullNetwork.of(network, Opening.all(network, ways));
+    return Stepping.scaleFor(relaxed).isPresent() && WayScale.of(relaxed).isPresent();
+  }
+
   public SlopeScale scale() {
     return scale;
   }
@@ -141,8 +153,10 @@ public final class WaySearch {
    *
    * @param root from {@link #reach}
    * @param most how many nodes are solved at most
+   * @param isOver whether to stop before that
    */
-  public Outcome search(Narrowing.State root, Incumbent incumbent, long most) {
+  public Outcome search(
+      Narrowing.State root, Incumbent incumbent, long most, BooleanSupplier isOver) {
     waiting.clear();
     leftOpen = null;
     unresolved = Optional.empty();
@@ -153,7 +167,7 @@ public final class WaySearch {
       if (node.bound.compareTo(incumbent.closedFrom()) >= 0) {
         continue;
       }
-      if (nodes >= most) {
+      if (nodes >= most || isOver.getAsBoolean()) {
         leave(node.bound);
       } else {
         solve(node, root.finish(), incumbent);
