@@ -1,6 +1,5 @@
 package dayworth.engine.measures;
 
-import dayworth.engine.Flow;
 import dayworth.engine.Ways;
 import dayworth.engine.proof.WayBound;
 import dayworth.engine.stepping.Narrowing;
@@ -188,31 +187,54 @@ public final class WaySearch {
     if (node.activity >= 0 && !narrow(node.activity, node.allowed)) {
       return;
     }
-    Flow flow = narrowing.flow();
-    WayBound.Proven proven = counting.of(flow);
-    BigInteger bound = proven.atLeast(finish, node.allowed).max(node.bound);
-    if (bound.compareTo(incumbent.closedFrom()) >= 0) {
-      return;
+    BigInteger bound = node.bound;
+    boolean isNarrower = true;
+    for (int round = 0; isNarrower; round++) {
+      WayBound.Proven proven = counting.of(narrowing.flow());
+      BigInteger counted = proven.atLeast(finish, node.allowed);
+      bound = bound.max(counted);
+      if (bound.compareTo(incumbent.closedFrom()) >= 0) {
+        return;
+      }
+      if (round == 0) {
+        incumbent.offer(rounding.round(narrowing, finish));
+      }
+      Closing closing = close(proven, node.allowed, incumbent.closedFrom().subtract(counted));
+      if (closing == Closing.ALL) {
+        return;
+      }
+      isNarrower = closing == Closing.SOME;
     }
-    incumbent.offer(rounding.round(narrowing, finish));
-    BigInteger closedFrom = incumbent.closedFrom();
-    if (bound.compareTo(closedFrom) >= 0) {
-      return;
-    }
-    if (close(proven, node.allowed, closedFrom.subtract(bound))) {
-      split(node.allowed, bound, incumbent);
-    }
+    split(node.allowed, bound, incumbent);
   }
 
-  /** Disallows ways that no better plan can use; whether any plan is left. */
-  private boolean close(WayBound.Proven proven, boolean[] allowed, BigInteger room) {
+  private enum Closing {
+    NONE,
+    SOME,
+    /** No plan is left. */
+    ALL
+  }
+
+  /**
+   * Disallows ways that no better plan can use, and narrows the relaxation to the rest.
+   *
+   * @param room how far a way must lift the bound, scaled
+   */
+  private Closing close(WayBound.Proven proven, boolean[] allowed, BigInteger room) {
+    if (room.signum() <= 0) {
+      return Closing.ALL;
+    }
     long most = room.bitLength() < Long.SIZE ? room.longValueExact() : Long.MAX_VALUE;
+    Closing closing = Closing.NONE;
     for (int i = 0; i < network.size(); i++) {
-      if (ways.isChoice(i) && close(i, proven, allowed, most) && !narrow(i, allowed)) {
-        return false;
+      if (ways.isChoice(i) && close(i, proven, allowed, most)) {
+        closing = Closing.SOME;
+        if (!narrow(i, allowed)) {
+          return Closing.ALL;
+        }
       }
     }
-    return true;
+    return closing;
   }
 
   /** Closes ways of one activity; its line only as a whole. Whether any was. */

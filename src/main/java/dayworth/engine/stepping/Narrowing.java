@@ -117,10 +117,11 @@ public final class Narrowing {
       return true;
     }
     if (squeeze.time(to) - squeeze.time(from) > apart) {
-      if (squeeze.run(from, to, UNLIMITED, apart, Squeeze.Listener.NONE) == Squeeze.End.HELD) {
+      Squeeze.End end = squeeze.run(from, to, UNLIMITED, apart, Squeeze.Listener.NONE);
+      squeeze.settle();
+      if (end == Squeeze.End.HELD) {
         return false;
       }
-      squeeze.settle();
       net.set(arc, UNLIMITED, squeeze.sent());
     }
     net.setLength(arc, -apart);
