@@ -1,6 +1,7 @@
 package dayworth.engine.branching;
 
 import dayworth.engine.Ways;
+import dayworth.engine.proof.ProofChecker;
 import dayworth.engine.stepping.Descent;
 import dayworth.network.Activity;
 import dayworth.network.Measures;
@@ -42,9 +43,9 @@ final class LeastChanged {
     List<Activity> settled = new ArrayList<>();
     for (int i = 0; i < network.size(); i++) {
       Activity activity = network.activity(i);
-      boolean onLine = found.measure(i) == Plan.NO_MEASURE && activity.divisible();
+      boolean onLine = found.measure(i) == Plan.NO_MEASURE && ways.hasLine(i);
       settled.add(
-          onLine || !ways.isChoice(i)
+          onLine
               ? activity
               : new Activity(
                   activity.id(),
@@ -69,9 +70,8 @@ final class LeastChanged {
     for (int i = 0; i < network.size(); i++) {
       boolean same =
           found.measure(i) == like.measure(i)
-              && (!ways.isChoice(i)
-                  || network.activity(i).divisible()
-                  || found.duration(i) == like.duration(i));
+              && (found.duration(i) == like.duration(i)
+                  || (found.measure(i) == Plan.NO_MEASURE && ways.hasLine(i)));
       if (!same) {
         return false;
       }
@@ -89,6 +89,7 @@ final class LeastChanged {
         .within(duration, before)
         .map(plan -> plan.withMeasuresOf(found))
         .map(plan -> plan.isScheduled() ? plan : Timing.earliest(network, plan).scheduled())
+        .filter(plan -> ProofChecker.possible(network, plan, duration).isEmpty())
         .filter(plan -> ChargedMoney.cost(network, charges, plan).equals(cost));
   }
 }
