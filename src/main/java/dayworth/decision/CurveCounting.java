@@ -69,7 +69,8 @@ final class CurveCounting {
       CrossCheck crossCheck,
       long slopeUnits,
       Optional<List<List<Flow.Entry>>> flows,
-      boolean isCut) {
+      boolean isCut,
+      Optional<Curve> relaxed) {
     NavigableSet<Long> durations = durations(of, curve.longest(), curve.shortest());
     curve.steps().forEach(step -> durations.add(step.to()));
     List<Finish> rows = finishes(durations.descendingSet());
@@ -98,6 +99,7 @@ final class CurveCounting {
         unproved,
         isCut,
         crossCheck,
+        relaxed,
         new Evidence(slopeUnits, flows, counted, asPlanned, crashEverything));
   }
 

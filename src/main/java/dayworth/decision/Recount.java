@@ -141,7 +141,8 @@ public final class Recount {
         crossCheck(curve),
         claim.slopeUnits(),
         claim.flows(),
-        claim.isCut());
+        claim.isCut(),
+        Optional.empty());
   }
 
   private void requireSteps() throws ClaimRefuted {

@@ -141,6 +141,7 @@ final class SeriesAnswer {
             1,
             2,
             List.of()),
+        Optional.empty(),
         new Evidence(
             1,
             Optional.empty(),

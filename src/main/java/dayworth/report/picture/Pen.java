@@ -14,6 +14,7 @@ record Pen(Color color, BasicStroke stroke) {
   static final Pen LEADER = solid(Look.EDGE, 0.9);
   static final Pen TOTAL = solid(Look.PLUM, 3);
   static final Pen DIRECT = solid(Look.INK, 1.9);
+  static final Pen LEAST_DIRECT = dashed(Look.INK, 1.1, 2, 3);
   static final Pen TIME = dashed(Look.SLATE, 1.9, 11, 4);
   static final Pen DAMAGES = dashed(Look.BRICK, 2, 4, 3);
   static final Pen BONUS = dotted(Look.OLIVE, 2.4, 4.6);
