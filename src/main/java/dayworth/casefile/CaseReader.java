@@ -1,5 +1,6 @@
 package dayworth.casefile;
 
+import dayworth.buildup.BuildUp;
 import dayworth.contract.MomentMoney;
 import dayworth.decision.Case;
 import dayworth.decision.InputFile;
@@ -9,6 +10,7 @@ import dayworth.network.Activity;
 import dayworth.network.Link;
 import dayworth.network.Network;
 import dayworth.value.Money;
+import dayworth.value.Quantity;
 import dayworth.value.TimeScale;
 import java.math.BigDecimal;
 import java.nio.file.Path;
@@ -35,7 +37,17 @@ public final class CaseReader {
    * @param atLeast the time scale is at least as fine as this
    */
   public static Reading read(Path path, TimeScale atLeast) {
-    return new CaseReader(path).read(atLeast);
+    return read(path, atLeast, Quantity.ONE);
+  }
+
+  /**
+   * Reads a folder.
+   *
+   * @param atLeast the time scale is at least as fine as this
+   * @param lossFactor what all losses of output are multiplied by; 0 or more
+   */
+  public static Reading read(Path path, TimeScale atLeast, Quantity lossFactor) {
+    return new CaseReader(path).read(atLeast, lossFactor);
   }
 
   /** The files of the contract in a folder with their digests, sound or not. */
@@ -43,31 +55,53 @@ public final class CaseReader {
     return new CaseReader(path).folder.digests();
   }
 
-  private Reading read(TimeScale atLeast) {
+  private Reading read(TimeScale atLeast, Quantity lossFactor) {
     folder.checkNames();
     Optional<String> activityText = folder.text(ActivityTable.FILE);
     Optional<String> holidayText = folder.text(HolidayTable.FILE);
+    Optional<String> labourText = folder.text(LabourTable.FILE);
     Optional<String> linkText = folder.text(LinkTable.FILE);
+    Optional<String> lossText = folder.text(LossTable.FILE);
+    Optional<String> patternText = folder.text(PatternTable.FILE);
+    Optional<String> payText = folder.text(PayTable.FILE);
     Optional<String> progressText = folder.text(ProgressTable.FILE);
     Optional<String> runningText = folder.text(RunningTable.FILE);
     Optional<String> sectionText = folder.text(SectionTable.FILE);
     Optional<String> termText = folder.text(TermsTable.FILE);
-    Optional<List<ActivityRow>> known =
-        activityText.flatMap(text -> ActivityTable.read(text, findings));
-    List<LinkRow> links = LinkTable.read(known, linkText, findings);
     TermsTable terms = TermsTable.read(termText, findings);
+    LabourTable labour = LabourTable.of(labourText, findings);
+    Optional<List<ActivityRow>> stated =
+        activityText.flatMap(text -> ActivityTable.read(text, labour::mayGive, findings));
+    ActivityIds ids = new ActivityIds(stated, findings);
+    LabourFiles.Texts patternTexts = new LabourFiles.Texts(patternText, payText, lossText);
+    LabourFiles files = LabourFiles.read(labour, ids, patternTexts, lossFactor, findings);
+    CaseBuildUp built = CaseBuildUp.of(files, terms, findings);
+    Optional<List<ActivityRow>> known = stated.map(built::filled);
+    List<LinkRow> links = LinkTable.read(known, linkText, findings);
     List<LocalDate> holidays = HolidayTable.read(holidayText, findings);
     DateRules.check(known.orElse(List.of()), holidays, terms, findings);
     List<ProgressRow> progress = ProgressTable.read(known, progressText, findings);
-    ActivityIds ids = new ActivityIds(known, findings);
     List<SectionRow> sections = SectionTable.read(ids, terms, sectionText, findings);
     List<RunningRow> running = RunningTable.read(ids, terms, runningText, findings);
     ProgressDates.check(progress, folder.has(ProgressTable.FILE), terms, findings);
     if (findings.hasProblems()) {
       return new Reading.Unsound(findings.problems(), findings.warnings());
     }
+    BuildUp buildUp = built.build(stated.orElseThrow(), known.orElseThrow(), progress, lossFactor);
+    if (findings.hasProblems()) {
+      return new Reading.Unsound(findings.problems(), findings.warnings());
+    }
     Case read =
-        build(known.orElseThrow(), links, terms, holidays, progress, sections, running, atLeast);
+        build(
+            known.orElseThrow(),
+            links,
+            terms,
+            holidays,
+            progress,
+            sections,
+            running,
+            buildUp,
+            atLeast);
     if (findings.hasProblems()) {
       return new Reading.Unsound(findings.problems(), findings.warnings());
     }
@@ -82,8 +116,12 @@ public final class CaseReader {
       List<ProgressRow> rows,
       List<SectionRow> sections,
       List<RunningRow> running,
+      BuildUp buildUp,
       TimeScale atLeast) {
-    TimeScale scale = Resolution.of(activities, links, terms, rows, sections).and(atLeast);
+    TimeScale scale =
+        Resolution.of(activities, links, terms, rows, sections)
+            .and(CaseBuildUp.scale(buildUp))
+            .and(atLeast);
     CaseCalendar times = CaseCalendar.of(terms, holidays, scale);
     Network planned =
         new Network(
@@ -116,6 +154,7 @@ public final class CaseReader {
         ContractTerms.of(terms, times),
         money,
         progress,
+        buildUp,
         findings.warnings(),
         folder.inputs());
   }

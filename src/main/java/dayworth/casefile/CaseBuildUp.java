@@ -1,0 +1,232 @@
+package dayworth.casefile;
+
+import dayworth.buildup.ActivityBuildUp;
+import dayworth.buildup.BuildUp;
+import dayworth.buildup.Building;
+import dayworth.buildup.Labour;
+import dayworth.buildup.Way;
+import dayworth.value.Money;
+import dayworth.value.Quantity;
+import dayworth.value.TimeScale;
+import java.math.BigDecimal;
+import java.math.RoundingMode;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.stream.LongStream;
+
+/**
+ * Makes of labour and patterns what activities take the normal way, and what spells of the other
+ * patterns make of them.
+ */
+final class CaseBuildUp {
+
+  private static final BigDecimal PERCENT = BigDecimal.valueOf(100);
+  private static final int MOST_PERCENT = 5;
+
+  private final LabourFiles files;
+  private final Optional<Building> building;
+  private final Findings findings;
+
+  private CaseBuildUp(LabourFiles files, Optional<Building> building, Findings findings) {
+    this.files = files;
+    this.building = building;
+    this.findings = findings;
+  }
+
+  static CaseBuildUp of(LabourFiles files, TermsTable terms, Findings findings) {
+    Quantity unitsPerWeek = unitsPerWeek(terms);
+    boolean can = !files.patterns().isEmpty() && unitsPerWeek.signum() > 0;
+    return new CaseBuildUp(
+        files,
+        can ? Optional.of(new Building(unitsPerWeek, files.patterns())) : Optional.empty(),
+        findings);
+  }
+
+  /** The working days of a week in time units; 0 where the terms that tell it are faulty. */
+  private static Quantity unitsPerWeek(TermsTable terms) {
+    Quantity days = Quantity.of(terms.workingDays().size());
+    return switch (terms.unit()) {
+      case WEEK -> Quantity.ONE;
+      case DAY -> days;
+      case HOUR, SHIFT -> days.times(Quantity.of(terms.amount("units_per_working_day")));
+    };
+  }
+
+  /**
+   * The activities, each with a normal duration and cost: those that are stated, or else those of
+   * its labour. A stated one that differs from its labour by more than a twentieth is doubtful.
+   */
+  List<ActivityRow> filled(List<ActivityRow> activities) {
+    List<ActivityRow> filled = new ArrayList<>(activities);
+    building.ifPresent(
+        known ->
+            files
+                .rows()
+                .forEach(
+                    row ->
+                        filled.set(
+                            row.activity(), filled(activities.get(row.activity()), row, known))));
+    return filled;
+  }
+
+  private ActivityRow filled(ActivityRow stated, LabourRow row, Building known) {
+    Quantity units = known.normalUnits(row.labour());
+    Money cost = known.normalCost(row.labour());
+    if (units.compareTo(Quantity.of(TimeCell.MOST)) > 0) {
+      String right =
+          "fewer labour_hours or a bigger crew: at most " + TimeCell.MOST + " time units";
+      findings.problem(row.place("labour_hours").notice("takes too long", "", right));
+      return stated;
+    }
+    stated
+        .normal()
+        .ifPresent(
+            given ->
+                compare(stated, "normal_duration", given, units.rounded(3, RoundingMode.CEILING)));
+    stated.normalCost().ifPresent(given -> compare(stated, "normal_cost", given, cost.cents()));
+    ActivityRow filled =
+        stated.withNormal(
+            stated.normal().orElseGet(() -> BuildUp.SCALE.units(Building.roundedUp(units))),
+            stated
+                .normalCost()
+                .orElseGet(() -> cost.rounded(MoneyCell.MOST_DECIMALS, RoundingMode.HALF_UP)));
+    if (stated.normal().isEmpty()) {
+      checkCrash(filled);
+    }
+    return filled;
+  }
+
+  private void compare(ActivityRow row, String column, BigDecimal stated, BigDecimal sum) {
+    if (column.equals("normal_duration") && stated.signum() == 0) {
+      String right = "more than 0 or blank, or no row in " + LabourTable.FILE;
+      findings.problem(place(row, column).notice("a milestone takes no labour", "0", right));
+      return;
+    }
+    BigDecimal most = sum.multiply(BigDecimal.valueOf(MOST_PERCENT));
+    BigDecimal difference = stated.subtract(sum).abs();
+    if (difference.multiply(PERCENT).compareTo(most) > 0) {
+      String wrong = "differs from its labour by more than " + MOST_PERCENT + " %";
+      String right = "the labour comes to " + sum.toPlainString() + "; what is stated is kept";
+      findings.warning(place(row, column).notice(wrong, stated.toPlainString(), right));
+    }
+  }
+
+  /** What is checked of a stated duration when it is read. */
+  private void checkCrash(ActivityRow row) {
+    BigDecimal normal = row.normal().orElseThrow();
+    String given = normal.toPlainString() + ", the normal duration by its labour";
+    int longer = row.crash().map(crash -> crash.compareTo(normal)).orElse(-1);
+    if (longer > 0) {
+      findings.problem(
+          place(row, "crash_duration")
+              .notice(
+                  "longer than the normal duration",
+                  row.crash().orElseThrow().toPlainString(),
+                  "at most " + given));
+    } else if (longer == 0
+        && row.crashCost()
+            .filter(cost -> cost.compareTo(row.normalCost().orElseThrow()) != 0)
+            .isPresent()) {
+      findings.problem(
+          place(row, "crash_cost")
+              .notice(
+                  "another cost for the same duration",
+                  row.crashCost().orElseThrow().toPlainString(),
+                  "a crash duration below " + given));
+    }
+  }
+
+  private static Place place(ActivityRow row, String column) {
+    return new Place(ActivityTable.FILE, row.line(), column);
+  }
+
+  /**
+   * The build-up of all activities with labour that are not finished; of one in progress of what is
+   * left.
+   *
+   * @param stated the activities as they stand in the file
+   * @param filled the same with their normal durations and costs
+   */
+  BuildUp build(
+      List<ActivityRow> stated,
+      List<ActivityRow> filled,
+      List<ProgressRow> progress,
+      Quantity lossFactor) {
+    if (building.isEmpty() || files.rows().isEmpty()) {
+      return BuildUp.NONE;
+    }
+    Map<Integer, ProgressRow> progressOf = new HashMap<>();
+    progress.forEach(row -> progressOf.put(row.activity(), row));
+    List<ActivityBuildUp> built = new ArrayList<>();
+    for (LabourRow row : files.rows()) {
+      ActivityRow normal = filled.get(row.activity());
+      Optional<ProgressRow> status = Optional.ofNullable(progressOf.get(row.activity()));
+      Optional<BigDecimal> left =
+          status
+              .filter(given -> given.started().given())
+              .map(
+                  given ->
+                      given.finished().given()
+                          ? BigDecimal.ZERO
+                          : given.remaining().value().orElseThrow());
+      if (left.isEmpty()) {
+        built.add(whole(row, stated.get(row.activity()), normal));
+      } else if (left.get().signum() > 0) {
+        built.add(rest(row, normal, left.get()));
+      }
+    }
+    built.sort(Comparator.comparingInt(ActivityBuildUp::activity));
+    return new BuildUp(lossFactor, files.patterns(), built);
+  }
+
+  private ActivityBuildUp whole(LabourRow row, ActivityRow stated, ActivityRow normal) {
+    Money cost = Money.of(normal.normalCost().orElseThrow());
+    return checked(row, row.labour(), stated.normal().map(Quantity::of), cost);
+  }
+
+  private ActivityBuildUp rest(LabourRow row, ActivityRow normal, BigDecimal left) {
+    Quantity remaining = Quantity.of(left);
+    Quantity share = remaining.dividedBy(Quantity.of(normal.normal().orElseThrow()));
+    Money cost = share.at(Money.of(normal.normalCost().orElseThrow()));
+    return checked(row, row.labour().share(share), Optional.of(remaining), cost);
+  }
+
+  private ActivityBuildUp checked(
+      LabourRow row, Labour labour, Optional<Quantity> units, Money cost) {
+    ActivityBuildUp built = building.orElseThrow().build(row.activity(), labour, units, cost);
+    files.patterns().stream()
+        .skip(1)
+        .filter(pattern -> pattern.weeksMax().isEmpty())
+        .filter(pattern -> !endsWithin(built.ways(pattern)))
+        .forEach(
+            pattern ->
+                findings.problem(
+                    row.place("labour_hours")
+                        .notice(
+                            "takes more than " + BuildUp.MOST_WEEKS + " weeks",
+                            pattern.name(),
+                            "a weeks_max for it in " + PatternTable.FILE)));
+    return built;
+  }
+
+  private static boolean endsWithin(List<Way> ways) {
+    return ways.get(ways.size() - 1).spell().lastsToTheEnd();
+  }
+
+  /** The coarsest scale on which all its durations are whole. */
+  static TimeScale scale(BuildUp buildUp) {
+    return buildUp.activities().stream()
+        .flatMapToLong(CaseBuildUp::durations)
+        .mapToObj(duration -> TimeScale.of(BuildUp.SCALE.units(duration)))
+        .reduce(TimeScale.WHOLE, TimeScale::and);
+  }
+
+  private static LongStream durations(ActivityBuildUp built) {
+    return LongStream.concat(
+        LongStream.of(built.normal()), built.ways().stream().mapToLong(Way::duration));
+  }
+}
