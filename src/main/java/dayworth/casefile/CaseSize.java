@@ -45,8 +45,7 @@ final class CaseSize {
       tooFarApart(ActivityTable.FILE, "smaller or rounder costs");
       return;
     }
-    Network priced =
-        new Network(network.scale(), network.activities(), network.links(), money.spans());
+    Network priced = network.withSpans(money.spans());
     if (!ChargedMoney.fits(priced, money.charges(), TIMES_AS_PLANNED * asPlanned)) {
       String file = money.running().isEmpty() ? SectionTable.FILE : RunningTable.FILE;
       tooFarApart(file, "smaller or rounder rates and costs");

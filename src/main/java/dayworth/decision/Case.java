@@ -69,9 +69,7 @@ public record Case(
 
   /** The network with the convex money that hangs on moments as spans. */
   public Network pricedNetwork() {
-    return momentMoney.spans().isEmpty()
-        ? network
-        : new Network(network.scale(), network.activities(), network.links(), momentMoney.spans());
+    return momentMoney.spans().isEmpty() ? network : network.withSpans(momentMoney.spans());
   }
 
   /** How far an activity is. */

@@ -44,7 +44,7 @@ public final class ChargedMoney {
         spans.add(new Span(charge.name(), Moment.PROJECT_START, moment, longest, steepest));
       }
     }
-    Network fenced = new Network(network.scale(), network.activities(), network.links(), spans);
+    Network fenced = network.withSpans(spans);
     return Stepping.scaleFor(fenced)
         .filter(scale -> scale.perUnit() >= grain.perUnit())
         .isPresent();

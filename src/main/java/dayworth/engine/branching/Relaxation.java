@@ -19,8 +19,7 @@ public record Relaxation(Network network, List<List<Envelope>> envelopes) {
   static Relaxation of(Network network, List<List<Envelope>> envelopes) {
     List<Span> spans = new ArrayList<>(network.spans());
     envelopes.forEach(ofCharge -> ofCharge.forEach(envelope -> spans.addAll(envelope.spans())));
-    return new Relaxation(
-        new Network(network.scale(), network.activities(), network.links(), spans), envelopes);
+    return new Relaxation(network.withSpans(spans), envelopes);
   }
 
   /** What a plan costs here: no more than in truth if it lies in the branch. */
