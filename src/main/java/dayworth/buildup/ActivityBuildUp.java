@@ -8,13 +8,19 @@ import java.util.stream.Stream;
  * What working patterns buy in one activity.
  *
  * @param activity its index in the case
- * @param labour what it takes; of work in progress what is left of it
+ * @param ofRemaining whether all of it is of what is left of work in progress
+ * @param labour what it takes
  * @param normal its duration at the normal pattern, in thousandths of a time unit
  * @param normalCost the cost at it
  * @param ways by pattern, then by weeks
  */
 public record ActivityBuildUp(
-    int activity, Labour labour, long normal, Money normalCost, List<Way> ways) {
+    int activity,
+    boolean ofRemaining,
+    Labour labour,
+    long normal,
+    Money normalCost,
+    List<Way> ways) {
 
   public ActivityBuildUp {
     ways = List.copyOf(ways);

@@ -52,9 +52,24 @@ public final class Building {
    * @param stated its normal duration in time units; empty if nothing but the labour tells it
    * @param cost its normal cost, stated or not
    */
-  public ActivityBuildUp build(int activity, Labour labour, Optional<Quantity> stated, Money cost) {
+  public ActivityBuildUp whole(int activity, Labour labour, Optional<Quantity> stated, Money cost) {
+    return build(activity, false, labour, stated.orElseGet(() -> normalUnits(labour)), cost);
+  }
+
+  /**
+   * The ways to do what is left of one activity.
+   *
+   * @param left what is left of its labour
+   * @param remaining its duration in time units
+   * @param cost of what is left
+   */
+  public ActivityBuildUp rest(int activity, Labour left, Quantity remaining, Money cost) {
+    return build(activity, true, left, remaining, cost);
+  }
+
+  private ActivityBuildUp build(
+      int activity, boolean ofRemaining, Labour labour, Quantity units, Money cost) {
     SpellSum sum = new SpellSum(labour, normal);
-    Quantity units = stated.orElseGet(() -> normalUnits(labour));
     Quantity unitsOfAWeek = units.dividedBy(sum.normalWeeks());
     List<Way> ways = new ArrayList<>();
     for (Pattern pattern : bought) {
@@ -64,7 +79,12 @@ public final class Building {
       }
     }
     return new ActivityBuildUp(
-        activity, labour, roundedUp(units), cost, judged(ways, roundedUp(units), cost));
+        activity,
+        ofRemaining,
+        labour,
+        roundedUp(units),
+        cost,
+        judged(ways, roundedUp(units), cost));
   }
 
   /** A number of time units in thousandths of one, rounded up. */

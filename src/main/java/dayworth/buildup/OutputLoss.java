@@ -44,16 +44,6 @@ public record OutputLoss(List<Week> weeks) {
     return weeks.stream().limit(upTo).map(Week::source).distinct().toList();
   }
 
-  /**
-   * All losses times a factor.
-   *
-   * @throws IllegalArgumentException if no output would be left in some week
-   */
-  public OutputLoss times(Quantity factor) {
-    return new OutputLoss(
-        weeks.stream().map(week -> new Week(week.loss().times(factor), week.source())).toList());
-  }
-
   private Week at(int week) {
     return weeks.get(Math.min(week, weeks.size()) - 1);
   }

@@ -41,38 +41,6 @@ public record Pattern(
     }
   }
 
-  /** So many hours and days for the crew as it is, with neither loss nor cost of its own. */
-  public static Pattern plain(String name, Quantity hoursPerWeek, Quantity daysPerWeek) {
-    return new Pattern(
-        name,
-        hoursPerWeek,
-        daysPerWeek,
-        Quantity.ONE,
-        Quantity.ZERO,
-        Money.ZERO,
-        Money.ZERO,
-        OptionalInt.empty(),
-        "",
-        PayLadder.STRAIGHT,
-        OutputLoss.NONE);
-  }
-
-  /** The same pattern, its losses of output times a factor; crowding stays. */
-  public Pattern withLossTimes(Quantity factor) {
-    return new Pattern(
-        name,
-        hoursPerWeek,
-        daysPerWeek,
-        crewFactor,
-        crowdingLoss,
-        onceCost,
-        weekCost,
-        weeksMax,
-        note,
-        pay,
-        loss.times(factor));
-  }
-
   public Quantity hoursPerDay() {
     return hoursPerWeek.dividedBy(daysPerWeek);
   }

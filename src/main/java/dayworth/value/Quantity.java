@@ -29,11 +29,6 @@ public final class Quantity implements Comparable<Quantity> {
     return new Quantity(Money.of(number));
   }
 
-  /** What share of {@code all} an amount is. */
-  public static Quantity share(Money amount, Money all) {
-    return new Quantity(amount.dividedBy(all));
-  }
-
   public Quantity plus(Quantity other) {
     return new Quantity(number.plus(other.number));
   }
@@ -70,10 +65,6 @@ public final class Quantity implements Comparable<Quantity> {
 
   public int signum() {
     return number.signum();
-  }
-
-  public boolean isWhole() {
-    return number.rounded(0, RoundingMode.DOWN).compareTo(number.rounded(1, RoundingMode.UP)) == 0;
   }
 
   /** The number cut to some decimals, without zeros at its end. */

@@ -2,6 +2,7 @@ package dayworth.buildup;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
+import dayworth.testing.Patterns;
 import dayworth.value.Money;
 import dayworth.value.Quantity;
 import java.math.BigDecimal;
@@ -15,7 +16,7 @@ import org.junit.jupiter.api.Test;
 /** Each line of the cost of three spells of the ferry berth, added up by hand beside it. */
 class FerryBerthByHandTest {
 
-  private static final Pattern NORMAL = Pattern.plain("normal", Quantity.of(40), Quantity.of(5));
+  private static final Pattern NORMAL = Patterns.plain("normal", 40, 5);
 
   /** Five tens: once and a half above 40 hours; 450 a week; 4, 4, 6, 8, 12, 16, 18, 20 % lost. */
   private static final Pattern LONG_DAYS =
@@ -30,7 +31,7 @@ class FerryBerthByHandTest {
           OptionalInt.of(10),
           "",
           ladder("40", "1.5"),
-          loss("0.04", "0.04", "0.06", "0.08", "0.12", "0.16", "0.18", "0.20"));
+          Patterns.loss("0.04", "0.04", "0.06", "0.08", "0.12", "0.16", "0.18", "0.20"));
 
   /** Twice the crew, an eighth lost to crowding, all hours at 1.12; 4,800 once, 2,600 a week. */
   private static final Pattern TWO_SHIFTS =
@@ -45,7 +46,7 @@ class FerryBerthByHandTest {
           OptionalInt.of(12),
           "",
           ladder("0", "1.12"),
-          loss("0"));
+          Patterns.loss("0"));
 
   /** 672 hours, crew of 6: 2.8 weeks, 14 days; 672 × 48 + 49,744 = 82,000. */
   private static final Labour H2 = labour(672, 6, 48, 49_744);
@@ -56,11 +57,6 @@ class FerryBerthByHandTest {
 
   private static PayLadder ladder(String above, String multiplier) {
     return new PayLadder(List.of(new PayLadder.Step(quantity(above), quantity(multiplier))));
-  }
-
-  private static OutputLoss loss(String... weeks) {
-    return new OutputLoss(
-        Stream.of(weeks).map(week -> new OutputLoss.Week(quantity(week), "assumed")).toList());
   }
 
   private static Labour labour(int hours, int crew, int rate, int other) {
@@ -74,7 +70,7 @@ class FerryBerthByHandTest {
   private static ActivityBuildUp built(Labour labour, Pattern... bought) {
     List<Pattern> patterns = Stream.concat(Stream.of(NORMAL), Stream.of(bought)).toList();
     Building building = new Building(Quantity.of(5), patterns);
-    return building.build(0, labour, Optional.empty(), building.normalCost(labour));
+    return building.whole(0, labour, Optional.empty(), building.normalCost(labour));
   }
 
   private static Way way(ActivityBuildUp of, String name) {
@@ -147,7 +143,7 @@ class FerryBerthByHandTest {
   @Test
   void aStatedDurationIsKeptAndOthersAreTheSameShareOfIt() {
     Building building = new Building(Quantity.of(5), List.of(NORMAL, LONG_DAYS));
-    ActivityBuildUp stated = building.build(0, H2, Optional.of(Quantity.of(28)), money("100000"));
+    ActivityBuildUp stated = building.whole(0, H2, Optional.of(Quantity.of(28)), money("100000"));
     assertEquals(28_000, stated.normal());
     Way way = way(stated, "long days 2 weeks");
     assertEquals(24_000, way.duration());
