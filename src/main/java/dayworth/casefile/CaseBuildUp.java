@@ -185,19 +185,20 @@ final class CaseBuildUp {
 
   private ActivityBuildUp whole(LabourRow row, ActivityRow stated, ActivityRow normal) {
     Money cost = Money.of(normal.normalCost().orElseThrow());
-    return checked(row, row.labour(), stated.normal().map(Quantity::of), cost);
+    Optional<Quantity> units = stated.normal().map(Quantity::of);
+    Labour labour = row.labour();
+    return checked(row, building.orElseThrow().whole(row.activity(), labour, units, cost));
   }
 
   private ActivityBuildUp rest(LabourRow row, ActivityRow normal, BigDecimal left) {
     Quantity remaining = Quantity.of(left);
     Quantity share = remaining.dividedBy(Quantity.of(normal.normal().orElseThrow()));
     Money cost = share.at(Money.of(normal.normalCost().orElseThrow()));
-    return checked(row, row.labour().share(share), Optional.of(remaining), cost);
+    Labour labour = row.labour().share(share);
+    return checked(row, building.orElseThrow().rest(row.activity(), labour, remaining, cost));
   }
 
-  private ActivityBuildUp checked(
-      LabourRow row, Labour labour, Optional<Quantity> units, Money cost) {
-    ActivityBuildUp built = building.orElseThrow().build(row.activity(), labour, units, cost);
+  private ActivityBuildUp checked(LabourRow row, ActivityBuildUp built) {
     files.patterns().stream()
         .skip(1)
         .filter(pattern -> pattern.weeksMax().isEmpty())

@@ -8,6 +8,7 @@ import dayworth.decision.Progress;
 import dayworth.decision.WorkToGo;
 import dayworth.network.Activity;
 import dayworth.network.Link;
+import dayworth.network.Measures;
 import dayworth.network.Network;
 import dayworth.value.Money;
 import dayworth.value.Quantity;
@@ -127,7 +128,9 @@ public final class CaseReader {
         new Network(
             scale,
             activities.stream().map(row -> activity(row, times)).toList(),
-            links.stream().map(row -> link(row, scale)).toList());
+            links.stream().map(row -> link(row, scale)).toList(),
+            List.of(),
+            new Measures(BuiltMeasures.of(buildUp, scale), List.of()));
     Optional<Progress> progress = CaseProgress.of(activities, rows, terms, times);
     WorkToGo work = WorkToGo.of(planned, progress);
     MomentMoney money = CaseMoney.of(sections, running, terms, times, progress);
