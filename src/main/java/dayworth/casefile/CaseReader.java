@@ -8,7 +8,6 @@ import dayworth.decision.Progress;
 import dayworth.decision.WorkToGo;
 import dayworth.network.Activity;
 import dayworth.network.Link;
-import dayworth.network.Measures;
 import dayworth.network.Network;
 import dayworth.value.Money;
 import dayworth.value.Quantity;
@@ -63,6 +62,8 @@ public final class CaseReader {
     Optional<String> labourText = folder.text(LabourTable.FILE);
     Optional<String> linkText = folder.text(LinkTable.FILE);
     Optional<String> lossText = folder.text(LossTable.FILE);
+    Optional<String> measureText = folder.text(MeasureTable.FILE);
+    Optional<String> packageText = folder.text(PackageTable.FILE);
     Optional<String> patternText = folder.text(PatternTable.FILE);
     Optional<String> payText = folder.text(PayTable.FILE);
     Optional<String> progressText = folder.text(ProgressTable.FILE);
@@ -84,6 +85,9 @@ public final class CaseReader {
     List<ProgressRow> progress = ProgressTable.read(known, progressText, findings);
     List<SectionRow> sections = SectionTable.read(ids, terms, sectionText, findings);
     List<RunningRow> running = RunningTable.read(ids, terms, runningText, findings);
+    PackageTable packages = PackageTable.read(packageText, findings);
+    List<MeasureRow> measures = MeasureTable.read(ids, packages, measureText, findings);
+    packages.reportUnused(measures);
     ProgressDates.check(progress, folder.has(ProgressTable.FILE), terms, findings);
     if (findings.hasProblems()) {
       return new Reading.Unsound(findings.problems(), findings.warnings());
@@ -101,6 +105,8 @@ public final class CaseReader {
             progress,
             sections,
             running,
+            measures,
+            packages,
             buildUp,
             atLeast);
     if (findings.hasProblems()) {
@@ -117,10 +123,12 @@ public final class CaseReader {
       List<ProgressRow> rows,
       List<SectionRow> sections,
       List<RunningRow> running,
+      List<MeasureRow> measures,
+      PackageTable packages,
       BuildUp buildUp,
       TimeScale atLeast) {
     TimeScale scale =
-        Resolution.of(activities, links, terms, rows, sections)
+        Resolution.of(activities, links, terms, rows, sections, measures)
             .and(CaseBuildUp.scale(buildUp))
             .and(atLeast);
     CaseCalendar times = CaseCalendar.of(terms, holidays, scale);
@@ -130,12 +138,13 @@ public final class CaseReader {
             activities.stream().map(row -> activity(row, times)).toList(),
             links.stream().map(row -> link(row, scale)).toList(),
             List.of(),
-            new Measures(BuiltMeasures.of(buildUp, scale), List.of()));
+            CaseMeasures.of(measures, packages, buildUp, scale, findings));
     Optional<Progress> progress = CaseProgress.of(activities, rows, terms, times);
     WorkToGo work = WorkToGo.of(planned, progress);
     MomentMoney money = CaseMoney.of(sections, running, terms, times, progress);
     CaseSize.check(work.network(), money, terms, times, sections, findings);
     SectionDoubts.report(sections, running, rows, terms, times, planned, findings);
+    MeasureDoubts.report(measures, rows, planned, findings);
     checkSomethingIsToGo(progress);
     Doubts.report(
         new ReadCase(
@@ -181,7 +190,9 @@ public final class CaseReader {
         scale.ticks(row.crash().orElse(normal)),
         cost,
         row.crashCost().map(Money::of).orElse(cost),
-        row.notBefore().map(times::start).orElse(0L));
+        row.notBefore().map(times::start).orElse(0L),
+        0,
+        row.divisible());
   }
 
   private static Link link(LinkRow row, TimeScale scale) {

@@ -2,7 +2,6 @@ package dayworth.decision;
 
 import dayworth.contract.Due;
 import dayworth.contract.FinishCost;
-import dayworth.contract.MomentMoney;
 import dayworth.contract.Terms;
 import dayworth.engine.Curve;
 import dayworth.engine.Flow;
@@ -34,7 +33,6 @@ final class CurveCounting {
   private final Case of;
   private final Network network;
   private final Terms terms;
-  private final MomentMoney money;
   private final Curve curve;
   private final Function<SortedSet<Long>, List<Plan>> plans;
   private final UnaryOperator<Plan> schedule;
@@ -55,7 +53,6 @@ final class CurveCounting {
     this.of = of;
     this.network = of.network();
     this.terms = of.terms();
-    this.money = of.momentMoney();
     this.curve = curve;
     this.plans = plans;
     this.schedule = schedule;
@@ -79,7 +76,7 @@ final class CurveCounting {
     long asked = at.orElse(least.get(0).duration());
     Plan plan = plans(new TreeSet<>(List.of(asked))).get(0);
     Plan asPlanned = schedule.apply(Plan.allNormal(network));
-    Plan crashEverything = schedule.apply(Plan.allCrash(network));
+    Plan crashEverything = schedule.apply(of.everythingShortest());
     Optional<Finish> atContract =
         terms
             .contractFinish()
@@ -132,7 +129,7 @@ final class CurveCounting {
   }
 
   private List<Finish> finishes(SortedSet<Long> durations) {
-    if (money.isNone()) {
+    if (of.isPlain()) {
       return durations.stream()
           .map(duration -> finish(duration, curve.costAt(duration), Money.ZERO, terms.at(duration)))
           .toList();

@@ -62,14 +62,14 @@ public final class MeetQuestion {
 
   /** When to finish; where time is wished for, no later than money gains by waiting. */
   private static long finish(Case of, Wish wish, Watcher watcher) throws FinishTooEarly {
-    return of.momentMoney().isNone()
+    return of.isPlain()
         ? finish(of, Stepping.curve(of.network(), PieceWitness.NONE), wish)
         : finishByRows(CurveQuestion.ask(of, wish.duration(), 0, watcher), wish);
   }
 
   /** When to finish, by a curve that is known. */
   static long finish(CurveAnswer answer, Wish wish) {
-    return answer.of().momentMoney().isNone()
+    return answer.of().isPlain()
         ? finish(answer.of(), answer.curve(), wish)
         : finishByRows(answer, wish);
   }

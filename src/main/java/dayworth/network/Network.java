@@ -114,6 +114,12 @@ public final class Network {
     return measures;
   }
 
+  /** Whether some activity has ways that are taken wholly or not at all. */
+  public boolean hasChoices() {
+    return !measures.isNone()
+        || activities.stream().anyMatch(each -> each.isCompressible() && !each.divisible());
+  }
+
   /** The same network with other money between moments. */
   public Network withSpans(List<Span> others) {
     return new Network(scale, activities, links, others, measures);

@@ -9,8 +9,6 @@ import java.nio.file.Path;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
-import org.junit.jupiter.params.ParameterizedTest;
-import org.junit.jupiter.params.provider.ValueSource;
 
 /** The folder itself, the names in it, and all problems together. */
 class FolderRulesTest {
@@ -43,14 +41,6 @@ class FolderRulesTest {
     assertEquals(
         List.of("activities.csv | cannot be read |  | a file one may read"),
         new CaseOnDisk(folder).problems());
-  }
-
-  @ParameterizedTest
-  @ValueSource(strings = {"measures.csv", "packages.csv"})
-  void otherFilesOfACaseAreNotServedYet(String name) throws IOException {
-    assertEquals(
-        List.of(name + " | is not served yet |  | take it out of the folder"),
-        oneActivity().with(name, "x\n").problems());
   }
 
   @Test
