@@ -21,6 +21,7 @@ final class BuildUpPicture implements Picture {
   private final List<ActivityBuildUp> shown;
   private final BuildUpWording wording;
   private final Heading heading;
+  private final SpellKey key;
 
   BuildUpPicture(BuildUpAnswer answer) {
     this.answer = answer;
@@ -28,6 +29,7 @@ final class BuildUpPicture implements Picture {
     shown = all.subList(0, Math.min(MOST_ACTIVITIES, all.size()));
     wording = new BuildUpWording(answer, all.size() - shown.size());
     heading = new Heading(LAYOUT, wording.title(), wording.note());
+    key = new SpellKey(answer.all().bought(), LAYOUT.textWidth());
   }
 
   @Override
@@ -37,7 +39,7 @@ final class BuildUpPicture implements Picture {
 
   @Override
   public int height() {
-    return (int) Math.ceil(heading.height() + shown.size() * ROW + BOTTOM);
+    return (int) Math.ceil(heading.height() + key.height() + shown.size() * ROW + BOTTOM);
   }
 
   @Override
@@ -53,7 +55,8 @@ final class BuildUpPicture implements Picture {
   @Override
   public void paint(Sheet sheet) {
     heading.paint(sheet);
-    double top = heading.height();
+    key.paint(sheet, heading.height());
+    double top = heading.height() + key.height();
     for (ActivityBuildUp built : shown) {
       new SpellRow(answer, built, top).paint(sheet);
       top += ROW;

@@ -41,7 +41,8 @@ record Pen(Color color, BasicStroke stroke) {
           dashed(Look.TEAL_INK, 2.1, 9, 4),
           dashed(Look.BRICK, 2.1, 3, 3),
           dashed(Look.SLATE, 2.1, 14, 3),
-          dotted(Look.OLIVE_INK, 2.6, 4.6));
+          dotted(Look.OLIVE_INK, 2.6, 4.6),
+          dashed(Look.PLUM, 2.1, 6, 2));
 
   static final Pen FLOAT_HATCH = solid(Look.HATCH, 1.1);
 

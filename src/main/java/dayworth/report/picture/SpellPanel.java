@@ -23,6 +23,9 @@ final class SpellPanel {
   private static final double OFF = 8;
   private static final int MOST_GRID_LINES = 4;
   private static final int MOST_WEEKS_NAMED = 8;
+  private static final String WEEKS = "weeks";
+  private static final double SIDE = 20;
+  private static final double TICK_AIR = 8;
 
   private final Box plot;
   private final double atNone;
@@ -48,7 +51,7 @@ final class SpellPanel {
   void paint(Sheet sheet, String caption, Words words) {
     sheet.text(Type.AXIS_NAMED, Look.INK, Sheet.Anchor.START, plot.x(), plot.y() - 8, caption);
     paintAxes(sheet, words);
-    LabelPlacer placer = new LabelPlacer(new Box(plot.x(), plot.y() - 4, plot.width(), 10_000));
+    LabelPlacer placer = new LabelPlacer(plot);
     for (Line line : lines) {
       paintLine(sheet, line, placer);
     }
@@ -66,13 +69,27 @@ final class SpellPanel {
           Type.AXIS, Look.QUIET, Sheet.Anchor.END, plot.x() - 6, y + 4, words.amount(figure));
     }
     sheet.line(Pen.AXIS, plot.x(), plot.bottom(), plot.right(), plot.bottom());
+    paintWeeks(sheet);
+  }
+
+  /** Figures that would run into others are left out. */
+  private void paintWeeks(Sheet sheet) {
+    double baseline = plot.bottom() + 16;
+    double from = plot.x() - SIDE;
+    LabelPlacer placer =
+        new LabelPlacer(new Box(from, plot.bottom(), plot.right() - from, 2 * SIDE));
+    double unit = Type.AXIS.width(WEEKS);
+    placer.avoid(new Box(plot.right() - unit, plot.bottom(), unit, SIDE));
+    sheet.text(Type.AXIS, Look.QUIET, Sheet.Anchor.END, plot.right(), baseline, WEEKS);
     for (BigDecimal weeks : NiceSteps.between(0, longest(), MOST_WEEKS_NAMED)) {
       double x = x(weeks.doubleValue());
-      sheet.line(Pen.AXIS, x, plot.bottom(), x, plot.bottom() + 4);
-      String figure = weeks.stripTrailingZeros().toPlainString();
-      sheet.text(Type.AXIS, Look.QUIET, Sheet.Anchor.MIDDLE, x, plot.bottom() + 16, figure);
+      String figure = weeks.signum() == 0 ? "0" : weeks.stripTrailingZeros().toPlainString();
+      double width = Type.AXIS.width(figure) + TICK_AIR;
+      if (placer.place(List.of(new Box(x - width / 2, plot.bottom(), width, SIDE))).isPresent()) {
+        sheet.line(Pen.AXIS, x, plot.bottom(), x, plot.bottom() + 4);
+        sheet.text(Type.AXIS, Look.QUIET, Sheet.Anchor.MIDDLE, x, baseline, figure);
+      }
     }
-    sheet.text(Type.AXIS, Look.QUIET, Sheet.Anchor.END, plot.right(), plot.bottom() + 16, "weeks");
   }
 
   private void paintLine(Sheet sheet, Line line, LabelPlacer placer) {
@@ -103,6 +120,7 @@ final class SpellPanel {
     }
   }
 
+  /** Where there is room: the key above the rows names every line. */
   private void name(Sheet sheet, Line line, LabelPlacer placer) {
     Point last = line.points().get(line.points().size() - 1);
     double x = x(last.weeks());
@@ -116,8 +134,7 @@ final class SpellPanel {
     places.add(label.at(Sheet.Anchor.END, x - OFF, y - label.height()));
     places.add(label.at(Sheet.Anchor.START, x + OFF, y - label.height() - OFF));
     places.add(label.at(Sheet.Anchor.START, x + OFF, y + OFF));
-    places.add(label.at(Sheet.Anchor.MIDDLE, x, y - label.height() - OFF));
-    label.writeOnPlate(sheet, Sheet.Anchor.START, placer.placeAlways(places));
+    placer.place(places).ifPresent(box -> label.writeOnPlate(sheet, Sheet.Anchor.START, box));
   }
 
   private double x(double weeks) {

@@ -15,6 +15,7 @@ import java.util.function.ToDoubleFunction;
 final class SpellRow {
 
   private static final double NAME_WIDTH = 168;
+  private static final int MOST_LINES = 5;
   private static final double DURATION_X = 244;
   private static final double COST_X = 624;
   private static final double PANEL_WIDTH = 316;
@@ -75,7 +76,8 @@ final class SpellRow {
     double y = top + ABOVE + Type.NAME.size() - 4;
     String id = Type.NAME.fit(Words.safe(activity.id()), NAME_WIDTH);
     sheet.text(Type.NAME, Look.INK, Sheet.Anchor.START, Layout.MARGIN, y, id);
-    for (String line : Type.AXIS.wrap(Words.safe(activity.name()), NAME_WIDTH)) {
+    List<String> name = Type.AXIS.wrap(Words.safe(activity.name()), NAME_WIDTH);
+    for (String line : name.subList(0, Math.min(MOST_LINES, name.size()))) {
       y += Type.NAME.leading();
       sheet.text(Type.AXIS, Look.INK, Sheet.Anchor.START, Layout.MARGIN, y, line);
     }
