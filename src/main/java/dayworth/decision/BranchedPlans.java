@@ -17,6 +17,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.SortedSet;
 import java.util.function.BiFunction;
+import java.util.function.BooleanSupplier;
 import java.util.stream.IntStream;
 
 /**
@@ -32,7 +33,8 @@ final class BranchedPlans implements CheapestPlans {
 
   private final Network network;
   private final List<Charge> charges;
-  private final Effort effort;
+  private final long nodesPerFinish;
+  private final BooleanSupplier isOver;
   private final List<Point> points;
   private final Curve curve;
   private final Map<Long, Plan> planOf = new HashMap<>();
@@ -41,6 +43,8 @@ final class BranchedPlans implements CheapestPlans {
    * Solves every finish.
    *
    * @param network with the convex money as spans
+   * @param nodesPerFinish relaxations that are solved for each finish on average
+   * @param isOver whether to stop before that
    * @param bare the same network without them: its curve tells what stops the project
    * @param rows from the longest and the shortest finish to all that are to be solved, from long to
    *     short
@@ -50,10 +54,12 @@ final class BranchedPlans implements CheapestPlans {
       Network network,
       List<Charge> charges,
       Curve bare,
-      Effort effort,
+      long nodesPerFinish,
+      BooleanSupplier isOver,
       BiFunction<Long, Long, SortedSet<Long>> rows,
       Watcher watcher) {
-    this.effort = effort;
+    this.nodesPerFinish = nodesPerFinish;
+    this.isOver = isOver;
     this.network = network;
     this.charges = charges;
     watcher.now("seeking the cheapest plan whatever the finish");
@@ -95,7 +101,7 @@ final class BranchedPlans implements CheapestPlans {
   private List<Point> solve(long[] durations) {
     try {
       return Branching.solve(
-          network, charges, durations, effort.nodesPerFinish() * durations.length, effort.isOver());
+          network, charges, durations, nodesPerFinish * durations.length, isOver);
     } catch (Branching.BoundRefuted refuted) {
       throw new ProofFailed(
           "the finish at " + network.scale().text(refuted.duration()), refuted.getMessage());

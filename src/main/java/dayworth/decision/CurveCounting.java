@@ -68,7 +68,8 @@ final class CurveCounting {
       List<Unproved> unproved,
       CrossCheck crossCheck,
       long slopeUnits,
-      Optional<List<List<Flow.Entry>>> flows) {
+      Optional<List<List<Flow.Entry>>> flows,
+      boolean isCut) {
     NavigableSet<Long> durations = durations(of, curve.longest(), curve.shortest());
     curve.steps().forEach(step -> durations.add(step.to()));
     List<Finish> rows = finishes(durations.descendingSet());
@@ -95,6 +96,7 @@ final class CurveCounting {
         new CurveAnswer.AskedPlan(finish(asked), Timing.by(network, plan, asked)),
         rows.size() - unproved.size(),
         unproved,
+        isCut,
         crossCheck,
         new Evidence(slopeUnits, flows, counted, asPlanned, crashEverything));
   }

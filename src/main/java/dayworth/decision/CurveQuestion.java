@@ -67,7 +67,8 @@ public final class CurveQuestion {
         priced,
         money.charges(),
         bare,
-        effort,
+        effort.nodesFor(of),
+        effort.isOver(),
         (longest, shortest) -> {
           NavigableSet<Long> durations = CurveCounting.durations(of, longest, shortest);
           at.ifPresent(asked -> durations.add(Math.min(asked, longest)));
@@ -96,7 +97,8 @@ public final class CurveQuestion {
         cheapest.unproved(),
         cheapest.crossCheck(crossChecks, watcher),
         Stepping.scaleFor(of.pricedNetwork()).orElseThrow().perUnit(),
-        cheapest.flows());
+        cheapest.flows(),
+        !cheapest.unproved().isEmpty() && effort.isOver().getAsBoolean());
   }
 
   private List<Plan> plans(SortedSet<Long> durations) {

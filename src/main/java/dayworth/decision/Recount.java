@@ -140,7 +140,8 @@ public final class Recount {
         of.isConvex() ? List.of() : unproved(),
         crossCheck(curve),
         claim.slopeUnits(),
-        claim.flows());
+        claim.flows(),
+        claim.isCut());
   }
 
   private void requireSteps() throws ClaimRefuted {

@@ -71,6 +71,7 @@ final class ClaimReader {
         plan(evidence.get("crash_everything")),
         ticks(result.get("plan"), "duration"),
         each(result.get("proof").get("unproved"), this::unproved),
+        result.get("proof").get("cut_by_effort").isYes(),
         crossCheck(result.get("crosscheck")));
   }
 

@@ -74,8 +74,6 @@ public final class Branching {
 
   private BooleanSupplier isOver = () -> false;
 
-  public static long lastNodes;
-
   private Branching(
       Network network, List<Charge> charges, long[] durations, Optional<List<Leaf>> leaves) {
     this.network = network;
@@ -113,7 +111,6 @@ public final class Branching {
     Branching branching = new Branching(network, charges, durations, Optional.empty());
     branching.isOver = isOver;
     branching.run(most + durations.length);
-    lastNodes = branching.solved;
     return branching.points();
   }
 

@@ -20,6 +20,11 @@ import java.util.function.BooleanSupplier;
  */
 final class WayBranch {
 
+  /** Relaxations for each finish at first, and how many times more each time after. */
+  private static final long FIRST_ALLOWANCE = 100;
+
+  private static final long TIMES_MORE = 5;
+
   private final Network network;
   private final List<Charge> charges;
   private final Branch branch;
@@ -69,47 +74,82 @@ final class WayBranch {
   }
 
   /**
-   * Solves finishes from long to short.
+   * Solves finishes from long to short. What is not settled with few relaxations is searched again
+   * with more, when more is known of its neighbours.
    *
    * @param most how many relaxations are solved at most, beyond one for each finish
    * @return for each finish what the branch's plans cost at least that were not settled; empty if
    *     all are
    */
   List<Optional<Money>> solve(List<Row> rows, long most) {
-    List<Optional<Narrowing.State>> roots = new ArrayList<>();
+    List<Search> searches = new ArrayList<>();
     boolean isPossible = true;
     for (Row row : rows) {
       Optional<Narrowing.State> root = isPossible ? search.reach(row.duration()) : Optional.empty();
       isPossible = root.isPresent();
-      roots.add(root);
+      searches.add(new Search(row, root));
     }
-    List<Optional<Money>> bounds = new ArrayList<>();
-    rows.forEach(row -> bounds.add(Optional.empty()));
-    for (int k = rows.size() - 1; k >= 0; k--) {
-      if (roots.get(k).isPresent()) {
-        long allowance = Math.max(1, (most - nodes) / (k + 1));
-        bounds.set(k, solve(rows.get(k), roots.get(k).get(), allowance));
-      }
-      if (k > 0) {
-        rows.get(k - 1).best().offer(rows.get(k).best());
-      }
-    }
-    return bounds;
+    long allowance = FIRST_ALLOWANCE;
+    long searched = nodes;
+    do {
+      searched = nodes;
+      pass(searches, allowance, most);
+      allowance *= TIMES_MORE;
+    } while (searched < nodes && nodes < most && !isOver.getAsBoolean());
+    return searches.stream()
+        .map(each -> each.bound.filter(b -> !each.row.best().beats(b)))
+        .toList();
   }
 
-  private Optional<Money> solve(Row row, Narrowing.State root, long most) {
-    Money least = money(search.boundAt(root));
-    nodes++;
-    if (row.best().beats(least)) {
-      return Optional.empty();
+  /** Searches what can be searched further once, from the shortest finish on. */
+  private void pass(List<Search> searches, long allowance, long most) {
+    long waiting = searches.stream().filter(each -> each.isOpen).count();
+    for (int k = searches.size() - 1; k >= 0; k--) {
+      Search each = searches.get(k);
+      if (each.isOpen) {
+        each.run(Math.min(allowance, Math.max(1, (most - nodes) / waiting--)));
+      }
+      if (k > 0) {
+        searches.get(k - 1).row.best().offer(each.row.best());
+      }
     }
-    if (isSplitFor(search.planAt(root))) {
-      return Optional.of(least);
+  }
+
+  /** The search for one finish. */
+  private final class Search {
+
+    private final Row row;
+    private final Optional<Narrowing.State> root;
+
+    /** What plans cost at least that are not settled; empty if all are. */
+    private Optional<Money> bound = Optional.empty();
+
+    /** Whether more relaxations can settle more. */
+    private boolean isOpen;
+
+    Search(Row row, Optional<Narrowing.State> root) {
+      this.row = row;
+      this.root = root;
+      this.isOpen = root.isPresent();
     }
-    WaySearch.Outcome outcome = search.search(root, incumbent(row), most, isOver);
-    nodes += outcome.nodes();
-    outcome.unresolved().ifPresent(this::splitFor);
-    return outcome.bound().map(this::money).filter(bound -> !row.best().beats(bound));
+
+    void run(long most) {
+      Money least = money(search.boundAt(root.orElseThrow()));
+      nodes++;
+      if (row.best().beats(least)) {
+        isOpen = false;
+        bound = Optional.empty();
+      } else if (isSplitFor(search.planAt(root.orElseThrow()))) {
+        isOpen = false;
+        bound = Optional.of(least);
+      } else {
+        WaySearch.Outcome outcome = search.search(root.orElseThrow(), incumbent(row), most, isOver);
+        nodes += outcome.nodes();
+        outcome.unresolved().ifPresent(WayBranch.this::splitFor);
+        bound = outcome.bound().map(WayBranch.this::money);
+        isOpen = bound.isPresent() && outcome.unresolved().isEmpty();
+      }
+    }
   }
 
   private void splitFor(WaySearch.Unresolved left) {
