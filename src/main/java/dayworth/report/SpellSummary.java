@@ -89,26 +89,38 @@ final class SpellSummary {
   private void useless(List<String> lines, int width) {
     List<String> own = new ArrayList<>();
     List<String> others = new ArrayList<>();
+    List<String> slower = new ArrayList<>();
     for (Line line : rows) {
       for (Way way : line.useless()) {
-        String by = new WayFigures(line.built(), way).dominator().orElse("slower than normal");
-        boolean isOwn = by.startsWith(line.pattern().name() + " ");
-        String text = id(line) + " " + Wording.safe(way.name() + " (" + by + ")");
-        (isOwn ? own : others).add(text);
+        Optional<String> by = new WayFigures(line.built(), way).dominator();
+        String name = id(line) + " " + Wording.safe(way.name());
+        if (by.isEmpty()) {
+          slower.add(name);
+        } else {
+          boolean isOwn = by.get().startsWith(line.pattern().name() + " ");
+          (isOwn ? own : others).add(name + " (" + Wording.safe(by.get()) + ")");
+        }
       }
     }
     own.addAll(others);
-    if (own.isEmpty()) {
+    String dominated =
+        Wording.count(own.size(), "spell gains", "spells gain")
+            + " nothing over what stands in brackets, which is as quick and no dearer: ";
+    String late =
+        Wording.count(slower.size(), "spell is", "spells are")
+            + " cheaper than the normal way and slower: ";
+    list(lines, dominated, own, width);
+    list(lines, late, slower, width);
+  }
+
+  private static void list(List<String> lines, String what, List<String> names, int width) {
+    if (names.isEmpty()) {
       return;
     }
-    int named = Math.min(MOST_NAMED, own.size());
-    String more = own.size() > named ? ", and " + (own.size() - named) + " more" : "";
-    String text =
-        Wording.count(own.size(), "spell gains", "spells gain")
-            + " nothing over what stands in brackets, which is as quick and no dearer: "
-            + String.join(", ", own.subList(0, named))
-            + more
-            + ".";
+    int named = Math.min(MOST_NAMED, names.size());
+    String more =
+        names.size() > named ? ", and " + Wording.count(names.size() - named, "more", "more") : "";
+    String text = what + String.join(", ", names.subList(0, named)) + more + ".";
     lines.addAll(Wording.wrap(text, Wording.INDENT, width));
   }
 
