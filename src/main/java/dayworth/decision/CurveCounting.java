@@ -177,7 +177,12 @@ final class CurveCounting {
     for (int k = 0; k < curve.steps().size(); k++) {
       Step step = curve.steps().get(k);
       Timing after = Timing.by(network, curve.planAfter(k + 1), step.to());
-      facts.add(new StepFacts(step, of.criticalCount(after), newlyCritical(before, after)));
+      facts.add(
+          new StepFacts(
+              step,
+              PlanChange.between(network, before.plan(), after.plan()),
+              of.criticalCount(after),
+              newlyCritical(before, after)));
       before = after;
     }
     return facts;

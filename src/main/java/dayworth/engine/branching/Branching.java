@@ -123,6 +123,9 @@ public final class Branching {
    */
   public static Optional<Proof> prove(
       Network network, List<Charge> charges, long duration, long most) {
+    if (network.hasChoices()) {
+      return WayProof.of(network, charges, duration, most);
+    }
     List<Leaf> leaves = new ArrayList<>();
     Branching branching =
         new Branching(network, charges, new long[] {duration}, Optional.of(leaves));
@@ -146,10 +149,11 @@ public final class Branching {
   /**
    * A branch that was not split further.
    *
-   * @param plan the cheapest of its convex problem
-   * @param flow proves that
+   * @param network its convex problem
+   * @param flow proves what that costs at least
+   * @param fixed what comes on top
    */
-  public record Leaf(Relaxation relaxation, Plan plan, Flow flow) {}
+  public record Leaf(Network network, Flow flow, Money fixed) {}
 
   private void run(long most) {
     mostNodes = most;
@@ -219,7 +223,7 @@ public final class Branching {
       best.get(row).offer(plan, ChargedMoney.cost(network, charges, plan), node.branch());
       Money bound = relaxation.cost(plan);
       if (leaves.isPresent() && best.get(row).beats(bound)) {
-        leaves.get().add(new Leaf(relaxation, plan, descent.flow()));
+        leaves.get().add(new Leaf(relaxation.network(), descent.flow(), relaxation.fixed()));
       }
       if (!best.get(row).beats(bound)) {
         rows.add(row);
