@@ -21,7 +21,7 @@ import org.junit.jupiter.api.io.TempDir;
 /** Whatever the files of labour hold, they are read or refused, and what is sound can be told. */
 class LabourFuzzTest {
 
-  private static final int CASES = 1500;
+  private static final int CASES = 600;
 
   private static final List<String> SPLICES =
       List.of(
