@@ -9,7 +9,6 @@ import dayworth.value.Money;
 import dayworth.value.Quantity;
 import dayworth.value.TimeScale;
 import java.math.BigDecimal;
-import java.math.RoundingMode;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.HashMap;
@@ -19,13 +18,9 @@ import java.util.Optional;
 import java.util.stream.LongStream;
 
 /**
- * Makes of labour and patterns what activities take the normal way, and what spells of the other
- * patterns make of them.
+ * Makes the build-up of a case: what spells of other patterns make of its activities with labour.
  */
 final class CaseBuildUp {
-
-  private static final BigDecimal PERCENT = BigDecimal.valueOf(100);
-  private static final int MOST_PERCENT = 5;
 
   private final LabourFiles files;
   private final Optional<Building> building;
@@ -56,92 +51,11 @@ final class CaseBuildUp {
     };
   }
 
-  /**
-   * The activities, each with a normal duration and cost: those that are stated, or else those of
-   * its labour. A stated one that differs from its labour by more than a twentieth is doubtful.
-   */
+  /** The activities, each with a normal duration and cost where its labour tells them. */
   List<ActivityRow> filled(List<ActivityRow> activities) {
-    List<ActivityRow> filled = new ArrayList<>(activities);
-    building.ifPresent(
-        known ->
-            files
-                .rows()
-                .forEach(
-                    row ->
-                        filled.set(
-                            row.activity(), filled(activities.get(row.activity()), row, known))));
-    return filled;
-  }
-
-  private ActivityRow filled(ActivityRow stated, LabourRow row, Building known) {
-    Quantity units = known.normalUnits(row.labour());
-    Money cost = known.normalCost(row.labour());
-    if (units.compareTo(Quantity.of(TimeCell.MOST)) > 0) {
-      String right =
-          "fewer labour_hours or a bigger crew: at most " + TimeCell.MOST + " time units";
-      findings.problem(row.place("labour_hours").notice("takes too long", "", right));
-      return stated;
-    }
-    stated
-        .normal()
-        .ifPresent(
-            given ->
-                compare(stated, "normal_duration", given, units.rounded(3, RoundingMode.CEILING)));
-    stated.normalCost().ifPresent(given -> compare(stated, "normal_cost", given, cost.cents()));
-    ActivityRow filled =
-        stated.withNormal(
-            stated.normal().orElseGet(() -> BuildUp.SCALE.units(Building.roundedUp(units))),
-            stated
-                .normalCost()
-                .orElseGet(() -> cost.rounded(MoneyCell.MOST_DECIMALS, RoundingMode.HALF_UP)));
-    if (stated.normal().isEmpty()) {
-      checkCrash(filled);
-    }
-    return filled;
-  }
-
-  private void compare(ActivityRow row, String column, BigDecimal stated, BigDecimal sum) {
-    if (column.equals("normal_duration") && stated.signum() == 0) {
-      String right = "more than 0 or blank, or no row in " + LabourTable.FILE;
-      findings.problem(place(row, column).notice("a milestone takes no labour", "0", right));
-      return;
-    }
-    BigDecimal most = sum.multiply(BigDecimal.valueOf(MOST_PERCENT));
-    BigDecimal difference = stated.subtract(sum).abs();
-    if (difference.multiply(PERCENT).compareTo(most) > 0) {
-      String wrong = "differs from its labour by more than " + MOST_PERCENT + " %";
-      String right = "the labour comes to " + sum.toPlainString() + "; what is stated is kept";
-      findings.warning(place(row, column).notice(wrong, stated.toPlainString(), right));
-    }
-  }
-
-  /** What is checked of a stated duration when it is read. */
-  private void checkCrash(ActivityRow row) {
-    BigDecimal normal = row.normal().orElseThrow();
-    String given = normal.toPlainString() + ", the normal duration by its labour";
-    int longer = row.crash().map(crash -> crash.compareTo(normal)).orElse(-1);
-    if (longer > 0) {
-      findings.problem(
-          place(row, "crash_duration")
-              .notice(
-                  "longer than the normal duration",
-                  row.crash().orElseThrow().toPlainString(),
-                  "at most " + given));
-    } else if (longer == 0
-        && row.crashCost()
-            .filter(cost -> cost.compareTo(row.normalCost().orElseThrow()) != 0)
-            .isPresent()) {
-      findings.problem(
-          place(row, "crash_cost")
-              .notice(
-                  "another cost for the same duration",
-                  row.crashCost().orElseThrow().toPlainString(),
-                  "a crash duration below " + given));
-    }
-  }
-
-  private static Place place(ActivityRow row, String column) {
-    return new Place(ActivityTable.FILE, row.line(), column);
+    return building
+        .map(known -> NormalByLabour.fill(activities, files.rows(), known, findings))
+        .orElse(activities);
   }
 
   /**

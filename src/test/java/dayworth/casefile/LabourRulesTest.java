@@ -126,7 +126,17 @@ class LabourRulesTest {
         .with("activities.csv", header + "A,,,10,21000,\nB,10,5000,,,A\n")
         .expect(
             "activities.csv:2 crash_cost | another cost for the same duration | 21000"
-                + " | a crash duration below 10, the normal duration by its labour");
+                + " | 20200.00 by its labour");
+    disk()
+        .with("activities.csv", header + "A,10,,10,21000,\nB,10,5000,,,A\n")
+        .expect(
+            "activities.csv:2 crash_cost | another cost for the same duration | 21000"
+                + " | 20200.00 by its labour");
+    disk()
+        .with("activities.csv", header + "A,10,,11,21000,\nB,10,5000,,,A\n")
+        .expect(
+            "activities.csv:2 crash_duration | longer than the normal duration | 11"
+                + " | at most 10, the normal duration");
     disk().with("activities.csv", header + "A,,,9,21000,\nB,10,5000,,,A\n").expect();
   }
 

@@ -17,6 +17,9 @@ import org.junit.jupiter.api.io.TempDir;
 /** {@code buildup} with the real jar. */
 class BuildUpCommandTest {
 
+  /** What the README shows. */
+  private static final Path KEPT = Path.of("output", "ferry-berth").toAbsolutePath();
+
   @TempDir private Path folder;
   private RealJar jar;
 
@@ -103,6 +106,10 @@ class BuildUpCommandTest {
     assertTrue(said.contains("at 60 hours a week or more the injury hazard was 23 % higher"), said);
     assertTrue(run.out().lines().allMatch(line -> line.length() <= 94), run.out());
     List<String> table = Files.readAllLines(output("ferry-berth").resolve("buildup.csv"));
+    assertEquals(Files.readAllLines(KEPT.resolve("buildup.csv")), table);
+    assertEquals(
+        Files.readString(KEPT.resolve("result.json")),
+        Files.readString(output("ferry-berth").resolve("result.json")));
     assertTrue(table.stream().anyMatch(row -> row.startsWith("H2,two shifts,1.6,0,8,6,768,0,96,")));
   }
 
