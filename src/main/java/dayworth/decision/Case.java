@@ -1,5 +1,6 @@
 package dayworth.decision;
 
+import dayworth.buildup.BuildUp;
 import dayworth.contract.Due;
 import dayworth.contract.MomentMoney;
 import dayworth.contract.Terms;
@@ -24,6 +25,7 @@ import java.util.stream.IntStream;
  * @param terms what time is worth for the whole
  * @param momentMoney sections and running costs
  * @param progress how far the work is; empty where time counts from the start
+ * @param buildUp what working patterns buy in the activities whose labour is known
  * @param warnings doubtful input, sorted; they stand in every result
  * @param inputs the files it was read from, sorted by name
  */
@@ -36,6 +38,7 @@ public record Case(
     Terms terms,
     MomentMoney momentMoney,
     Optional<Progress> progress,
+    BuildUp buildUp,
     List<Notice> warnings,
     List<InputFile> inputs) {
 
@@ -63,6 +66,7 @@ public record Case(
         terms,
         MomentMoney.none(network.scale()),
         Optional.empty(),
+        BuildUp.NONE,
         warnings,
         inputs);
   }
@@ -129,6 +133,7 @@ public record Case(
         terms.dueBy(due),
         momentMoney,
         progress,
+        buildUp,
         warnings,
         inputs);
   }
