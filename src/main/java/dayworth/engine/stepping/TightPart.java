@@ -94,12 +94,12 @@ final class TightPart {
     int halves = listed;
     for (int out = net.first[here]; out < net.first[here + 1]; out++) {
       int tail = net.head[out];
-      if (time[here] + net.length[out] == time[tail]) {
+      if (moving.holds(tail) && time[here] + net.length[out] == time[tail]) {
         if (halves == half.length) {
           half = Arrays.copyOf(half, 2 * halves);
         }
         half[halves++] = out;
-        if (numberOf[tail] == OUTSIDE && moving.holds(tail) && net.room[net.mate[out]] > 0) {
+        if (numberOf[tail] == OUTSIDE && net.room[net.mate[out]] > 0) {
           take(tail);
         }
       }
@@ -107,7 +107,7 @@ final class TightPart {
     return halves;
   }
 
-  /** Makes half-links of the half-arcs that stay within the part. */
+  /** Makes half-links of the half-arcs listed that stay within the part. */
   private void link() {
     if (head.length < half.length) {
       head = new int[half.length];
@@ -119,25 +119,31 @@ final class TightPart {
       int listed = first[v];
       first[v] = links;
       for (; listed < first[v + 1]; listed++) {
-        int out = half[listed];
-        int next = numberOf[net.head[out]];
-        if (next == OUTSIDE) {
-          continue;
-        }
-        if (links > first[v] && areBesideEachOther(half[links - 1], out)) {
-          room[links - 1] = sum(room[links - 1], net.room[out]);
-        } else {
-          half[links] = out;
-          linkOf[out] = links;
-          head[links] = next;
-          room[links++] = net.room[out];
-        }
+        links = link(half[listed], first[v], links);
       }
     }
     first[events] = links;
     for (int h = 0; h < links; h++) {
       mate[h] = linkOf[net.mate[half[h]]];
     }
+  }
+
+  /** Adds a half-arc to the last half-link of its tail, or as a new one. */
+  private int link(int out, int firstOfTail, int links) {
+    int next = numberOf[net.head[out]];
+    if (next == OUTSIDE) {
+      return links;
+    }
+    int last = links - 1;
+    if (links > firstOfTail && areBesideEachOther(half[last], out)) {
+      room[last] = sum(room[last], net.room[out]);
+      return links;
+    }
+    half[links] = out;
+    linkOf[out] = links;
+    head[links] = next;
+    room[links] = net.room[out];
+    return links + 1;
   }
 
   /** Whether two half-arcs and all between them have the same ends and lie so at both. */
@@ -183,11 +189,11 @@ final class TightPart {
     }
   }
 
-  private boolean isTight(int k) {
-    return time[net.head[net.mate[k]]] + net.length[k] == time[net.head[k]];
+  private boolean isTight(int arcHalf) {
+    return time[net.head[net.mate[arcHalf]]] + net.length[arcHalf] == time[net.head[arcHalf]];
   }
 
-  /** The network's number of a half-arc without limit in a half-link without limit. */
+  /** The network's number of the half-arc that gives a half-link room without limit. */
   int unlimited(int h) {
     int k = half[h];
     while (net.room[k] != UNLIMITED || !isTight(k)) {
