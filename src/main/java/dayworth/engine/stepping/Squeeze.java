@@ -26,8 +26,9 @@ import java.util.List;
  * without slack leads out of it; half-arcs with flow in both directions have no slack; so times and
  * flow are cheapest for the present t(to) − t(from).
  *
- * <p><b>Cost.</b> For each change of price the half-arcs of the events reached, a few times over;
- * for each event that joins or leaves its half-arcs and their places in a queue. All numbers are
+ * <p><b>Cost.</b> For each change of price the half-arcs of the events that move and lead to {@code
+ * to}, a few times over; for each event that joins or leaves its half-arcs and their places in a
+ * queue; at most once for each change of price the half-arcs of all that move. All numbers are
  * whole.
  */
 final class Squeeze {
