@@ -72,7 +72,7 @@ public final class CurveQuestion {
         priced,
         money.charges(),
         bare,
-        effort.nodesFor(of),
+        finishes -> effort.nodesFor(of, finishes),
         effort.isOver(),
         (longest, shortest) -> {
           NavigableSet<Long> durations = CurveCounting.durations(of, longest, shortest);

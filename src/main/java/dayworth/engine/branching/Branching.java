@@ -278,11 +278,15 @@ public final class Branching {
     List<Point> points = new ArrayList<>();
     Optional<LeastChanged> plans = Optional.empty();
     Plan before = Plan.allNormal(network);
+    Relaxation relaxed = best.get(0).branch.relaxation(network, charges, fence);
     for (int row = 0; row < durations.length && best.get(row).plan.isPresent(); row++) {
       Best of = best.get(row);
       Plan found = of.plan.get();
       if (plans.isEmpty() || !plans.get().serves(of.branch, found)) {
-        plans = Optional.of(new LeastChanged(network, charges, fence, of.branch, found));
+        if (row == 0 || !of.branch.equals(best.get(row - 1).branch)) {
+          relaxed = of.branch.relaxation(network, charges, fence);
+        }
+        plans = Optional.of(new LeastChanged(network, charges, of.branch, relaxed, found));
       }
       before = plans.get().within(durations[row], before, of.cost).orElse(found);
       Money bound = of.leftOpen.map(of.cost::min).orElse(of.cost);

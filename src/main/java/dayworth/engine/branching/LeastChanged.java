@@ -25,17 +25,23 @@ final class LeastChanged {
   private final Plan found;
   private final Descent descent;
 
-  LeastChanged(Network network, List<Charge> charges, Money fence, Branch branch, Plan found) {
+  /**
+   * Prepares.
+   *
+   * @param relaxed the branch's convex problem
+   */
+  LeastChanged(
+      Network network, List<Charge> charges, Branch branch, Relaxation relaxed, Plan found) {
     this.network = network;
     this.charges = charges;
     this.branch = branch;
     this.found = found;
-    Network relaxed = branch.relaxation(network, charges, fence).network();
+    Network open = relaxed.network();
     this.descent =
         new Descent(
             branch.opening().ways().isPlain()
-                ? relaxed
-                : relaxed.withActivities(settled(branch.opening().ways()), Measures.NONE));
+                ? open
+                : open.withActivities(settled(branch.opening().ways()), Measures.NONE));
   }
 
   /** Activities with a choice take the way that was found; what goes along its line stays open. */
