@@ -38,6 +38,7 @@ final class BranchedPlans implements CheapestPlans {
   private final BooleanSupplier isOver;
   private final List<Point> points;
   private final Curve curve;
+  private long relaxations;
   private final Map<Long, Plan> planOf = new HashMap<>();
 
   /**
@@ -83,8 +84,12 @@ final class BranchedPlans implements CheapestPlans {
   /** The cheapest plan of all. */
   private Point unhurried(Curve bare) {
     long asPlanned = Timing.earliest(network, Plan.allNormal(network)).finish();
-    long far = Math.max(bare.longest(), asPlanned) * TIMES_AS_PLANNED;
-    return solve(new long[] {far}).get(0);
+    return solve(new long[] {far(bare.longest(), asPlanned)}).get(0);
+  }
+
+  /** A duration that no deadline of the project binds. */
+  static long far(long longest, long asPlanned) {
+    return Math.max(longest, asPlanned) * TIMES_AS_PLANNED;
   }
 
   private static long finish(Plan plan) {
@@ -101,8 +106,11 @@ final class BranchedPlans implements CheapestPlans {
 
   private List<Point> solve(long[] durations) {
     try {
-      return Branching.solve(
-          network, charges, durations, nodesFor.applyAsLong(durations.length), isOver);
+      Branching.Solution solution =
+          Branching.solve(
+              network, charges, durations, nodesFor.applyAsLong(durations.length), isOver);
+      relaxations += solution.relaxations();
+      return solution.points();
     } catch (Branching.BoundRefuted refuted) {
       throw new ProofFailed(
           "the finish at " + network.scale().text(refuted.duration()), refuted.getMessage());
@@ -198,6 +206,11 @@ final class BranchedPlans implements CheapestPlans {
         .filter(point -> !point.isProved())
         .map(point -> new Unproved(point.duration(), point.cost(), point.bound()))
         .toList();
+  }
+
+  @Override
+  public long relaxations() {
+    return relaxations;
   }
 
   /** No one flow proves a finish: that takes a flow for each branch. */

@@ -29,6 +29,9 @@ sealed interface CheapestPlans permits ConvexPlans, BranchedPlans {
   /** How many of the finishes are not proved to be cheapest. */
   List<Unproved> unproved();
 
+  /** How many convex problems were solved by branching. */
+  long relaxations();
+
   /**
    * The flow that proves each piece of the curve, the first one its longest finish; empty if there
    * is none or they are too many to be carried.

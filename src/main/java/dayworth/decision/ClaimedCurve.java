@@ -18,6 +18,7 @@ import java.util.SortedMap;
  * @param obstacles the chain that makes the shortest finish the shortest
  * @param slopeUnits how many units of flow make one money unit per tick
  * @param flows for each piece; empty if the result carries none
+ * @param relaxations how many convex problems are said to be enough to prove it
  * @param plans by their finish
  * @param asPlanned with its starts where money hangs on them
  * @param crashEverything likewise
@@ -34,6 +35,7 @@ public record ClaimedCurve(
     List<Obstacle> obstacles,
     long slopeUnits,
     Optional<List<List<Flow.Entry>>> flows,
+    long relaxations,
     SortedMap<Long, Plan> plans,
     Plan asPlanned,
     Plan crashEverything,

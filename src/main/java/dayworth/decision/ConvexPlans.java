@@ -61,6 +61,11 @@ final class ConvexPlans implements CheapestPlans {
   }
 
   @Override
+  public long relaxations() {
+    return 0;
+  }
+
+  @Override
   public Optional<List<List<Flow.Entry>>> flows() {
     return flows;
   }

@@ -69,6 +69,7 @@ final class CurveCounting {
       CrossCheck crossCheck,
       long slopeUnits,
       Optional<List<List<Flow.Entry>>> flows,
+      long relaxations,
       boolean isCut,
       Optional<Curve> relaxed) {
     NavigableSet<Long> durations = durations(of, curve.longest(), curve.shortest());
@@ -100,7 +101,7 @@ final class CurveCounting {
         isCut,
         crossCheck,
         relaxed,
-        new Evidence(slopeUnits, flows, counted, asPlanned, crashEverything));
+        new Evidence(slopeUnits, flows, relaxations, counted, asPlanned, crashEverything));
   }
 
   /**

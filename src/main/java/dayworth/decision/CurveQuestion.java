@@ -103,6 +103,7 @@ public final class CurveQuestion {
         cheapest.crossCheck(crossChecks, watcher),
         Stepping.scaleFor(of.pricedNetwork()).orElseThrow().perUnit(),
         cheapest.flows(),
+        cheapest.relaxations(),
         !cheapest.unproved().isEmpty() && effort.isOver().getAsBoolean(),
         relaxed);
   }

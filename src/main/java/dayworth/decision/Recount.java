@@ -7,6 +7,7 @@ import dayworth.engine.Change;
 import dayworth.engine.Curve;
 import dayworth.engine.Flow;
 import dayworth.engine.Step;
+import dayworth.engine.branching.Branching;
 import dayworth.engine.proof.FlowBound;
 import dayworth.engine.proof.ProofChecker;
 import dayworth.engine.proof.Verdict;
@@ -25,17 +26,23 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.Map;
+import java.util.NavigableMap;
 import java.util.Optional;
 import java.util.OptionalLong;
+import java.util.TreeMap;
 import java.util.TreeSet;
 import java.util.stream.IntStream;
 
 /**
  * Recounts a claimed curve from the case: which plans it names and what they cost, whether its
- * flows prove them, and whether its chain stops the project. It neither steps nor solves nor
- * branches; what it answers is what the result ought to tell, given that the claims hold.
+ * flows prove them, and whether its chain stops the project. What it answers is what the result
+ * ought to tell, given that the claims hold. Where one flow cannot prove a finish, all that could
+ * be cheaper than the claimed plan is searched once more, each bound counted from its flow.
  */
 public final class Recount {
+
+  /** Ties may be broken another way. */
+  private static final long SEARCH_AGAIN = 4;
 
   private static final BigDecimal MOST_DIFFERENCE = new BigDecimal("0.01");
 
@@ -135,12 +142,16 @@ public final class Recount {
         claim.rows() + " finishes",
         "one for each unit from " + text(curve.longest()) + " to " + text(curve.shortest()));
     requireRowPlans(curve);
+    if (isSearched(of, claim.relaxations())) {
+      requireNoneCheaper(curve);
+    }
     return counting.answer(
         OptionalLong.of(claim.asked()),
         of.isConvex() ? List.of() : unproved(),
         crossCheck(curve),
         claim.slopeUnits(),
         claim.flows(),
+        claim.relaxations(),
         claim.isCut(),
         Optional.empty());
   }
@@ -327,6 +338,45 @@ public final class Recount {
     }
     for (long finish : needed) {
       planFor(finish);
+    }
+  }
+
+  /** Whether all that could be cheaper than a claimed plan is searched once more. */
+  public static boolean isSearched(Case of, long relaxations) {
+    return !of.isConvex() && relaxations >= 0 && relaxations <= Evidence.MOST_RELAXATIONS;
+  }
+
+  /** A search that knows the claimed plans needs no more relaxations than the one that did not. */
+  private void requireNoneCheaper(Curve curve) throws ClaimRefuted {
+    NavigableMap<Long, Plan> proved = new TreeMap<>();
+    for (long finish : CurveCounting.durations(of, curve.longest(), curve.shortest())) {
+      proved.put(finish, planFor(finish));
+    }
+    claim.unproved().forEach(gap -> proved.remove(gap.duration()));
+    if (proved.containsKey(curve.longest())) {
+      long asPlanned = Timing.earliest(network, Plan.allNormal(network)).finish();
+      proved.put(BranchedPlans.far(curve.longest(), asPlanned), planFor(curve.longest()));
+    }
+    long[] durations = proved.descendingKeySet().stream().mapToLong(Long::longValue).toArray();
+    if (durations.length == 0) {
+      return;
+    }
+    Branching.Doubts doubts =
+        Branching.doubts(
+            priced,
+            money.charges(),
+            durations,
+            List.copyOf(proved.descendingMap().values()),
+            SEARCH_AGAIN * (claim.relaxations() + durations.length));
+    for (long finish : doubts.cheaper()) {
+      throw new ClaimRefuted(
+          "evidence.plans, the one of " + text(finish),
+          "a plan that can be bettered",
+          "the cheapest");
+    }
+    for (long finish : doubts.open()) {
+      throw new ClaimRefuted(
+          "proof.unproved", "not the finish " + text(finish), "it, as its proof needs more");
     }
   }
 

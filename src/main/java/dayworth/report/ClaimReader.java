@@ -66,6 +66,7 @@ final class ClaimReader {
         evidence.get("flows").isNothing()
             ? Optional.empty()
             : Optional.of(each(evidence.get("flows"), this::flow)),
+        evidence.get("relaxations").whole(),
         plans,
         plan(evidence.get("as_planned")),
         plan(evidence.get("crash_everything")),

@@ -41,6 +41,7 @@ final class EvidenceJson {
     } else {
       json.nothing("flows");
     }
+    json.number("relaxations", BigDecimal.valueOf(evidence.relaxations()));
     json.array(
         "plans",
         evidence.plans().entrySet(),

@@ -145,6 +145,7 @@ final class SeriesAnswer {
         new Evidence(
             1,
             Optional.empty(),
+            0,
             new TreeMap<>(Map.of(8L, atEight)),
             Plan.allNormal(NETWORK),
             Plan.allCrash(NETWORK)));

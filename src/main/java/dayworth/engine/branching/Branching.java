@@ -98,7 +98,20 @@ public final class Branching {
    */
   public static List<Point> solve(
       Network network, List<Charge> charges, long[] durations, long most) {
-    return solve(network, charges, durations, most, () -> false);
+    return solve(network, charges, durations, most, () -> false).points();
+  }
+
+  /**
+   * What is known of every finish.
+   *
+   * @param points one for each finish that has a plan
+   * @param relaxations how many convex problems were solved
+   */
+  public record Solution(List<Point> points, long relaxations) {
+
+    public Solution {
+      points = List.copyOf(points);
+    }
   }
 
   /**
@@ -106,12 +119,50 @@ public final class Branching {
    *
    * @throws BoundRefuted if a bound does not stand up to its recheck
    */
-  public static List<Point> solve(
+  public static Solution solve(
       Network network, List<Charge> charges, long[] durations, long most, BooleanSupplier isOver) {
     Branching branching = new Branching(network, charges, durations, Optional.empty());
     branching.isOver = isOver;
     branching.run(most + durations.length);
-    return branching.points();
+    return new Solution(branching.points(), branching.solved);
+  }
+
+  /**
+   * What is found about claimed plans when all that could be cheaper is searched once more.
+   *
+   * @param cheaper finishes that have a cheaper plan
+   * @param open finishes for which the limit leaves that open
+   */
+  public record Doubts(List<Long> cheaper, List<Long> open) {}
+
+  /**
+   * Searches for plans that are cheaper than given ones.
+   *
+   * @param durations ticks, from long to short
+   * @param plans one for each; they must be possible
+   * @param most how many convex problems are solved at most
+   * @throws BoundRefuted if a bound does not stand up to its recheck
+   */
+  public static Doubts doubts(
+      Network network, List<Charge> charges, long[] durations, List<Plan> plans, long most) {
+    Branching branching = new Branching(network, charges, durations, Optional.empty());
+    List<Money> claimed = new ArrayList<>();
+    for (int row = 0; row < durations.length; row++) {
+      Money cost = ChargedMoney.cost(network, charges, plans.get(row));
+      claimed.add(cost);
+      branching.best.get(row).offer(plans.get(row), cost, branching.best.get(row).branch);
+    }
+    branching.run(most);
+    Doubts doubts = new Doubts(new ArrayList<>(), new ArrayList<>());
+    for (int row = 0; row < durations.length; row++) {
+      Best best = branching.best.get(row);
+      if (claimed.get(row).minus(best.cost).compareTo(Point.ROUNDING) >= 0) {
+        doubts.cheaper().add(durations[row]);
+      } else if (best.leftOpen.isPresent()) {
+        doubts.open().add(durations[row]);
+      }
+    }
+    return doubts;
   }
 
   /**

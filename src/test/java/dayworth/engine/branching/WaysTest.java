@@ -5,6 +5,8 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import dayworth.engine.proof.ProofChecker;
 import dayworth.network.Network;
+import dayworth.network.Plan;
+import dayworth.network.Timing;
 import dayworth.testing.BruteForce;
 import dayworth.testing.RandomMeasures;
 import dayworth.testing.RandomNetworks;
@@ -50,5 +52,33 @@ class WaysTest {
             where);
       }
     }
+  }
+
+  /** The plan of the next shorter finish is possible, but often not the cheapest. */
+  @Test
+  void aPlanThatCanBeBetteredIsFound() {
+    int bettered = 0;
+    for (long seed = 0; seed < CASES / 4; seed++) {
+      Network plain = RandomNetworks.of(seed, RandomNetworks.Kind.WHOLE, 3, 5);
+      Network network = RandomMeasures.with(plain, seed, 3);
+      long longest = Timing.earliest(network, Plan.allNormal(network)).finish();
+      long[] durations = LongStream.rangeClosed(0, 2).map(k -> longest - k).toArray();
+      List<Point> points = Branching.solve(network, List.of(), durations, UNLIMITED);
+      if (points.size() < 2) {
+        continue;
+      }
+      Point first = points.get(0);
+      Point next = points.get(1);
+      long[] asked = {first.duration()};
+      Branching.Doubts right =
+          Branching.doubts(network, List.of(), asked, List.of(first.plan()), UNLIMITED);
+      assertEquals(new Branching.Doubts(List.of(), List.of()), right, "seed " + seed);
+      Branching.Doubts wrong =
+          Branching.doubts(network, List.of(), asked, List.of(next.plan()), UNLIMITED);
+      boolean isDearer = next.cost().compareTo(first.cost()) > 0;
+      assertEquals(isDearer ? List.of(first.duration()) : List.of(), wrong.cheaper());
+      bettered += isDearer ? 1 : 0;
+    }
+    assertTrue(bettered > 20, bettered + " could be bettered");
   }
 }
