@@ -55,6 +55,6 @@ public final class PlansAlong {
       durations[change.activity()] -=
           Math.floorDiv(change.shortened() * (step.from() - finish), step.ticks());
     }
-    return Plan.of(durations);
+    return Plan.of(durations).withMeasuresOf(curve.planAfter(k));
   }
 }
