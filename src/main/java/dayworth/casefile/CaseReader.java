@@ -3,7 +3,9 @@ package dayworth.casefile;
 import dayworth.contract.MomentMoney;
 import dayworth.decision.Case;
 import dayworth.decision.InputFile;
+import dayworth.decision.Notes;
 import dayworth.decision.Progress;
+import dayworth.decision.Submission;
 import dayworth.decision.WorkToGo;
 import dayworth.network.Activity;
 import dayworth.network.Link;
@@ -52,12 +54,14 @@ public final class CaseReader {
     Optional<String> runningText = folder.text(RunningTable.FILE);
     Optional<String> sectionText = folder.text(SectionTable.FILE);
     Optional<String> termText = folder.text(TermsTable.FILE);
+    Optional<String> noteText = folder.textBeside(NotesText.FILE);
     Optional<List<ActivityRow>> known =
         activityText.flatMap(text -> ActivityTable.read(text, findings));
     List<LinkRow> links = LinkTable.read(known, linkText, findings);
     TermsTable terms = TermsTable.read(termText, findings);
     List<LocalDate> holidays = HolidayTable.read(holidayText, findings);
     DateRules.check(known.orElse(List.of()), holidays, terms, findings);
+    Notes notes = noteText.map(text -> NotesText.read(text, findings)).orElse(Notes.NONE);
     List<ProgressRow> progress = ProgressTable.read(known, progressText, findings);
     ActivityIds ids = new ActivityIds(known, findings);
     List<SectionRow> sections = SectionTable.read(ids, terms, sectionText, findings);
@@ -67,7 +71,16 @@ public final class CaseReader {
       return new Reading.Unsound(findings.problems(), findings.warnings());
     }
     Case read =
-        build(known.orElseThrow(), links, terms, holidays, progress, sections, running, atLeast);
+        build(
+            known.orElseThrow(),
+            links,
+            terms,
+            holidays,
+            progress,
+            sections,
+            running,
+            notes,
+            atLeast);
     if (findings.hasProblems()) {
       return new Reading.Unsound(findings.problems(), findings.warnings());
     }
@@ -82,6 +95,7 @@ public final class CaseReader {
       List<ProgressRow> rows,
       List<SectionRow> sections,
       List<RunningRow> running,
+      Notes notes,
       TimeScale atLeast) {
     TimeScale scale = Resolution.of(activities, links, terms, rows, sections).and(atLeast);
     CaseCalendar times = CaseCalendar.of(terms, holidays, scale);
@@ -117,7 +131,20 @@ public final class CaseReader {
         money,
         progress,
         findings.warnings(),
-        folder.inputs());
+        folder.inputs(),
+        submission(terms, notes));
+  }
+
+  private static Submission submission(TermsTable terms, Notes notes) {
+    return new Submission(
+        terms.basis(),
+        terms.text("prepared_for").orElse(""),
+        terms.text("prepared_by").orElse(""),
+        terms.text("reference").orElse(""),
+        terms.validUntil(),
+        terms.number("on_cost_percent"),
+        terms.number("proposal_cost").map(Money::of),
+        notes);
   }
 
   private void checkSomethingIsToGo(Optional<Progress> progress) {

@@ -22,6 +22,7 @@ import java.util.stream.IntStream;
  * @param progress how far the work is; empty where time counts from the start
  * @param warnings doubtful input, sorted; they stand in every result
  * @param inputs the files it was read from, sorted by name
+ * @param submission the paper in which it is put before a client
  */
 public record Case(
     String name,
@@ -33,11 +34,38 @@ public record Case(
     MomentMoney momentMoney,
     Optional<Progress> progress,
     List<Notice> warnings,
-    List<InputFile> inputs) {
+    List<InputFile> inputs,
+    Submission submission) {
 
   public Case {
     warnings = List.copyOf(warnings);
     inputs = List.copyOf(inputs);
+  }
+
+  /** A case of which no paper is known. */
+  public Case(
+      String name,
+      String title,
+      String currency,
+      TimeUnit unit,
+      Network network,
+      Terms terms,
+      MomentMoney momentMoney,
+      Optional<Progress> progress,
+      List<Notice> warnings,
+      List<InputFile> inputs) {
+    this(
+        name,
+        title,
+        currency,
+        unit,
+        network,
+        terms,
+        momentMoney,
+        progress,
+        warnings,
+        inputs,
+        Submission.NONE);
   }
 
   /** A case of which nothing has started, without sections and running costs. */
@@ -106,6 +134,7 @@ public record Case(
         momentMoney,
         progress,
         warnings,
-        inputs);
+        inputs,
+        submission);
   }
 }
