@@ -17,6 +17,7 @@ import picocli.CommandLine.Spec;
       CurveCommand.class,
       MeetCommand.class,
       WeighCommand.class,
+      BriefCommand.class,
       VerifyCommand.class
     })
 final class Dayworth implements Runnable {
