@@ -167,34 +167,34 @@ final class AskedSection {
   }
 
   private Optional<Part> missing() {
+    List<String> what = new ArrayList<>();
     List<String> terms = new ArrayList<>();
-    if (submission.basis().isEmpty()) {
-      terms.add("basis");
-    }
-    if (submission.preparedFor().isEmpty()) {
-      terms.add("prepared_for");
-    }
-    if (submission.preparedBy().isEmpty()) {
-      terms.add("prepared_by");
-    }
-    if (submission.reference().isEmpty()) {
-      terms.add("reference");
-    }
-    if (submission.validUntil().isEmpty()) {
-      terms.add("valid_until");
-    }
-    boolean noNotes = submission.notes().asked().isEmpty();
-    if (terms.isEmpty() && !noNotes) {
-      return Optional.empty();
-    }
+    missing(submission.basis().isEmpty(), "the basis", "basis", what, terms);
+    missing(submission.preparedFor().isEmpty(), "whom it is for", "prepared_for", what, terms);
+    missing(submission.preparedBy().isEmpty(), "who wrote it", "prepared_by", what, terms);
+    missing(submission.reference().isEmpty(), "its reference", "reference", what, terms);
+    missing(
+        submission.validUntil().isEmpty(), "until when it is open", "valid_until", what, terms);
     List<String> how = new ArrayList<>();
     if (!terms.isEmpty()) {
-      how.add("terms.csv has no row for " + Words.list(terms, 5) + ".");
+      how.add("Add to terms.csv: " + Words.list(terms, 5) + ".");
     }
-    if (noNotes) {
-      how.add("notes.md has nothing under What is asked: say there what is wanted of the reader.");
+    if (submission.notes().asked().isEmpty()) {
+      what.add("what is wanted of the reader");
+      how.add("Say in notes.md, under the heading What is asked, what is wanted of the reader.");
     }
-    return Optional.of(
-        new Part.Gap("Not in the case: all that this part should say.", String.join(" ", how)));
+    return what.isEmpty()
+        ? Optional.empty()
+        : Optional.of(
+            new Part.Gap(
+                "Not in the case: " + Words.list(what, 6) + ".", String.join(" ", how)));
+  }
+
+  private static void missing(
+      boolean isMissing, String name, String term, List<String> what, List<String> terms) {
+    if (isMissing) {
+      what.add(name);
+      terms.add(term);
+    }
   }
 }

@@ -71,7 +71,10 @@ final class ChoicePicture {
       stack(drawing, choices.get(i), first + column * (i + 0.5), bar, first > 0);
     }
     if (first > 0) {
-      names(drawing, first + column / 2 - bar / 2 - 10);
+      double total =
+          dayworth.report.brief.svg.Face.SEMIBOLD.width(
+              words.money(outcome.depends(choices.get(0))), 17);
+      names(drawing, first + column / 2 - Math.max(bar, total) / 2 - 10);
     } else {
       legend(drawing);
     }

@@ -17,7 +17,9 @@ import dayworth.value.Money;
 import java.math.BigDecimal;
 import java.math.RoundingMode;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.function.Function;
 
@@ -45,7 +47,9 @@ final class ChoicesSection {
   }
 
   private void choose(Weighing weighing) {
-    for (Choice choice : weighing.choices()) {
+    List<Choice> inOrder = new ArrayList<>(weighing.choices());
+    inOrder.sort(Comparator.comparing(choice -> choice.kind() == Choice.Kind.MOST_BONUS));
+    for (Choice choice : inOrder) {
       add(name(choice), choice.finish());
       if (choice.kind() == Choice.Kind.LEAST_TOTAL && !answer.isLeastTotal()) {
         add("Put forward", answer.finish());
@@ -58,7 +62,8 @@ final class ChoicesSection {
       Finish other = choices.get(i);
       if (other.duration() == finish.duration()
           && other.total().compareTo(finish.total()) == 0) {
-        notes.add(names.get(i) + " is also: " + name.toLowerCase(java.util.Locale.ROOT) + ".");
+        notes.add(
+            names.get(i) + " and " + name.toLowerCase(Locale.ROOT) + " are the same finish.");
         return;
       }
     }
@@ -238,7 +243,7 @@ final class ChoicesSection {
       said.add(
           "If shortening cost "
               + most
-              + " % more than estimated, the finish put forward would "
+              + "\u00a0% more than estimated, the finish put forward would "
               + (then.signum() >= 0
                   ? "still be " + words.money(then) + " better"
                   : "be " + words.money(then.negate()) + " dearer")
@@ -267,8 +272,8 @@ final class ChoicesSection {
     Optional<String> less =
         Optional.of(range.from())
             .filter(from -> !from.isZero())
-            .map(from -> percent(Money.of(1).minus(from)) + " % less");
-    Optional<String> more = range.to().map(to -> percent(to.minus(Money.of(1))) + " % more");
+            .map(from -> percent(Money.of(1).minus(from)) + "\u00a0% less");
+    Optional<String> more = range.to().map(to -> percent(to.minus(Money.of(1))) + "\u00a0% more");
     if (more.isEmpty()) {
       return name
           + less.map(share -> "until shortening costs " + share + " than estimated.")

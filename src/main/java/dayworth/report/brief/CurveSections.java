@@ -223,17 +223,17 @@ final class CurveSections {
     List<String> made = new ArrayList<>();
     if (outcome.hasTimeRelated()) {
       made.add(
-          words.money(terms.timeRelated().rate())
+          "time-related cost of "
+              + words.money(terms.timeRelated().rate())
               + " "
-              + words.one(terms.timeRelated().per())
-              + " of time-related cost");
+              + words.one(terms.timeRelated().per()));
     }
     if (outcome.hasDamages()) {
       made.add(
-          words.money(terms.damages().rate())
+          "damages of "
+              + words.money(terms.damages().rate())
               + " "
-              + words.one(terms.damages().per())
-              + " of the damages that it takes away");
+              + words.one(terms.damages().per()));
     }
     if (made.isEmpty()) {
       return Optional.empty();
@@ -248,8 +248,8 @@ final class CurveSections {
             : "from " + words.money(least) + " to " + words.money(most) + ".";
     return Optional.of(
         Words.capital(words.workingUnit().equals("hour") ? "an hour" : "a " + words.workingUnit())
-            + " is worth "
-            + String.join(", and ", made)
+            + " is worth what it saves, "
+            + Words.list(made, 2)
             + ": "
             + range);
   }

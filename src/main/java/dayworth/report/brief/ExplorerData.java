@@ -86,6 +86,7 @@ final class ExplorerData {
   private void net(JsonGenerator json) throws IOException {
     json.writeObjectFieldStart("net");
     json.writeNumberField("perTick", layout.perTick());
+    json.writeNumberField("left", layout.left());
     json.writeNumberField("width", layout.width());
     json.writeNumberField("height", layout.height());
     json.writeNumberField("bottom", layout.bottom());
@@ -107,6 +108,7 @@ final class ExplorerData {
       json.writeNumber(layout.box(link.successor()));
       json.writeString(link.relation().name());
       json.writeNumber(link.lag());
+      json.writeString(picture.lagLabel(link));
       json.writeEndArray();
     }
     json.writeEndArray();

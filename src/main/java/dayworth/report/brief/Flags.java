@@ -1,31 +1,61 @@
 package dayworth.report.brief;
 
-import dayworth.report.brief.Places.Room;
 import dayworth.report.brief.svg.Drawing;
 import dayworth.report.brief.svg.Drawing.Anchor;
 import java.util.ArrayList;
 import java.util.List;
 
-/** Labels above a picture, each with a thin line down to its mark; as many rows as they need. */
+/**
+ * Labels above a picture, each with a thin line down to its mark, in as few rows as they need: no
+ * label on another, and no line through a label. Those that have no room are left out, the last ones
+ * first.
+ */
 final class Flags {
 
   private static final double GAP = 8;
-  private static final int MOST_ROWS = 8;
+  private static final int MOST_ROWS = 4;
 
   private record Flag(double x, Label label) {}
 
-  private record Placed(Flag flag, Anchor anchor, int row) {}
+  /** Row 0 is the lowest, next to the picture. */
+  private record Placed(Flag flag, Anchor anchor, int row) {
+
+    double left() {
+      double w = flag.label().width();
+      return switch (anchor) {
+        case START -> flag.x() - 1;
+        case MIDDLE -> flag.x() - w / 2;
+        case END -> flag.x() - w + 1;
+      };
+    }
+
+    double right() {
+      return left() + flag.label().width();
+    }
+
+    boolean meets(Placed other) {
+      boolean beside = right() + GAP <= other.left() || other.right() + GAP <= left();
+      return row == other.row() && !beside || cuts(other) || other.cuts(this);
+    }
+
+    /** Whether this one's line goes down through a lower label. */
+    private boolean cuts(Placed lower) {
+      return row > lower.row()
+          && flag.x() > lower.left() - GAP / 2
+          && flag.x() < lower.right() + GAP / 2;
+    }
+  }
 
   private final double width;
   private final List<Flag> flags = new ArrayList<>();
-  private final List<Placed> placed = new ArrayList<>();
+  private List<Placed> placed = List.of();
   private double rowHeight;
 
   Flags(double width) {
     this.width = width;
   }
 
-  /** Those added first have the choice. */
+  /** The most telling first. */
   void add(double x, Label label) {
     flags.add(new Flag(x, label));
     rowHeight = Math.max(rowHeight, label.height() + 6);
@@ -33,40 +63,38 @@ final class Flags {
 
   /** Finds a place for each and says how much height they need. */
   double place() {
-    Places places = new Places();
-    for (Flag flag : flags) {
-      placed.add(place(flag, places));
+    for (int kept = flags.size(); kept > 0 && placed.isEmpty(); kept--) {
+      for (int rows = 1; rows <= MOST_ROWS && placed.isEmpty(); rows++) {
+        placed = place(flags.subList(0, kept), new ArrayList<>(), rows);
+      }
     }
-    int rows = placed.stream().mapToInt(Placed::row).max().orElse(-1) + 1;
-    return rows * rowHeight;
+    return rows() * rowHeight;
   }
 
-  private Placed place(Flag flag, Places places) {
-    for (int row = 0; row < MOST_ROWS; row++) {
+  private int rows() {
+    return placed.stream().mapToInt(Placed::row).max().orElse(-1) + 1;
+  }
+
+  /** Where each can stand beside those that have their place; empty if that is impossible. */
+  private List<Placed> place(List<Flag> left, List<Placed> done, int rows) {
+    if (left.isEmpty()) {
+      return List.copyOf(done);
+    }
+    for (int row = 0; row < rows; row++) {
       for (Anchor anchor : List.of(Anchor.END, Anchor.START, Anchor.MIDDLE)) {
-        Room room = room(flag, anchor, row);
-        boolean inside = room.x() >= 0 && room.x() + room.w() <= width + GAP;
-        if (inside && places.isFree(room)) {
-          places.take(room);
-          // What is added later may not stand where this one's line comes down.
-          places.take(new Room(flag.x() - 2, row, 4, MOST_ROWS));
-          return new Placed(flag, anchor, row);
+        Placed one = new Placed(left.get(0), anchor, row);
+        boolean inside = one.left() >= 0 && one.right() <= width;
+        if (inside && done.stream().noneMatch(one::meets)) {
+          done.add(one);
+          List<Placed> all = place(left.subList(1, left.size()), done, rows);
+          if (!all.isEmpty()) {
+            return all;
+          }
+          done.remove(done.size() - 1);
         }
       }
     }
-    return new Placed(flag, flag.x() > width / 2 ? Anchor.END : Anchor.START, MOST_ROWS - 1);
-  }
-
-  /** Rows are one high here. */
-  private static Room room(Flag flag, Anchor anchor, int row) {
-    double w = flag.label().width() + GAP;
-    double x =
-        switch (anchor) {
-          case START -> flag.x() - 1;
-          case MIDDLE -> flag.x() - w / 2;
-          case END -> flag.x() - w + 1;
-        };
-    return new Room(x, row + 0.1, w, 0.8);
+    return List.of();
   }
 
   /**
@@ -75,9 +103,10 @@ final class Flags {
    * @param ends down to where each line goes, in the order in which they were added
    */
   void write(Drawing drawing, List<Double> ends) {
+    int rows = rows();
     for (int i = 0; i < placed.size(); i++) {
       Placed one = placed.get(i);
-      double top = one.row() * rowHeight;
+      double top = (rows - 1 - one.row()) * rowHeight;
       double x =
           switch (one.anchor()) {
             case START -> one.flag().x() - 1;

@@ -6,6 +6,9 @@ import dayworth.network.Network;
 import dayworth.network.Timing;
 import java.util.ArrayList;
 import java.util.Arrays;
+import java.util.Collections;
+import java.util.Comparator;
+import java.util.HashMap;
 import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -41,6 +44,7 @@ final class Lanes {
     while (!all.open.isEmpty()) {
       all.put(all.longest(false));
     }
+    all.bringLinkedTogether();
     return all.lanes;
   }
 
@@ -84,7 +88,7 @@ final class Lanes {
     for (List<Integer> lane : lanes) {
       if (chain.stream().allMatch(i -> lane.stream().allMatch(other -> isApart(i, other)))) {
         lane.addAll(chain);
-        lane.sort(java.util.Comparator.comparingLong(chosen::start));
+        lane.sort(Comparator.comparingLong(chosen::start));
         return;
       }
     }
@@ -100,6 +104,44 @@ final class Lanes {
                     || timing.finish(other) <= timing.start(one));
   }
 
+  /** Swaps lanes as long as that makes the links between them shorter. */
+  private void bringLinkedTogether() {
+    boolean better = true;
+    while (better) {
+      better = false;
+      for (int a = 0; a < lanes.size(); a++) {
+        for (int b = a + 1; b < lanes.size(); b++) {
+          long before = crossed();
+          Collections.swap(lanes, a, b);
+          if (crossed() < before) {
+            better = true;
+          } else {
+            Collections.swap(lanes, a, b);
+          }
+        }
+      }
+    }
+  }
+
+  /** How many lanes all links cross; those without slack count twice. */
+  private long crossed() {
+    Map<Integer, Integer> laneOf = new HashMap<>();
+    for (int l = 0; l < lanes.size(); l++) {
+      for (int i : lanes.get(l)) {
+        laneOf.put(i, l);
+      }
+    }
+    long sum = 0;
+    for (Link link : network.links()) {
+      Integer from = laneOf.get(link.predecessor());
+      Integer to = laneOf.get(link.successor());
+      if (from != null && to != null) {
+        sum += Math.abs(from - to) * (chosen.slack(link) == 0 ? 2L : 1L);
+      }
+    }
+    return sum;
+  }
+
   /** The groups that do most of a lane's work, at most two. */
   static String name(Network network, Timing timing, List<Integer> lane) {
     Map<String, Long> work = new LinkedHashMap<>();
@@ -110,7 +152,7 @@ final class Lanes {
       }
     }
     List<String> most = new ArrayList<>(work.keySet());
-    most.sort(java.util.Comparator.comparingLong(group -> -work.get(group)));
+    most.sort(Comparator.comparingLong(group -> -work.get(group)));
     return Words.list(most.subList(0, Math.min(2, most.size())), 2);
   }
 }

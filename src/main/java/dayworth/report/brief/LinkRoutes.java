@@ -23,62 +23,77 @@ final class LinkRoutes {
   }
 
   double left(int box) {
-    return NetworkLayout.LEFT + ruler.x(frame.start()[box]) + NetworkLayout.BEFORE;
+    return layout.left() + ruler.x(frame.start()[box]) + NetworkLayout.BEFORE;
   }
 
   double right(int box) {
     return Math.max(
-        left(box) + 8, NetworkLayout.LEFT + ruler.x(frame.end(box)) - NetworkLayout.AFTER);
+        left(box) + 8, layout.left() + ruler.x(frame.end(box)) - NetworkLayout.AFTER);
   }
 
   double middle(int box) {
     return layout.top(layout.lane(box)) + MIDDLE;
   }
 
-  /** The path of a link with its arrow. */
-  String path(Link link) {
+  /**
+   * A link as a path with its arrow, and where its lag can be told: a level run of it.
+   *
+   * @param from where the run begins; equal to {@code to} where there is none
+   */
+  record Route(String path, double from, double to, double y) {
+
+    private static Route bare(String path) {
+      return new Route(path, 0, 0, 0);
+    }
+  }
+
+  /** The way of a link. */
+  Route route(Link link) {
     int a = layout.box(link.predecessor());
     int b = layout.box(link.successor());
     return switch (link.relation()) {
       case FS -> finishToStart(a, b);
       case SS -> startToStart(a, b);
-      case FF -> finishToFinish(a, b);
-      case SF -> startToFinish(a, b);
+      case FF -> Route.bare(finishToFinish(a, b));
+      case SF -> Route.bare(startToFinish(a, b));
     };
   }
 
-  private String finishToStart(int a, int b) {
+  private Route finishToStart(int a, int b) {
     double ax = right(a);
     double bx = left(b);
     double ya = middle(a);
     double yb = middle(b);
+    String begin = "M" + n(ax) + " " + n(ya);
     String end = "H" + n(bx) + arrow(bx, yb, 1);
     if (layout.lane(a) == layout.lane(b) && isFree(layout.lane(a), ax, bx)) {
-      return "M" + n(ax) + " " + n(ya) + end;
+      return new Route(begin + end, ax, bx - 6, ya);
     }
     double before = bx - NetworkLayout.BEFORE;
     double after = ax + NetworkLayout.AFTER;
     if (layout.lane(a) != layout.lane(b) && isFree(layout.lane(a), ax, before)) {
-      return "M" + n(ax) + " " + n(ya) + "H" + n(before) + "V" + n(yb) + end;
+      return new Route(begin + "H" + n(before) + "V" + n(yb) + end, ax, before, ya);
     }
     if (layout.lane(a) != layout.lane(b) && isFree(layout.lane(b), after, bx)) {
-      return "M" + n(ax) + " " + n(ya) + "H" + n(after) + "V" + n(yb) + end;
+      return new Route(begin + "H" + n(after) + "V" + n(yb) + end, after, bx - 6, yb);
     }
     double between = yb + (layout.lane(a) < layout.lane(b) ? -1 : 1) * (MIDDLE + 16);
-    return "M" + n(ax) + " " + n(ya) + "H" + n(after) + "V" + n(between) + "H" + n(before) + "V"
-        + n(yb) + end;
+    return Route.bare(
+        begin + "H" + n(after) + "V" + n(between) + "H" + n(before) + "V" + n(yb) + end);
   }
 
-  private String startToStart(int a, int b) {
+  private Route startToStart(int a, int b) {
     double bx = left(b);
     double yb = middle(b);
     double down = Math.min(left(a) + 9, bx - 5);
     String end = "V" + n(yb) + "H" + n(bx) + arrow(bx, yb, 1);
     if (down < left(a)) {
-      return "M" + n(left(a)) + " " + n(middle(a)) + "H" + n(down) + end;
+      return Route.bare("M" + n(left(a)) + " " + n(middle(a)) + "H" + n(down) + end);
     }
     double edge = middle(a) + (layout.lane(b) < layout.lane(a) ? -MIDDLE : MIDDLE);
-    return "M" + n(down) + " " + n(edge) + end;
+    boolean free = isFree(layout.lane(b), down, bx);
+    String path = "M" + n(down) + " " + n(edge) + end;
+    return free ? new Route(path, down, bx - 6, yb) : Route.bare(path);
   }
 
   private String finishToFinish(int a, int b) {

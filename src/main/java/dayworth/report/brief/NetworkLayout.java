@@ -13,7 +13,6 @@ import java.util.Map;
 /** What of the network's picture is the same at every finish: boxes, lanes, links and scale. */
 final class NetworkLayout {
 
-  static final double LEFT = 74;
   static final double RIGHT = 26;
   static final double TOP = 62;
   static final double PITCH = 87;
@@ -22,7 +21,10 @@ final class NetworkLayout {
   static final double AFTER = 3;
   static final double PAGE = 1040;
 
-  private static final double LEAST = 44;
+  private static final double LEAST = 40;
+  private static final double LEAST_GUTTER = 74;
+  private static final double MOST_GUTTER = 112;
+  private static final double MOST_NAMED = 84;
 
   /** So much narrower than even may long work be drawn, that short work has room. */
   private static final double NARROWEST = 0.3;
@@ -37,6 +39,7 @@ final class NetworkLayout {
   private final List<NetworkFrame> frames;
   private final double perTick;
   private final double width;
+  private final double left;
 
   NetworkLayout(BriefAnswer answer, Words words) {
     this.answer = answer;
@@ -51,14 +54,8 @@ final class NetworkLayout {
       int activity = choice.shown().get(b);
       boxOf.put(activity, b);
       Activity one = network.activity(activity);
-      least[b] =
-          Math.max(
-              LEAST,
-              figures
-                  + Face.SEMIBOLD.width(Words.shortId(one), 12)
-                  + BEFORE
-                  + AFTER
-                  + 18);
+      double first = figures + Face.SEMIBOLD.width(Words.shortId(one), 12) + 18;
+      least[b] = Math.max(first, Math.max(LEAST, named(Words.name(one)))) + BEFORE + AFTER;
       for (int l = 0; l < lanes.size(); l++) {
         if (lanes.get(l).contains(activity)) {
           lane[b] = l;
@@ -71,25 +68,58 @@ final class NetworkLayout {
         .forEach(links::add);
     this.frames =
         answer.states().stream().map(state -> NetworkFrame.of(state, choice.shown())).toList();
+    this.left = gutter();
     this.perTick = scale(Math.max(1, longest));
     this.width =
         Math.max(
             PAGE,
-            LEFT
+            left
                 + RIGHT
                 + frames.stream().mapToDouble(frame -> ruler(frame).width()).max().orElse(0));
   }
 
+  /** What a name on two lines needs; a very long one is cut. */
+  private static double named(String name) {
+    double room = LEAST;
+    while (room < MOST_NAMED
+        && Face.MEDIUM.wrap(name, 12, room - 8, 2).stream().anyMatch(l -> l.endsWith("…"))) {
+      room += 4;
+    }
+    return room;
+  }
+
   /** Even if all have room on the page; otherwise long work is drawn narrower, down to a limit. */
   private double scale(long longest) {
-    double even = (PAGE - LEFT - RIGHT) / longest;
+    double even = (PAGE - left - RIGHT) / longest;
     for (double share = 1; share > NARROWEST; share -= 0.05) {
       double perTick = even * share;
-      if (new TimeRuler(frames.get(0), least, perTick).width() <= PAGE - LEFT - RIGHT) {
+      if (new TimeRuler(frames.get(0), least, perTick).width() <= PAGE - left - RIGHT) {
         return perTick;
       }
     }
     return even * NARROWEST;
+  }
+
+  /** As wide as the longest word of a lane's name needs. */
+  private double gutter() {
+    double widest = LEAST_GUTTER;
+    for (List<Integer> one : lanes) {
+      for (String word : laneName(one).split(" ", -1)) {
+        widest = Math.max(widest, Face.SEMIBOLD.width(word, 13) + 8);
+      }
+    }
+    return Math.min(widest, MOST_GUTTER);
+  }
+
+  /** The groups that do most of a lane's work. */
+  String laneName(List<Integer> one) {
+    return Lanes.name(
+        answer.of().network(), answer.states().get(answer.chosenState()).timing(), one);
+  }
+
+  /** How much room the names of lanes have. */
+  double left() {
+    return left;
   }
 
   TimeRuler ruler(NetworkFrame frame) {

@@ -39,12 +39,12 @@ final class NetworkPicture {
 
   Picture picture(String name) {
     Drawing drawing = new Drawing(layout.width(), layout.height());
-    drawing.open(" id=\"net\"");
+    drawing.openSheet("net");
     still(drawing);
     drawing.open(" id=\"net-moving\"");
     moving(drawing, answer.chosenState());
     drawing.close();
-    drawing.close();
+    drawing.closeSheet();
     List<Picture.Drawn> drawings = new ArrayList<>();
     drawings.add(new Picture.Drawn(Picture.Use.ALWAYS, sized(drawing.svg())));
     if (layout.width() > NetworkLayout.PAGE) {
@@ -107,10 +107,9 @@ final class NetworkPicture {
 
   /** Lanes and what stands beside them. */
   private void still(Drawing drawing) {
-    Timing timing = answer.states().get(answer.chosenState()).timing();
     for (int l = 0; l < layout.lanes().size(); l++) {
-      String name = Lanes.name(answer.of().network(), timing, layout.lanes().get(l));
-      List<String> lines = Face.SEMIBOLD.wrap(name, 13, NetworkLayout.LEFT - 4, 3);
+      String name = layout.laneName(layout.lanes().get(l));
+      List<String> lines = Face.SEMIBOLD.wrap(name, 13, layout.left() - 4, 3);
       double y = layout.top(l) + 34 - (lines.size() - 1) * 7;
       for (int i = 0; i < lines.size(); i++) {
         drawing.text("b slate", Anchor.START, 0, y + i * 14, lines.get(i));
@@ -139,24 +138,46 @@ final class NetworkPicture {
     rest(drawing, state, ruler);
     for (Link link : layout.links()) {
       String lag = link.relation() != Relation.FS || link.lag() != 0 ? " lag" : "";
-      drawing.path("lk" + (routes.isCritical(link) ? " lkc" : "") + lag, routes.path(link));
+      LinkRoutes.Route route = routes.route(link);
+      drawing.path("lk" + (routes.isCritical(link) ? " lkc" : "") + lag, route.path());
+      lagOf(drawing, link, route);
     }
     for (int b = 0; b < layout.shown().size(); b++) {
       box(drawing, frame, routes, state, b);
     }
   }
 
+  /** How long the wait is, where its line has room for the words. */
+  private void lagOf(Drawing drawing, Link link, LinkRoutes.Route route) {
+    String label = lagLabel(link);
+    double w = Face.MEDIUM.width(label, SIZE);
+    if (!label.isEmpty() && route.to() - route.from() >= w + 8) {
+      double middle = (route.from() + route.to()) / 2;
+      drawing.text("a", Anchor.MIDDLE, middle, route.y() - 4, label);
+    }
+  }
+
+  /** What is written at a link; empty for one without a lag. */
+  String lagLabel(Link link) {
+    if (link.lag() == 0) {
+      return "";
+    }
+    String time = (link.lag() < 0 ? "−" : "") + words.time(Math.abs(link.lag()));
+    return link.relation() == Relation.SS ? "start + " + time : time;
+  }
+
   // The scale of time
 
   /** Round times from the start on, as many as have room on an even scale. */
   List<Long> ticks() {
-    long longest = answer.states().get(0).finish().duration();
+    long longest = Math.max(1, answer.states().get(0).finish().duration());
     long unit = words.ticksPerUnit();
-    double perUnit = layout.perTick() * unit;
+    double perUnit =
+        (layout.width() - layout.left() - NetworkLayout.RIGHT) / longest * unit;
     long step = 1;
     for (long one : new long[] {1, 2, 5, 10, 20, 25, 50, 100, 200, 500, 1000, 5000}) {
       step = one;
-      if (one * perUnit >= 40) {
+      if (one * perUnit >= 50) {
         break;
       }
     }
@@ -175,9 +196,9 @@ final class NetworkPicture {
   private void axis(Drawing drawing, NetworkFrame frame, TimeRuler ruler) {
     double bottom = layout.height() - 34;
     double free = Double.NEGATIVE_INFINITY;
-    double end = NetworkLayout.LEFT + ruler.x(frame.finish());
+    double end = layout.left() + ruler.x(frame.finish());
     for (long tick : ticks()) {
-      double x = NetworkLayout.LEFT + ruler.x(tick);
+      double x = layout.left() + ruler.x(tick);
       if (tick > frame.finish() || x < free) {
         continue;
       }
@@ -192,7 +213,7 @@ final class NetworkPicture {
     }
     Optional<Due> due = answer.of().terms().contractFinish().filter(by -> by.ticks() >= 0);
     double most = layout.width() - 2;
-    due.map(by -> NetworkLayout.LEFT + ruler.x(by.ticks()))
+    due.map(by -> layout.left() + ruler.x(by.ticks()))
         .filter(x -> x <= most)
         .ifPresent(
             x -> {
@@ -225,8 +246,8 @@ final class NetworkPicture {
       return;
     }
     double from = routes.right(b);
-    double to = NetworkLayout.LEFT + ruler.x(frame.late()[b] + frame.duration()[b]);
-    to = Math.min(to, NetworkLayout.LEFT + ruler.x(frame.finish())) - NetworkLayout.AFTER;
+    double to = layout.left() + ruler.x(frame.late()[b] + frame.duration()[b]);
+    to = Math.min(to, layout.left() + ruler.x(frame.finish())) - NetworkLayout.AFTER;
     for (int other = 0; other < layout.shown().size(); other++) {
       if (layout.lane(other) == layout.lane(b) && routes.left(other) > from - 1) {
         to = Math.min(to, routes.left(other) - 4);
@@ -337,9 +358,9 @@ final class NetworkPicture {
     Timing timing = answer.states().get(state).timing();
     for (Map.Entry<String, List<Integer>> group : layout.rest().entrySet()) {
       RestSpan span = RestSpan.of(timing, group.getValue());
-      double left = NetworkLayout.LEFT + ruler.x(span.from()) + NetworkLayout.BEFORE;
+      double left = layout.left() + ruler.x(span.from()) + NetworkLayout.BEFORE;
       double right =
-          Math.max(left + 8, NetworkLayout.LEFT + ruler.x(span.to()) - NetworkLayout.AFTER);
+          Math.max(left + 8, layout.left() + ruler.x(span.to()) - NetworkLayout.AFTER);
       drawing.path("k-fl", Hatch.falling(left, y, right - left, 24, 7));
       drawing.box("cell", left, y, right - left, 24);
       String label = restLabel(group.getKey(), group.getValue().size()) + floats(span);

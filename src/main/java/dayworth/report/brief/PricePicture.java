@@ -78,6 +78,7 @@ final class PricePicture {
     bands(drawing, axis, scale);
     Places places = new Places();
     staircase(drawing, axis, scale, places);
+    contractLine(drawing, axis, scale, places);
     stop(drawing, axis, scale, places);
     prices(drawing, axis, scale, places);
     contract(drawing, axis, scale, places);
@@ -255,10 +256,10 @@ final class PricePicture {
       double y = scale.y(run.high());
       List<Room> candidates = new ArrayList<>();
       if (right - left >= w + 4) {
-        candidates.add(new Room((left + right - w) / 2, y - 15, w, 11));
-        candidates.add(new Room(left + 3, y - 15, w, 11));
+        candidates.add(new Room((left + right - w) / 2 - 2, y - 15, w + 4, 11));
+        candidates.add(new Room(left + 3, y - 15, w + 4, 11));
       }
-      candidates.add(new Room(right - 4 - w, y - 15, w, 11));
+      candidates.add(new Room(right - 6 - w, y - 15, w + 4, 11));
       candidates.removeIf(room -> room.x() < axis.left() - 2 || room.y() < 32);
       boolean last = i == runs.size() - 1 && !axis.isNarrow();
       if (!last) {
@@ -266,27 +267,41 @@ final class PricePicture {
             .place(candidates)
             .ifPresent(
                 room -> {
-                  drawing.box("plate", room.x() - 2, room.y() - 0.5, w + 4, 12.5);
-                  drawing.text("a b", Anchor.START, room.x(), room.y() + 9.5, figure);
+                  drawing.box("plate", room.x(), room.y() - 0.5, w + 4, 12.5);
+                  drawing.text("a b", Anchor.START, room.x() + 2, room.y() + 9.5, figure);
                 });
       }
     }
   }
 
+  private Optional<Double> contractX(FinishAxis axis) {
+    return answer
+        .of()
+        .terms()
+        .contractFinish()
+        .map(by -> by.ticks())
+        .filter(ticks -> ticks <= axis.longest() && ticks >= axis.shortest())
+        .filter(ticks -> ticks != answer.finish().duration())
+        .map(axis::x);
+  }
+
+  private void contractLine(
+      Drawing drawing, FinishAxis axis, MoneyScale scale, Places places) {
+    contractX(axis)
+        .ifPresent(
+            x -> {
+              drawing.line("con", x, TOP, x, scale.bottom());
+              places.takeLine(x, TOP, x, scale.bottom());
+            });
+  }
+
   private void contract(Drawing drawing, FinishAxis axis, MoneyScale scale, Places places) {
-    Optional<Long> due =
-        answer
-            .of()
-            .terms()
-            .contractFinish()
-            .map(by -> by.ticks())
-            .filter(ticks -> ticks <= axis.longest() && ticks >= axis.shortest());
-    if (due.isEmpty()) {
+    Optional<Double> line = contractX(axis);
+    if (line.isEmpty()) {
       return;
     }
-    double x = axis.x(due.get());
+    double x = line.get();
     double w = Face.MEDIUM.width("contract finish", 13);
-    drawing.line("con", x, TOP, x, scale.bottom());
     List<Room> candidates = new ArrayList<>();
     for (double y = TOP; y < scale.bottom() - 20; y += 7) {
       candidates.add(new Room(x + 5, y, w, 12));

@@ -57,9 +57,7 @@ final class Words {
     this.calendar = of.terms().calendar();
     this.currency = SYMBOLS.getOrDefault(of.currency(), safe(of.currency()));
     boolean whole =
-        answer.states().stream()
-            .map(BriefAnswer.State::finish)
-            .flatMap(Words::amounts)
+        named(answer).flatMap(Words::amounts)
             .allMatch(Words::isWhole);
     this.decimals = whole ? 0 : 2;
     long latest =
@@ -76,6 +74,17 @@ final class Words {
 
   private static DateTimeFormatter format(String pattern) {
     return DateTimeFormatter.ofPattern(pattern, Locale.ENGLISH);
+  }
+
+  /** The finishes that are spoken of; whether they have cents says how all amounts look. */
+  private static Stream<Finish> named(BriefAnswer answer) {
+    return Stream.concat(
+        Stream.of(
+            answer.finish(),
+            answer.curve().asPlanned(),
+            answer.curve().leastTotal(),
+            answer.curve().shortest()),
+        answer.curve().atContract().stream());
   }
 
   private static Stream<BigDecimal> amounts(Finish finish) {
@@ -95,7 +104,7 @@ final class Words {
 
   // Money
 
-  /** An amount with its currency; cents where it or any finish has them. */
+  /** An amount with its currency; cents where it or a finish that is spoken of has them. */
   String money(BigDecimal amount) {
     String figures = amount(amount.abs());
     boolean symbol = currency.codePointCount(0, currency.length()) == 1;

@@ -1,9 +1,9 @@
 (function () {
   "use strict";
   var SVG = "http://www.w3.org/2000/svg";
-  var LEFT = 74, TOP = 62, PITCH = 87, BOX = 60, BEFORE = 7, AFTER = 3, NOTCHES = 8;
+  var TOP = 62, PITCH = 87, BOX = 60, BEFORE = 7, AFTER = 3, NOTCHES = 8;
   var data = JSON.parse(document.getElementById("states").textContent);
-  var states = data.states, net = data.net, chosen = data.chosen, now = chosen;
+  var states = data.states, net = data.net, LEFT = net.left, chosen = data.chosen, now = chosen;
   var root = document.documentElement;
   var $ = function (id) { return document.getElementById(id); };
   var slider = $("finish"), marks = document.querySelectorAll(".mark");
@@ -228,7 +228,7 @@
 
   function route(g, s, boxes, link) {
     var a = boxes[link[0]], b = boxes[link[1]], kind = link[2], path;
-    var between = b.middle + (a.lane < b.lane ? -1 : 1) * (BOX / 2 + 16), bx, end;
+    var between = b.middle + (a.lane < b.lane ? -1 : 1) * (BOX / 2 + 16), bx, end, run = null;
     function free(lane, from, to) {
       return !boxes.some(function (box) {
         return box.lane === lane && box.left < to - 0.5 && box.right > from + 0.5;
@@ -241,9 +241,12 @@
       path = "M" + n(a.right) + " " + n(a.middle);
       if (a.lane === b.lane && free(a.lane, a.right, bx)) {
         path += end;
+        run = [a.right, bx - 6, a.middle];
       } else if (a.lane !== b.lane && free(a.lane, a.right, before)) {
+        run = [a.right, before, a.middle];
         path += "H" + n(before) + "V" + n(b.middle) + end;
       } else if (a.lane !== b.lane && free(b.lane, after, bx)) {
+        run = [after, bx - 6, b.middle];
         path += "H" + n(after) + "V" + n(b.middle) + end;
       } else {
         path += "H" + n(after) + "V" + n(between) + "H" + n(before) + "V" + n(b.middle) + end;
@@ -255,6 +258,7 @@
       path = down < a.left
         ? "M" + n(a.left) + " " + n(a.middle) + "H" + n(down) + end
         : "M" + n(down) + " " + n(a.middle + (b.lane < a.lane ? -BOX : BOX) / 2) + end;
+      if (down >= a.left && free(b.lane, down, bx)) { run = [down, bx - 6, b.middle]; }
     } else if (kind === "FF") {
       bx = b.right;
       path = "M" + n(a.right) + " " + n(a.middle) + "H" + n(Math.max(a.right, bx) + 6) +
@@ -269,6 +273,9 @@
     var critical = a.critical && b.critical && to - from === link[3];
     var lag = kind !== "FS" || link[3] !== 0 ? " lag" : "";
     el(g, "path", "lk" + (critical ? " lkc" : "") + lag, { d: path });
+    if (link[4] && run && run[1] - run[0] >= width(link[4], 500, 12) + 8) {
+      text(g, "a", "middle", (run[0] + run[1]) / 2, run[2] - 4, link[4]);
+    }
   }
 
   function paint(g, s, k, box) {

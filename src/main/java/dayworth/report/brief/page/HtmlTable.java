@@ -3,6 +3,9 @@ package dayworth.report.brief.page;
 /** Tables as HTML. */
 final class HtmlTable {
 
+  /** Letters of a chain that does not stay on one line. */
+  private static final int LONG_CHAIN = 46;
+
   private final StringBuilder out;
 
   HtmlTable(StringBuilder out) {
@@ -146,7 +149,9 @@ final class HtmlTable {
   private void chains(Table.Chains chains) {
     String between = "";
     for (Table.Chain chain : chains.chains()) {
-      out.append(between).append("<span class=\"chain\"><span class=\"cn\">");
+      boolean isLong = chain.text().length() > LONG_CHAIN;
+      out.append(between).append(isLong ? "<span class=\"chain long\">" : "<span class=\"chain\">");
+      out.append("<span class=\"cn\">");
       out.append(html(chain.name())).append("</span>");
       chain.knots().forEach(this::knot);
       out.append("</span>");

@@ -78,6 +78,15 @@ public final class Drawing {
     body.append("<g").append(attributes).append('>');
   }
 
+  /** Begins a sheet within the sheet, which can be shown elsewhere by its id. */
+  public void openSheet(String id) {
+    body.append("<svg id=\"").append(id).append("\">");
+  }
+
+  public void closeSheet() {
+    body.append("</svg>");
+  }
+
   public void close() {
     body.append("</g>");
   }
