@@ -6,6 +6,7 @@ import dayworth.report.brief.Places.Room;
 import dayworth.report.brief.page.Picture;
 import dayworth.report.brief.svg.Drawing;
 import dayworth.report.brief.svg.Drawing.Anchor;
+import dayworth.report.brief.svg.Face;
 import java.math.BigDecimal;
 import java.util.ArrayList;
 import java.util.List;
@@ -17,6 +18,7 @@ final class CurvePicture {
 
   private static final double PLOT = 330;
   private static final int MOST_DOTS = 70;
+  private static final double GUTTER = 116;
 
   /** What wastes much more than everything else costs would flatten the picture. */
   private static final double MOST_WASTE = 1.5;
@@ -162,10 +164,21 @@ final class CurvePicture {
       Drawing drawing, FinishAxis axis, MoneyScale scale, double top, double below) {
     axis.mark(drawing, answer.finish().duration(), top - 6, scale.bottom() - top + below + 12);
     drawing.line("g0", axis.left(), scale.y(0), axis.right(), scale.y(0));
+    Places lines = linePlaces(axis, scale);
     for (BigDecimal amount : scale.round(4)) {
       double y = scale.y(amount);
       drawing.line("g", axis.left(), y, axis.right(), y);
-      drawing.text("a q", Anchor.START, axis.left() + 3, y - 4, words.money(amount.setScale(0, java.math.RoundingMode.HALF_UP)));
+      String text = words.round(amount);
+      double w = Face.MEDIUM.width(text, 12);
+      lines
+          .place(
+              List.of(
+                  new Room(axis.left() + 3, y - 14, w, 11),
+                  new Room(axis.right() - 3 - w, y - 14, w, 11),
+                  new Room(axis.left() + 3, y + 3, w, 11),
+                  new Room((axis.left() + axis.right() - w) / 2, y - 14, w, 11)))
+          .ifPresent(
+              room -> drawing.text("a q", Anchor.START, room.x(), room.y() + 10, text));
     }
   }
 
@@ -253,6 +266,19 @@ final class CurvePicture {
     return flags;
   }
 
+  /** A label beside the picture, where a line must not be long. */
+  private Label slim(String name, Finish finish) {
+    Label one = label(name, "", finish);
+    if (one.width() <= GUTTER || words.date(finish.duration()).isEmpty()) {
+      return one;
+    }
+    return Label.of(
+        one.lines().get(0),
+        new Label.Line("", words.finish(finish.duration())),
+        new Label.Line("", words.time(finish.duration())),
+        one.lines().get(2));
+  }
+
   private Label label(String name, String ink, Finish finish) {
     return Label.of(
         new Label.Line("b" + ink, name),
@@ -320,7 +346,7 @@ final class CurvePicture {
       addName(line, first, last, scale, left, right);
     }
     if (flagged(false).stream().noneMatch(n -> same(n.finish(), last))) {
-      right.add(scale.y(outcome.depends(last)), label("Shortest possible", "", last));
+      right.add(scale.y(outcome.depends(last)), slim("Shortest possible", last));
     }
     if (showsCrash) {
       right.add(scale.y(crash) - 6, crashLabel());
@@ -364,10 +390,24 @@ final class CurvePicture {
   }
 
   private void namesOnLines(Drawing drawing, FinishAxis axis, MoneyScale scale) {
-    Places places = new Places();
+    Places places = linePlaces(axis, scale);
+    List<MoneyLine> all = withTotal();
+    Room frame = new Room(axis.left(), scale.top() - 4, axis.right() - axis.left(), PLOT + 18);
+    for (MoneyLine line : all) {
+      name(drawing, axis, scale, line, places, frame);
+    }
+  }
+
+  private List<MoneyLine> withTotal() {
     List<MoneyLine> all = new ArrayList<>(lines);
     all.add(new MoneyLine("Total", "b plum", "s-to", outcome::depends));
-    for (MoneyLine line : all) {
+    return all;
+  }
+
+  /** What the lines of money cover. */
+  private Places linePlaces(FinishAxis axis, MoneyScale scale) {
+    Places places = new Places();
+    for (MoneyLine line : withTotal()) {
       for (int i = 1; i < finishes.size(); i++) {
         places.takeLine(
             axis.x(finishes.get(i - 1).duration()),
@@ -376,10 +416,7 @@ final class CurvePicture {
             scale.y(line.amount().apply(finishes.get(i))));
       }
     }
-    Room frame = new Room(axis.left(), scale.top() - 4, axis.right() - axis.left(), PLOT + 18);
-    for (MoneyLine line : all) {
-      name(drawing, axis, scale, line, places, frame);
-    }
+    return places;
   }
 
   private void name(

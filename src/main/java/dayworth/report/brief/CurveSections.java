@@ -190,10 +190,11 @@ final class CurveSections {
     List<String> notes = new ArrayList<>();
     worth().ifPresent(notes::add);
     Terms terms = answer.of().terms();
-    if (outcome.hasDamages() || outcome.hasBonus()) {
+    boolean reached = answer.curve().atContract().isPresent();
+    if (reached && (outcome.hasDamages() || outcome.hasBonus())) {
       boolean bonus = outcome.hasBonus();
       notes.add(
-          "After the contract finish there are no damages left to save"
+          "Once the contract finish is reached there are no damages left to save"
               + (bonus
                   ? ", only a bonus of "
                       + words.money(terms.bonus().rate())
@@ -207,12 +208,25 @@ final class CurveSections {
           "Running cost and the money of sections hang on when single activities are done; they are"
               + " in the price, not in the worth.");
     }
-    if (answer.curve().steps().size() > 1) {
+    if (stretches.size() > 1) {
       notes.add(
-          "The price rises because more chains hold the finish at once, or because what was cheapest"
-              + " is used up. The section on what is bought gives the reason for each step.");
+          rises()
+              ? "The price rises because more chains hold the finish at once, or because what was"
+                  + " cheapest is used up. The section on what is bought gives the reason for each"
+                  + " step."
+              : "The price does not only rise: running cost and sections change with the plan, and a"
+                  + " finish can be cheaper than the one before it.");
     }
     return notes;
+  }
+
+  private boolean rises() {
+    for (int i = 1; i < stretches.size(); i++) {
+      if (stretches.get(i).price().compareTo(stretches.get(i - 1).price()) < 0) {
+        return false;
+      }
+    }
+    return true;
   }
 
   private Optional<String> worth() {

@@ -124,10 +124,18 @@ final class FinishSections {
                     + " lower than for one."));
     int left = layout.rest().values().stream().mapToInt(List::size).sum();
     if (left > 0) {
+      boolean alsoCritical =
+          layout.rest().values().stream()
+              .flatMap(List::stream)
+              .anyMatch(i -> answer.of().isCritical(chosen.timing(), i));
       notes.add(
-          "Boxes show the critical and the nearly critical work; "
-              + left
-              + " activities with more float are counted below, by their group.");
+          alsoCritical
+              ? "More work is critical than there is room for; "
+                  + left
+                  + " activities are counted below by their group, some of them critical too."
+              : "Boxes show the critical and the nearly critical work; "
+                  + left
+                  + " activities with more float are counted below, by their group.");
     }
     int done = answer.of().network().size() - toGo;
     if (done > 0) {

@@ -3,16 +3,18 @@ package dayworth.report.brief;
 import dayworth.decision.BriefAnswer;
 import dayworth.network.Activity;
 import dayworth.report.brief.page.Part;
+import dayworth.value.Money;
 import java.math.BigDecimal;
 import java.math.BigInteger;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 
 /** What is told of any one finish; the slider changes from one telling to the next. */
 final class FinishTelling {
 
-  private static final int MOST_PICKS = 24;
+  private static final int MOST_PICKS = 16;
   private static final int MOST_MARKS = 10;
 
   private final BriefAnswer answer;
@@ -40,7 +42,7 @@ final class FinishTelling {
   }
 
   /** Something that is shortened or given back. */
-  record Pick(int activity, Part.Tally tally, String price) {}
+  record Pick(int activity, Part.Tally tally, Money cost, String price) {}
 
   private BriefAnswer.State state(int s) {
     return answer.states().get(s);
@@ -94,10 +96,16 @@ final class FinishTelling {
     lines.add(new Part.Amount(id, name, words.money(amount), Part.Weight.PLAIN));
   }
 
-  /** What is shortened and what is given back, in file order; of very many the first. */
+  /** What is shortened and what is given back, in file order; of very many the dearest. */
   List<Pick> picks(int s) {
     List<Pick> all = all(s);
-    return all.subList(0, Math.min(MOST_PICKS, all.size()));
+    if (all.size() <= MOST_PICKS) {
+      return all;
+    }
+    List<Pick> dearest = new ArrayList<>(all);
+    dearest.sort(Comparator.comparing(Pick::cost).reversed());
+    List<Pick> kept = dearest.subList(0, MOST_PICKS);
+    return all.stream().filter(kept::contains).toList();
   }
 
   /** How many have no room, and what they cost; or that nothing is shortened. */
@@ -106,8 +114,13 @@ final class FinishTelling {
     if (all.isEmpty()) {
       return "Nothing is shortened.";
     }
-    int left = all.size() - MOST_PICKS;
-    return left <= 0 ? "" : "and " + left + " more; plan.csv has them all";
+    List<Pick> shown = picks(s);
+    List<Pick> left = all.stream().filter(pick -> !shown.contains(pick)).toList();
+    if (left.isEmpty()) {
+      return "";
+    }
+    Money cost = left.stream().map(Pick::cost).reduce(Money.ZERO, Money::plus);
+    return "and " + left.size() + " more, together " + words.money(cost);
   }
 
   private List<Pick> all(int s) {
@@ -124,14 +137,18 @@ final class FinishTelling {
         most = Math.max(most, MapRows.bought(answer, state(before), i));
       }
       if (now > 0) {
-        bought.add(new Pick(i, tally(now, false), words.money(one.slope().times(now))));
+        bought.add(bought(i, one.slope().times(now), now));
       }
       if (most > now) {
-        back.add(new Pick(i, tally(most - now, true), ""));
+        back.add(new Pick(i, tally(most - now, true), Money.ZERO, ""));
       }
     }
     bought.addAll(back);
     return bought;
+  }
+
+  private Pick bought(int activity, Money cost, long ticks) {
+    return new Pick(activity, tally(ticks, false), cost, words.money(cost));
   }
 
   private Part.Tally tally(long ticks, boolean isBack) {

@@ -26,6 +26,10 @@ final class MapPicture {
   private static final double BETWEEN_GROUPS = 8;
   private static final int MOST_SAID = 40;
 
+  /** Where groups change oftener, gaps between them tell nothing. */
+  private static final int MOST_GROUPS = 14;
+
+
   private final BriefAnswer answer;
   private final Words words;
   private final MapRows rows;
@@ -190,11 +194,12 @@ final class MapPicture {
 
     String draw() {
       double height = above;
+      boolean grouped = groupChanges() <= MOST_GROUPS;
       List<Double> tops = new ArrayList<>();
       String group = "";
       for (int k = 0; k < rows.shown().size(); k++) {
         String next = answer.of().network().activity(rows.shown().get(k)).group();
-        height += k > 0 && !next.equals(group) ? BETWEEN_GROUPS : 0;
+        height += grouped && k > 0 && !next.equals(group) ? BETWEEN_GROUPS : 0;
         group = next;
         tops.add(height);
         height += axis.isNarrow() ? NARROW_ROW : BROAD_ROW;
@@ -216,6 +221,16 @@ final class MapPicture {
         figures(drawing, rows.shown().get(k), top(tops.get(k)));
       }
       return drawing.svg();
+    }
+
+    private int groupChanges() {
+      int changes = 0;
+      for (int k = 1; k < rows.shown().size(); k++) {
+        String one = answer.of().network().activity(rows.shown().get(k)).group();
+        changes +=
+            one.equals(answer.of().network().activity(rows.shown().get(k - 1)).group()) ? 0 : 1;
+      }
+      return changes;
     }
 
     private double top(double rowTop) {

@@ -22,6 +22,10 @@ final class NetworkPicture {
 
   private static final double SIZE = 12;
   private static final int MOST_NOTCHES = 8;
+
+  /** So many lanes go on a broad page of paper. */
+  private static final int MOST_LANES = 6;
+
   private static final int MOST_SAID = 60;
 
   /** Panels on paper share so much, that no box is only ever cut. */
@@ -47,7 +51,7 @@ final class NetworkPicture {
     drawing.closeSheet();
     List<Picture.Drawn> drawings = new ArrayList<>();
     drawings.add(new Picture.Drawn(Picture.Use.ALWAYS, sized(drawing.svg())));
-    if (layout.width() > NetworkLayout.PAGE) {
+    if (layout.width() > NetworkLayout.PAGE || layout.lanes().size() > MOST_LANES) {
       panels().forEach(panel -> drawings.add(new Picture.Drawn(Picture.Use.PAPER, panel)));
     }
     String boxes =
@@ -64,20 +68,34 @@ final class NetworkPicture {
         + svg.substring("<svg ".length());
   }
 
+  /** On paper the picture is cut into pages, so that its words can be read. */
   private List<String> panels() {
+    int lanes = Math.max(1, layout.lanes().size());
+    int rows = (lanes + MOST_LANES - 1) / MOST_LANES;
+    int each = (lanes + rows - 1) / rows;
     List<String> panels = new ArrayList<>();
-    double shown = NetworkLayout.PAGE;
-    for (double from = 0; from < layout.width() - SHARED || from == 0; from += shown - SHARED) {
-      panels.add(
-          "<svg viewBox=\""
-              + Drawing.n(from)
-              + " 0 "
-              + Drawing.n(shown)
-              + " "
-              + Drawing.n(layout.height())
-              + "\"><use href=\"#net\"/></svg>");
+    for (int row = 0; row < rows; row++) {
+      double top = row == 0 ? 0 : layout.top(row * each) - 16;
+      double bottom = row == rows - 1 ? layout.height() : layout.top((row + 1) * each) - 12;
+      double from = 0;
+      do {
+        panels.add(panel(from, top, bottom - top));
+        from += NetworkLayout.PAGE - SHARED;
+      } while (from < layout.width() - SHARED);
     }
     return panels;
+  }
+
+  private static String panel(double left, double top, double height) {
+    return "<svg viewBox=\""
+        + Drawing.n(left)
+        + " "
+        + Drawing.n(top)
+        + " "
+        + Drawing.n(NetworkLayout.PAGE)
+        + " "
+        + Drawing.n(height)
+        + "\"><use href=\"#net\"/></svg>";
   }
 
   private String description() {
@@ -371,7 +389,7 @@ final class NetworkPicture {
   }
 
   static String restLabel(String group, int count) {
-    String name = group.isEmpty() ? "others" : group;
+    String name = group.isEmpty() ? "Others" : group;
     return name + ": " + Words.count(count, "activity", "activities") + " not drawn, float ";
   }
 

@@ -307,7 +307,7 @@ final class PricePicture {
       candidates.add(new Room(x + 5, y, w, 12));
       candidates.add(new Room(x - 5 - w, y, w, 12));
     }
-    candidates.removeIf(room -> room.x() < 0 || room.x() + room.w() > axis.width());
+    candidates.removeIf(room -> room.x() < axis.left() || room.x() + room.w() > axis.right());
     places
         .place(candidates)
         .ifPresent(

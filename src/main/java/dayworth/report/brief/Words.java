@@ -49,7 +49,8 @@ final class Words {
   private final Optional<WorkingCalendar> calendar;
   private final String currency;
   private final int decimals;
-  private final boolean hasPlainDates;
+  /** Up to when a day and a month are one date; empty where they are not. */
+  private final Optional<LocalDate> plainUntil;
 
   Words(BriefAnswer answer) {
     this.of = answer.of();
@@ -62,14 +63,14 @@ final class Words {
     this.decimals = whole ? 0 : 2;
     long latest =
         Math.max(answer.curve().asPlanned().duration(), answer.states().get(0).finish().duration());
-    this.hasPlainDates =
+    this.plainUntil =
         calendar
             .filter(
                 dates ->
                     dates
                         .finishDate(latest)
                         .isBefore(dates.startDate(0).plusMonths(PLAIN_MONTHS)))
-            .isPresent();
+            .map(dates -> dates.finishDate(latest));
   }
 
   private static DateTimeFormatter format(String pattern) {
@@ -111,6 +112,12 @@ final class Words {
     String text =
         currency.isEmpty() ? figures : symbol ? currency + figures : currency + "\u00a0" + figures;
     return amount.signum() < 0 ? "−" + text : text;
+  }
+
+  /** A round amount on a scale, without cents. */
+  String round(BigDecimal amount) {
+    String text = money(amount);
+    return text.endsWith(".00") ? text.substring(0, text.length() - 3) : text;
   }
 
   String money(Money amount) {
@@ -244,7 +251,11 @@ final class Words {
 
   /** {@code Fri 20 Nov}, with the year where it could be another. */
   String shortDate(LocalDate date) {
-    return noBreaks((hasPlainDates ? SHORT : SHORT_YEAR).format(date));
+    return noBreaks((isPlain(date) ? SHORT : SHORT_YEAR).format(date));
+  }
+
+  private boolean isPlain(LocalDate date) {
+    return plainUntil.filter(last -> !date.isAfter(last)).isPresent();
   }
 
   static String dayMonth(LocalDate date) {
@@ -270,13 +281,21 @@ final class Words {
 
   /** The same in full. */
   String longFinish(long ticks) {
-    return date(ticks).map(Words::longDate).orElseGet(() -> workingTime(ticks));
+    return date(ticks)
+        .map(date -> longDate(date) + afterHours(ticks))
+        .orElseGet(() -> workingTime(ticks));
+  }
+
+  /** Where a day has several units a date alone does not say when. */
+  private String afterHours(long ticks) {
+    boolean finer = of.unit() == TimeUnit.HOUR || of.unit() == TimeUnit.SHIFT;
+    return finer ? ", after " + time(ticks) : "";
   }
 
   /** The same in full, without the year. */
   String plainFinish(long ticks) {
     return date(ticks)
-        .map(date -> hasPlainDates ? LONG_PLAIN.format(date) : LONG.format(date))
+        .map(date -> isPlain(date) ? LONG_PLAIN.format(date) : LONG.format(date))
         .orElseGet(() -> workingTime(ticks));
   }
 
@@ -292,7 +311,9 @@ final class Words {
 
   /** When something is due. */
   String due(Due due) {
-    return due.date().map(Words::longDate).orElseGet(() -> workingTime(due.ticks()));
+    return due.date()
+        .map(date -> longDate(date) + afterHours(due.ticks()))
+        .orElseGet(() -> workingTime(due.ticks()));
   }
 
   String shortDue(Due due) {

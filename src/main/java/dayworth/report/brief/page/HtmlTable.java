@@ -147,18 +147,16 @@ final class HtmlTable {
   }
 
   private void chains(Table.Chains chains) {
-    String between = "";
     for (Table.Chain chain : chains.chains()) {
       boolean isLong = chain.text().length() > LONG_CHAIN;
-      out.append(between).append(isLong ? "<span class=\"chain long\">" : "<span class=\"chain\">");
+      out.append(isLong ? "<span class=\"chain long\">" : "<span class=\"chain\">");
       out.append("<span class=\"cn\">");
       out.append(html(chain.name())).append("</span>");
       chain.knots().forEach(this::knot);
       out.append("</span>");
-      between = "<br>";
     }
     if (!chains.rest().isEmpty()) {
-      out.append(between).append("<span class=\"q\">").append(html(chains.rest())).append("</span>");
+      out.append("<span class=\"q\">").append(html(chains.rest())).append("</span>");
     }
   }
 
