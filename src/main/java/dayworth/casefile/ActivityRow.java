@@ -7,6 +7,7 @@ import java.util.Optional;
 /**
  * A row of activities.csv as far as it could be read; a value that is missing or faulty is empty.
  *
+ * @param divisible whether any duration between the two can be taken
  * @param predecessors ids as they stand in the cell
  */
 record ActivityRow(
@@ -18,5 +19,6 @@ record ActivityRow(
     Optional<BigDecimal> normalCost,
     Optional<BigDecimal> crash,
     Optional<BigDecimal> crashCost,
+    boolean divisible,
     Optional<Moment> notBefore,
     List<String> predecessors) {}

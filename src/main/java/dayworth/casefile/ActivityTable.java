@@ -26,17 +26,6 @@ final class ActivityTable {
           Column.optional("predecessors"),
           Column.optional("not_before").withNumbers());
 
-  private static final CellParser<String> DIVISIBLE =
-      (text, style) -> {
-        if (text.equals("no")) {
-          throw new CellFault("all-or-nothing activities are not served yet", "yes, or blank");
-        }
-        if (!text.equals("yes")) {
-          throw new CellFault("no such choice", "yes, or blank");
-        }
-        return text;
-      };
-
   private final Findings findings;
   private final Map<String, Integer> lineById = new HashMap<>();
   private final CrashRules crashRules;
@@ -83,6 +72,7 @@ final class ActivityTable {
         Optional.empty(),
         Optional.empty(),
         Optional.empty(),
+        true,
         Optional.empty(),
         List.of());
   }
@@ -111,7 +101,7 @@ final class ActivityTable {
     Cell<BigDecimal> cost = table.needed(row, "normal_cost", MoneyCell.AMOUNT, findings);
     Cell<BigDecimal> crash = table.cell(row, "crash_duration", TimeCell.DURATION, findings);
     Cell<BigDecimal> crashCost = table.cell(row, "crash_cost", MoneyCell.AMOUNT, findings);
-    table.cell(row, "divisible", DIVISIBLE, findings);
+    Cell<Boolean> divisible = table.cell(row, "divisible", WordCell.YES_OR_NO, findings);
     Cell<Moment> notBefore = table.cell(row, "not_before", Moment.Parser.MOMENT, findings);
     crashRules.check(row, normal, cost, crash, crashCost);
     return new ActivityRow(
@@ -123,6 +113,7 @@ final class ActivityTable {
         cost.value(),
         crash.value(),
         crashCost.value(),
+        divisible.value().orElse(true),
         notBefore.value(),
         ids(table.text(row, "predecessors")));
   }

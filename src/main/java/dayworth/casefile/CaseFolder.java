@@ -27,16 +27,12 @@ final class CaseFolder {
           HolidayTable.FILE,
           ProgressTable.FILE,
           SectionTable.FILE,
-          RunningTable.FILE);
+          RunningTable.FILE,
+          MeasureTable.FILE,
+          PackageTable.FILE);
 
   private static final Set<String> NOT_YET =
-      Set.of(
-          "measures.csv",
-          "packages.csv",
-          "labour.csv",
-          "patterns.csv",
-          "pay.csv",
-          "output_loss.csv");
+      Set.of("labour.csv", "patterns.csv", "pay.csv", "output_loss.csv");
 
   /** No figure hangs on these, so that results do not carry their digests. */
   private static final Set<String> BESIDE = Set.of(NotesText.FILE);

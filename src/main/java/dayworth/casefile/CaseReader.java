@@ -9,6 +9,9 @@ import dayworth.decision.Submission;
 import dayworth.decision.WorkToGo;
 import dayworth.network.Activity;
 import dayworth.network.Link;
+import dayworth.network.Measure;
+import dayworth.network.MeasurePackage;
+import dayworth.network.Measures;
 import dayworth.network.Network;
 import dayworth.value.Money;
 import dayworth.value.TimeScale;
@@ -50,6 +53,8 @@ public final class CaseReader {
     Optional<String> activityText = folder.text(ActivityTable.FILE);
     Optional<String> holidayText = folder.text(HolidayTable.FILE);
     Optional<String> linkText = folder.text(LinkTable.FILE);
+    Optional<String> measureText = folder.text(MeasureTable.FILE);
+    Optional<String> packageText = folder.text(PackageTable.FILE);
     Optional<String> progressText = folder.text(ProgressTable.FILE);
     Optional<String> runningText = folder.text(RunningTable.FILE);
     Optional<String> sectionText = folder.text(SectionTable.FILE);
@@ -66,6 +71,9 @@ public final class CaseReader {
     ActivityIds ids = new ActivityIds(known, findings);
     List<SectionRow> sections = SectionTable.read(ids, terms, sectionText, findings);
     List<RunningRow> running = RunningTable.read(ids, terms, runningText, findings);
+    PackageTable packages = PackageTable.read(packageText, findings);
+    List<MeasureRow> measures = MeasureTable.read(ids, packages, measureText, findings);
+    packages.reportUnused(measures);
     ProgressDates.check(progress, folder.has(ProgressTable.FILE), terms, findings);
     if (findings.hasProblems()) {
       return new Reading.Unsound(findings.problems(), findings.warnings());
@@ -79,6 +87,8 @@ public final class CaseReader {
             progress,
             sections,
             running,
+            measures,
+            packages,
             notes,
             atLeast);
     if (findings.hasProblems()) {
@@ -95,20 +105,26 @@ public final class CaseReader {
       List<ProgressRow> rows,
       List<SectionRow> sections,
       List<RunningRow> running,
+      List<MeasureRow> measures,
+      PackageTable packages,
       Notes notes,
       TimeScale atLeast) {
-    TimeScale scale = Resolution.of(activities, links, terms, rows, sections).and(atLeast);
+    TimeScale scale =
+        Resolution.of(activities, links, terms, rows, sections, measures).and(atLeast);
     CaseCalendar times = CaseCalendar.of(terms, holidays, scale);
     Network planned =
         new Network(
             scale,
             activities.stream().map(row -> activity(row, times)).toList(),
-            links.stream().map(row -> link(row, scale)).toList());
+            links.stream().map(row -> link(row, scale)).toList(),
+            List.of(),
+            measures(measures, packages, scale));
     Optional<Progress> progress = CaseProgress.of(activities, rows, terms, times);
     WorkToGo work = WorkToGo.of(planned, progress);
     MomentMoney money = CaseMoney.of(sections, running, terms, times, progress);
     CaseSize.check(work.network(), money, terms, times, sections, findings);
     SectionDoubts.report(sections, running, rows, terms, times, planned, findings);
+    MeasureDoubts.report(measures, rows, planned, findings);
     checkSomethingIsToGo(progress);
     Doubts.report(
         new ReadCase(
@@ -166,7 +182,28 @@ public final class CaseReader {
         scale.ticks(row.crash().orElse(normal)),
         cost,
         row.crashCost().map(Money::of).orElse(cost),
-        row.notBefore().map(times::start).orElse(0L));
+        row.notBefore().map(times::start).orElse(0L),
+        0,
+        row.divisible());
+  }
+
+  private static Measures measures(List<MeasureRow> rows, PackageTable packages, TimeScale scale) {
+    return new Measures(
+        rows.stream()
+            .map(
+                row ->
+                    new Measure(
+                        row.activity(),
+                        row.measure(),
+                        scale.ticks(row.duration()),
+                        Money.of(row.cost()),
+                        row.inPackage(),
+                        row.ofRemaining(),
+                        row.note()))
+            .toList(),
+        packages.rows().stream()
+            .map(row -> new MeasurePackage(row.name(), Money.of(row.cost())))
+            .toList());
   }
 
   private static Link link(LinkRow row, TimeScale scale) {

@@ -2,6 +2,7 @@ package dayworth.casefile;
 
 import dayworth.contract.MomentMoney;
 import dayworth.engine.branching.ChargedMoney;
+import dayworth.engine.measures.WaySearch;
 import dayworth.engine.stepping.Stepping;
 import dayworth.network.Network;
 import dayworth.network.Plan;
@@ -45,8 +46,11 @@ final class CaseSize {
       tooFarApart(ActivityTable.FILE, "smaller or rounder costs");
       return;
     }
-    Network priced =
-        new Network(network.scale(), network.activities(), network.links(), money.spans());
+    Network priced = network.withSpans(money.spans());
+    if (!WaySearch.fits(priced)) {
+      tooFarApart(MeasureTable.FILE, "smaller or rounder costs");
+      return;
+    }
     if (!ChargedMoney.fits(priced, money.charges(), TIMES_AS_PLANNED * asPlanned)) {
       String file = money.running().isEmpty() ? SectionTable.FILE : RunningTable.FILE;
       tooFarApart(file, "smaller or rounder rates and costs");

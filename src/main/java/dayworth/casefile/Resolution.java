@@ -24,8 +24,12 @@ final class Resolution {
       List<LinkRow> links,
       TermsTable terms,
       List<ProgressRow> progress,
-      List<SectionRow> sections) {
+      List<SectionRow> sections,
+      List<MeasureRow> measures) {
     TimeScale scale = ofTerms(terms);
+    for (MeasureRow row : measures) {
+      scale = scale.and(TimeScale.of(row.duration()));
+    }
     for (SectionRow row : sections) {
       scale = scale.and(ofSection(row));
     }

@@ -10,6 +10,9 @@ import java.util.Map;
  */
 record WordCell<T>(String what, Map<String, T> words) implements CellParser<T> {
 
+  static final WordCell<Boolean> YES_OR_NO =
+      WordCell.<Boolean>of("choice").with("yes", true).with("no", false);
+
   /** Without words yet; they are added in the order in which messages name them. */
   static <T> WordCell<T> of(String what) {
     return new WordCell<>(what, Map.of());

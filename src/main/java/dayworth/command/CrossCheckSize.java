@@ -23,7 +23,7 @@ record CrossCheckSize(long most) {
     int size = of.network().size();
     double k = size / 1000.0;
     double first = 1.2 * k * k * k;
-    double further = of.momentMoney().charges().isEmpty() ? 0.025 * k * k : first + 0.02;
+    double further = of.isConvex() ? 0.025 * k * k : first + 0.02;
     return size > TOO_LARGE ? 0 : (long) ((9.5 - first) / further);
   }
 

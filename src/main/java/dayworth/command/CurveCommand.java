@@ -53,7 +53,7 @@ final class CurveCommand extends ProvingCommand {
 
   private CurveAnswer ask(Case read, OptionalLong asked) throws FinishTooEarly {
     try (ProgressLine progress = ProgressLine.start(err(), isTerminal())) {
-      return CurveQuestion.ask(read, asked, crossChecks(read), progress);
+      return CurveQuestion.ask(read, asked, crossChecks(read), effort(), progress);
     }
   }
 

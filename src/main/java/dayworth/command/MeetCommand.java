@@ -115,7 +115,7 @@ final class MeetCommand extends ProvingCommand {
 
   private MeetAnswer ask(Case read, Wish wish) throws FinishTooEarly {
     try (ProgressLine progress = ProgressLine.start(err(), isTerminal())) {
-      return MeetQuestion.ask(read, wish, crossChecks(read), progress);
+      return MeetQuestion.ask(read, wish, crossChecks(read), effort(), progress);
     }
   }
 

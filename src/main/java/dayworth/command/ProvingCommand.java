@@ -2,6 +2,7 @@ package dayworth.command;
 
 import dayworth.decision.Case;
 import dayworth.decision.CurveAnswer;
+import dayworth.decision.Effort;
 import dayworth.engine.linear.LinearProgramme;
 import dayworth.report.ResultsNotWritten;
 import dayworth.report.picture.Pictures;
@@ -13,6 +14,7 @@ import java.util.LinkedHashSet;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 
 /** What questions have in common that compute the curve, compare it and draw it. */
@@ -30,6 +32,13 @@ abstract class ProvingCommand extends CaseCommand {
 
   @Option(names = "--no-pictures", description = "Write no pictures, only tables.")
   private boolean noPictures;
+
+  @Mixin private EffortOptions effort = new EffortOptions();
+
+  /** How long to look for proofs, from now on. */
+  final Effort effort() {
+    return effort.from();
+  }
 
   /** The solver's classes take longer to load than a case to read, and there is a second core. */
   @Override

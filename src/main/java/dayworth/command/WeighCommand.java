@@ -14,10 +14,13 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 
 /** {@code dayworth weigh}. */
 @Command(name = "weigh", description = "Put the choices side by side, and say how far each holds.")
 final class WeighCommand extends CaseCommand {
+
+  @Mixin private EffortOptions effort = new EffortOptions();
 
   @Override
   TimeScale finest() {
@@ -37,7 +40,7 @@ final class WeighCommand extends CaseCommand {
 
   private WeighAnswer ask(Case read) {
     try (ProgressLine progress = ProgressLine.start(err(), isTerminal())) {
-      return WeighQuestion.ask(read, progress);
+      return WeighQuestion.ask(read, effort.from(), progress);
     }
   }
 }

@@ -43,15 +43,15 @@ final class BranchChecking {
     byBranch.forEach(
         (branch, found) -> {
           Relaxation relaxation = branch.relaxation(network, charges, fence);
-          Descent descent = new Descent(relaxation.network());
-          LinearProgramme programme = new LinearProgramme(relaxation.network());
-          Plan before = Plan.allNormal(network);
+          Descent descent = new Descent(relaxation.convex());
+          LinearProgramme programme = new LinearProgramme(relaxation.convex());
+          Plan before = Plan.allNormal(relaxation.convex());
           for (Point point : found) {
             watcher.now(
                 "comparing with the linear programme, now at "
                     + network.scale().text(point.duration()));
             before = descent.within(point.duration(), before).orElseThrow();
-            Money stepping = before.cost(relaxation.network());
+            Money stepping = before.cost(relaxation.convex());
             Answer answer = programme.at(point.duration());
             if (answer instanceof Answer.NotSolved silent) {
               unanswered.add(new CrossCheck.Unanswered(point.duration(), silent.reason()));

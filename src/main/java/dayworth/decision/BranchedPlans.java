@@ -17,6 +17,8 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.SortedSet;
 import java.util.function.BiFunction;
+import java.util.function.BooleanSupplier;
+import java.util.stream.IntStream;
 
 /**
  * Where some money is not convex each finish that is to be reported is solved by branching.
@@ -26,14 +28,13 @@ import java.util.function.BiFunction;
  */
 final class BranchedPlans implements CheapestPlans {
 
-  /** Convex problems for each finish, before the rest is left with a gap. */
-  private static final long PROBLEMS_PER_FINISH = 400;
-
   /** A project that may last so much longer than as planned has no deadline that binds. */
   private static final long TIMES_AS_PLANNED = 2;
 
   private final Network network;
   private final List<Charge> charges;
+  private final long nodesPerFinish;
+  private final BooleanSupplier isOver;
   private final List<Point> points;
   private final Curve curve;
   private final Map<Long, Plan> planOf = new HashMap<>();
@@ -42,6 +43,8 @@ final class BranchedPlans implements CheapestPlans {
    * Solves every finish.
    *
    * @param network with the convex money as spans
+   * @param nodesPerFinish relaxations that are solved for each finish on average
+   * @param isOver whether to stop before that
    * @param bare the same network without them: its curve tells what stops the project
    * @param rows from the longest and the shortest finish to all that are to be solved, from long to
    *     short
@@ -51,8 +54,12 @@ final class BranchedPlans implements CheapestPlans {
       Network network,
       List<Charge> charges,
       Curve bare,
+      long nodesPerFinish,
+      BooleanSupplier isOver,
       BiFunction<Long, Long, SortedSet<Long>> rows,
       Watcher watcher) {
+    this.nodesPerFinish = nodesPerFinish;
+    this.isOver = isOver;
     this.network = network;
     this.charges = charges;
     watcher.now("seeking the cheapest plan whatever the finish");
@@ -93,7 +100,8 @@ final class BranchedPlans implements CheapestPlans {
 
   private List<Point> solve(long[] durations) {
     try {
-      return Branching.solve(network, charges, durations, PROBLEMS_PER_FINISH * durations.length);
+      return Branching.solve(
+          network, charges, durations, nodesPerFinish * durations.length, isOver);
     } catch (Branching.BoundRefuted refuted) {
       throw new ProofFailed(
           "the finish at " + network.scale().text(refuted.duration()), refuted.getMessage());
@@ -104,10 +112,14 @@ final class BranchedPlans implements CheapestPlans {
   private Curve curve(Curve bare) {
     List<Step> steps = new ArrayList<>();
     List<Plan> plans = new ArrayList<>(List.of(points.get(0).plan()));
+    boolean lastIsEven = false;
     for (int k = 1; k < points.size(); k++) {
       Step step = step(points.get(k - 1), points.get(k));
       Step last = steps.isEmpty() ? step : steps.get(steps.size() - 1);
-      if (!steps.isEmpty() && goesOnEvenly(last, step)) {
+      boolean isEven = haveSameMeasures(points.get(k - 1).plan(), points.get(k).plan());
+      boolean joins = lastIsEven && isEven && goesOnEvenly(last, step);
+      lastIsEven = isEven;
+      if (joins) {
         steps.set(steps.size() - 1, joined(last, step));
         plans.set(plans.size() - 1, points.get(k).plan());
       } else {
@@ -129,6 +141,11 @@ final class BranchedPlans implements CheapestPlans {
       }
     }
     return new Step(from.duration(), to.duration(), to.cost().minus(from.cost()), changes);
+  }
+
+  /** Otherwise something is switched, which is no even change. */
+  private static boolean haveSameMeasures(Plan one, Plan other) {
+    return IntStream.range(0, one.size()).allMatch(i -> one.measure(i) == other.measure(i));
   }
 
   private static boolean goesOnEvenly(Step last, Step next) {

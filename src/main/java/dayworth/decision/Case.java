@@ -3,7 +3,11 @@ package dayworth.decision;
 import dayworth.contract.Due;
 import dayworth.contract.MomentMoney;
 import dayworth.contract.Terms;
+import dayworth.engine.Ways;
+import dayworth.engine.measures.HullNetwork;
+import dayworth.engine.measures.Opening;
 import dayworth.network.Network;
+import dayworth.network.Plan;
 import dayworth.network.Timing;
 import java.util.List;
 import java.util.Optional;
@@ -93,9 +97,29 @@ public record Case(
 
   /** The network with the convex money that hangs on moments as spans. */
   public Network pricedNetwork() {
-    return momentMoney.spans().isEmpty()
-        ? network
-        : new Network(network.scale(), network.activities(), network.links(), momentMoney.spans());
+    return momentMoney.spans().isEmpty() ? network : network.withSpans(momentMoney.spans());
+  }
+
+  /** Whether money hangs on durations alone and every activity goes along its line. */
+  public boolean isPlain() {
+    return momentMoney.isNone() && !network.hasChoices();
+  }
+
+  /** Whether all money is convex in the times, so that one flow proves each piece of the curve. */
+  public boolean isConvex() {
+    return momentMoney.charges().isEmpty() && !network.hasChoices();
+  }
+
+  /** The network where each activity may take any duration that its ways bound; convex. */
+  Network boundingNetwork() {
+    return network.hasChoices()
+        ? HullNetwork.of(network, Opening.all(network, Ways.of(network)))
+        : network;
+  }
+
+  /** Every activity at its shortest. */
+  Plan everythingShortest() {
+    return network.hasChoices() ? Ways.of(network).shortest() : Plan.allCrash(network);
   }
 
   /** How far an activity is. */

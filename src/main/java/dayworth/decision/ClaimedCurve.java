@@ -23,6 +23,7 @@ import java.util.SortedMap;
  * @param crashEverything likewise
  * @param asked the finish of the plan asked for
  * @param unproved taken as it is
+ * @param isCut likewise
  * @param crossCheck what the linear programme is said to have found
  */
 public record ClaimedCurve(
@@ -38,6 +39,7 @@ public record ClaimedCurve(
     Plan crashEverything,
     long asked,
     List<Unproved> unproved,
+    boolean isCut,
     CrossCheck crossCheck) {
 
   /** A step without its price. */

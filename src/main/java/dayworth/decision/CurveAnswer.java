@@ -22,6 +22,7 @@ import java.util.Optional;
  * @param asked the plan asked for: the longest of the least total, or another
  * @param provedRows how many rows the checker proved to be cheapest
  * @param unproved the rest, each with what is known of it; empty where all money is convex
+ * @param isCut whether the search for proofs was ended by the clock
  * @param crossCheck the linear programme's agreement
  * @param evidence what rechecks it
  */
@@ -37,6 +38,7 @@ public record CurveAnswer(
     AskedPlan asked,
     int provedRows,
     List<Unproved> unproved,
+    boolean isCut,
     CrossCheck crossCheck,
     Evidence evidence) {
 
@@ -70,6 +72,7 @@ public record CurveAnswer(
         asked,
         provedRows,
         unproved,
+        isCut,
         crossCheck,
         evidence);
   }

@@ -2,7 +2,6 @@ package dayworth.decision;
 
 import dayworth.contract.Due;
 import dayworth.contract.FinishCost;
-import dayworth.contract.MomentMoney;
 import dayworth.contract.Terms;
 import dayworth.engine.Curve;
 import dayworth.engine.Flow;
@@ -34,7 +33,6 @@ final class CurveCounting {
   private final Case of;
   private final Network network;
   private final Terms terms;
-  private final MomentMoney money;
   private final Curve curve;
   private final Function<SortedSet<Long>, List<Plan>> plans;
   private final UnaryOperator<Plan> schedule;
@@ -55,7 +53,6 @@ final class CurveCounting {
     this.of = of;
     this.network = of.network();
     this.terms = of.terms();
-    this.money = of.momentMoney();
     this.curve = curve;
     this.plans = plans;
     this.schedule = schedule;
@@ -71,7 +68,8 @@ final class CurveCounting {
       List<Unproved> unproved,
       CrossCheck crossCheck,
       long slopeUnits,
-      Optional<List<List<Flow.Entry>>> flows) {
+      Optional<List<List<Flow.Entry>>> flows,
+      boolean isCut) {
     NavigableSet<Long> durations = durations(of, curve.longest(), curve.shortest());
     curve.steps().forEach(step -> durations.add(step.to()));
     List<Finish> rows = finishes(durations.descendingSet());
@@ -79,7 +77,7 @@ final class CurveCounting {
     long asked = at.orElse(least.get(0).duration());
     Plan plan = plans(new TreeSet<>(List.of(asked))).get(0);
     Plan asPlanned = schedule.apply(Plan.allNormal(network));
-    Plan crashEverything = schedule.apply(Plan.allCrash(network));
+    Plan crashEverything = schedule.apply(of.everythingShortest());
     Optional<Finish> atContract =
         terms
             .contractFinish()
@@ -98,6 +96,7 @@ final class CurveCounting {
         new CurveAnswer.AskedPlan(finish(asked), Timing.by(network, plan, asked)),
         rows.size() - unproved.size(),
         unproved,
+        isCut,
         crossCheck,
         new Evidence(slopeUnits, flows, counted, asPlanned, crashEverything));
   }
@@ -132,7 +131,7 @@ final class CurveCounting {
   }
 
   private List<Finish> finishes(SortedSet<Long> durations) {
-    if (money.isNone()) {
+    if (of.isPlain()) {
       return durations.stream()
           .map(duration -> finish(duration, curve.costAt(duration), Money.ZERO, terms.at(duration)))
           .toList();

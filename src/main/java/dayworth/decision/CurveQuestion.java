@@ -17,12 +17,15 @@ public final class CurveQuestion {
   private final Case of;
   private final Network network;
   private final MomentMoney money;
+  private final Effort effort;
   private final Watcher watcher;
   private final CheapestPlans cheapest;
   private final Curve curve;
 
-  private CurveQuestion(Case of, OptionalLong at, Watcher watcher) throws FinishTooEarly {
+  private CurveQuestion(Case of, OptionalLong at, Effort effort, Watcher watcher)
+      throws FinishTooEarly {
     this.of = of;
+    this.effort = effort;
     this.watcher = watcher;
     this.network = of.network();
     this.money = of.momentMoney();
@@ -41,22 +44,31 @@ public final class CurveQuestion {
    */
   public static CurveAnswer ask(Case of, OptionalLong at, long crossChecks, Watcher watcher)
       throws FinishTooEarly {
-    return new CurveQuestion(of, at, watcher).answer(at, crossChecks);
+    return ask(of, at, crossChecks, Effort.USUAL, watcher);
+  }
+
+  /** The same with a stated effort. */
+  public static CurveAnswer ask(
+      Case of, OptionalLong at, long crossChecks, Effort effort, Watcher watcher)
+      throws FinishTooEarly {
+    return new CurveQuestion(of, at, effort, watcher).answer(at, crossChecks);
   }
 
   private CheapestPlans cheapest(OptionalLong at) throws FinishTooEarly {
     Network priced = of.pricedNetwork();
-    if (money.charges().isEmpty()) {
+    if (of.isConvex()) {
       ConvexPlans convex = new ConvexPlans(priced, watcher);
       requirePossible(convex.curve(), at);
       return convex;
     }
-    Curve bare = new ConvexPlans(network, watcher).curve();
+    Curve bare = new ConvexPlans(of.boundingNetwork(), watcher).curve();
     requirePossible(bare, at);
     return new BranchedPlans(
         priced,
         money.charges(),
         bare,
+        effort.nodesFor(of),
+        effort.isOver(),
         (longest, shortest) -> {
           NavigableSet<Long> durations = CurveCounting.durations(of, longest, shortest);
           at.ifPresent(asked -> durations.add(Math.min(asked, longest)));
@@ -69,7 +81,7 @@ public final class CurveQuestion {
     if (at.isPresent() && at.getAsLong() < possible.shortest()) {
       throw new FinishTooEarly(of, possible, at.getAsLong());
     }
-    ProofChecker.stops(network, possible.obstacles(), possible.shortest())
+    ProofChecker.stops(of.boundingNetwork(), possible.obstacles(), possible.shortest())
         .ifPresent(
             refuted -> {
               throw new ProofFailed(refuted.where(), refuted.why());
@@ -85,11 +97,12 @@ public final class CurveQuestion {
         cheapest.unproved(),
         cheapest.crossCheck(crossChecks, watcher),
         Stepping.scaleFor(of.pricedNetwork()).orElseThrow().perUnit(),
-        cheapest.flows());
+        cheapest.flows(),
+        !cheapest.unproved().isEmpty() && effort.isOver().getAsBoolean());
   }
 
   private List<Plan> plans(SortedSet<Long> durations) {
-    return money.isNone()
+    return of.isPlain()
         ? durations.stream().map(duration -> Stepping.planWithin(network, duration)).toList()
         : cheapest.plans(durations);
   }

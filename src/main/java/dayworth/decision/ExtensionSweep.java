@@ -41,7 +41,7 @@ final class ExtensionSweep {
   private ExtensionSweep(CurveAnswer answer, Extension claimed) {
     this.terms = answer.of().terms();
     this.claimed = claimed;
-    this.isStraight = answer.of().momentMoney().charges().isEmpty();
+    this.isStraight = answer.of().isConvex();
     answer.rows().forEach(row -> rows.put(row.duration(), row));
   }
 

@@ -4,6 +4,7 @@ import dayworth.contract.MomentMoney;
 import dayworth.contract.Section;
 import dayworth.engine.branching.Branching;
 import dayworth.network.Activity;
+import dayworth.network.Measures;
 import dayworth.network.Network;
 import dayworth.network.Plan;
 import dayworth.network.Timing;
@@ -44,7 +45,7 @@ final class GivenDurations {
       fixed.add(lasting(network.activity(i), durations.duration(i)));
     }
     HeldSections held =
-        new HeldSections(new Network(network.scale(), fixed, network.links(), running.spans()));
+        new HeldSections(network.withActivities(fixed, Measures.NONE).withSpans(running.spans()));
     for (Section section : all.sections()) {
       held.with(section, earliest.finish() - earliest.earlyFinish(section.activity()));
     }
@@ -53,7 +54,7 @@ final class GivenDurations {
         Branching.solve(lasting, running.charges(), new long[] {earliest.finish()}, PROBLEMS)
             .get(0)
             .plan();
-    return held.ofBase(Timing.earliest(lasting, solved).scheduled());
+    return held.ofBase(Timing.earliest(lasting, solved).scheduled()).withMeasuresOf(durations);
   }
 
   private static Activity lasting(Activity activity, long duration) {

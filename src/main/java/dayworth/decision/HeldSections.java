@@ -41,7 +41,7 @@ final class HeldSections {
   }
 
   Network network() {
-    return new Network(base.scale(), activities, links, base.spans());
+    return new Network(base.scale(), activities, links, base.spans(), base.measures());
   }
 
   /** The part of a scheduled plan of {@link #network} that is of the given activities. */

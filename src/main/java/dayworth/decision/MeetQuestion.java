@@ -35,9 +35,16 @@ public final class MeetQuestion {
    */
   public static MeetAnswer ask(Case of, Wish wish, long crossChecks, Watcher watcher)
       throws FinishTooEarly {
+    return ask(of, wish, crossChecks, Effort.USUAL, watcher);
+  }
+
+  /** The same with a stated effort. */
+  public static MeetAnswer ask(Case of, Wish wish, long crossChecks, Effort effort, Watcher watcher)
+      throws FinishTooEarly {
     watcher.now("looking for the cheapest plan");
-    long finish = finish(of, wish, watcher);
-    CurveAnswer answer = CurveQuestion.ask(of, OptionalLong.of(finish), crossChecks, watcher);
+    long finish = finish(of, wish, effort, watcher);
+    CurveAnswer answer =
+        CurveQuestion.ask(of, OptionalLong.of(finish), crossChecks, effort, watcher);
     watcher.now("writing the proof sheet");
     return answer(wish, answer, PlanProving.of(of, answer.asked().timing().plan(), finish));
   }
@@ -61,15 +68,16 @@ public final class MeetQuestion {
   }
 
   /** When to finish; where time is wished for, no later than money gains by waiting. */
-  private static long finish(Case of, Wish wish, Watcher watcher) throws FinishTooEarly {
-    return of.momentMoney().isNone()
+  private static long finish(Case of, Wish wish, Effort effort, Watcher watcher)
+      throws FinishTooEarly {
+    return of.isPlain()
         ? finish(of, Stepping.curve(of.network(), PieceWitness.NONE), wish)
-        : finishByRows(CurveQuestion.ask(of, wish.duration(), 0, watcher), wish);
+        : finishByRows(CurveQuestion.ask(of, wish.duration(), 0, effort, watcher), wish);
   }
 
   /** When to finish, by a curve that is known. */
   static long finish(CurveAnswer answer, Wish wish) {
-    return answer.of().momentMoney().isNone()
+    return answer.of().isPlain()
         ? finish(answer.of(), answer.curve(), wish)
         : finishByRows(answer, wish);
   }

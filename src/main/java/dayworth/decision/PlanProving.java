@@ -31,7 +31,7 @@ final class PlanProving {
    * @throws ProofFailed if it is not
    */
   static PlanProof of(Case of, Plan plan, long finish) {
-    return of.momentMoney().charges().isEmpty()
+    return of.isConvex()
         ? convex(of.pricedNetwork(), plan, finish, of.momentMoney().fixed())
         : branched(of, plan, finish);
   }

@@ -29,7 +29,7 @@ public final class PlansAlong {
       return answer.asked().timing();
     }
     Network network = answer.of().network();
-    boolean isConvex = answer.of().momentMoney().charges().isEmpty();
+    boolean isConvex = answer.of().isConvex();
     Curve curve = answer.curve();
     if (finish == curve.longest()) {
       return Timing.by(network, curve.firstPlan(), finish);

@@ -28,6 +28,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalLong;
 import java.util.TreeSet;
+import java.util.stream.IntStream;
 
 /**
  * Recounts a claimed curve from the case: which plans it names and what they cost, whether its
@@ -83,8 +84,7 @@ public final class Recount {
         (long) perActivity * of.network().size()
             + of.network().links().size()
             + of.momentMoney().spans().size();
-    return of.momentMoney().charges().isEmpty()
-        && most * (claim.steps().size() + 1) <= Evidence.MOST_ENTRIES;
+    return of.isConvex() && most * (claim.steps().size() + 1) <= Evidence.MOST_ENTRIES;
   }
 
   private MeetAnswer meet(Wish wish, List<Flow.Entry> flow) throws ClaimRefuted {
@@ -92,7 +92,7 @@ public final class Recount {
     long finish = MeetQuestion.finish(answer, wish);
     require(claim.asked() == finish, "plan.duration", text(claim.asked()), text(finish));
     Plan plan = answer.asked().timing().plan();
-    if (!money.charges().isEmpty()) {
+    if (!of.isConvex()) {
       return MeetQuestion.answer(wish, answer, PlanProving.paid(of, plan));
     }
     Flow proving = Flow.of(scale, priced, flow);
@@ -105,7 +105,8 @@ public final class Recount {
     requireSteps();
     requirePlans();
     Curve curve = recounted();
-    Optional<Refuted> free = ProofChecker.stops(network, claim.obstacles(), curve.shortest());
+    Optional<Refuted> free =
+        ProofChecker.stops(of.boundingNetwork(), claim.obstacles(), curve.shortest());
     require("shortest.stopped_by", free);
     require(
         claim.flows().isPresent() || !mustCarryFlows(of, claim),
@@ -115,7 +116,7 @@ public final class Recount {
     if (claim.flows().isPresent()) {
       requireFlows(curve, claim.flows().get());
     }
-    if (money.isNone()) {
+    if (of.isPlain()) {
       Plan asked = planFor(claim.asked());
       Money least = curve.costAt(claim.asked());
       require(
@@ -136,10 +137,11 @@ public final class Recount {
     requireRowPlans(curve);
     return counting.answer(
         OptionalLong.of(claim.asked()),
-        money.charges().isEmpty() ? List.of() : unproved(),
+        of.isConvex() ? List.of() : unproved(),
         crossCheck(curve),
         claim.slopeUnits(),
-        claim.flows());
+        claim.flows(),
+        claim.isCut());
   }
 
   private void requireSteps() throws ClaimRefuted {
@@ -151,7 +153,7 @@ public final class Recount {
       require(step.to() < from, place + ".to_duration", text(step.to()), "less than " + text(from));
       from = step.to();
     }
-    int breakpoints = money.isNone() ? 1 : claim.steps().size() + 1;
+    int breakpoints = of.isPlain() ? 1 : claim.steps().size() + 1;
     require(
         claim.breakpoints().size() == breakpoints,
         "evidence.breakpoint_plans",
@@ -178,15 +180,12 @@ public final class Recount {
       require(place, ProofChecker.possible(network, entry.getValue(), entry.getKey()));
     }
     requireGiven("evidence.as_planned", claim.asPlanned(), Plan.allNormal(network));
-    requireGiven("evidence.crash_everything", claim.crashEverything(), Plan.allCrash(network));
+    requireGiven("evidence.crash_everything", claim.crashEverything(), of.everythingShortest());
   }
 
   private void requireGiven(String place, Plan plan, Plan durations) throws ClaimRefuted {
     require(
-        Arrays.equals(plan.toArray(), durations.toArray()),
-        place + ".durations",
-        "other durations",
-        "those of the case");
+        sameWays(plan, durations), place + ".durations", "other durations", "those of the case");
     if (money.isNone()) {
       return;
     }
@@ -202,6 +201,11 @@ public final class Recount {
     }
   }
 
+  private static boolean sameWays(Plan one, Plan other) {
+    return IntStream.range(0, one.size())
+        .allMatch(i -> one.duration(i) == other.duration(i) && one.measure(i) == other.measure(i));
+  }
+
   private static long[] after(long[] durations, ClaimedStep step) {
     step.changes().forEach(change -> durations[change.activity()] -= change.shortened());
     return durations;
@@ -214,7 +218,7 @@ public final class Recount {
     for (int k = 0; k < claim.steps().size(); k++) {
       ClaimedStep step = claim.steps().get(k);
       Money extra;
-      if (money.isNone()) {
+      if (of.isPlain()) {
         MoneySum sum = new MoneySum();
         for (Change change : step.changes()) {
           sum.add(network.activity(change.activity()).slope(), change.shortened(), 1);
@@ -235,7 +239,7 @@ public final class Recount {
             cost(first),
             steps,
             claim.obstacles(),
-            money.isNone() ? List.of() : claim.breakpoints());
+            of.isPlain() ? List.of() : claim.breakpoints());
     for (int k = 1; k <= steps.size(); k++) {
       long finish = steps.get(k - 1).to();
       String place = "steps[" + (k - 1) + "].changes";
@@ -246,7 +250,7 @@ public final class Recount {
 
   /** Direct cost, spans and charges. */
   private Money cost(Plan plan) {
-    if (money.isNone()) {
+    if (of.isPlain()) {
       return plan.directCost(network);
     }
     MoneySum sum = new MoneySum().add(plan.cost(priced));
@@ -260,7 +264,7 @@ public final class Recount {
 
   private void requireFlows(Curve curve, List<List<Flow.Entry>> flows) throws ClaimRefuted {
     require(
-        money.charges().isEmpty() && flows.size() == curve.steps().size() + 1,
+        of.isConvex() && flows.size() == curve.steps().size() + 1,
         "evidence.flows",
         flows.size() + " flows",
         "one for the longest finish and one for each step");
@@ -300,7 +304,7 @@ public final class Recount {
   private void requireRowPlans(Curve curve) throws ClaimRefuted {
     TreeSet<Long> needed = new TreeSet<>();
     needed.add(claim.asked());
-    if (!money.isNone()) {
+    if (!of.isPlain()) {
       needed.addAll(CurveCounting.durations(of, curve.longest(), curve.shortest()));
       curve.steps().forEach(step -> needed.add(step.to()));
       of.terms()
@@ -327,9 +331,7 @@ public final class Recount {
     if (money.isNone()) {
       return durations;
     }
-    return Arrays.equals(durations.toArray(), claim.asPlanned().toArray())
-        ? claim.asPlanned()
-        : claim.crashEverything();
+    return sameWays(durations, claim.asPlanned()) ? claim.asPlanned() : claim.crashEverything();
   }
 
   private List<Unproved> unproved() throws ClaimRefuted {
@@ -342,7 +344,7 @@ public final class Recount {
 
   /** What stepping costs is counted; what the linear programme found is taken, within rounding. */
   private CrossCheck crossCheck(Curve curve) throws ClaimRefuted {
-    if (!money.charges().isEmpty()) {
+    if (!of.isConvex()) {
       return claim.crossCheck();
     }
     TreeSet<Long> breakpoints = new TreeSet<>(List.of(curve.longest()));

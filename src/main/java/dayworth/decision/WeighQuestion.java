@@ -21,16 +21,21 @@ public final class WeighQuestion {
    * @throws ProofFailed if a check refutes what was computed
    */
   public static WeighAnswer ask(Case of, Watcher watcher) {
-    Weighing granted = weigh(of, watcher);
+    return ask(of, Effort.USUAL, watcher);
+  }
+
+  /** The same with a stated effort. */
+  public static WeighAnswer ask(Case of, Effort effort, Watcher watcher) {
+    Weighing granted = weigh(of, effort, watcher);
     Optional<Extension> extension = of.terms().extension();
     return new WeighAnswer(
         granted,
-        extension.map(claimed -> weigh(of.dueBy(claimed.due()), watcher)),
+        extension.map(claimed -> weigh(of.dueBy(claimed.due()), effort, watcher)),
         extension.map(claimed -> ExtensionSweep.of(granted.curve(), claimed)).orElse(List.of()));
   }
 
-  private static Weighing weigh(Case of, Watcher watcher) {
-    CurveAnswer curve = curve(of, watcher);
+  private static Weighing weigh(Case of, Effort effort, Watcher watcher) {
+    CurveAnswer curve = curve(of, effort, watcher);
     Terms terms = of.terms();
     boolean hasDamages = terms.contractFinish().isPresent() && !terms.damages().rate().isZero();
     return new Weighing(
@@ -42,9 +47,9 @@ public final class WeighQuestion {
         hasDamages ? wrongRates(curve) : List.of());
   }
 
-  private static CurveAnswer curve(Case of, Watcher watcher) {
+  private static CurveAnswer curve(Case of, Effort effort, Watcher watcher) {
     try {
-      return CurveQuestion.ask(of, OptionalLong.empty(), 0, watcher);
+      return CurveQuestion.ask(of, OptionalLong.empty(), 0, effort, watcher);
     } catch (FinishTooEarly impossible) {
       throw new IllegalStateException("no finish was asked for", impossible);
     }

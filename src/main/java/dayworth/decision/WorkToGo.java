@@ -5,6 +5,7 @@ import dayworth.decision.Status.Finished;
 import dayworth.decision.Status.InProgress;
 import dayworth.network.Activity;
 import dayworth.network.Link;
+import dayworth.network.Measures;
 import dayworth.network.Moment;
 import dayworth.network.Network;
 import dayworth.network.Span;
@@ -67,7 +68,8 @@ public final class WorkToGo {
             planned.scale(),
             activities,
             links.stream().map(planned::link).toList(),
-            planned.spans().stream().flatMap(span -> toGo(span).stream()).toList());
+            planned.spans().stream().flatMap(span -> toGo(span).stream()).toList(),
+            measuresToGo());
   }
 
   /**
@@ -129,6 +131,19 @@ public final class WorkToGo {
         : OptionalLong.empty();
   }
 
+  /** Started work keeps only measures for what remains, finished work none. */
+  private Measures measuresToGo() {
+    return new Measures(
+        planned.measures().list().stream()
+            .filter(
+                measure ->
+                    statuses.get(measure.activity()) instanceof Status.NotStarted
+                        || (measure.ofRemaining()
+                            && statuses.get(measure.activity()) instanceof InProgress))
+            .toList(),
+        planned.measures().packages());
+  }
+
   private Activity toGo(int i) {
     Activity whole = planned.activity(i);
     Status status = statuses.get(i);
@@ -146,7 +161,8 @@ public final class WorkToGo {
             whole.normalCost(),
             whole.crashCost(),
             Math.max(whole.notBefore(), earliestStart[i]),
-            Math.max(whole.notFinishedBefore(), earliestFinish[i]));
+            Math.max(whole.notFinishedBefore(), earliestFinish[i]),
+            whole.divisible());
   }
 
   private Activity rest(int i, Activity whole, InProgress started) {
@@ -162,7 +178,8 @@ public final class WorkToGo {
         cost,
         crash.duration() == remaining ? cost : crash.cost(),
         earliestStart[i],
-        earliestFinish[i]);
+        earliestFinish[i],
+        whole.divisible());
   }
 
   /**

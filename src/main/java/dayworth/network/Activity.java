@@ -3,8 +3,8 @@ package dayworth.network;
 import dayworth.value.Money;
 
 /**
- * A piece of contiguous work that can be done in its normal duration, or faster for other money
- * along a straight line.
+ * A piece of contiguous work that can be done in its normal duration, or faster for other money:
+ * along a straight line, or wholly or not at all.
  *
  * @param id unique in its network
  * @param name for people; may be empty
@@ -16,6 +16,7 @@ import dayworth.value.Money;
  * @param crashCost direct cost at the crash duration; {@code normalCost} if it cannot be compressed
  * @param notBefore earliest start in ticks after the project start; 0 for none
  * @param notFinishedBefore earliest finish in ticks after the project start; 0 for none
+ * @param divisible whether it can take any duration between normal and crash; otherwise only these
  */
 public record Activity(
     String id,
@@ -26,7 +27,8 @@ public record Activity(
     Money normalCost,
     Money crashCost,
     long notBefore,
-    long notFinishedBefore) {
+    long notFinishedBefore,
+    boolean divisible) {
 
   public Activity {
     if (crash < 0 || normal < crash || notBefore < 0 || notFinishedBefore < 0) {
@@ -39,7 +41,21 @@ public record Activity(
     }
   }
 
-  /** An activity whose finish waits for its start alone. */
+  /** A divisible activity. */
+  public Activity(
+      String id,
+      String name,
+      String group,
+      long normal,
+      long crash,
+      Money normalCost,
+      Money crashCost,
+      long notBefore,
+      long notFinishedBefore) {
+    this(id, name, group, normal, crash, normalCost, crashCost, notBefore, notFinishedBefore, true);
+  }
+
+  /** A divisible activity whose finish waits for its start alone. */
   public Activity(
       String id,
       String name,

@@ -31,7 +31,7 @@ final class EarliestStarts {
       starts.followLinks();
       starts.holdSpans();
     } while (starts.isMoved);
-    return Plan.scheduled(plan.toArray(), starts.start);
+    return plan.startingAt(starts.start);
   }
 
   private void followLinks() {

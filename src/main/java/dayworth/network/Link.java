@@ -19,7 +19,7 @@ public record Link(int predecessor, int successor, Relation relation, long lag) 
    *
    * @return how long after the predecessor's start the successor's start must come, in ticks
    */
-  long betweenStarts(long predecessorDuration, long successorDuration) {
+  public long betweenStarts(long predecessorDuration, long successorDuration) {
     long from = relation.fromStart() ? 0 : predecessorDuration;
     long to = relation.toStart() ? 0 : successorDuration;
     return from + lag - to;

@@ -19,6 +19,7 @@ public final class Network {
   private final List<Activity> activities;
   private final List<Link> links;
   private final List<Span> spans;
+  private final Measures measures;
   private final Map<String, Integer> indexById = new HashMap<>();
   private final int[] order;
 
@@ -45,10 +46,25 @@ public final class Network {
    * @throws IllegalArgumentException as without; or if a span's moment is of no activity
    */
   public Network(TimeScale scale, List<Activity> activities, List<Link> links, List<Span> spans) {
+    this(scale, activities, links, spans, Measures.NONE);
+  }
+
+  /**
+   * Joins activities and links, with money that runs between moments and with measures.
+   *
+   * @throws IllegalArgumentException as without; or if a measure is of no activity
+   */
+  public Network(
+      TimeScale scale,
+      List<Activity> activities,
+      List<Link> links,
+      List<Span> spans,
+      Measures measures) {
     this.scale = scale;
     this.activities = List.copyOf(activities);
     this.links = List.copyOf(links);
     this.spans = List.copyOf(spans);
+    this.measures = measures;
     for (int i = 0; i < activities.size(); i++) {
       if (indexById.put(activities.get(i).id(), i) != null) {
         throw new IllegalArgumentException("two activities are called " + activities.get(i).id());
@@ -56,6 +72,7 @@ public final class Network {
     }
     links.forEach(this::requireEnds);
     spans.forEach(this::requireMoments);
+    measures.list().forEach(this::requireActivity);
     firstInto = firsts(Link::successor);
     into = grouped(firstInto, Link::successor);
     firstOutOf = firsts(Link::predecessor);
@@ -90,6 +107,27 @@ public final class Network {
   /** Money that runs between moments; by their index. */
   public List<Span> spans() {
     return spans;
+  }
+
+  /** Ways to do activities that are taken wholly or not at all. */
+  public Measures measures() {
+    return measures;
+  }
+
+  /** Whether some activity has ways that are taken wholly or not at all. */
+  public boolean hasChoices() {
+    return !measures.isNone()
+        || activities.stream().anyMatch(each -> each.isCompressible() && !each.divisible());
+  }
+
+  /** The same network with other money between moments. */
+  public Network withSpans(List<Span> others) {
+    return new Network(scale, activities, links, others, measures);
+  }
+
+  /** The same network with other activities of the same number, and other measures. */
+  public Network withActivities(List<Activity> others, Measures otherMeasures) {
+    return new Network(scale, others, links, spans, otherMeasures);
   }
 
   public OptionalInt indexOf(String id) {
@@ -143,6 +181,12 @@ public final class Network {
   private void requireMoments(Span span) {
     if (span.from().activity() >= size() || span.to().activity() >= size()) {
       throw new IllegalArgumentException("span " + span.name() + " is of no activity");
+    }
+  }
+
+  private void requireActivity(Measure measure) {
+    if (measure.activity() >= size()) {
+      throw new IllegalArgumentException("measure " + measure.name() + " is of no activity");
     }
   }
 

@@ -66,7 +66,7 @@ public final class Timing {
   public Plan scheduled() {
     long[] starts = new long[network.size()];
     Arrays.setAll(starts, this::start);
-    return Plan.scheduled(plan.toArray(), starts);
+    return plan.startingAt(starts);
   }
 
   public long finish(int activity) {

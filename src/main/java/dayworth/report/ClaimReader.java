@@ -19,6 +19,7 @@ import dayworth.value.TimeScale;
 import java.time.LocalDate;
 import java.time.format.DateTimeParseException;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
@@ -70,6 +71,7 @@ final class ClaimReader {
         plan(evidence.get("crash_everything")),
         ticks(result.get("plan"), "duration"),
         each(result.get("proof").get("unproved"), this::unproved),
+        result.get("proof").get("cut_by_effort").isYes(),
         crossCheck(result.get("crosscheck")));
   }
 
@@ -137,21 +139,44 @@ final class ClaimReader {
   private Plan plan(JsonPlace at) throws ClaimRefuted {
     long[] durations = Plan.allNormal(network).toArray();
     put(at.get("durations"), durations);
+    int[] measures = measures(at);
     for (int i = 0; i < durations.length; i++) {
-      if (durations[i] < network.activity(i).crash()
+      if (measures[i] != Plan.NO_MEASURE) {
+        durations[i] = network.measures().get(measures[i]).duration();
+      } else if (durations[i] < network.activity(i).crash()
           || durations[i] > network.activity(i).normal()) {
         String id = network.activity(i).id();
         throw at.get("durations").get(id).wrong("from crash to normal duration");
       }
     }
-    Plan plan = Plan.of(durations);
-    if (of.momentMoney().isNone()) {
+    Plan plan = Plan.of(durations).using(measures);
+    if (of.isPlain() || (of.momentMoney().isNone() && at.find("starts").isEmpty())) {
       return plan;
     }
     Timing earliest = Timing.earliest(network, plan);
     long[] starts = IntStream.range(0, durations.length).mapToLong(earliest::earlyStart).toArray();
     put(at.get("starts"), starts);
-    return Plan.scheduled(durations, starts);
+    return plan.startingAt(starts);
+  }
+
+  private int[] measures(JsonPlace at) throws ClaimRefuted {
+    int[] measures = new int[network.size()];
+    Arrays.fill(measures, Plan.NO_MEASURE);
+    Optional<JsonPlace> used = at.find("measures");
+    if (used.isEmpty()) {
+      return measures;
+    }
+    for (String id : used.get().members().keySet()) {
+      JsonPlace named = used.get().get(id);
+      int activity = network.indexOf(id).orElseThrow(() -> named.wrong("an activity before it"));
+      String name = named.text();
+      measures[activity] =
+          Arrays.stream(network.measures().of(activity))
+              .filter(m -> network.measures().get(m).name().equals(name))
+              .findFirst()
+              .orElseThrow(() -> named.wrong("a measure of the activity"));
+    }
+    return measures;
   }
 
   private void put(JsonPlace at, long[] times) throws ClaimRefuted {

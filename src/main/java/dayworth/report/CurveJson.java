@@ -53,6 +53,7 @@ final class CurveJson {
                 gap.number("cost", unproved.cost().cents());
                 gap.number("bound", unproved.bound().cents());
               });
+          members.yesNo("cut_by_effort", answer.isCut());
         });
     json.object("evidence", members -> new EvidenceJson(answer).write(members));
   }

@@ -197,7 +197,7 @@ public final class CurveText {
   /** Where money is not convex, what is compared is the branch that a finish's plan lies in. */
   private static String whereCompared(CurveAnswer answer) {
     CrossCheck check = answer.crossCheck();
-    return answer.of().momentMoney().charges().isEmpty()
+    return answer.of().isConvex()
         ? Wording.count(check.atBreakpoints(), "breakpoint", "breakpoints")
             + " and "
             + Wording.count(check.between(), "point", "points")

@@ -92,11 +92,22 @@ final class EvidenceJson {
         members -> {
           for (int i = 0; i < plan.size(); i++) {
             Activity activity = network.activity(i);
-            if (plan.duration(i) != activity.normal()) {
+            if (plan.duration(i) != activity.normal() && plan.measure(i) == Plan.NO_MEASURE) {
               members.number(activity.id(), names.units(plan.duration(i)));
             }
           }
         });
+    if (plan.usesMeasures()) {
+      json.object(
+          "measures",
+          members -> {
+            for (int i = 0; i < plan.size(); i++) {
+              if (plan.measure(i) != Plan.NO_MEASURE) {
+                members.text(names.id(i), network.measures().get(plan.measure(i)).name());
+              }
+            }
+          });
+    }
     if (plan.isScheduled()) {
       Timing timing = Timing.earliest(network, plan);
       json.object(

@@ -59,6 +59,14 @@ record JsonPlace(String place, JsonValue value) {
     throw wrong("a text");
   }
 
+  boolean isYes() throws ClaimRefuted {
+    if (value instanceof JsonValue.Word word
+        && (word.kind() == JsonToken.VALUE_TRUE || word.kind() == JsonToken.VALUE_FALSE)) {
+      return word.kind() == JsonToken.VALUE_TRUE;
+    }
+    throw wrong("true or false");
+  }
+
   BigDecimal number() throws ClaimRefuted {
     if (!(value instanceof JsonValue.Numeral number)) {
       throw wrong("a number");

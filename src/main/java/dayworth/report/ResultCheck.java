@@ -64,7 +64,7 @@ final class ResultCheck {
   private void meet() throws ClaimRefuted {
     ClaimReader reader = new ClaimReader(of, all);
     MeetAnswer answer = Recount.meet(of, reader.curve(), reader.wish(), reader.proofFlow());
-    boolean isConvex = of.momentMoney().charges().isEmpty();
+    boolean isConvex = of.isConvex();
     String right = ResultJson.ofMeet(answer, programVersion);
     if (isConvex) {
       compare(right, Set.of(NAME));
@@ -95,7 +95,7 @@ final class ResultCheck {
     checked.add("the chain that makes the shortest finish the shortest");
     if (answer.evidence().flows().isPresent()) {
       checked.add("that no plan is cheaper, at every finish, by " + flows(answer));
-    } else if (of.momentMoney().charges().isEmpty()) {
+    } else if (of.isConvex()) {
       unchecked.add("that no plan is cheaper: the flows are too many to be in the result");
     } else {
       unchecked.add("that no plan is cheaper: money is not straight, so that takes branching");
@@ -103,7 +103,7 @@ final class ResultCheck {
     int asked = answer.crossCheck().comparisons().size();
     if (asked > 0) {
       String points = Wording.count(asked, "point", "points");
-      if (of.momentMoney().charges().isEmpty()) {
+      if (of.isConvex()) {
         checked.add("what is told of the linear programme, which agrees at " + points);
       } else {
         unchecked.add("what the two ways found in single branches, at " + points);

@@ -129,12 +129,10 @@ class ActivityRulesTest {
   }
 
   @Test
-  void allOrNothingIsNotServedYet() throws IOException {
+  void divisibleIsYesOrNo() throws IOException {
     expect(
         "A,Dig,5,100,3,130,no,\nB,Dig,5,100,3,130,No,\n",
-        "activities.csv:2 divisible | all-or-nothing activities are not served yet | no"
-            + " | yes, or blank",
-        "activities.csv:3 divisible | no such choice | No | yes, or blank");
+        "activities.csv:3 divisible | no such choice | No | one of yes, no");
   }
 
   @Test

@@ -48,6 +48,7 @@ class DoubtLawsTest {
               blank,
               blank,
               blank,
+              true,
               Optional.empty(),
               List.of()));
     }

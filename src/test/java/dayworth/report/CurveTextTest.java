@@ -122,6 +122,7 @@ class CurveTextTest {
             plain.asked(),
             plain.provedRows(),
             plain.unproved(),
+            plain.isCut(),
             plain.crossCheck(),
             plain.evidence());
     List<String> lines = CurveText.lines(stopped, Style.PLAIN, 94);

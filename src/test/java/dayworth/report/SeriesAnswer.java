@@ -124,6 +124,7 @@ final class SeriesAnswer {
         new CurveAnswer.AskedPlan(eight, Timing.earliest(NETWORK, atEight)),
         4,
         List.of(),
+        false,
         new CrossCheck(
             List.of(
                 new CrossCheck.Comparison(10, Money.of(160), new BigDecimal("160.00")),

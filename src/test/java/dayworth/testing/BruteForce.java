@@ -2,14 +2,17 @@ package dayworth.testing;
 
 import dayworth.network.Activity;
 import dayworth.network.Link;
+import dayworth.network.Measure;
 import dayworth.network.Network;
 import dayworth.value.Money;
+import java.util.HashSet;
 import java.util.Map;
+import java.util.Set;
 import java.util.TreeMap;
 
 /**
- * Every choice of whole durations of a tiny network, each timed by relaxing all inequalities until
- * nothing moves. It shares no method with the program.
+ * Every choice of whole durations and of measures of a tiny network, each timed by relaxing all
+ * inequalities until nothing moves. It shares no method with the program.
  */
 public final class BruteForce {
 
@@ -25,22 +28,36 @@ public final class BruteForce {
   /** The least cost of each finish that some choice has. */
   public static Map<Long, Money> leastCosts(Network network) {
     BruteForce force = new BruteForce(network);
-    force.choose(0, Money.ZERO);
+    force.choose(0, Money.ZERO, Set.of());
     return force.cheapest;
   }
 
-  private void choose(int i, Money cost) {
+  private void choose(int i, Money cost, Set<Integer> packages) {
     if (i == network.size()) {
-      cheapest.merge(finish(), cost, Money::min);
+      Money all = cost;
+      for (int index : packages) {
+        all = all.plus(network.measures().packages().get(index).cost());
+      }
+      cheapest.merge(finish(), all, Money::min);
       return;
     }
     Activity activity = network.activity(i);
     for (long d = activity.crash(); d <= activity.normal(); d++) {
-      duration[i] = d;
-      Money extra = activity.crashCost().plus(activity.normalCost().negate());
-      long most = activity.normal() - activity.crash();
-      Money share = most == 0 ? Money.ZERO : extra.times(activity.normal() - d).dividedBy(most);
-      choose(i + 1, cost.plus(activity.normalCost()).plus(share));
+      if (activity.divisible() || d == activity.crash() || d == activity.normal()) {
+        duration[i] = d;
+        Money extra = activity.crashCost().plus(activity.normalCost().negate());
+        long most = activity.normal() - activity.crash();
+        Money share = most == 0 ? Money.ZERO : extra.times(activity.normal() - d).dividedBy(most);
+        choose(i + 1, cost.plus(activity.normalCost()).plus(share), packages);
+      }
+    }
+    for (Measure measure : network.measures().list()) {
+      if (measure.activity() == i) {
+        duration[i] = measure.duration();
+        Set<Integer> paid = new HashSet<>(packages);
+        measure.inPackage().ifPresent(paid::add);
+        choose(i + 1, cost.plus(measure.cost()), paid);
+      }
     }
   }
 

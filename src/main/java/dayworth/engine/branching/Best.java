@@ -22,6 +22,11 @@ final class Best {
     return plan.isPresent() && cost.minus(bound).compareTo(Point.ROUNDING) < 0;
   }
 
+  /** What is the best of a shorter finish serves this one too. */
+  void offer(Best shorter) {
+    shorter.plan.ifPresent(other -> offer(other, shorter.cost, shorter.branch));
+  }
+
   void offer(Plan other, Money otherCost, Branch from) {
     if (plan.isEmpty() || otherCost.compareTo(cost) < 0) {
       plan = Optional.of(other);

@@ -1,5 +1,7 @@
 package dayworth.engine.branching;
 
+import dayworth.engine.Ways;
+import dayworth.engine.measures.Opening;
 import dayworth.engine.stepping.Stepping;
 import dayworth.network.Network;
 import dayworth.network.Plan;
@@ -9,22 +11,24 @@ import java.util.List;
 import java.util.Optional;
 
 /**
- * A share of all plans: those whose moments come within given windows. Immutable.
+ * A share of all plans: those whose moments come within given windows and that use what is open.
+ * Immutable.
  *
  * @param windows for each charge one for each of its moments
  */
-public record Branch(List<List<Window>> windows) {
+public record Branch(List<List<Window>> windows, Opening opening) {
 
   public Branch {
     windows = windows.stream().map(List::copyOf).toList();
   }
 
   /** All plans that finish within a duration. */
-  static Branch whole(List<Charge> charges, long duration) {
+  static Branch whole(Network network, List<Charge> charges, long duration) {
     return new Branch(
         charges.stream()
             .map(charge -> charge.moments().stream().map(m -> new Window(0, duration)).toList())
-            .toList());
+            .toList(),
+        Opening.all(network, Ways.of(network)));
   }
 
   /**
@@ -35,7 +39,7 @@ public record Branch(List<List<Window>> windows) {
    */
   public Relaxation relaxation(Network network, List<Charge> charges, Money fence) {
     Relaxation exact = relaxation(network, charges, fence, SlopeGrain.NONE);
-    return Stepping.scaleFor(exact.network()).isPresent()
+    return Stepping.scaleFor(exact.convex()).isPresent()
         ? exact
         : relaxation(network, charges, fence, SlopeGrain.within(windows));
   }
@@ -46,7 +50,7 @@ public record Branch(List<List<Window>> windows) {
     for (int j = 0; j < charges.size(); j++) {
       envelopes.add(Envelope.of(charges.get(j), windows.get(j), fence, grain));
     }
-    return Relaxation.of(network, envelopes);
+    return Relaxation.of(network, envelopes, opening);
   }
 
   /** The two halves of this branch; together they are all of it. */
@@ -57,12 +61,17 @@ public record Branch(List<List<Window>> windows) {
         with(split, new Window(split.last() + 1, window.most())));
   }
 
+  /** The same windows with each of several openings. */
+  List<Branch> with(List<Opening> openings) {
+    return openings.stream().map(other -> new Branch(windows, other)).toList();
+  }
+
   private Branch with(Split split, Window window) {
     List<List<Window>> changed = new ArrayList<>(windows);
     List<Window> ofCharge = new ArrayList<>(changed.get(split.charge()));
     ofCharge.set(split.moment(), window);
     changed.set(split.charge(), ofCharge);
-    return new Branch(changed);
+    return new Branch(changed, opening);
   }
 
   /**

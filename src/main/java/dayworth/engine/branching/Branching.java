@@ -12,6 +12,7 @@ import java.util.ArrayList;
 import java.util.Deque;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.BooleanSupplier;
 import java.util.stream.IntStream;
 
 /**
@@ -68,6 +69,11 @@ public final class Branching {
 
   private long solved;
 
+  /** How many relaxations are solved at most. */
+  private long mostNodes;
+
+  private BooleanSupplier isOver = () -> false;
+
   private Branching(
       Network network, List<Charge> charges, long[] durations, Optional<List<Leaf>> leaves) {
     this.network = network;
@@ -75,7 +81,7 @@ public final class Branching {
     this.durations = durations;
     this.leaves = leaves;
     this.fence = ChargedMoney.fence(network, charges, durations[0]);
-    Branch whole = Branch.whole(charges, durations[0]);
+    Branch whole = Branch.whole(network, charges, durations[0]);
     List<Integer> rows = IntStream.range(0, durations.length).boxed().toList();
     rows.forEach(row -> best.add(new Best(whole)));
     open.add(new Open(whole, rows, rows.stream().map(row -> Money.ZERO).toList()));
@@ -86,12 +92,24 @@ public final class Branching {
    *
    * @param durations ticks, from long to short; for each some plan must exist
    * @param most how many convex problems are solved at most, beyond one for each finish
-   * @return one point for each duration; a plan for a shorter one serves a longer one too
+   * @return one point for each duration that has a plan; a plan for a shorter one serves a longer
+   *     one too
    * @throws BoundRefuted if a bound does not stand up to its recheck
    */
   public static List<Point> solve(
       Network network, List<Charge> charges, long[] durations, long most) {
+    return solve(network, charges, durations, most, () -> false);
+  }
+
+  /**
+   * The same, stopped early where somebody says that it is over; what is open then keeps a gap.
+   *
+   * @throws BoundRefuted if a bound does not stand up to its recheck
+   */
+  public static List<Point> solve(
+      Network network, List<Charge> charges, long[] durations, long most, BooleanSupplier isOver) {
     Branching branching = new Branching(network, charges, durations, Optional.empty());
+    branching.isOver = isOver;
     branching.run(most + durations.length);
     return branching.points();
   }
@@ -134,7 +152,8 @@ public final class Branching {
   public record Leaf(Relaxation relaxation, Plan plan, Flow flow) {}
 
   private void run(long most) {
-    while (!open.isEmpty() && solved < most) {
+    mostNodes = most;
+    while (!open.isEmpty() && solved < most && !isOver.getAsBoolean()) {
       goOn(open.remove());
     }
     open.forEach(this::leave);
@@ -143,6 +162,48 @@ public final class Branching {
   /** Solves a branch for the finishes that are open in it, and splits it for those that remain. */
   private void goOn(Open node) {
     Relaxation relaxation = node.branch().relaxation(network, charges, fence);
+    if (node.branch().opening().ways().isPlain()) {
+      goOnConvex(node, relaxation);
+    } else {
+      goOnWithWays(node, relaxation);
+    }
+  }
+
+  /** The same where activities have ways to choose from. */
+  private void goOnWithWays(Open node, Relaxation relaxation) {
+    List<Integer> rows = new ArrayList<>();
+    for (int k = 0; k < node.rows().size(); k++) {
+      if (!best.get(node.rows().get(k)).beats(node.bounds().get(k))) {
+        rows.add(node.rows().get(k));
+      }
+    }
+    WayBranch ways = new WayBranch(network, charges, node.branch(), relaxation, isOver);
+    List<Optional<Money>> bounds =
+        ways.solve(
+            rows.stream().map(row -> new WayBranch.Row(durations[row], best.get(row))).toList(),
+            mostNodes - solved);
+    solved += ways.nodes();
+    List<Integer> left = new ArrayList<>();
+    List<Money> leftBounds = new ArrayList<>();
+    for (int k = 0; k < rows.size(); k++) {
+      if (bounds.get(k).isPresent()) {
+        left.add(rows.get(k));
+        leftBounds.add(bounds.get(k).get());
+      }
+    }
+    if (left.isEmpty()) {
+      return;
+    }
+    if (ways.halves().isEmpty()) {
+      leave(new Open(node.branch(), left, leftBounds));
+      return;
+    }
+    for (Branch half : ways.halves().get()) {
+      open.add(new Open(half, left, leftBounds));
+    }
+  }
+
+  private void goOnConvex(Open node, Relaxation relaxation) {
     Descent descent = new Descent(relaxation.network());
     ProofChecker checker = new ProofChecker(relaxation.network());
     List<Integer> rows = new ArrayList<>();
@@ -208,33 +269,21 @@ public final class Branching {
 
   private List<Point> points() {
     for (int row = durations.length - 2; row >= 0; row--) {
-      Best shorter = best.get(row + 1);
-      best.get(row).offer(shorter.plan.orElseThrow(), shorter.cost, shorter.branch);
+      best.get(row).offer(best.get(row + 1));
     }
     List<Point> points = new ArrayList<>();
-    Optional<Descent> descent = Optional.empty();
+    Optional<LeastChanged> plans = Optional.empty();
     Plan before = Plan.allNormal(network);
-    for (int row = 0; row < durations.length; row++) {
+    for (int row = 0; row < durations.length && best.get(row).plan.isPresent(); row++) {
       Best of = best.get(row);
-      if (row == 0 || !of.branch.equals(best.get(row - 1).branch)) {
-        descent = Optional.of(new Descent(of.branch.relaxation(network, charges, fence).network()));
+      Plan found = of.plan.get();
+      if (plans.isEmpty() || !plans.get().serves(of.branch, found)) {
+        plans = Optional.of(new LeastChanged(network, charges, fence, of.branch, found));
       }
-      before = leastChanged(descent.orElseThrow(), row, before);
+      before = plans.get().within(durations[row], before, of.cost).orElse(found);
       Money bound = of.leftOpen.map(of.cost::min).orElse(of.cost);
       points.add(new Point(durations[row], before, of.cost, bound, of.branch));
     }
     return points;
-  }
-
-  /**
-   * The best plan's like that changes least against another; the best plan itself where its branch
-   * has none that costs the same in truth.
-   */
-  private Plan leastChanged(Descent descent, int row, Plan before) {
-    Best of = best.get(row);
-    return descent
-        .within(durations[row], before)
-        .filter(plan -> ChargedMoney.cost(network, charges, plan).equals(of.cost))
-        .orElse(of.plan.orElseThrow());
   }
 }

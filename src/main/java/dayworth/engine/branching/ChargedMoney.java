@@ -2,6 +2,7 @@ package dayworth.engine.branching;
 
 import dayworth.engine.stepping.Stepping;
 import dayworth.network.Activity;
+import dayworth.network.Measure;
 import dayworth.network.Moment;
 import dayworth.network.Network;
 import dayworth.network.Plan;
@@ -35,7 +36,7 @@ public final class ChargedMoney {
       return Stepping.scaleFor(network).isPresent();
     }
     Money fence = fence(network, charges, longest);
-    Branch whole = Branch.whole(charges, longest);
+    Branch whole = Branch.whole(network, charges, longest);
     SlopeGrain grain = SlopeGrain.within(whole.windows());
     Money steepest = fence.plus(Money.of(1).dividedBy(grain.perUnit()));
     List<Span> spans = new ArrayList<>(network.spans());
@@ -44,7 +45,7 @@ public final class ChargedMoney {
         spans.add(new Span(charge.name(), Moment.PROJECT_START, moment, longest, steepest));
       }
     }
-    Network fenced = new Network(network.scale(), network.activities(), network.links(), spans);
+    Network fenced = network.withSpans(spans);
     return Stepping.scaleFor(fenced)
         .filter(scale -> scale.perUnit() >= grain.perUnit())
         .isPresent();
@@ -52,7 +53,7 @@ public final class ChargedMoney {
 
   /**
    * Money per tick that makes leaving a window dearer than anything within: all that compression,
-   * spans and charges can come to, in whole units.
+   * measures, spans and charges can come to, in whole units.
    */
   public static Money fence(Network network, List<Charge> charges, long longest) {
     MoneySum sum = new MoneySum().add(Money.of(1));
@@ -60,6 +61,11 @@ public final class ChargedMoney {
       Money extra = activity.crashExtra();
       sum.add(extra.max(extra.negate()));
     }
+    for (Measure measure : network.measures().list()) {
+      Money extra = measure.cost().minus(network.activity(measure.activity()).normalCost());
+      sum.add(extra.max(extra.negate()));
+    }
+    network.measures().packages().forEach(each -> sum.add(each.cost()));
     for (Span span : network.spans()) {
       sum.add(span.rate(), longest + Math.abs(span.free()), 1);
     }

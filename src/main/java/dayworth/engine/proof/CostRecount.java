@@ -12,8 +12,9 @@ import java.util.LinkedHashMap;
 import java.util.Map;
 
 /**
- * Recounts a plan's cost exactly: Σ normal cost + slope × (normal − duration), and for each span
- * its rate times the ticks beyond what is free.
+ * Recounts a plan's cost exactly: Σ normal cost + slope × (normal − duration), or what its measure
+ * costs; each package that is used, once; and for each span its rate times the ticks beyond what is
+ * free.
  *
  * <p>Slopes are fractions; those with equal denominators are added as whole numbers, so that a
  * large network is counted in one quick pass. A slope whose numerator does not fit in a long is
@@ -58,6 +59,10 @@ final class CostRecount {
     MoneySum cost = new MoneySum().add(normalCost);
     for (int i = 0; i < group.length; i++) {
       Activity activity = network.activity(i);
+      if (plan.measure(i) != Plan.NO_MEASURE) {
+        cost.add(network.measures().get(plan.measure(i)).cost().minus(activity.normalCost()));
+        continue;
+      }
       long shortened = activity.normal() - plan.duration(i);
       if (group[i] != BY_ITSELF) {
         sums[group[i]].addProduct(numerator[i], shortened);
@@ -67,6 +72,9 @@ final class CostRecount {
     }
     for (int g = 0; g < sums.length; g++) {
       cost.add(Money.fraction(sums[g].total(), denominators[g]));
+    }
+    for (int index : plan.packages(network)) {
+      cost.add(network.measures().packages().get(index).cost());
     }
     for (Span span : network.spans()) {
       long apart = time(plan, span.to()) - time(plan, span.from());

@@ -3,6 +3,7 @@ package dayworth.engine.proof;
 import dayworth.engine.proof.Verdict.Refuted;
 import dayworth.network.Activity;
 import dayworth.network.Link;
+import dayworth.network.Measure;
 import dayworth.network.Network;
 import dayworth.network.Plan;
 import java.util.Arrays;
@@ -38,11 +39,9 @@ final class ScheduleCheck {
     }
     ScheduleCheck check = new ScheduleCheck(network, plan);
     for (int i = 0; i < network.size(); i++) {
-      Activity activity = network.activity(i);
-      long duration = plan.duration(i);
-      if (duration < activity.crash() || duration > activity.normal()) {
-        return check.refuted(
-            i, "lasts " + duration + " ticks", activity.crash() + " to " + activity.normal());
+      Optional<Refuted> fault = check.wrongDuration(i);
+      if (fault.isPresent()) {
+        return fault;
       }
     }
     if (plan.isScheduled()) {
@@ -51,6 +50,26 @@ final class ScheduleCheck {
       check.placeEarliest();
     }
     return check.brokenLimit(finish).or(check::brokenLink);
+  }
+
+  private Optional<Refuted> wrongDuration(int i) {
+    Activity activity = network.activity(i);
+    long duration = plan.duration(i);
+    if (plan.measure(i) != Plan.NO_MEASURE) {
+      Measure measure = network.measures().get(plan.measure(i));
+      boolean fits = measure.activity() == i && measure.duration() == duration;
+      return fits
+          ? Optional.empty()
+          : refuted(i, "lasts " + duration + " ticks by " + measure.name(), "what it takes");
+    }
+    boolean within = duration >= activity.crash() && duration <= activity.normal();
+    boolean atAnEnd = duration == activity.crash() || duration == activity.normal();
+    return (activity.divisible() ? within : atAnEnd)
+        ? Optional.empty()
+        : refuted(
+            i,
+            "lasts " + duration + " ticks",
+            activity.crash() + (activity.divisible() ? " to " : " or ") + activity.normal());
   }
 
   private void placeEarliest() {

@@ -97,6 +97,12 @@ final class ArcNetwork {
     return length[forward[arc]];
   }
 
+  /** Changes an arc's length; the times must keep it as before. */
+  void setLength(int arc, long ticks) {
+    length[forward[arc]] = ticks;
+    length[mate[forward[arc]]] = -ticks;
+  }
+
   /** Whether the arc can carry no more. */
   boolean isFull(int arc) {
     return room[forward[arc]] == 0;

@@ -58,6 +58,9 @@ final class EventNetwork {
   /** The length of each span's arc, also where it has none. */
   private final long[] spanLength;
 
+  /** The arc that holds the project's finish; -1 if there is none. It is no part of a flow. */
+  final int deadlineArc;
+
   private final long[] lateTimes;
 
   EventNetwork(EventNetworkBuilder from) {
@@ -73,6 +76,7 @@ final class EventNetwork {
     stretchArc = from.stretchArc;
     cheaperArc = from.cheaperArc;
     spanArc = from.spanArc;
+    deadlineArc = from.deadlineArc;
     spanLength = network.spans().stream().mapToLong(from::spanLength).toArray();
     lateTimes = from.lateTimes();
   }
@@ -129,7 +133,7 @@ final class EventNetwork {
     long[] through = new long[network.size()];
     for (int arc = 0; arc < net.arcs(); arc++) {
       long amount = net.flow(arc);
-      if (amount != 0) {
+      if (amount != 0 && arc != deadlineArc) {
         flow.set(arcOver[arc], arcIndex[arc], amount);
         countThrough(arc, amount, through);
       }

@@ -28,6 +28,9 @@ final class EventNetworkBuilder {
   /** The arc of each span; -1 where its two moments are one event or its rate is too small. */
   final int[] spanArc;
 
+  /** The arc from the project's finish back to its start; -1 if there is none. */
+  int deadlineArc = NONE;
+
   private final ArcNetwork.Builder arcs = new ArcNetwork.Builder();
   private final long[] slope;
 
@@ -38,7 +41,9 @@ final class EventNetworkBuilder {
   private final Reach normal;
 
   /** Chains shorter than this never carry flow. */
-  private final long least;
+  private long least;
+
+  private boolean hasDeadline;
 
   private Over[] overs = new Over[64];
   private int[] indices = new int[64];
@@ -89,6 +94,13 @@ final class EventNetworkBuilder {
         .longest();
   }
 
+  /** Leaves out nothing, and adds an arc from the project's finish back to its start. */
+  EventNetworkBuilder withDeadline() {
+    least = Long.MIN_VALUE;
+    hasDeadline = true;
+    return this;
+  }
+
   ArcNetwork build() {
     for (int position = 0; position < network.size(); position++) {
       addActivity(network.inOrder(position));
@@ -103,6 +115,9 @@ final class EventNetworkBuilder {
     }
     for (int j = 0; j < network.spans().size(); j++) {
       addSpan(j);
+    }
+    if (hasDeadline) {
+      deadlineArc = arc(Over.TO_PROJECT, NONE, EventNetwork.END, EventNetwork.BEGIN, 0, 0);
     }
     return arcs.build(events);
   }

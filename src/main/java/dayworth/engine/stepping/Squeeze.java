@@ -141,6 +141,16 @@ final class Squeeze {
     shift = 0;
   }
 
+  /** The times of all events; only after {@link #settle}. */
+  long[] times() {
+    return time.clone();
+  }
+
+  /** Sets the times of all events; only after {@link #settle}. */
+  void goBackTo(long[] times) {
+    System.arraycopy(times, 0, time, 0, time.length);
+  }
+
   /** Grows the set until it holds {@code to}; false if the events came close enough before. */
   private boolean reach(int from, int to, long close) {
     while (true) {

@@ -122,7 +122,7 @@ class BranchingTest {
         assertTrue(point.isProved(), where);
         assertEquals(point.cost(), ChargedMoney.cost(network, charges, point.plan()), where);
         assertEquals(Money.of(leastCost(network, charges, point.duration())), point.cost(), where);
-        withGap += point.branch().equals(Branch.whole(charges, durations[0])) ? 0 : 1;
+        withGap += point.branch().equals(Branch.whole(network, charges, durations[0])) ? 0 : 1;
       }
     }
     assertTrue(withGap > CASES, withGap + " points needed more than one branch");
