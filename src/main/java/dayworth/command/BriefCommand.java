@@ -49,7 +49,8 @@ final class BriefCommand extends CaseCommand {
 
   @Override
   int answer(Case read) throws ResultsNotWritten {
-    OptionalLong at = plan.map(which -> which.ticks(read, this::wrongUsage)).orElse(OptionalLong.empty());
+    OptionalLong at =
+        plan.map(which -> which.ticks(read, this::wrongUsage)).orElse(OptionalLong.empty());
     try {
       tell(ask(read, at));
       return Exit.DONE;

@@ -56,8 +56,7 @@ public final class BriefQuestion {
     for (Finish finish : finishes) {
       Timing timing = timing(finish.duration());
       states.add(
-          new BriefAnswer.State(
-              finish, timing, chains(timing).count(), of.criticalCount(timing)));
+          new BriefAnswer.State(finish, timing, chains(timing).count(), of.criticalCount(timing)));
     }
     return new BriefAnswer(weigh, chosen, states, reasons());
   }

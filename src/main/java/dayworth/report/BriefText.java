@@ -27,7 +27,10 @@ public final class BriefText {
             + finish
             + (better.signum() == 0
                 ? "."
-                : ": " + amount + (better.signum() > 0 ? " better" : " dearer") + " than carrying on.");
+                : ": "
+                    + amount
+                    + (better.signum() > 0 ? " better" : " dearer")
+                    + " than carrying on.");
     List<String> lines = new ArrayList<>();
     lines.add(style.bold(Wording.answer(sentence, of.currency(), widest)));
     lines.add("");

@@ -173,8 +173,7 @@ final class AskedSection {
     missing(submission.preparedFor().isEmpty(), "whom it is for", "prepared_for", what, terms);
     missing(submission.preparedBy().isEmpty(), "who wrote it", "prepared_by", what, terms);
     missing(submission.reference().isEmpty(), "its reference", "reference", what, terms);
-    missing(
-        submission.validUntil().isEmpty(), "until when it is open", "valid_until", what, terms);
+    missing(submission.validUntil().isEmpty(), "until when it is open", "valid_until", what, terms);
     List<String> how = new ArrayList<>();
     if (!terms.isEmpty()) {
       how.add("Add to terms.csv: " + Words.list(terms, 5) + ".");
@@ -186,8 +185,7 @@ final class AskedSection {
     return what.isEmpty()
         ? Optional.empty()
         : Optional.of(
-            new Part.Gap(
-                "Not in the case: " + Words.list(what, 6) + ".", String.join(" ", how)));
+            new Part.Gap("Not in the case: " + Words.list(what, 6) + ".", String.join(" ", how)));
   }
 
   private static void missing(

@@ -114,7 +114,8 @@ final class BoughtSection {
     long now = activity.normal() - one.ticks();
     String atEnd = now == activity.crash() ? ", its shortest" : "";
     long unit = words.ticksPerUnit();
-    long marks = one.ticks() % unit == 0 && one.ticks() / unit <= MOST_MARKS ? one.ticks() / unit : 0;
+    long marks =
+        one.ticks() % unit == 0 && one.ticks() / unit <= MOST_MARKS ? one.ticks() / unit : 0;
     return new Row(
         Row.Kind.PLAIN,
         List.of(
@@ -151,7 +152,9 @@ final class BoughtSection {
 
   private String onChains(Bought one) {
     List<String> on = names.passing(answer.chosen().chains(), one.activity());
-    return on.isEmpty() ? "none that is critical" : Words.list(on, MOST_CHAINS_NAMED).replace(" and ", ", ");
+    return on.isEmpty()
+        ? "none that is critical"
+        : Words.list(on, MOST_CHAINS_NAMED).replace(" and ", ", ");
   }
 
   // Cost and price
@@ -176,7 +179,17 @@ final class BoughtSection {
     BigDecimal writing = proposal.map(Money::cents).orElse(BigDecimal.ZERO);
     List<Row> rows = new ArrayList<>();
     rows.add(priceRow("Extra direct cost of the shortening", cost));
-    percent.ifPresent(p -> rows.add(priceRow("On-cost, " + Words.grouped(p.stripTrailingZeros().scale() < 0 ? p.setScale(0) : p.stripTrailingZeros()) + " % of it", onCost)));
+    percent.ifPresent(
+        p ->
+            rows.add(
+                priceRow(
+                    "On-cost, "
+                        + Words.grouped(
+                            p.stripTrailingZeros().scale() < 0
+                                ? p.setScale(0)
+                                : p.stripTrailingZeros())
+                        + " % of it",
+                    onCost)));
     proposal.ifPresent(p -> rows.add(priceRow("Cost of preparing this proposal", writing)));
     Row sum = priceRow("Price of finishing earlier", cost.add(onCost).add(writing));
     rows.add(new Row(Row.Kind.SUM, sum.cells()));
@@ -257,7 +270,8 @@ final class BoughtSection {
                     Cell.of(left + " more steps"),
                     Cell.blank(),
                     Cell.blank(),
-                    Cell.of("are like these, each dearer than the one before; steps.csv has them."))));
+                    Cell.of(
+                        "are like these, each dearer than the one before; steps.csv has them."))));
       }
       rows.add(row(shown.get(i)));
     }
@@ -290,7 +304,9 @@ final class BoughtSection {
 
   private String notBought(Piece piece) {
     Optional<Stretch> next =
-        stretches.stream().filter(stretch -> stretch.from() == answer.finish().duration()).findFirst();
+        stretches.stream()
+            .filter(stretch -> stretch.from() == answer.finish().duration())
+            .findFirst();
     if (!outcome.hasWorth() || next.isEmpty()) {
       return "Not bought.";
     }
@@ -306,8 +322,7 @@ final class BoughtSection {
     Money sum = Money.ZERO;
     for (Change change : reason.step().changes()) {
       Activity activity = answer.of().network().activity(change.activity());
-      Money share =
-          StepWhy.share(activity, change, reason.step().ticks(), words.ticksPerUnit());
+      Money share = StepWhy.share(activity, change, reason.step().ticks(), words.ticksPerUnit());
       sum = sum.plus(share);
       addends.add(
           new Table.Addend(Words.shortId(activity), words.amount(share), change.isRelaxation()));
@@ -329,9 +344,7 @@ final class BoughtSection {
     List<Table.Chain> chains = new ArrayList<>();
     for (List<Integer> chain : reason.chains()) {
       chains.add(
-          new Table.Chain(
-              names.of(chain),
-              chain.stream().map(i -> knot(reason, i)).toList()));
+          new Table.Chain(names.of(chain), chain.stream().map(i -> knot(reason, i)).toList()));
     }
     String rest =
         reason.hasAllChains()
@@ -344,8 +357,7 @@ final class BoughtSection {
     Table.Knot.Change change = Table.Knot.Change.NONE;
     for (Change one : reason.step().changes()) {
       if (one.activity() == activity) {
-        change =
-            one.isRelaxation() ? Table.Knot.Change.GIVEN_BACK : Table.Knot.Change.SHORTENED;
+        change = one.isRelaxation() ? Table.Knot.Change.GIVEN_BACK : Table.Knot.Change.SHORTENED;
       }
     }
     return new Table.Knot(Words.shortId(answer.of().network().activity(activity)), change);

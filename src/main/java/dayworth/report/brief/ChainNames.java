@@ -31,7 +31,8 @@ final class ChainNames {
     for (List<Integer> chain : chains) {
       String group = group(chain, passing);
       int number = used.merge(group, 1, Integer::sum);
-      names.put(chain, group.isEmpty() ? "chain " + number : number == 1 ? group : group + " " + number);
+      names.put(
+          chain, group.isEmpty() ? "chain " + number : number == 1 ? group : group + " " + number);
     }
   }
 

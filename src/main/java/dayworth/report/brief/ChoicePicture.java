@@ -119,8 +119,7 @@ final class ChoicePicture {
     drawing.text(style, Anchor.MIDDLE, x, above, words.money(outcome.depends(finish)));
   }
 
-  private static void piece(
-      Drawing drawing, String kind, double x, double y, double w, double h) {
+  private static void piece(Drawing drawing, String kind, double x, double y, double w, double h) {
     if (h <= 0.2) {
       return;
     }
@@ -159,7 +158,10 @@ final class ChoicePicture {
     List<Label.Line> rest = new ArrayList<>();
     for (Piece piece : pieces(last)) {
       if (piece.amount().signum() > 0 && !told.contains(piece.name())) {
-        rest.add(new Label.Line(piece.ink(), piece.kind().equals("ex") ? "Solid: extra direct cost" : piece.name()));
+        rest.add(
+            new Label.Line(
+                piece.ink(),
+                piece.kind().equals("ex") ? "Solid: extra direct cost" : piece.name()));
       }
     }
     if (Outcome.bonus(last).signum() > 0) {
@@ -179,8 +181,7 @@ final class ChoicePicture {
               .anyMatch(
                   choice ->
                       pieces(choice).stream()
-                          .anyMatch(
-                              p -> p.name().equals(piece.name()) && p.amount().signum() > 0));
+                          .anyMatch(p -> p.name().equals(piece.name()) && p.amount().signum() > 0));
       if (used) {
         String name = piece.name().replace(" cost", "");
         piece(drawing, piece.kind(), x, BASE + 10, 12, 12);

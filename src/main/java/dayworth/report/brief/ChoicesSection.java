@@ -60,17 +60,19 @@ final class ChoicesSection {
   private void add(String name, Finish finish) {
     for (int i = 0; i < choices.size(); i++) {
       Finish other = choices.get(i);
-      if (other.duration() == finish.duration()
-          && other.total().compareTo(finish.total()) == 0) {
-        notes.add(
-            names.get(i) + " and " + name.toLowerCase(Locale.ROOT) + " are the same finish.");
+      if (other.duration() == finish.duration() && other.total().compareTo(finish.total()) == 0) {
+        notes.add(names.get(i) + " and " + name.toLowerCase(Locale.ROOT) + " are the same finish.");
         return;
       }
     }
     if (choices.size() == MOST_CHOICES) {
       notes.add(
-          name + " is left out for want of room: " + words.both(finish.duration()) + ", "
-              + words.money(outcome.depends(finish)) + ".");
+          name
+              + " is left out for want of room: "
+              + words.both(finish.duration())
+              + ", "
+              + words.money(outcome.depends(finish))
+              + ".");
     } else {
       names.add(name);
       choices.add(finish);
@@ -91,8 +93,7 @@ final class ChoicesSection {
 
   Section section() {
     List<Part> parts = new ArrayList<>();
-    parts.add(
-        new Part.Drawn(new ChoicePicture(words, outcome, choices, names).picture(), table()));
+    parts.add(new Part.Drawn(new ChoicePicture(words, outcome, choices, names).picture(), table()));
     if (!notes.isEmpty()) {
       parts.add(new Part.Remark("Note on the choices", List.of(new Part.Notes(notes))));
     }
@@ -103,7 +104,8 @@ final class ChoicesSection {
         .filter(best -> best.ranges().size() > 1)
         .ifPresent(
             best ->
-                ranges.add(ranges(best, "damages", "Damages for ", answer.of().terms().damages().per())));
+                ranges.add(
+                    ranges(best, "damages", "Damages for ", answer.of().terms().damages().per())));
     if (granted.byTimeRelated().ranges().size() > 1) {
       ranges.add(
           ranges(
@@ -117,7 +119,8 @@ final class ChoicesSection {
     } else {
       parts.add(
           new Part.Beside(
-              ranges, new Part.Remark("How far this holds", List.of(new Part.Notes(firm(granted))))));
+              ranges,
+              new Part.Remark("How far this holds", List.of(new Part.Notes(firm(granted))))));
     }
     answer.weigh().claimed().ifPresent(claimed -> parts.addAll(claimed(answer.weigh(), claimed)));
     return new Section("choices", "The choices side by side", parts);
@@ -130,15 +133,13 @@ final class ChoicesSection {
     columns.add(Column.words(""));
     for (int i = 0; i < choices.size(); i++) {
       boolean chosen = choices.get(i).duration() == answer.finish().duration() && isPutForward(i);
-      columns.add(
-          new Column(names.get(i), chosen ? Column.Kind.CHOSEN : Column.Kind.WORDS));
+      columns.add(new Column(names.get(i), chosen ? Column.Kind.CHOSEN : Column.Kind.WORDS));
     }
     List<Row> rows = new ArrayList<>();
     if (words.hasDates()) {
       rows.add(row("Finish", finish -> words.finish(finish.duration())));
     }
-    rows.add(
-        row(Words.capital(words.workingUnits()), finish -> words.figure(finish.duration())));
+    rows.add(row(Words.capital(words.workingUnits()), finish -> words.figure(finish.duration())));
     if (outcome.contract().isPresent()) {
       rows.add(
           row(
@@ -161,14 +162,11 @@ final class ChoicesSection {
     Row total =
         row("Total that depends on the finish", finish -> words.money(outcome.depends(finish)));
     rows.add(new Row(Row.Kind.SUM, total.cells()));
-    rows.add(
-        row("Against carrying on", finish -> words.money(outcome.better(finish).negate())));
+    rows.add(row("Against carrying on", finish -> words.money(outcome.better(finish).negate())));
     String caption =
         Words.capital(Words.count(choices.size(), "finish", "finishes"))
             + " worth comparing, drawn and written in the same columns."
-            + (outcome.sameForAll().signum() == 0
-                ? ""
-                : " What is the same in all is left out.");
+            + (outcome.sameForAll().signum() == 0 ? "" : " What is the same in all is left out.");
     return new Table(numbering.table(), caption, columns, rows, Table.Look.EVEN);
   }
 
@@ -268,7 +266,8 @@ final class ChoicesSection {
 
   private String holds(Weighing weighing) {
     BestByRate.Range range = weighing.byCompression().present();
-    String name = "The least total, " + words.finish(weighing.best().duration()) + ", stays the best ";
+    String name =
+        "The least total, " + words.finish(weighing.best().duration()) + ", stays the best ";
     Optional<String> less =
         Optional.of(range.from())
             .filter(from -> !from.isZero())

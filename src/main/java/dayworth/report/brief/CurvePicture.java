@@ -68,8 +68,7 @@ final class CurvePicture {
       all.add(new MoneyLine("Damages", "brick", "s-da", Outcome::damages));
     }
     if (outcome.hasBonus()) {
-      all.add(
-          new MoneyLine("Bonus", "olive", "s-bo", finish -> Outcome.bonus(finish).negate()));
+      all.add(new MoneyLine("Bonus", "olive", "s-bo", finish -> Outcome.bonus(finish).negate()));
     }
     return all;
   }
@@ -177,8 +176,7 @@ final class CurvePicture {
                   new Room(axis.right() - 3 - w, y - 14, w, 11),
                   new Room(axis.left() + 3, y + 3, w, 11),
                   new Room((axis.left() + axis.right() - w) / 2, y - 14, w, 11)))
-          .ifPresent(
-              room -> drawing.text("a q", Anchor.START, room.x(), room.y() + 10, text));
+          .ifPresent(room -> drawing.text("a q", Anchor.START, room.x(), room.y() + 10, text));
     }
   }
 
@@ -186,8 +184,7 @@ final class CurvePicture {
     for (MoneyLine line : lines) {
       drawing.path(line.stroke(), path(axis, scale, line));
     }
-    drawing.path(
-        "s-to", path(axis, scale, new MoneyLine("", "", "", outcome::depends)));
+    drawing.path("s-to", path(axis, scale, new MoneyLine("", "", "", outcome::depends)));
     if (finishes.size() <= MOST_DOTS && axis.column() >= 6) {
       for (Finish finish : finishes) {
         drawing.dot("d-ex", axis.x(finish.duration()), scale.y(outcome.extraDirect(finish)), 1.7);
@@ -254,14 +251,14 @@ final class CurvePicture {
   }
 
   private boolean same(Finish one, Finish other) {
-    return one.duration() == other.duration()
-        && one.total().compareTo(other.total()) == 0;
+    return one.duration() == other.duration() && one.total().compareTo(other.total()) == 0;
   }
 
   private Flags flags(FinishAxis axis, boolean narrow) {
     Flags flags = new Flags(axis.width());
     for (Named named : flagged(narrow)) {
-      flags.add(axis.x(named.finish().duration()), label(named.name(), named.ink(), named.finish()));
+      flags.add(
+          axis.x(named.finish().duration()), label(named.name(), named.ink(), named.finish()));
     }
     return flags;
   }
@@ -304,12 +301,7 @@ final class CurvePicture {
         drawing.line("waste", x, y + 7, x, from - 6);
       }
       drawing.path(
-          "cross",
-          "M"
-              + Drawing.n(x - 5)
-              + " "
-              + Drawing.n(y - 5)
-              + "l10 10m0 -10l-10 10");
+          "cross", "M" + Drawing.n(x - 5) + " " + Drawing.n(y - 5) + "l10 10m0 -10l-10 10");
     }
     for (Named named : flagged(true)) {
       open(drawing, axis, scale, named.finish());
@@ -322,8 +314,7 @@ final class CurvePicture {
   }
 
   private void open(Drawing drawing, FinishAxis axis, MoneyScale scale, Finish finish) {
-    drawing.dot(
-        "open", axis.x(finish.duration()), scale.y(outcome.depends(finish)), 4.6);
+    drawing.dot("open", axis.x(finish.duration()), scale.y(outcome.depends(finish)), 4.6);
   }
 
   // Names of lines
@@ -333,7 +324,8 @@ final class CurvePicture {
     Finish last = shortest();
     Gutter left = new Gutter();
     Gutter right = new Gutter();
-    if (same(first, outcome.planned()) && flagged(false).stream().noneMatch(n -> same(n.finish(), first))) {
+    if (same(first, outcome.planned())
+        && flagged(false).stream().noneMatch(n -> same(n.finish(), first))) {
       left.add(scale.y(outcome.depends(first)), label(words.asPlanned(), "", first));
     } else {
       left.add(
@@ -356,12 +348,7 @@ final class CurvePicture {
   }
 
   private void addName(
-      MoneyLine line,
-      Finish first,
-      Finish last,
-      MoneyScale scale,
-      Gutter left,
-      Gutter right) {
+      MoneyLine line, Finish first, Finish last, MoneyScale scale, Gutter left, Gutter right) {
     BigDecimal begin = line.amount().apply(first);
     BigDecimal end = line.amount().apply(last);
     boolean fromLeft = !line.stroke().equals("s-bo") || begin.signum() != 0;
@@ -369,15 +356,13 @@ final class CurvePicture {
       left.add(
           scale.y(begin),
           Label.of(
-              new Label.Line(line.ink(), line.name()),
-              new Label.Line("", words.money(begin))));
+              new Label.Line(line.ink(), line.name()), new Label.Line("", words.money(begin))));
       if (end.signum() != 0 && finishes.size() > 1) {
         right.add(scale.y(end), Label.of(new Label.Line(line.ink(), words.money(end))));
       }
     } else {
       right.add(
-          scale.y(end),
-          Label.of(new Label.Line(line.ink(), line.name() + " " + words.money(end))));
+          scale.y(end), Label.of(new Label.Line(line.ink(), line.name() + " " + words.money(end))));
     }
   }
 
@@ -442,8 +427,6 @@ final class CurvePicture {
     candidates.removeIf(room -> !room.isWithin(frame));
     Optional<Room> room = places.place(candidates);
     room.ifPresent(
-        found ->
-            drawing.text(
-                line.ink(), Anchor.START, found.x(), found.y() + 10, line.name()));
+        found -> drawing.text(line.ink(), Anchor.START, found.x(), found.y() + 10, line.name()));
   }
 }

@@ -54,7 +54,10 @@ final class CurveSections {
             + Words.number(answer.curve().least().size())
             + " of them share the lowest"
         : "Each finish has a least cost; the lowest of them is "
-            + words.date(least.duration()).map(this::dayAndMonth).orElse(words.time(least.duration()));
+            + words
+                .date(least.duration())
+                .map(this::dayAndMonth)
+                .orElse(words.time(least.duration()));
   }
 
   private String dayAndMonth(LocalDate date) {
@@ -106,7 +109,9 @@ final class CurveSections {
             ? low == 0
                 ? "The total rises from the first " + words.unit() + " bought on."
                 : low == totals.size() - 1
-                    ? "The total falls all the way: each " + words.unit() + " is worth what it costs."
+                    ? "The total falls all the way: each "
+                        + words.unit()
+                        + " is worth what it costs."
                     : "The total falls while "
                         + unit
                         + " is worth more than it costs and rises from then on."
@@ -294,7 +299,8 @@ final class CurveSections {
     }
     if (map.rows().crowded() > 0) {
       notes.add(
-          Words.capital(Words.count(map.rows().crowded(), "more activity is", "more activities are"))
+          Words.capital(
+                  Words.count(map.rows().crowded(), "more activity is", "more activities are"))
               + " critical or shortened at some finish and not shown for want of room: the rows are"
               + " those of which most is bought. plan.csv and steps.csv have them all.");
     }
@@ -352,6 +358,7 @@ final class CurveSections {
         heading,
         List.of(
             new Part.Beside(
-                List.of(figure), new Part.Remark("Note on " + name.toLowerCase(java.util.Locale.ROOT), notes))));
+                List.of(figure),
+                new Part.Remark("Note on " + name.toLowerCase(java.util.Locale.ROOT), notes))));
   }
 }

@@ -25,8 +25,7 @@ final class ExplorerData {
   private final NetworkPicture picture;
   private final FinishAxis axis;
 
-  ExplorerData(
-      BriefAnswer answer, Words words, FinishTelling telling, NetworkLayout layout) {
+  ExplorerData(BriefAnswer answer, Words words, FinishTelling telling, NetworkLayout layout) {
     this.answer = answer;
     this.words = words;
     this.telling = telling;

@@ -33,12 +33,16 @@ final class FinishAxis {
   private final int width;
 
   private FinishAxis(
-      BriefAnswer answer, Words words, int width, double left, double mostRight, boolean hasContract) {
+      BriefAnswer answer,
+      Words words,
+      int width,
+      double left,
+      double mostRight,
+      boolean hasContract) {
     this.words = words;
     this.width = width;
     this.left = left;
-    this.finishes =
-        answer.states().stream().map(state -> state.finish().duration()).toList();
+    this.finishes = answer.states().stream().map(state -> state.finish().duration()).toList();
     long unit = answer.of().network().scale().ticksPerUnit();
     double units = (longest() - shortest()) / (double) unit + 1;
     this.column = Math.min(WIDEST_COLUMN, (mostRight - left) / units);
@@ -99,16 +103,12 @@ final class FinishAxis {
 
   double x(long finish) {
     double first = left + column / 2;
-    return longest() == shortest()
-        ? first
-        : first + (right - left - column) * share(finish);
+    return longest() == shortest() ? first : first + (right - left - column) * share(finish);
   }
 
   /** 0 at the longest finish, 1 at the shortest. */
   double share(long finish) {
-    return longest() == shortest()
-        ? 0
-        : (longest() - finish) / (double) (longest() - shortest());
+    return longest() == shortest() ? 0 : (longest() - finish) / (double) (longest() - shortest());
   }
 
   /** The column of the chosen finish; the slider moves it. */

@@ -44,8 +44,7 @@ final class FinishSections {
                         pick.tally(),
                         pick.price()))
             .toList();
-    Part readout =
-        new Part.Readout(telling.lines(chosen), picks, telling.rest(chosen), jumps());
+    Part readout = new Part.Readout(telling.lines(chosen), picks, telling.rest(chosen), jumps());
     return new Section(
         "finish",
         telling.heading(chosen),
@@ -73,9 +72,7 @@ final class FinishSections {
     names.forEach(
         (finish, name) -> {
           if (answer.states().stream().anyMatch(s -> s.finish().duration() == finish)) {
-            jumps.add(
-                new Part.Jump(
-                    name, "finish=" + answer.of().network().scale().text(finish)));
+            jumps.add(new Part.Jump(name, "finish=" + answer.of().network().scale().text(finish)));
           }
         });
     return jumps;
@@ -139,7 +136,9 @@ final class FinishSections {
     }
     int done = answer.of().network().size() - toGo;
     if (done > 0) {
-      notes.add(Words.capital(Words.count(done, "finished activity is", "finished activities are")) + " not shown.");
+      notes.add(
+          Words.capital(Words.count(done, "finished activity is", "finished activities are"))
+              + " not shown.");
     }
     return notes;
   }

@@ -29,11 +29,7 @@ final class FinishTelling {
    * @param shortest why no plan is shorter than the last of them, as a sentence
    */
   FinishTelling(
-      BriefAnswer answer,
-      Words words,
-      Outcome outcome,
-      List<Stretch> stretches,
-      String shortest) {
+      BriefAnswer answer, Words words, Outcome outcome, List<Stretch> stretches, String shortest) {
     this.answer = answer;
     this.words = words;
     this.outcome = outcome;
@@ -81,8 +77,7 @@ final class FinishTelling {
       add(lines, "bonus", "Bonus", Outcome.bonus(finish).negate());
     }
     lines.add(
-        new Part.Amount(
-            "total", "Total", words.money(outcome.depends(finish)), Part.Weight.TOTAL));
+        new Part.Amount("total", "Total", words.money(outcome.depends(finish)), Part.Weight.TOTAL));
     lines.add(
         new Part.Amount(
             "diff",

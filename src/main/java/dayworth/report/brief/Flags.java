@@ -7,8 +7,8 @@ import java.util.List;
 
 /**
  * Labels above a picture, each with a thin line down to its mark, in as few rows as they need: no
- * label on another, and no line through a label. Those that have no room are left out, the last ones
- * first.
+ * label on another, and no line through a label. Those that have no room are left out, the last
+ * ones first.
  */
 final class Flags {
 

@@ -110,7 +110,9 @@ final class HeadOfBrief {
                 words.money(better),
                 better.signum() > 0
                     ? "better than " + than
-                    : better.signum() == 0 ? "beside " + than : "better, which is dearer, than " + than)));
+                    : better.signum() == 0
+                        ? "beside " + than
+                        : "better, which is dearer, than " + than)));
   }
 
   List<String> lede() {

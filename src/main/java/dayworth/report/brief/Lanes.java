@@ -70,8 +70,7 @@ final class Lanes {
           before[i] = from;
         }
       }
-      length[i] =
-          chosen.plan().duration(i) + 1 + (before[i] < 0 ? 0 : length[before[i]]);
+      length[i] = chosen.plan().duration(i) + 1 + (before[i] < 0 ? 0 : length[before[i]]);
       if (end < 0 || length[i] > length[end]) {
         end = i;
       }

@@ -27,8 +27,7 @@ final class LinkRoutes {
   }
 
   double right(int box) {
-    return Math.max(
-        left(box) + 8, layout.left() + ruler.x(frame.end(box)) - NetworkLayout.AFTER);
+    return Math.max(left(box) + 8, layout.left() + ruler.x(frame.end(box)) - NetworkLayout.AFTER);
   }
 
   double middle(int box) {
@@ -100,7 +99,16 @@ final class LinkRoutes {
     double bx = right(b);
     double yb = middle(b);
     double out = Math.max(right(a), bx) + 6;
-    return "M" + n(right(a)) + " " + n(middle(a)) + "H" + n(out) + "V" + n(yb) + "H" + n(bx)
+    return "M"
+        + n(right(a))
+        + " "
+        + n(middle(a))
+        + "H"
+        + n(out)
+        + "V"
+        + n(yb)
+        + "H"
+        + n(bx)
         + arrow(bx, yb, -1);
   }
 
@@ -108,8 +116,21 @@ final class LinkRoutes {
     double bx = right(b);
     double yb = middle(b);
     double between = yb + (layout.lane(a) < layout.lane(b) ? -1 : 1) * (MIDDLE + 16);
-    return "M" + n(left(a)) + " " + n(middle(a)) + "H" + n(left(a) - 4) + "V" + n(between) + "H"
-        + n(bx + 6) + "V" + n(yb) + "H" + n(bx) + arrow(bx, yb, -1);
+    return "M"
+        + n(left(a))
+        + " "
+        + n(middle(a))
+        + "H"
+        + n(left(a) - 4)
+        + "V"
+        + n(between)
+        + "H"
+        + n(bx + 6)
+        + "V"
+        + n(yb)
+        + "H"
+        + n(bx)
+        + arrow(bx, yb, -1);
   }
 
   /** Whether no box of a lane stands between two places. */
@@ -123,8 +144,18 @@ final class LinkRoutes {
   }
 
   private static String arrow(double x, double y, int way) {
-    return "M" + n(x - way * 6) + " " + n(y - 3.4) + "L" + n(x) + " " + n(y) + "L" + n(x - way * 6)
-        + " " + n(y + 3.4);
+    return "M"
+        + n(x - way * 6)
+        + " "
+        + n(y - 3.4)
+        + "L"
+        + n(x)
+        + " "
+        + n(y)
+        + "L"
+        + n(x - way * 6)
+        + " "
+        + n(y + 3.4);
   }
 
   /** Whether a link has no slack between critical work. */

@@ -29,7 +29,6 @@ final class MapPicture {
   /** Where groups change oftener, gaps between them tell nothing. */
   private static final int MOST_GROUPS = 14;
 
-
   private final BriefAnswer answer;
   private final Words words;
   private final MapRows rows;
@@ -50,8 +49,7 @@ final class MapPicture {
         "Compression map: " + words.units() + " bought from each activity, for every finish.",
         description(),
         List.of(
-            new Picture.Drawn(
-                Picture.Use.BROAD, new Sheet(FinishAxis.broad(answer, words)).draw()),
+            new Picture.Drawn(Picture.Use.BROAD, new Sheet(FinishAxis.broad(answer, words)).draw()),
             new Picture.Drawn(
                 Picture.Use.NARROW, new Sheet(FinishAxis.narrow(answer, words)).draw())));
   }
@@ -139,7 +137,8 @@ final class MapPicture {
       }
       if (!changes.isEmpty() && said.size() < MOST_SAID) {
         Activity one = answer.of().network().activity(activity);
-        said.add((Words.id(one) + " " + Words.name(one)).strip() + ": " + String.join(", ", changes));
+        said.add(
+            (Words.id(one) + " " + Words.name(one)).strip() + ": " + String.join(", ", changes));
       }
     }
     return "Rows are activities, columns are finishes, longest on the left. What is bought of each"
@@ -158,9 +157,7 @@ final class MapPicture {
     boolean units = axis.column() >= NARROWEST;
     for (int s = 0; s < answer.states().size(); s++) {
       boolean regular =
-          units
-              ? axis.finishes().get(s) % unit == 0
-              : answer.states().get(s).finish().breakpoint();
+          units ? axis.finishes().get(s) % unit == 0 : answer.states().get(s).finish().breakpoint();
       if (regular) {
         wanted.add(s);
       }
@@ -242,9 +239,7 @@ final class MapPicture {
       if (column > 0) {
         return (x + x(column - 1)) / 2;
       }
-      return columns.size() == 1
-          ? axis.left()
-          : Math.max(axis.left(), x - (x(1) - x) / 2);
+      return columns.size() == 1 ? axis.left() : Math.max(axis.left(), x - (x(1) - x) / 2);
     }
 
     private double right(int column) {
@@ -266,9 +261,7 @@ final class MapPicture {
     }
 
     private boolean isCritical(int column, int activity) {
-      return answer
-          .of()
-          .isCritical(answer.states().get(columns.get(column)).timing(), activity);
+      return answer.of().isCritical(answer.states().get(columns.get(column)).timing(), activity);
     }
 
     private boolean isRelaxed(int column, int activity) {
@@ -284,8 +277,7 @@ final class MapPicture {
         long bought = boughtAt(c, activity);
         boolean critical = isCritical(c, activity);
         if (bought > 0 && !(isRelaxed(c, activity) && w >= WIDE - 2)) {
-          int tone =
-              Math.max(1, (int) Math.ceil(bought * (double) TONES / one.mostShortening()));
+          int tone = Math.max(1, (int) Math.ceil(bought * (double) TONES / one.mostShortening()));
           rect("1o" + tone, x, top, w, CELL);
         } else if (isRelaxed(c, activity)) {
           rect("1plate", x, top, w, CELL);
@@ -330,7 +322,8 @@ final class MapPicture {
         double x = (left(c) + right(c)) / 2;
         if (told && room <= w - 1 && x - room / 2 > free) {
           int tone =
-              Math.max(1, (int) Math.ceil(bought * (double) TONES / Math.max(1, one.mostShortening())));
+              Math.max(
+                  1, (int) Math.ceil(bought * (double) TONES / Math.max(1, one.mostShortening())));
           String ink = relaxed ? (w >= WIDE ? " teal" : " t" + tone) : " t" + tone;
           drawing.text("a b" + ink, Anchor.MIDDLE, x, top + 13, figure);
           free = x + room / 2;
@@ -346,8 +339,7 @@ final class MapPicture {
       double widest =
           rows.shown().stream()
               .mapToDouble(
-                  i ->
-                      Face.SEMIBOLD.width(Words.id(answer.of().network().activity(i)), 13))
+                  i -> Face.SEMIBOLD.width(Words.id(answer.of().network().activity(i)), 13))
               .max()
               .orElse(0);
       double left = axis.isNarrow() ? axis.left() : 0;

@@ -8,8 +8,8 @@ import java.util.Comparator;
 import java.util.List;
 
 /**
- * The activities of the compression map, in file order: those that are shortened or critical at some
- * finish; where they are many, those of which most is bought.
+ * The activities of the compression map, in file order: those that are shortened or critical at
+ * some finish; where they are many, those of which most is bought.
  *
  * @param shown indices in the network
  * @param quiet how many are never shortened nor critical
@@ -37,8 +37,7 @@ record MapRows(List<Integer> shown, int quiet, int crowded) {
     int quiet = answer.of().toGo() - told.size();
     int crowded = Math.max(0, told.size() - MOST);
     if (crowded > 0) {
-      told.sort(
-          Comparator.<Integer>comparingDouble(i -> -share(answer, i)).thenComparing(i -> i));
+      told.sort(Comparator.<Integer>comparingDouble(i -> -share(answer, i)).thenComparing(i -> i));
       told = new ArrayList<>(told.subList(0, MOST));
       told.sort(null);
     }

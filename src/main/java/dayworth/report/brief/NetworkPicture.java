@@ -17,7 +17,10 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 
-/** The network at one finish: boxes on a scale of time, in lanes by chain, with early and late times. */
+/**
+ * The network at one finish: boxes on a scale of time, in lanes by chain, with early and late
+ * times.
+ */
 final class NetworkPicture {
 
   private static final double SIZE = 12;
@@ -190,8 +193,7 @@ final class NetworkPicture {
   List<Long> ticks() {
     long longest = Math.max(1, answer.states().get(0).finish().duration());
     long unit = words.ticksPerUnit();
-    double perUnit =
-        (layout.width() - layout.left() - NetworkLayout.RIGHT) / longest * unit;
+    double perUnit = (layout.width() - layout.left() - NetworkLayout.RIGHT) / longest * unit;
     long step = 1;
     for (long one : new long[] {1, 2, 5, 10, 20, 25, 50, 100, 200, 500, 1000, 5000}) {
       step = one;
@@ -277,8 +279,7 @@ final class NetworkPicture {
     }
   }
 
-  private void box(
-      Drawing drawing, NetworkFrame frame, LinkRoutes routes, int state, int b) {
+  private void box(Drawing drawing, NetworkFrame frame, LinkRoutes routes, int state, int b) {
     double x = routes.left(b);
     double w = routes.right(b) - x;
     double y = layout.top(layout.lane(b));
@@ -324,14 +325,12 @@ final class NetworkPicture {
     drawing.path(
         critical ? "ms msc" : "ms",
         "M" + Drawing.n(x + 4) + " " + Drawing.n(middle - 9) + "l7 9l-7 9l-7 -9z");
-    drawing.text(
-        "a b", Anchor.MIDDLE, x + 4, y + 13.5, Words.shortId(layout.activity(b)));
+    drawing.text("a b", Anchor.MIDDLE, x + 4, y + 13.5, Words.shortId(layout.activity(b)));
     drawing.text("a", Anchor.MIDDLE, x + 4, y + 53.5, words.figure(frame.early()[b]));
   }
 
   /** A notch for each unit that is bought, a hollow one for each that is given back. */
-  private void notches(
-      Drawing drawing, double left, double right, double y, int state, int b) {
+  private void notches(Drawing drawing, double left, double right, double y, int state, int b) {
     long unit = words.ticksPerUnit();
     long bought = bought(state, b);
     long back = givenBack(state, b);
@@ -345,7 +344,8 @@ final class NetworkPicture {
       drawing.box(i < full ? "notch" : "notcho", x - 3.6, y - 1, 3.6, 9);
       x -= 6;
     }
-    String label = bought == 0 ? words.figure(back) + " given back" : words.figure(bought) + " bought";
+    String label =
+        bought == 0 ? words.figure(back) + " given back" : words.figure(bought) + " bought";
     if (x - 3 - Face.MEDIUM.width(label, SIZE) >= left - 2) {
       drawing.text(bought == 0 ? "a teal" : "a och", Anchor.END, x - 3, y + 9.5, label);
     } else {
@@ -377,8 +377,7 @@ final class NetworkPicture {
     for (Map.Entry<String, List<Integer>> group : layout.rest().entrySet()) {
       RestSpan span = RestSpan.of(timing, group.getValue());
       double left = layout.left() + ruler.x(span.from()) + NetworkLayout.BEFORE;
-      double right =
-          Math.max(left + 8, layout.left() + ruler.x(span.to()) - NetworkLayout.AFTER);
+      double right = Math.max(left + 8, layout.left() + ruler.x(span.to()) - NetworkLayout.AFTER);
       drawing.path("k-fl", Hatch.falling(left, y, right - left, 24, 7));
       drawing.box("cell", left, y, right - left, 24);
       String label = restLabel(group.getKey(), group.getValue().size()) + floats(span);
@@ -433,7 +432,8 @@ final class NetworkPicture {
     Drawing lag = new Drawing(30, 20);
     lag.path("lk lag", "M2 10H28");
     marks.add(
-        new Part.Mark(lag.marks(), "Dotted: a waiting time, or a link from a start or to a finish."));
+        new Part.Mark(
+            lag.marks(), "Dotted: a waiting time, or a link from a start or to a finish."));
     return new Part.Key(marks);
   }
 }

@@ -142,7 +142,8 @@ final class Outcome {
   private String lateness(Finish finish, Due due, Words words) {
     Optional<Long> days =
         due.date()
-            .flatMap(date -> words.date(finish.duration()).map(at -> ChronoUnit.DAYS.between(date, at)));
+            .flatMap(
+                date -> words.date(finish.duration()).map(at -> ChronoUnit.DAYS.between(date, at)));
     if (days.isPresent() && isByDate()) {
       long late = days.get();
       String count = Math.abs(late) + (Math.abs(late) == 1 ? " calendar day" : " calendar days");
@@ -170,7 +171,13 @@ final class Outcome {
     if (damagesSaved().signum() > 0) {
       falls.add("damages");
     }
-    String text = falls.isEmpty() ? "" : Words.list(falls, 4) + " that " + (falls.size() == 1 && !falls.get(0).equals("damages") ? "does" : "do") + " not arise";
+    String text =
+        falls.isEmpty()
+            ? ""
+            : Words.list(falls, 4)
+                + " that "
+                + (falls.size() == 1 && !falls.get(0).equals("damages") ? "does" : "do")
+                + " not arise";
     List<String> rest = new java.util.ArrayList<>();
     if (bonusGained().signum() > 0) {
       rest.add((falls.isEmpty() ? "" : "and ") + "bonus that is earned");
@@ -188,6 +195,8 @@ final class Outcome {
       rest.add("less bonus that is lost");
     }
     String more = String.join(", ", rest);
-    return text.isEmpty() ? (more.isEmpty() ? "saved beside direct cost" : more) : more.isEmpty() ? text : text + (more.startsWith("and") ? " " : ", ") + more;
+    return text.isEmpty()
+        ? (more.isEmpty() ? "saved beside direct cost" : more)
+        : more.isEmpty() ? text : text + (more.startsWith("and") ? " " : ", ") + more;
   }
 }

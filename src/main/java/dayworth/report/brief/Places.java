@@ -13,10 +13,7 @@ final class Places {
   record Room(double x, double y, double w, double h) {
 
     boolean meets(Room other) {
-      return x < other.x + other.w
-          && other.x < x + w
-          && y < other.y + other.h
-          && other.y < y + h;
+      return x < other.x + other.w && other.x < x + w && y < other.y + other.h && other.y < y + h;
     }
 
     boolean isWithin(Room frame) {

@@ -97,8 +97,7 @@ final class PricePicture {
     }
     return new MoneyScale(
         0,
-        Math.max(
-            1, amounts.stream().mapToDouble(BigDecimal::doubleValue).max().orElse(1)),
+        Math.max(1, amounts.stream().mapToDouble(BigDecimal::doubleValue).max().orElse(1)),
         TOP,
         bottom);
   }
@@ -106,12 +105,14 @@ final class PricePicture {
   private void bands(Drawing drawing, FinishAxis axis, MoneyScale scale) {
     band(drawing, axis, scale, runs(s -> BigDecimal.ZERO, Stretch::time), "tr");
     band(drawing, axis, scale, runs(Stretch::time, s -> s.time().add(s.damages())), "da");
-    band(
-        drawing, axis, scale, runs(s -> s.time().add(s.damages()), Stretch::worth), "bo");
+    band(drawing, axis, scale, runs(s -> s.time().add(s.damages()), Stretch::worth), "bo");
     StringBuilder outline = new StringBuilder();
     for (Run run : runs(s -> BigDecimal.ZERO, Stretch::worth)) {
       outline
-          .append(outline.length() == 0 ? "M" + x(axis, run.from()) + " " + y(scale, BigDecimal.ZERO) : "")
+          .append(
+              outline.length() == 0
+                  ? "M" + x(axis, run.from()) + " " + y(scale, BigDecimal.ZERO)
+                  : "")
           .append("L")
           .append(x(axis, run.from()))
           .append(" ")
@@ -147,8 +148,7 @@ final class PricePicture {
     drawing.path("k-" + kind, hatch);
   }
 
-  private List<Run> runs(
-      Function<Stretch, BigDecimal> low, Function<Stretch, BigDecimal> high) {
+  private List<Run> runs(Function<Stretch, BigDecimal> low, Function<Stretch, BigDecimal> high) {
     List<Run> runs = new ArrayList<>();
     for (Stretch one : stretches) {
       BigDecimal bottom = low.apply(one).max(BigDecimal.ZERO);
@@ -216,11 +216,17 @@ final class PricePicture {
                 new Label.Line("b plum", stop),
                 new Label.Line(
                     "",
-                    next.map(s -> "then " + words.money(s.price()) + ", worth " + words.money(s.worth()))
+                    next.map(
+                            s ->
+                                "then "
+                                    + words.money(s.price())
+                                    + ", worth "
+                                    + words.money(s.worth()))
                         .orElse("No plan is shorter")))
             : Label.of(new Label.Line("b plum", stop), new Label.Line("", then));
     double w = label.width();
-    Anchor anchor = x + 8 + w <= axis.width() ? Anchor.START : x - 8 - w >= 0 ? Anchor.END : Anchor.MIDDLE;
+    Anchor anchor =
+        x + 8 + w <= axis.width() ? Anchor.START : x - 8 - w >= 0 ? Anchor.END : Anchor.MIDDLE;
     double at =
         switch (anchor) {
           case START -> x + 8;
@@ -285,8 +291,7 @@ final class PricePicture {
         .map(axis::x);
   }
 
-  private void contractLine(
-      Drawing drawing, FinishAxis axis, MoneyScale scale, Places places) {
+  private void contractLine(Drawing drawing, FinishAxis axis, MoneyScale scale, Places places) {
     contractX(axis)
         .ifPresent(
             x -> {
@@ -332,7 +337,10 @@ final class PricePicture {
           Label.of(
               new Label.Line("slate", "Time-related cost"),
               new Label.Line(
-                  "", words.money(terms.timeRelated().rate()) + " " + words.one(terms.timeRelated().per()))));
+                  "",
+                  words.money(terms.timeRelated().rate())
+                      + " "
+                      + words.one(terms.timeRelated().per()))));
     }
     if (stretches.stream().anyMatch(s -> s.damages().signum() > 0)) {
       double at = first.time().doubleValue() + Math.max(0, first.damages().doubleValue()) / 2;
@@ -341,7 +349,8 @@ final class PricePicture {
           Label.of(
               new Label.Line("brick", "Damages"),
               new Label.Line(
-                  "", words.money(terms.damages().rate()) + " " + words.one(terms.damages().per()))));
+                  "",
+                  words.money(terms.damages().rate()) + " " + words.one(terms.damages().per()))));
     }
     if (stretches.stream().anyMatch(s -> s.bonus().signum() > 0)) {
       double at = last.time().doubleValue() + Math.max(0, last.bonus().doubleValue()) / 2;

@@ -20,7 +20,9 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 
-/** Why no cheaper plan exists, with the sheet that proves it, and every finish with all its money. */
+/**
+ * Why no cheaper plan exists, with the sheet that proves it, and every finish with all its money.
+ */
 final class ProofSection {
 
   private static final int MOST_BRANCHES = 60;
@@ -207,7 +209,8 @@ final class ProofSection {
     if (exact.scale() <= 0) {
       return Words.grouped(exact.setScale(0, RoundingMode.UNNECESSARY));
     }
-    return Words.grouped(exact.setScale(Math.min(6, Math.max(2, exact.scale())), RoundingMode.HALF_UP));
+    return Words.grouped(
+        exact.setScale(Math.min(6, Math.max(2, exact.scale())), RoundingMode.HALF_UP));
   }
 
   // Branches prove it

@@ -147,10 +147,12 @@ final class RestsSection {
     if (told.isEmpty()) {
       return List.of();
     }
-    List<String> said =
-        told.stream().limit(MOST_LINKS).map(this::said).toList();
+    List<String> said = told.stream().limit(MOST_LINKS).map(this::said).toList();
     int left = told.size() - said.size();
-    String more = left > 0 ? " " + Words.capital(Words.count(left, "more link", "more links")) + " of such kinds." : "";
+    String more =
+        left > 0
+            ? " " + Words.capital(Words.count(left, "more link", "more links")) + " of such kinds."
+            : "";
     return List.of(new Statement(Words.capital(String.join("; ", said)) + "." + more, "links.csv"));
   }
 
@@ -192,7 +194,8 @@ final class RestsSection {
     if (terms.contractFinish().isPresent() && !terms.bonus().rate().isZero()) {
       all.add(
           new Statement(
-              "A bonus of " + said(terms.bonus()) + " is paid before it.", "terms.csv, bonus_rate"));
+              "A bonus of " + said(terms.bonus()) + " is paid before it.",
+              "terms.csv, bonus_rate"));
     }
     for (RunningCost cost : of.momentMoney().running()) {
       all.add(
@@ -225,7 +228,12 @@ final class RestsSection {
     String grace =
         damages.grace().signum() == 0
             ? ""
-            : ", the first " + Words.grouped(damages.grace().stripTrailingZeros().scale() < 0 ? damages.grace().setScale(0) : damages.grace()) + " free";
+            : ", the first "
+                + Words.grouped(
+                    damages.grace().stripTrailingZeros().scale() < 0
+                        ? damages.grace().setScale(0)
+                        : damages.grace())
+                + " free";
     String cap = damages.cap().map(most -> ", at most " + words.money(most) + " in all").orElse("");
     return words.money(damages.rate()) + " " + words.one(damages.per()) + grace + cap;
   }
@@ -242,13 +250,20 @@ final class RestsSection {
     for (Notice warning : of.warnings()) {
       if (all.size() == MOST_WARNINGS) {
         int left = of.warnings().size() - MOST_WARNINGS;
-        all.add(new Statement(Words.capital(Words.count(left, "more warning", "more warnings")) + ".", "result.json has them"));
+        all.add(
+            new Statement(
+                Words.capital(Words.count(left, "more warning", "more warnings")) + ".",
+                "result.json has them"));
         return all;
       }
       String found = warning.found().isEmpty() ? "" : ", found " + Words.safe(warning.found());
       all.add(
           new Statement(
-              Words.capital(Words.safe(warning.wrong())) + found + ". " + Words.capital(Words.safe(warning.right())) + ".",
+              Words.capital(Words.safe(warning.wrong()))
+                  + found
+                  + ". "
+                  + Words.capital(Words.safe(warning.right()))
+                  + ".",
               Words.safe(warning.place())));
     }
     return all;

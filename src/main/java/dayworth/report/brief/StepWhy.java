@@ -57,8 +57,7 @@ final class StepWhy {
         reasons.get(k - 1).shortened().stream()
             .map(Change::activity)
             .filter(i -> !now.contains(i))
-            .filter(
-                i -> reasons.get(k).before().duration(i) == network.activity(i).crash())
+            .filter(i -> reasons.get(k).before().duration(i) == network.activity(i).crash())
             .toList();
     return out.isEmpty()
         ? Optional.empty()
@@ -116,7 +115,9 @@ final class StepWhy {
               && reason.chains().stream().allMatch(chain -> chain.contains(shortened.get(0)));
       return onAll
           ? Optional.of(
-              ids(shortened) + " lies on " + (reason.chains().size() == 2 ? "both." : "all of them."))
+              ids(shortened)
+                  + " lies on "
+                  + (reason.chains().size() == 2 ? "both." : "all of them."))
           : Optional.empty();
     }
     return Optional.of(
@@ -145,18 +146,14 @@ final class StepWhy {
                     + ", which lies on "
                     + (reason.chains().size() == 2 ? "both" : "all")
                     + ", would cost "
-                    + words.money(
-                        network.activity(i).slope().times(words.ticksPerUnit()))
+                    + words.money(network.activity(i).slope().times(words.ticksPerUnit()))
                     + ".");
   }
 
   /** A chain that passes several shortened activities would shrink too much. */
   private void givenBack(StepReason reason, List<String> said) {
     List<Integer> shortened = reason.shortened().stream().map(Change::activity).toList();
-    said.add(
-        ids(shortened)
-            + (shortened.size() == 1 ? " is" : " are")
-            + " shortened.");
+    said.add(ids(shortened) + (shortened.size() == 1 ? " is" : " are") + " shortened.");
     boolean even =
         reason.step().changes().stream()
             .allMatch(change -> Math.abs(change.shortened()) == reason.step().ticks());

@@ -10,7 +10,8 @@ import java.util.ArrayList;
 import java.util.List;
 
 /**
- * What lies between two neighbouring finishes: what a unit of time costs there and what it is worth.
+ * What lies between two neighbouring finishes: what a unit of time costs there and what it is
+ * worth.
  *
  * @param from the longer one, ticks
  * @param to the shorter one, ticks

@@ -49,6 +49,7 @@ final class Words {
   private final Optional<WorkingCalendar> calendar;
   private final String currency;
   private final int decimals;
+
   /** Up to when a day and a month are one date; empty where they are not. */
   private final Optional<LocalDate> plainUntil;
 
@@ -57,9 +58,7 @@ final class Words {
     this.scale = of.network().scale();
     this.calendar = of.terms().calendar();
     this.currency = SYMBOLS.getOrDefault(of.currency(), safe(of.currency()));
-    boolean whole =
-        named(answer).flatMap(Words::amounts)
-            .allMatch(Words::isWhole);
+    boolean whole = named(answer).flatMap(Words::amounts).allMatch(Words::isWhole);
     this.decimals = whole ? 0 : 2;
     long latest =
         Math.max(answer.curve().asPlanned().duration(), answer.states().get(0).finish().duration());
@@ -67,9 +66,7 @@ final class Words {
         calendar
             .filter(
                 dates ->
-                    dates
-                        .finishDate(latest)
-                        .isBefore(dates.startDate(0).plusMonths(PLAIN_MONTHS)))
+                    dates.finishDate(latest).isBefore(dates.startDate(0).plusMonths(PLAIN_MONTHS)))
             .map(dates -> dates.finishDate(latest));
   }
 

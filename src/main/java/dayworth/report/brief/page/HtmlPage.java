@@ -7,7 +7,8 @@ import java.util.Base64;
 
 /**
  * A document as one HTML file that needs nothing else: style, fonts, pictures and data lie in it.
- * Without scripts it is a document that stands still; with them a slider leads through the finishes.
+ * Without scripts it is a document that stands still; with them a slider leads through the
+ * finishes.
  */
 public final class HtmlPage {
 
@@ -185,7 +186,9 @@ public final class HtmlPage {
             + "\"><span class=\"no\">"
             + number
             + "</span>"
-            + (explores ? "<span id=\"try-h\">" + heading + "</span>" : "<span>" + heading + "</span>")
+            + (explores
+                ? "<span id=\"try-h\">" + heading + "</span>"
+                : "<span>" + heading + "</span>")
             + "</h2>");
     section.parts().forEach(parts::write);
     line("</section>");

@@ -144,10 +144,7 @@ final class HtmlParts {
                   + "</desc>";
       int end = drawn.svg().indexOf('>') + 1;
       line(
-          open
-              + drawn.svg().substring("<svg ".length(), end)
-              + words
-              + drawn.svg().substring(end));
+          open + drawn.svg().substring("<svg ".length(), end) + words + drawn.svg().substring(end));
       if (scrolls && drawn.use() == Picture.Use.ALWAYS) {
         line("</div>");
       }

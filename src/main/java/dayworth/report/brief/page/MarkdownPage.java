@@ -21,8 +21,7 @@ public final class MarkdownPage {
     String reference = document.reference().isEmpty() ? "" : " (" + document.reference() + ")";
     block("# " + text(document.title() + reference));
     Document.Headline head = document.headline();
-    block(
-        "**" + text((head.before() + head.stressed() + head.after()).strip()) + "**");
+    block("**" + text((head.before() + head.stressed() + head.after()).strip()) + "**");
     document.sum().ifPresent(this::sum);
     document.lede().forEach(this::paragraph);
     table(
@@ -89,7 +88,10 @@ public final class MarkdownPage {
 
   private void picture(Picture picture) {
     block(
-        "**" + text(picture.name()) + ".** " + text(picture.caption() + " " + picture.description()));
+        "**"
+            + text(picture.name())
+            + ".** "
+            + text(picture.caption() + " " + picture.description()));
   }
 
   private void readout(Part.Readout readout) {

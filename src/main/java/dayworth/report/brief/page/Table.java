@@ -11,8 +11,7 @@ import java.util.List;
  * @param rows from top to bottom
  * @param look how it is laid out
  */
-public record Table(
-    String name, String caption, List<Column> columns, List<Row> rows, Look look) {
+public record Table(String name, String caption, List<Column> columns, List<Row> rows, Look look) {
 
   public Table {
     columns = List.copyOf(columns);

@@ -4,7 +4,8 @@ import dayworth.report.brief.page.Escape;
 import java.util.Locale;
 
 /**
- * A drawing that is being made; every mark has a class of the page's style and no colour of its own.
+ * A drawing that is being made; every mark has a class of the page's style and no colour of its
+ * own.
  */
 public final class Drawing {
 

@@ -41,8 +41,7 @@ public enum Face {
           .skip(1)
           .map(line -> line.split(",", -1))
           .forEach(
-              cells ->
-                  widths.put(Integer.parseInt(cells[0], 16), Integer.parseInt(cells[column])));
+              cells -> widths.put(Integer.parseInt(cells[0], 16), Integer.parseInt(cells[column])));
     } catch (IOException e) {
       throw new UncheckedIOException(e);
     }
@@ -75,7 +74,9 @@ public enum Face {
     return end == 0 ? "" : text.substring(0, end).strip() + "…";
   }
 
-  /** The text on at most so many lines, broken between words; what has no room ends in an ellipsis. */
+  /**
+   * The text on at most so many lines, broken between words; what has no room ends in an ellipsis.
+   */
   public List<String> wrap(String text, double size, double room, int most) {
     List<String> lines = new ArrayList<>();
     String line = "";
