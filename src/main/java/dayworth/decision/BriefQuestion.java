@@ -111,7 +111,12 @@ public final class BriefQuestion {
       CriticalChains chains = chains(timing);
       List<Integer> changed = step.changes().stream().map(change -> change.activity()).toList();
       reasons.add(
-          new StepReason(facts, plan, chains.passing(changed, MOST_CHAINS), chains.count()));
+          new StepReason(
+              facts,
+              plan,
+              curve.curve().planAfter(k + 1),
+              chains.passing(changed, MOST_CHAINS),
+              chains.count()));
     }
     return reasons;
   }

@@ -11,11 +11,12 @@ import java.util.List;
  *
  * @param facts the step
  * @param before the plan at its longer end
+ * @param after the plan at its shorter end
  * @param chains some of the critical chains there, those first that pass what the step changes
  * @param chainCount how many there are; exact
  */
 public record StepReason(
-    StepFacts facts, Plan before, List<List<Integer>> chains, BigInteger chainCount) {
+    StepFacts facts, Plan before, Plan after, List<List<Integer>> chains, BigInteger chainCount) {
 
   public StepReason {
     chains = List.copyOf(chains);

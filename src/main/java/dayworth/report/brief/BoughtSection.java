@@ -6,6 +6,9 @@ import dayworth.decision.StepReason;
 import dayworth.decision.Submission;
 import dayworth.engine.Change;
 import dayworth.network.Activity;
+import dayworth.network.MeasurePackage;
+import dayworth.network.Network;
+import dayworth.network.Plan;
 import dayworth.network.Timing;
 import dayworth.report.brief.page.Part;
 import dayworth.report.brief.page.Section;
@@ -61,14 +64,7 @@ final class BoughtSection {
       parts.add(new Part.Prose(List.of("Nothing is bought: the work goes on at its normal pace.")));
     } else {
       parts.add(new Part.Sheet(bought()));
-      parts.add(
-          new Part.Gap(
-              "Not in the case: how this time is made.",
-              "The case gives a price for "
-                  + words.aUnit()
-                  + " of each activity, not the method, crew and hours. Add them as measures.csv or"
-                  + " labour.csv, and this part names each measure with its build-up and the source"
-                  + " of every productivity figure."));
+      unexplained().ifPresent(parts::add);
       parts.addAll(price());
     }
     if (!answer.reasons().isEmpty()) {
@@ -77,12 +73,41 @@ final class BoughtSection {
     return new Section("bought", "What is bought, and why", parts);
   }
 
+  /** Whether the case says how each activity is shortened. */
+  private Optional<Part> unexplained() {
+    List<Integer> bare =
+        answer.chosen().bought().stream()
+            .map(Bought::activity)
+            .filter(i -> Ways.measure(answer.of().network(), plan(), i).isEmpty())
+            .toList();
+    if (bare.isEmpty()) {
+      return Optional.empty();
+    }
+    String of =
+        usesMeasures()
+            ? "of " + Words.list(bare.stream().map(words::id).toList(), 6)
+            : "of each activity";
+    return Optional.of(
+        new Part.Gap(
+            "Not in the case: how this time is made.",
+            "The case gives a price for "
+                + words.aUnit()
+                + " "
+                + of
+                + ", not the method, crew and hours. Add them as measures.csv or labour.csv, and this"
+                + " part names each measure with its build-up and the source of every productivity"
+                + " figure."));
+  }
+
   // By activity
 
   private Table bought() {
     boolean dated = words.hasDates();
     List<Column> columns = new ArrayList<>();
     columns.add(Column.words("Activity"));
+    if (usesMeasures()) {
+      columns.add(Column.words("Measure"));
+    }
     columns.add(Column.words(Words.capital(words.workingUnits())));
     columns.add(Column.figures("Price of " + words.aUnit()));
     columns.add(Column.figures("Cost"));
@@ -92,16 +117,8 @@ final class BoughtSection {
     for (Bought one : answer.chosen().bought()) {
       rows.add(row(one));
     }
-    rows.add(
-        new Row(
-            Row.Kind.SUM,
-            List.of(
-                Cell.of("All shortening"),
-                Cell.blank(),
-                Cell.blank(),
-                Cell.of(words.money(outcome.extraDirect())),
-                Cell.blank(),
-                Cell.blank())));
+    rows.addAll(packages());
+    rows.add(sumRow("All shortening", words.money(outcome.extraDirect()), Row.Kind.SUM));
     String gained =
         outcome.gained() > 0
             ? "The " + words.workingTimeInWords(outcome.gained()) + " gained, by activity"
@@ -112,23 +129,68 @@ final class BoughtSection {
   private Row row(Bought one) {
     Activity activity = answer.of().network().activity(one.activity());
     long now = activity.normal() - one.ticks();
+    Money extra = Ways.extra(answer.of().network(), plan(), one.activity());
     String atEnd = now == activity.crash() ? ", its shortest" : "";
     long unit = words.ticksPerUnit();
     long marks =
         one.ticks() % unit == 0 && one.ticks() / unit <= MOST_MARKS ? one.ticks() / unit : 0;
-    return new Row(
-        Row.Kind.PLAIN,
+    List<Cell> cells = new ArrayList<>();
+    cells.add(new Table.Named(Words.id(activity), Words.name(activity)));
+    if (usesMeasures()) {
+      cells.add(Cell.of(by(one.activity())));
+    }
+    cells.addAll(
         List.of(
-            new Table.Named(Words.id(activity), Words.name(activity)),
             new Table.Counted(
                 new Part.Tally(
                     (int) marks,
                     false,
                     words.figure(activity.normal()) + " to " + words.figure(now) + atEnd)),
-            Cell.of(words.money(activity.slope().times(unit))),
-            Cell.of(words.money(one.cost())),
+            Cell.of(words.money(extra.times(unit).dividedBy(one.ticks()))),
+            Cell.of(words.money(extra)),
             Cell.of(fromTo(one.activity())),
             Cell.of(onChains(one))));
+    return new Row(Row.Kind.PLAIN, cells);
+  }
+
+  private Plan plan() {
+    return answer.chosen().curve().asked().timing().plan();
+  }
+
+  private boolean usesMeasures() {
+    return plan().usesMeasures();
+  }
+
+  /** The measure and what is noted of it. */
+  private String by(int activity) {
+    return Ways.measure(answer.of().network(), plan(), activity)
+        .map(
+            measure ->
+                Words.safe(measure.name())
+                    + (measure.note().isEmpty() ? "" : " (" + Words.safe(measure.note()) + ")"))
+        .orElse("along its line");
+  }
+
+  private List<Row> packages() {
+    List<Row> rows = new ArrayList<>();
+    for (int index : plan().packages(answer.of().network())) {
+      MeasurePackage shared = answer.of().network().measures().packages().get(index);
+      rows.add(
+          sumRow(
+              "Package " + Words.safe(shared.name()) + ", paid once",
+              words.money(shared.cost()),
+              Row.Kind.PLAIN));
+    }
+    return rows;
+  }
+
+  private Row sumRow(String name, String cost, Row.Kind kind) {
+    List<Cell> cells = new ArrayList<>(List.of(Cell.of(name), Cell.blank(), Cell.blank()));
+    if (usesMeasures()) {
+      cells.add(Cell.blank());
+    }
+    cells.addAll(List.of(Cell.of(cost), Cell.blank(), Cell.blank()));
+    return new Row(kind, cells);
   }
 
   private String fromTo(int activity) {
@@ -270,8 +332,7 @@ final class BoughtSection {
                     Cell.of(left + " more steps"),
                     Cell.blank(),
                     Cell.blank(),
-                    Cell.of(
-                        "are like these, each dearer than the one before; steps.csv has them."))));
+                    Cell.of("are not shown here; steps.csv has them."))));
       }
       rows.add(row(shown.get(i)));
     }
@@ -322,7 +383,7 @@ final class BoughtSection {
     Money sum = Money.ZERO;
     for (Change change : reason.step().changes()) {
       Activity activity = answer.of().network().activity(change.activity());
-      Money share = StepWhy.share(activity, change, reason.step().ticks(), words.ticksPerUnit());
+      Money share = share(reason, change.activity());
       sum = sum.plus(share);
       addends.add(
           new Table.Addend(Words.shortId(activity), words.amount(share), change.isRelaxation()));
@@ -330,7 +391,8 @@ final class BoughtSection {
     Money price = reason.step().pricePerTick().times(words.ticksPerUnit());
     Money other = price.minus(sum);
     if (!other.isZero()) {
-      addends.add(new Table.Addend("running, sections", words.amount(other), false));
+      String name = answer.of().momentMoney().isNone() ? "packages" : "other";
+      addends.add(new Table.Addend(name, words.amount(other), false));
     }
     if (addends.size() > 8) {
       int left = addends.size() - 7;
@@ -338,6 +400,15 @@ final class BoughtSection {
       addends.add(new Table.Addend("and " + left + " more", "", false));
     }
     return new Table.AddUp(addends, words.money(price));
+  }
+
+  /** What an activity adds to the price of a unit, exactly. */
+  private Money share(StepReason reason, int activity) {
+    Network network = answer.of().network();
+    return Ways.extra(network, reason.after(), activity)
+        .minus(Ways.extra(network, reason.before(), activity))
+        .times(words.ticksPerUnit())
+        .dividedBy(reason.step().ticks());
   }
 
   private Cell chains(StepReason reason) {

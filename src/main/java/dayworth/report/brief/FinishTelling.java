@@ -132,7 +132,7 @@ final class FinishTelling {
         most = Math.max(most, MapRows.bought(answer, state(before), i));
       }
       if (now > 0) {
-        bought.add(bought(i, one.slope().times(now), now));
+        bought.add(bought(i, Ways.extra(answer.of().network(), state(s).timing().plan(), i), now));
       }
       if (most > now) {
         back.add(new Pick(i, tally(most - now, true), Money.ZERO, ""));

@@ -2,6 +2,7 @@ package dayworth.report.brief;
 
 import dayworth.decision.BriefAnswer;
 import dayworth.network.Activity;
+import dayworth.network.Measures;
 import dayworth.report.brief.page.Part;
 import dayworth.report.brief.page.Picture;
 import dayworth.report.brief.svg.Drawing;
@@ -9,6 +10,7 @@ import dayworth.report.brief.svg.Drawing.Anchor;
 import dayworth.report.brief.svg.Face;
 import dayworth.report.brief.svg.Hatch;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Map;
@@ -174,6 +176,20 @@ final class MapPicture {
     return kept;
   }
 
+  /** The most ticks that can be taken out of an activity in any way. */
+  private long most(int activity) {
+    Activity one = answer.of().network().activity(activity);
+    Measures measures = answer.of().network().measures();
+    return Arrays.stream(measures.of(activity))
+        .mapToLong(m -> one.normal() - measures.get(m).duration())
+        .reduce(one.mostShortening(), Math::max);
+  }
+
+  private int tone(int activity, long bought) {
+    int tone = (int) Math.ceil(bought * (double) TONES / Math.max(1, most(activity)));
+    return Math.min(TONES, Math.max(1, tone));
+  }
+
   /** One drawing. */
   private final class Sheet {
 
@@ -277,7 +293,7 @@ final class MapPicture {
         long bought = boughtAt(c, activity);
         boolean critical = isCritical(c, activity);
         if (bought > 0 && !(isRelaxed(c, activity) && w >= WIDE - 2)) {
-          int tone = Math.max(1, (int) Math.ceil(bought * (double) TONES / one.mostShortening()));
+          int tone = tone(activity, bought);
           rect("1o" + tone, x, top, w, CELL);
         } else if (isRelaxed(c, activity)) {
           rect("1plate", x, top, w, CELL);
@@ -289,7 +305,7 @@ final class MapPicture {
         if (isRelaxed(c, activity)) {
           rect("3rel", x + 1, top + 1, w - 2, CELL - 2);
         }
-        if (bought > 0 && bought == one.mostShortening()) {
+        if (bought > 0 && bought == most(activity)) {
           rect("2cap", x, top, w, 2.4);
         }
         if (critical) {
@@ -321,9 +337,7 @@ final class MapPicture {
         boolean told = (bought > 0 || relaxed) && (w >= WIDE || changes);
         double x = (left(c) + right(c)) / 2;
         if (told && room <= w - 1 && x - room / 2 > free) {
-          int tone =
-              Math.max(
-                  1, (int) Math.ceil(bought * (double) TONES / Math.max(1, one.mostShortening())));
+          int tone = tone(activity, bought);
           String ink = relaxed ? (w >= WIDE ? " teal" : " t" + tone) : " t" + tone;
           drawing.text("a b" + ink, Anchor.MIDDLE, x, top + 13, figure);
           free = x + room / 2;
@@ -344,7 +358,7 @@ final class MapPicture {
               .orElse(0);
       double left = axis.isNarrow() ? axis.left() : 0;
       double from = left + Math.min(widest, idRoom) + 8;
-      String price = price(one);
+      String price = price(activity);
       double priceWidth = Face.MEDIUM.width(price, 13);
       double room =
           axis.isNarrow() ? axis.width() - 10 - priceWidth - 8 - from : axis.left() - 10 - from;
@@ -362,9 +376,10 @@ final class MapPicture {
       }
     }
 
-    private String price(Activity one) {
+    private String price(int activity) {
+      Activity one = answer.of().network().activity(activity);
       if (!one.isCompressible()) {
-        return "cannot shorten";
+        return most(activity) > 0 ? "by measures" : "cannot shorten";
       }
       return words.money(one.slope().times(words.ticksPerUnit()))
           + ", up to "

@@ -3,7 +3,6 @@ package dayworth.report.brief;
 import dayworth.decision.BriefAnswer;
 import dayworth.decision.StepReason;
 import dayworth.engine.Change;
-import dayworth.network.Activity;
 import dayworth.network.Network;
 import dayworth.value.Money;
 import java.math.BigInteger;
@@ -136,6 +135,7 @@ final class StepWhy {
     return reason.chains().get(0).stream()
         .filter(i -> reason.chains().stream().allMatch(chain -> chain.contains(i)))
         .filter(i -> reason.before().duration(i) > network.activity(i).crash())
+        .filter(i -> network.measures().of(i).length == 0)
         .min(Comparator.comparing(i -> network.activity(i).slope()))
         .filter(i -> network.activity(i).slope().compareTo(price) > 0)
         .map(
@@ -196,10 +196,5 @@ final class StepWhy {
   private String ids(List<Integer> some) {
     return Words.list(
         some.stream().map(i -> network.activity(i)).map(Words::id).toList(), MOST_IDS);
-  }
-
-  /** The step's addends: what each activity adds to the price of a unit, exactly. */
-  static Money share(Activity activity, Change change, long ticks, long perUnit) {
-    return activity.slope().times(change.shortened()).times(perUnit).dividedBy(ticks);
   }
 }

@@ -3,7 +3,10 @@ package dayworth.report.brief.page;
 import java.util.ArrayList;
 import java.util.List;
 
-/** A document as Markdown with tables: the same text, its pictures told in words. */
+/**
+ * A document as Markdown with tables: the same text, its pictures told in words, without their
+ * keys.
+ */
 public final class MarkdownPage {
 
   private final StringBuilder out = new StringBuilder();
@@ -56,9 +59,6 @@ public final class MarkdownPage {
       part(beside.remark());
     } else if (part instanceof Part.Remark remark) {
       remark.parts().forEach(this::part);
-    } else if (part instanceof Part.Key key) {
-      key.marks().forEach(mark -> line("- " + text(mark.meaning())));
-      line("");
     } else if (part instanceof Part.Subheading heading) {
       block("### " + text(heading.text()));
     } else if (part instanceof Part.Statements statements) {
