@@ -114,7 +114,8 @@ final class CurvePicture {
     double top = flags.place() + 16;
     MoneyScale scale = scale(top);
     Drawing drawing = new Drawing(FinishAxis.BROAD, scale.bottom() + 20 + axis.height());
-    ground(drawing, axis, scale, top, 14);
+    Places places = linePlaces(axis, scale);
+    ground(drawing, axis, scale, top, places);
     money(drawing, axis, scale);
     flags.write(drawing, flagEnds(scale, false));
     points(drawing, axis, scale);
@@ -129,11 +130,12 @@ final class CurvePicture {
     double top = flags.place() + 14;
     MoneyScale scale = scale(top);
     Drawing drawing = new Drawing(FinishAxis.NARROW, scale.bottom() + 20 + axis.height());
-    ground(drawing, axis, scale, top, 14);
+    Places places = linePlaces(axis, scale);
+    ground(drawing, axis, scale, top, places);
     money(drawing, axis, scale);
     flags.write(drawing, flagEnds(scale, true));
     points(drawing, axis, scale);
-    namesOnLines(drawing, axis, scale);
+    namesOnLines(drawing, axis, scale, places);
     axis.below(drawing, scale.bottom() + 20);
     return drawing.svg();
   }
@@ -160,16 +162,15 @@ final class CurvePicture {
 
   /** The grid, and the column of the chosen finish. */
   private void ground(
-      Drawing drawing, FinishAxis axis, MoneyScale scale, double top, double below) {
-    axis.mark(drawing, answer.finish().duration(), top - 6, scale.bottom() - top + below + 12);
+      Drawing drawing, FinishAxis axis, MoneyScale scale, double top, Places places) {
+    axis.mark(drawing, answer.finish().duration(), top - 6, scale.bottom() - top + 26);
     drawing.line("g0", axis.left(), scale.y(0), axis.right(), scale.y(0));
-    Places lines = linePlaces(axis, scale);
     for (BigDecimal amount : scale.round(4)) {
       double y = scale.y(amount);
       drawing.line("g", axis.left(), y, axis.right(), y);
       String text = words.round(amount);
       double w = Face.MEDIUM.width(text, 12);
-      lines
+      places
           .place(
               List.of(
                   new Room(axis.left() + 3, y - 14, w, 11),
@@ -374,8 +375,8 @@ final class CurvePicture {
         new Label.Line("", words.money(wasted) + " wasted"));
   }
 
-  private void namesOnLines(Drawing drawing, FinishAxis axis, MoneyScale scale) {
-    Places places = linePlaces(axis, scale);
+  private void namesOnLines(
+      Drawing drawing, FinishAxis axis, MoneyScale scale, Places places) {
     List<MoneyLine> all = withTotal();
     Room frame = new Room(axis.left(), scale.top() - 4, axis.right() - axis.left(), PLOT + 18);
     for (MoneyLine line : all) {

@@ -5,6 +5,7 @@ import com.fasterxml.jackson.core.JsonGenerator;
 import dayworth.decision.BriefAnswer;
 import dayworth.network.Link;
 import dayworth.report.brief.page.Part;
+import dayworth.report.brief.svg.Face;
 import java.io.IOException;
 import java.io.StringWriter;
 import java.io.UncheckedIOException;
@@ -86,6 +87,7 @@ final class ExplorerData {
     json.writeObjectFieldStart("net");
     json.writeNumberField("perTick", layout.perTick());
     json.writeNumberField("left", layout.left());
+    json.writeNumberField("digit", Face.MEDIUM.width("0", 1));
     json.writeNumberField("width", layout.width());
     json.writeNumberField("height", layout.height());
     json.writeNumberField("bottom", layout.bottom());

@@ -22,6 +22,9 @@ import java.util.Set;
  */
 final class Lanes {
 
+  /** So many milestones have room beside each other. */
+  private static final int MOST_MARKS = 16;
+
   private final BriefAnswer answer;
   private final Network network;
   private final Timing chosen;
@@ -64,6 +67,8 @@ final class Lanes {
         int from = link.predecessor();
         boolean usable =
             open.contains(from)
+                && !isMilestone(from)
+                && !isMilestone(i)
                 && chosen.finish(from) <= chosen.start(i)
                 && (!critical || chosen.isCritical(from) && chosen.slack(link) == 0);
         if (usable && (before[i] < 0 || length[from] > length[before[i]])) {
@@ -82,6 +87,10 @@ final class Lanes {
     return chain;
   }
 
+  private boolean isMilestone(int activity) {
+    return chosen.plan().duration(activity) == 0;
+  }
+
   private void put(List<Integer> chain) {
     open.removeAll(chain);
     for (List<Integer> lane : lanes) {
@@ -94,7 +103,15 @@ final class Lanes {
     lanes.add(new ArrayList<>(chain));
   }
 
+  /** Milestones need room for their words on both sides, so they have lanes of their own. */
   private boolean isApart(int one, int other) {
+    if (isMilestone(one) || isMilestone(other)) {
+      return isMilestone(one)
+          && isMilestone(other)
+          && answer.states().stream()
+              .map(BriefAnswer.State::timing)
+              .allMatch(t -> Math.abs(t.start(one) - t.start(other)) * MOST_MARKS > t.finish());
+    }
     return answer.states().stream()
         .map(BriefAnswer.State::timing)
         .allMatch(

@@ -77,11 +77,15 @@
 
   var pen = document.createElement("canvas").getContext("2d");
   var widths = {};
+  pen.fontKerning = "none";
+  // Figures are all equally wide on the page, which a canvas cannot be told.
   function width(text, weight, size) {
     var key = weight + text;
     if (!(key in widths)) {
+      var letters = text.replace(/[0-9]/g, "");
       pen.font = weight + ' 100px "Dayworth Label"';
-      widths[key] = pen.measureText(text).width / 100;
+      widths[key] = pen.measureText(letters).width / 100 +
+          (text.length - letters.length) * net.digit;
     }
     return widths[key] * size;
   }
