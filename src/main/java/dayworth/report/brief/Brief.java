@@ -25,7 +25,7 @@ public final class Brief {
   private final FinishTelling telling;
   private final NetworkLayout layout;
 
-  private Brief(BriefAnswer answer) {
+  Brief(BriefAnswer answer) {
     this.answer = answer;
     this.words = new Words(answer);
     this.outcome = new Outcome(answer);
@@ -58,7 +58,7 @@ public final class Brief {
             ExplorerBar.style(axis, narrow)));
   }
 
-  private Document document() {
+  Document document() {
     Numbering numbering = new Numbering();
     HeadOfBrief head = new HeadOfBrief(answer, words, outcome);
     CurveSections curve = new CurveSections(answer, words, outcome, stretches, numbering);

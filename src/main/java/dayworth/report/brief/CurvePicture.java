@@ -375,8 +375,7 @@ final class CurvePicture {
         new Label.Line("", words.money(wasted) + " wasted"));
   }
 
-  private void namesOnLines(
-      Drawing drawing, FinishAxis axis, MoneyScale scale, Places places) {
+  private void namesOnLines(Drawing drawing, FinishAxis axis, MoneyScale scale, Places places) {
     List<MoneyLine> all = withTotal();
     Room frame = new Room(axis.left(), scale.top() - 4, axis.right() - axis.left(), PLOT + 18);
     for (MoneyLine line : all) {
