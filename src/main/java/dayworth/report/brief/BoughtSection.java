@@ -360,10 +360,10 @@ final class BoughtSection {
             Cell.of(words.figure(piece.from()) + " to " + words.figure(piece.to())),
             addUp(reason),
             chains(reason),
-            Cell.of(piece.isBought() ? because : because + " " + notBought(piece))));
+            Cell.of(piece.isBought() ? because : because + " " + notBought())));
   }
 
-  private String notBought(Piece piece) {
+  private String notBought() {
     Optional<Stretch> next =
         stretches.stream()
             .filter(stretch -> stretch.from() == answer.finish().duration())

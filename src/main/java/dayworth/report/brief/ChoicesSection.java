@@ -133,7 +133,7 @@ final class ChoicesSection {
     columns.add(Column.words(""));
     for (int i = 0; i < choices.size(); i++) {
       boolean chosen = choices.get(i).duration() == answer.finish().duration() && isPutForward(i);
-      columns.add(new Column(names.get(i), chosen ? Column.Kind.CHOSEN : Column.Kind.WORDS));
+      columns.add(new Column(names.get(i), chosen ? Column.Content.CHOSEN : Column.Content.WORDS));
     }
     List<Row> rows = new ArrayList<>();
     if (words.hasDates()) {

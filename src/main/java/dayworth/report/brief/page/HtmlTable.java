@@ -69,7 +69,7 @@ final class HtmlTable {
   }
 
   private static String attribute(Table table, int column) {
-    return switch (table.columns().get(column).kind()) {
+    return switch (table.columns().get(column).content()) {
       case WORDS -> "";
       case FIGURES -> " class=\"r\"";
       case CHOSEN -> " class=\"pickcol\"";

@@ -31,10 +31,10 @@ public record Table(String name, String caption, List<Column> columns, List<Row>
   }
 
   /** A column. */
-  public record Column(String head, Kind kind) {
+  public record Column(String head, Content content) {
 
     /** What stands in a column. */
-    public enum Kind {
+    public enum Content {
       WORDS,
       /** Below each other to the right. */
       FIGURES,
@@ -44,16 +44,16 @@ public record Table(String name, String caption, List<Column> columns, List<Row>
 
     /** A column of words. */
     public static Column words(String head) {
-      return new Column(head, Kind.WORDS);
+      return new Column(head, Content.WORDS);
     }
 
     /** A column of figures. */
     public static Column figures(String head) {
-      return new Column(head, Kind.FIGURES);
+      return new Column(head, Content.FIGURES);
     }
 
     boolean isFigure() {
-      return kind == Kind.FIGURES;
+      return content == Content.FIGURES;
     }
   }
 
