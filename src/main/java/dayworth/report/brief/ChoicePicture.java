@@ -154,7 +154,6 @@ final class ChoicePicture {
       }
     }
     Finish last = choices.get(choices.size() - 1);
-    sum = BigDecimal.ZERO;
     List<Label.Line> rest = new ArrayList<>();
     for (Piece piece : pieces(last)) {
       if (piece.amount().signum() > 0 && !told.contains(piece.name())) {

@@ -201,7 +201,7 @@ final class CurvePicture {
     for (int i = 0; i < finishes.size(); i++) {
       boolean told = !part || isTold(line, i - 1) || isTold(line, i) || isTold(line, i + 1);
       if (told) {
-        boolean begins = path.length() == 0 || part && !wasTold(line, i);
+        boolean begins = path.length() == 0 || (part && !wasTold(line, i));
         path.append(begins ? 'M' : 'L')
             .append(Drawing.n(axis.x(finishes.get(i).duration())))
             .append(' ')

@@ -11,6 +11,7 @@ import java.io.StringWriter;
 import java.io.UncheckedIOException;
 import java.util.List;
 import java.util.Map;
+import java.util.function.IntToLongFunction;
 
 /**
  * What the slider of the page tells of every finish, as JSON that can stand in a script element:
@@ -171,10 +172,10 @@ final class ExplorerData {
 
   private void frame(JsonGenerator json, NetworkFrame frame, BriefAnswer.State state)
       throws IOException {
-    array(json, "s", frame.start());
-    array(json, "e", frame.early());
-    array(json, "l", frame.late());
-    array(json, "d", frame.duration());
+    array(json, "s", frame, frame::start);
+    array(json, "e", frame, frame::early);
+    array(json, "l", frame, frame::late);
+    array(json, "d", frame, frame::duration);
     json.writeNumberField("end", frame.finish());
     if (!layout.rest().isEmpty()) {
       json.writeArrayFieldStart("r");
@@ -190,8 +191,13 @@ final class ExplorerData {
     }
   }
 
-  private static void array(JsonGenerator json, String name, long[] values) throws IOException {
-    json.writeFieldName(name);
-    json.writeArray(values, 0, values.length);
+  private static void array(
+      JsonGenerator json, String name, NetworkFrame frame, IntToLongFunction time)
+      throws IOException {
+    json.writeArrayFieldStart(name);
+    for (int b = 0; b < frame.boxes(); b++) {
+      json.writeNumber(time.applyAsLong(b));
+    }
+    json.writeEndArray();
   }
 }

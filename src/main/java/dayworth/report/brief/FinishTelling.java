@@ -1,7 +1,6 @@
 package dayworth.report.brief;
 
 import dayworth.decision.BriefAnswer;
-import dayworth.network.Activity;
 import dayworth.report.brief.page.Part;
 import dayworth.value.Money;
 import java.math.BigDecimal;
@@ -125,7 +124,6 @@ final class FinishTelling {
       if (!answer.of().isToGo(i)) {
         continue;
       }
-      Activity one = answer.of().network().activity(i);
       long now = MapRows.bought(answer, state(s), i);
       long most = now;
       for (int before = 0; before < s; before++) {

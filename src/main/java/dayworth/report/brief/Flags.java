@@ -35,7 +35,7 @@ final class Flags {
 
     boolean meets(Placed other) {
       boolean beside = right() + GAP <= other.left() || other.right() + GAP <= left();
-      return row == other.row() && !beside || cuts(other) || other.cuts(this);
+      return (row == other.row() && !beside) || cuts(other) || other.cuts(this);
     }
 
     /** Whether this one's line goes down through a lower label. */

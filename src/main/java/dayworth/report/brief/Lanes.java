@@ -59,7 +59,7 @@ final class Lanes {
     int end = -1;
     for (int position = 0; position < network.size(); position++) {
       int i = network.inOrder(position);
-      if (!open.contains(i) || critical && !chosen.isCritical(i)) {
+      if (!open.contains(i) || (critical && !chosen.isCritical(i))) {
         continue;
       }
       for (int k = 0; k < network.linksInto(i); k++) {
@@ -70,7 +70,7 @@ final class Lanes {
                 && !isMilestone(from)
                 && !isMilestone(i)
                 && chosen.finish(from) <= chosen.start(i)
-                && (!critical || chosen.isCritical(from) && chosen.slack(link) == 0);
+                && (!critical || (chosen.isCritical(from) && chosen.slack(link) == 0));
         if (usable && (before[i] < 0 || length[from] > length[before[i]])) {
           before[i] = from;
         }

@@ -23,7 +23,7 @@ final class LinkRoutes {
   }
 
   double left(int box) {
-    return layout.left() + ruler.x(frame.start()[box]) + NetworkLayout.BEFORE;
+    return layout.left() + ruler.x(frame.start(box)) + NetworkLayout.BEFORE;
   }
 
   double right(int box) {
@@ -167,12 +167,12 @@ final class LinkRoutes {
     }
     long from =
         link.relation() == Relation.FS || link.relation() == Relation.FF
-            ? frame.early()[a] + frame.duration()[a]
-            : frame.early()[a];
+            ? frame.early(a) + frame.duration(a)
+            : frame.early(a);
     long to =
         link.relation() == Relation.FF || link.relation() == Relation.SF
-            ? frame.early()[b] + frame.duration()[b]
-            : frame.early()[b];
+            ? frame.early(b) + frame.duration(b)
+            : frame.early(b);
     return to - from == link.lag();
   }
 

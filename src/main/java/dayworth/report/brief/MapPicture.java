@@ -285,7 +285,6 @@ final class MapPicture {
     }
 
     private void cells(int activity, double top) {
-      Activity one = answer.of().network().activity(activity);
       for (int c = 0; c < columns.size(); c++) {
         double air = right(c) - left(c) >= WIDE ? 1 : 0.5;
         double x = left(c) + air;
@@ -325,7 +324,6 @@ final class MapPicture {
     }
 
     private void figures(Drawing drawing, int activity, double top) {
-      Activity one = answer.of().network().activity(activity);
       double free = 0;
       for (int c = 0; c < columns.size(); c++) {
         long bought = boughtAt(c, activity);

@@ -111,11 +111,11 @@ final class NetworkPicture {
               + ": "
               + words.unit()
               + " "
-              + words.figure(frame.start()[b])
+              + words.figure(frame.start(b))
               + " to "
               + words.figure(frame.end(b))
               + ", float "
-              + words.figure(frame.late()[b] - frame.early()[b]));
+              + words.figure(frame.late(b) - frame.early(b)));
     }
     return "Activities as boxes on a scale of "
         + words.workingUnits()
@@ -261,12 +261,12 @@ final class NetworkPicture {
 
   private void floatOf(
       Drawing drawing, NetworkFrame frame, TimeRuler ruler, LinkRoutes routes, int b) {
-    long spare = frame.late()[b] - frame.early()[b];
+    long spare = frame.late(b) - frame.early(b);
     if (spare <= 0) {
       return;
     }
     double from = routes.right(b);
-    double to = layout.left() + ruler.x(frame.late()[b] + frame.duration()[b]);
+    double to = layout.left() + ruler.x(frame.late(b) + frame.duration(b));
     to = Math.min(to, layout.left() + ruler.x(frame.finish())) - NetworkLayout.AFTER;
     for (int other = 0; other < layout.shown().size(); other++) {
       if (layout.lane(other) == layout.lane(b) && routes.left(other) > from - 1) {
@@ -284,7 +284,7 @@ final class NetworkPicture {
     double w = routes.right(b) - x;
     double y = layout.top(layout.lane(b));
     boolean critical = frame.isCritical(b);
-    if (frame.duration()[b] == 0) {
+    if (frame.duration(b) == 0) {
       milestone(drawing, frame, x, y, critical, b);
       return;
     }
@@ -293,18 +293,18 @@ final class NetworkPicture {
       drawing.box("cr", x, y, w, 3);
       drawing.box("cr", x, y + NetworkLayout.BOX - 3, w, 3);
     }
-    long d = frame.duration()[b];
-    drawing.text("a", Anchor.START, x + 4, y + 13.5, words.figure(frame.early()[b]));
-    drawing.text("a", Anchor.END, x + w - 4, y + 13.5, words.figure(frame.early()[b] + d));
-    drawing.text("a", Anchor.START, x + 4, y + 53.5, words.figure(frame.late()[b]));
-    drawing.text("a", Anchor.END, x + w - 4, y + 53.5, words.figure(frame.late()[b] + d));
+    long d = frame.duration(b);
+    drawing.text("a", Anchor.START, x + 4, y + 13.5, words.figure(frame.early(b)));
+    drawing.text("a", Anchor.END, x + w - 4, y + 13.5, words.figure(frame.early(b) + d));
+    drawing.text("a", Anchor.START, x + 4, y + 53.5, words.figure(frame.late(b)));
+    drawing.text("a", Anchor.END, x + w - 4, y + 53.5, words.figure(frame.late(b) + d));
     drawing.text("a b", Anchor.MIDDLE, x + w / 2, y + 13.5, Words.shortId(layout.activity(b)));
-    String spare = words.figure(frame.late()[b] - frame.early()[b]);
+    String spare = words.figure(frame.late(b) - frame.early(b));
     double room =
         w
             - 20
-            - Face.MEDIUM.width(words.figure(frame.late()[b]), SIZE)
-            - Face.MEDIUM.width(words.figure(frame.late()[b] + d), SIZE);
+            - Face.MEDIUM.width(words.figure(frame.late(b)), SIZE)
+            - Face.MEDIUM.width(words.figure(frame.late(b) + d), SIZE);
     boolean wide = Face.MEDIUM.width("float " + spare, SIZE) <= room;
     drawing.text("a", Anchor.MIDDLE, x + w / 2, y + 53.5, wide ? "float " + spare : spare);
     name(drawing, x + w / 2, y, w - 8, Words.name(layout.activity(b)));
@@ -326,7 +326,7 @@ final class NetworkPicture {
         critical ? "ms msc" : "ms",
         "M" + Drawing.n(x + 4) + " " + Drawing.n(middle - 9) + "l7 9l-7 9l-7 -9z");
     drawing.text("a b", Anchor.MIDDLE, x + 4, y + 13.5, Words.shortId(layout.activity(b)));
-    drawing.text("a", Anchor.MIDDLE, x + 4, y + 53.5, words.figure(frame.early()[b]));
+    drawing.text("a", Anchor.MIDDLE, x + 4, y + 53.5, words.figure(frame.early(b)));
   }
 
   /** A notch for each unit that is bought, a hollow one for each that is given back. */
@@ -357,7 +357,7 @@ final class NetworkPicture {
   }
 
   private long bought(int state, int b) {
-    return layout.activity(b).normal() - layout.frame(state).duration()[b];
+    return layout.activity(b).normal() - layout.frame(state).duration(b);
   }
 
   /** Ticks that are bought at some longer finish and no more at this one. */

@@ -27,12 +27,10 @@ final class RestsSection {
   private static final int MOST_LINKS = 5;
   private static final int MOST_WARNINGS = 8;
 
-  private final BriefAnswer answer;
   private final Case of;
   private final Words words;
 
   RestsSection(BriefAnswer answer, Words words) {
-    this.answer = answer;
     this.of = answer.of();
     this.words = words;
   }

@@ -121,8 +121,7 @@ final class StepWhy {
     }
     return Optional.of(
         ids(shortened)
-            + (shortened.size() == 2 ? " together" : " together")
-            + " do it, and nothing else does it for less."
+            + " together do it, and nothing else does it for less."
             + common(reason).map(text -> " " + text).orElse(""));
   }
 

@@ -29,7 +29,7 @@ final class TimeRuler {
     all.add(0L);
     all.add(frame.finish());
     for (int b = 0; b < least.length; b++) {
-      all.add(frame.start()[b]);
+      all.add(frame.start(b));
       all.add(frame.end(b));
     }
     times = all.stream().mapToLong(Long::longValue).toArray();
@@ -37,8 +37,8 @@ final class TimeRuler {
     for (int k = 1; k < times.length; k++) {
       xs[k] = xs[k - 1] + Math.max(LEAST, (times[k] - times[k - 1]) * perTick);
       for (int b = 0; b < least.length; b++) {
-        if (frame.end(b) == times[k] && frame.duration()[b] > 0) {
-          xs[k] = Math.max(xs[k], xs[index(frame.start()[b])] + least[b]);
+        if (frame.end(b) == times[k] && frame.duration(b) > 0) {
+          xs[k] = Math.max(xs[k], xs[index(frame.start(b))] + least[b]);
         }
       }
     }

@@ -124,8 +124,14 @@ class BriefTextTest {
             + "extension,3\n");
     write(
         "notes.md",
-        "# What is asked\nAgree by return.\n# What we need\n- The berth closed\n"
-            + "# Assumptions\n- Dry weather\n");
+        """
+        # What is asked
+        Agree by return.
+        # What we need
+        - The berth closed
+        # Assumptions
+        - Dry weather
+        """);
     Document document = document(Briefs.of(folder));
     String said = all(document);
     for (String text :
@@ -199,8 +205,14 @@ class BriefTextTest {
     write("activities.csv", rows.toString());
     write(
         "terms.csv",
-        "term,value\ntime_related_cost,4000\nstart_date,2027-01-11\ncontract_finish,2027-06-01\n"
-            + "damages_rate,900\ndamages_per,calendar_day\n");
+        """
+        term,value
+        time_related_cost,4000
+        start_date,2027-01-11
+        contract_finish,2027-06-01
+        damages_rate,900
+        damages_per,calendar_day
+        """);
     BriefAnswer answer = Briefs.of(folder);
     assertTrue(answer.states().size() > 40, "finishes: " + answer.states().size());
     int size = Briefs.html(answer).getBytes(StandardCharsets.UTF_8).length;
@@ -217,9 +229,11 @@ class BriefTextTest {
   void theDataCannotEndItsScript() throws IOException {
     write(
         "activities.csv",
-        "id,name,normal_duration,normal_cost\n"
-            + "</script>,<!--<script>alert(1)//,5,100\n"
-            + "\"a\"\"b'&\",x\u2028y\u2029z\u202Eend,4,100\n");
+        """
+        id,name,normal_duration,normal_cost
+        </script>,<!--<script>alert(1)//,5,100
+        "a""b'&",x\u2028y\u2029z\u202Eend,4,100
+        """);
     String html = Briefs.html(Briefs.of(folder));
     int begin = html.indexOf("id=\"states\">") + "id=\"states\">".length();
     String json = html.substring(begin, html.indexOf("</script>", begin));

@@ -310,7 +310,7 @@ class BrowserTest {
       press("End");
       assertEquals(List.of(), browser.run(OVERLAPS), name + " at " + width + ", shortest");
       assertEquals(
-          Boolean.TRUE,
+          true,
           browser.run("return document.documentElement.scrollWidth <= window.innerWidth;"),
           name + " is no wider than the screen");
     }

@@ -65,7 +65,7 @@ class DrawingPartsTest {
       long finish = 1;
       for (int b = 0; b < boxes; b++) {
         start[b] = random.nextInt(60);
-        duration[b] = 1 + random.nextInt(20);
+        duration[b] = 1L + random.nextInt(20);
         least[b] = 20 + random.nextInt(60);
         finish = Math.max(finish, start[b] + duration[b]);
       }
@@ -77,7 +77,7 @@ class DrawingPartsTest {
         before = ruler.x(time);
       }
       for (int b = 0; b < boxes; b++) {
-        double room = ruler.x(frame.end(b)) - ruler.x(start[b]);
+        double room = ruler.x(frame.end(b)) - ruler.x(frame.start(b));
         assertTrue(room >= least[b] - 1e-9, "seed " + seed + ", box " + b);
       }
     }

@@ -97,7 +97,7 @@ public final class HtmlPage {
     text.codePoints()
         .forEach(
             c -> {
-              boolean plain = Character.isLetterOrDigit(c) && c < 128 || c == ' ' || c == ',';
+              boolean plain = (Character.isLetterOrDigit(c) && c < 128) || c == ' ' || c == ',';
               css.append(plain ? Character.toString(c) : String.format("\\%06X", c));
             });
     return css.append('"').toString();

@@ -7,9 +7,9 @@ import java.io.InputStreamReader;
 import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
-import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.Collectors;
 
 /**
  * The label face of the page, Barlow Semi Condensed, in one weight: how wide words are. The widths
@@ -26,40 +26,44 @@ public enum Face {
   private static final double UNKNOWN = 1000;
 
   private final int column;
-  private final Map<Integer, Integer> widths = new HashMap<>();
 
   Face(int column) {
     this.column = column;
   }
 
-  private void load() {
-    try (InputStream file = Face.class.getResourceAsStream(WIDTHS);
-        BufferedReader lines =
-            new BufferedReader(new InputStreamReader(file, StandardCharsets.US_ASCII))) {
-      lines
-          .lines()
-          .skip(1)
-          .map(line -> line.split(",", -1))
-          .forEach(
-              cells -> widths.put(Integer.parseInt(cells[0], 16), Integer.parseInt(cells[column])));
-    } catch (IOException e) {
-      throw new UncheckedIOException(e);
+  /** The widths of all faces, read when they are first needed. */
+  private static final class Widths {
+
+    private static final Map<Integer, String[]> ALL = read();
+
+    private static Map<Integer, String[]> read() {
+      try (InputStream file = Face.class.getResourceAsStream(WIDTHS);
+          BufferedReader lines =
+              new BufferedReader(new InputStreamReader(file, StandardCharsets.US_ASCII))) {
+        return lines
+            .lines()
+            .skip(1)
+            .map(line -> line.split(",", -1))
+            .collect(
+                Collectors.toUnmodifiableMap(
+                    cells -> Integer.parseInt(cells[0], 16), cells -> cells));
+      } catch (IOException e) {
+        throw new UncheckedIOException(e);
+      }
     }
   }
 
   /** Pixels at a size in pixels. */
   public double width(String text, double size) {
-    synchronized (widths) {
-      if (widths.isEmpty()) {
-        load();
-      }
-      double sum = 0;
-      for (int i = 0; i < text.length(); i = text.offsetByCodePoints(i, 1)) {
-        Integer width = widths.get(text.codePointAt(i));
-        sum += width == null ? UNKNOWN : width;
-      }
-      return sum * size / PER_EM;
-    }
+    double sum =
+        text.codePoints()
+            .mapToDouble(
+                c ->
+                    Widths.ALL.containsKey(c)
+                        ? Double.parseDouble(Widths.ALL.get(c)[column])
+                        : UNKNOWN)
+            .sum();
+    return sum * size / PER_EM;
   }
 
   /** The text, or as much of its beginning as fits with an ellipsis. */
