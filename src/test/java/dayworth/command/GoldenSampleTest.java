@@ -16,8 +16,8 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 
 /**
- * The results kept in output/ are what the program writes today: tables byte by byte. Pictures
- * depend on the machine's fonts, so of them only the names are compared.
+ * The results kept in output/ are what the program writes today: tables and the brief byte by byte.
+ * Pictures depend on the machine's fonts, so of them only the names are compared.
  */
 class GoldenSampleTest {
 
@@ -27,12 +27,25 @@ class GoldenSampleTest {
   void theKeptResultsAreWhatTheProgramWrites(@TempDir Path folder)
       throws IOException, InterruptedException {
     Path written = folder.resolve("results");
+    run(folder, written, "curve");
+    run(folder, written, "brief");
+    assertEquals(files(KEPT), files(written));
+    for (String name : files(KEPT)) {
+      if (name.endsWith(".csv") || name.endsWith(".json") || name.endsWith(".html")) {
+        assertEquals(
+            Files.readString(KEPT.resolve(name)), Files.readString(written.resolve(name)), name);
+      }
+    }
+  }
+
+  private static void run(Path folder, Path written, String command)
+      throws IOException, InterruptedException {
     Process process =
         new ProcessBuilder(
                 Path.of(System.getProperty("java.home"), "bin", "java").toString(),
                 "-jar",
                 Path.of("target", "dayworth.jar").toString(),
-                "curve",
+                command,
                 Path.of("cases", "ferry-berth-core").toString(),
                 "--quiet",
                 "--out",
@@ -42,13 +55,6 @@ class GoldenSampleTest {
             .start();
     assertTrue(process.waitFor(2, TimeUnit.MINUTES), "the program ends");
     assertEquals(0, process.exitValue(), Files.readString(folder.resolve("said.txt")));
-    assertEquals(files(KEPT), files(written));
-    for (String name : files(KEPT)) {
-      if (name.endsWith(".csv") || name.endsWith(".json")) {
-        assertEquals(
-            Files.readString(KEPT.resolve(name)), Files.readString(written.resolve(name)), name);
-      }
-    }
   }
 
   @Test

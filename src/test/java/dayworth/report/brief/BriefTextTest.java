@@ -232,8 +232,9 @@ class BriefTextTest {
         """
         id,name,normal_duration,normal_cost
         </script>,<!--<script>alert(1)//,5,100
-        "a""b'&",x\u2028y\u2029z\u202Eend,4,100
-        """);
+        "a""b'&",%s,4,100
+        """
+            .formatted("x\u2028y\u2029z\u202Eend"));
     String html = Briefs.html(Briefs.of(folder));
     int begin = html.indexOf("id=\"states\">") + "id=\"states\">".length();
     String json = html.substring(begin, html.indexOf("</script>", begin));

@@ -216,7 +216,7 @@ class BrowserTest {
         "id,name,group,normal_duration,normal_cost,crash_duration,crash_cost,predecessors\n"
             + "<img src=x onerror=bad()>,</script><script>bad()</script>,\"\"\"><svg"
             + " onload=bad()>\",5,100,3,300,\n"
-            + "b&amp;'\"\"`${bad()},\u202Eevil\u2066 \u05E9\u05DC\u05D5\u05DD,<!--,4,100,2,200,<img"
+            + "b&amp'\"\"`${bad()},\u202Eevil\u2066 \u05E9\u05DC\u05D5\u05DD,<!--,4,100,2,200,<img"
             + " src=x onerror=bad()>\n");
     Files.writeString(
         hostile.resolve("terms.csv"),

@@ -66,9 +66,9 @@ final class HtmlParts {
   }
 
   private void remark(Part.Remark remark) {
-    line("<aside class=\"note\" aria-label=\"" + html(remark.label()) + "\">");
+    line("<div class=\"note\" role=\"note\" aria-label=\"" + html(remark.label()) + "\">");
     remark.parts().forEach(this::write);
-    line("</aside>");
+    line("</div>");
   }
 
   private void key(Part.Key key) {
