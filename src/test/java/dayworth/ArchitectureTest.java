@@ -36,6 +36,8 @@ class ArchitectureTest {
         .definedBy("dayworth.engine..")
         .layer("contract")
         .definedBy("dayworth.contract")
+        .layer("buildup")
+        .definedBy("dayworth.buildup")
         .layer("decision")
         .definedBy("dayworth.decision")
         .layer("casefile")
@@ -52,6 +54,8 @@ class ArchitectureTest {
         .mayOnlyBeAccessedByLayers("command")
         .whereLayer("decision")
         .mayOnlyBeAccessedByLayers("casefile", "report", "command")
+        .whereLayer("buildup")
+        .mayOnlyBeAccessedByLayers("decision", "casefile", "report", "command")
         .whereLayer("contract")
         .mayOnlyBeAccessedByLayers("decision", "casefile", "report", "command")
         .whereLayer("engine")
@@ -59,6 +63,17 @@ class ArchitectureTest {
         .whereLayer("network")
         .mayOnlyBeAccessedByLayers(
             "engine", "contract", "decision", "casefile", "report", "command")
+        .check(CLASSES);
+  }
+
+  @Test
+  void theBuildUpKnowsNothingButValues() {
+    noClasses()
+        .that()
+        .resideInAPackage("dayworth.buildup")
+        .should()
+        .dependOnClassesThat()
+        .resideInAnyPackage("dayworth.network..", "dayworth.engine..", "dayworth.contract..")
         .check(CLASSES);
   }
 

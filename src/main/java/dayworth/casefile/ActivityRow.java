@@ -21,4 +21,21 @@ record ActivityRow(
     Optional<BigDecimal> crashCost,
     boolean divisible,
     Optional<Moment> notBefore,
-    List<String> predecessors) {}
+    List<String> predecessors) {
+
+  /** The same activity with another normal duration and cost. */
+  ActivityRow withNormal(BigDecimal duration, BigDecimal cost) {
+    return new ActivityRow(
+        line,
+        id,
+        name,
+        group,
+        Optional.of(duration),
+        Optional.of(cost),
+        crash,
+        crashCost,
+        divisible,
+        notBefore,
+        predecessors);
+  }
+}

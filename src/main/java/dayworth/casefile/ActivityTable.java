@@ -7,6 +7,7 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.Predicate;
 
 /** Reads activities.csv. */
 final class ActivityTable {
@@ -26,22 +27,29 @@ final class ActivityTable {
           Column.optional("predecessors"),
           Column.optional("not_before").withNumbers());
 
+  private final Predicate<String> mayBeBlank;
   private final Findings findings;
   private final Map<String, Integer> lineById = new HashMap<>();
   private final CrashRules crashRules;
 
-  private ActivityTable(Table table, Findings findings) {
+  private ActivityTable(Table table, Predicate<String> mayBeBlank, Findings findings) {
+    this.mayBeBlank = mayBeBlank;
     this.findings = findings;
     crashRules = CrashRules.ofActivities(table, findings);
   }
 
-  /** The rows; empty where they have no ids that links could name. */
-  static Optional<List<ActivityRow>> read(String text, Findings findings) {
+  /**
+   * The rows; empty where they have no ids that links could name.
+   *
+   * @param mayBeBlank whether the normal duration and cost of an activity, by its id, may be blank
+   */
+  static Optional<List<ActivityRow>> read(
+      String text, Predicate<String> mayBeBlank, Findings findings) {
     Optional<Table> table = Table.of(FILE, text, COLUMNS, findings);
     if (table.isEmpty()) {
       return Optional.empty();
     }
-    List<ActivityRow> rows = new ActivityTable(table.get(), findings).rows(table.get());
+    List<ActivityRow> rows = new ActivityTable(table.get(), mayBeBlank, findings).rows(table.get());
     if (rows.isEmpty() && table.get().misfits().isEmpty()) {
       findings.problem(Place.whole(FILE).notice("no activity", "a header only", "a row for each"));
     }
@@ -97,8 +105,8 @@ final class ActivityTable {
   }
 
   private ActivityRow row(Table table, Row row, String id) {
-    Cell<BigDecimal> normal = table.needed(row, "normal_duration", TimeCell.DURATION, findings);
-    Cell<BigDecimal> cost = table.needed(row, "normal_cost", MoneyCell.AMOUNT, findings);
+    Cell<BigDecimal> normal = normal(table, row, id, "normal_duration", TimeCell.DURATION);
+    Cell<BigDecimal> cost = normal(table, row, id, "normal_cost", MoneyCell.AMOUNT);
     Cell<BigDecimal> crash = table.cell(row, "crash_duration", TimeCell.DURATION, findings);
     Cell<BigDecimal> crashCost = table.cell(row, "crash_cost", MoneyCell.AMOUNT, findings);
     Cell<Boolean> divisible = table.cell(row, "divisible", WordCell.YES_OR_NO, findings);
@@ -116,6 +124,13 @@ final class ActivityTable {
         divisible.value().orElse(true),
         notBefore.value(),
         ids(table.text(row, "predecessors")));
+  }
+
+  private Cell<BigDecimal> normal(
+      Table table, Row row, String id, String column, CellParser<BigDecimal> parser) {
+    return mayBeBlank.test(id)
+        ? table.cell(row, column, parser, findings)
+        : table.needed(row, column, parser, findings);
   }
 
   private static List<String> ids(String cell) {

@@ -28,11 +28,12 @@ final class CaseFolder {
           ProgressTable.FILE,
           SectionTable.FILE,
           RunningTable.FILE,
+          LabourTable.FILE,
+          PatternTable.FILE,
+          PayTable.FILE,
+          LossTable.FILE,
           MeasureTable.FILE,
           PackageTable.FILE);
-
-  private static final Set<String> NOT_YET =
-      Set.of("labour.csv", "patterns.csv", "pay.csv", "output_loss.csv");
 
   /** No figure hangs on these, so that results do not carry their digests. */
   private static final Set<String> BESIDE = Set.of(NotesText.FILE);
@@ -53,7 +54,7 @@ final class CaseFolder {
 
   /** Digests of all files of the contract that a result can hang on, also of unsound ones. */
   List<InputFile> digests() {
-    Stream.concat(SERVED.stream(), NOT_YET.stream()).sorted().forEach(this::text);
+    SERVED.stream().sorted().forEach(this::text);
     return inputs;
   }
 
@@ -82,12 +83,9 @@ final class CaseFolder {
   }
 
   private void checkName(String name) {
-    if (NOT_YET.contains(name)) {
-      findings.problem(
-          Place.whole(name).notice("is not served yet", "", "take it out of the folder"));
-    } else if (!SERVED.contains(name) && !LEFT_ALONE.contains(name) && !BESIDE.contains(name)) {
+    if (!SERVED.contains(name) && !LEFT_ALONE.contains(name) && !BESIDE.contains(name)) {
       List<String> known = new ArrayList<>(SERVED);
-      Stream.of(NOT_YET, LEFT_ALONE, BESIDE).flatMap(Set::stream).sorted().forEach(known::add);
+      Stream.of(LEFT_ALONE, BESIDE).flatMap(Set::stream).sorted().forEach(known::add);
       new Nearest(known)
           .to(name)
           .filter(near -> name.length() > 4)

@@ -1,5 +1,6 @@
 package dayworth.casefile;
 
+import dayworth.buildup.BuildUp;
 import dayworth.contract.MomentMoney;
 import dayworth.decision.Case;
 import dayworth.decision.InputFile;
@@ -9,11 +10,9 @@ import dayworth.decision.Submission;
 import dayworth.decision.WorkToGo;
 import dayworth.network.Activity;
 import dayworth.network.Link;
-import dayworth.network.Measure;
-import dayworth.network.MeasurePackage;
-import dayworth.network.Measures;
 import dayworth.network.Network;
 import dayworth.value.Money;
+import dayworth.value.Quantity;
 import dayworth.value.TimeScale;
 import java.math.BigDecimal;
 import java.nio.file.Path;
@@ -40,7 +39,17 @@ public final class CaseReader {
    * @param atLeast the time scale is at least as fine as this
    */
   public static Reading read(Path path, TimeScale atLeast) {
-    return new CaseReader(path).read(atLeast);
+    return read(path, atLeast, Quantity.ONE);
+  }
+
+  /**
+   * Reads a folder.
+   *
+   * @param atLeast the time scale is at least as fine as this
+   * @param lossFactor what all losses of output are multiplied by; 0 or more
+   */
+  public static Reading read(Path path, TimeScale atLeast, Quantity lossFactor) {
+    return new CaseReader(path).read(atLeast, lossFactor);
   }
 
   /** The files of the contract in a folder with their digests, sound or not. */
@@ -48,33 +57,46 @@ public final class CaseReader {
     return new CaseReader(path).folder.digests();
   }
 
-  private Reading read(TimeScale atLeast) {
+  private Reading read(TimeScale atLeast, Quantity lossFactor) {
     folder.checkNames();
     Optional<String> activityText = folder.text(ActivityTable.FILE);
     Optional<String> holidayText = folder.text(HolidayTable.FILE);
+    Optional<String> labourText = folder.text(LabourTable.FILE);
     Optional<String> linkText = folder.text(LinkTable.FILE);
+    Optional<String> lossText = folder.text(LossTable.FILE);
     Optional<String> measureText = folder.text(MeasureTable.FILE);
     Optional<String> packageText = folder.text(PackageTable.FILE);
+    Optional<String> patternText = folder.text(PatternTable.FILE);
+    Optional<String> payText = folder.text(PayTable.FILE);
     Optional<String> progressText = folder.text(ProgressTable.FILE);
     Optional<String> runningText = folder.text(RunningTable.FILE);
     Optional<String> sectionText = folder.text(SectionTable.FILE);
     Optional<String> termText = folder.text(TermsTable.FILE);
     Optional<String> noteText = folder.textBeside(NotesText.FILE);
-    Optional<List<ActivityRow>> known =
-        activityText.flatMap(text -> ActivityTable.read(text, findings));
-    List<LinkRow> links = LinkTable.read(known, linkText, findings);
     TermsTable terms = TermsTable.read(termText, findings);
+    LabourTable labour = LabourTable.of(labourText, findings);
+    Optional<List<ActivityRow>> stated =
+        activityText.flatMap(text -> ActivityTable.read(text, labour::mayGive, findings));
+    ActivityIds ids = new ActivityIds(stated, findings);
+    LabourFiles.Texts patternTexts = new LabourFiles.Texts(patternText, payText, lossText);
+    LabourFiles files = LabourFiles.read(labour, ids, patternTexts, lossFactor, findings);
+    CaseBuildUp built = CaseBuildUp.of(files, terms, findings);
+    Optional<List<ActivityRow>> known = stated.map(built::filled);
+    List<LinkRow> links = LinkTable.read(known, linkText, findings);
     List<LocalDate> holidays = HolidayTable.read(holidayText, findings);
     DateRules.check(known.orElse(List.of()), holidays, terms, findings);
     Notes notes = noteText.map(text -> NotesText.read(text, findings)).orElse(Notes.NONE);
     List<ProgressRow> progress = ProgressTable.read(known, progressText, findings);
-    ActivityIds ids = new ActivityIds(known, findings);
     List<SectionRow> sections = SectionTable.read(ids, terms, sectionText, findings);
     List<RunningRow> running = RunningTable.read(ids, terms, runningText, findings);
     PackageTable packages = PackageTable.read(packageText, findings);
     List<MeasureRow> measures = MeasureTable.read(ids, packages, measureText, findings);
     packages.reportUnused(measures);
     ProgressDates.check(progress, folder.has(ProgressTable.FILE), terms, findings);
+    if (findings.hasProblems()) {
+      return new Reading.Unsound(findings.problems(), findings.warnings());
+    }
+    BuildUp buildUp = built.build(stated.orElseThrow(), known.orElseThrow(), progress, lossFactor);
     if (findings.hasProblems()) {
       return new Reading.Unsound(findings.problems(), findings.warnings());
     }
@@ -90,6 +112,7 @@ public final class CaseReader {
             measures,
             packages,
             notes,
+            buildUp,
             atLeast);
     if (findings.hasProblems()) {
       return new Reading.Unsound(findings.problems(), findings.warnings());
@@ -108,9 +131,12 @@ public final class CaseReader {
       List<MeasureRow> measures,
       PackageTable packages,
       Notes notes,
+      BuildUp buildUp,
       TimeScale atLeast) {
     TimeScale scale =
-        Resolution.of(activities, links, terms, rows, sections, measures).and(atLeast);
+        Resolution.of(activities, links, terms, rows, sections, measures)
+            .and(CaseBuildUp.scale(buildUp))
+            .and(atLeast);
     CaseCalendar times = CaseCalendar.of(terms, holidays, scale);
     Network planned =
         new Network(
@@ -118,7 +144,7 @@ public final class CaseReader {
             activities.stream().map(row -> activity(row, times)).toList(),
             links.stream().map(row -> link(row, scale)).toList(),
             List.of(),
-            measures(measures, packages, scale));
+            CaseMeasures.of(measures, packages, buildUp, scale, findings));
     Optional<Progress> progress = CaseProgress.of(activities, rows, terms, times);
     WorkToGo work = WorkToGo.of(planned, progress);
     MomentMoney money = CaseMoney.of(sections, running, terms, times, progress);
@@ -146,6 +172,7 @@ public final class CaseReader {
         ContractTerms.of(terms, times),
         money,
         progress,
+        buildUp,
         findings.warnings(),
         folder.inputs(),
         submission(terms, notes));
@@ -185,25 +212,6 @@ public final class CaseReader {
         row.notBefore().map(times::start).orElse(0L),
         0,
         row.divisible());
-  }
-
-  private static Measures measures(List<MeasureRow> rows, PackageTable packages, TimeScale scale) {
-    return new Measures(
-        rows.stream()
-            .map(
-                row ->
-                    new Measure(
-                        row.activity(),
-                        row.measure(),
-                        scale.ticks(row.duration()),
-                        Money.of(row.cost()),
-                        row.inPackage(),
-                        row.ofRemaining(),
-                        row.note()))
-            .toList(),
-        packages.rows().stream()
-            .map(row -> new MeasurePackage(row.name(), Money.of(row.cost())))
-            .toList());
   }
 
   private static Link link(LinkRow row, TimeScale scale) {

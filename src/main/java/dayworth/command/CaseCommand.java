@@ -9,6 +9,7 @@ import dayworth.report.NoticeText;
 import dayworth.report.ResultSet;
 import dayworth.report.ResultsNotWritten;
 import dayworth.report.Style;
+import dayworth.value.Quantity;
 import dayworth.value.TimeScale;
 import java.io.PrintWriter;
 import java.nio.file.Path;
@@ -48,11 +49,16 @@ abstract class CaseCommand implements Callable<Integer> {
   /** How fine the time scale must be for the question. */
   abstract TimeScale finest();
 
+  /** What all losses of output are multiplied by. */
+  Quantity lossFactor() {
+    return Quantity.ONE;
+  }
+
   abstract int answer(Case read) throws ResultsNotWritten;
 
   @Override
   public Integer call() {
-    Reading reading = CaseReader.read(folder, finest());
+    Reading reading = CaseReader.read(folder, finest(), lossFactor());
     if (reading instanceof Reading.Unsound unsound) {
       print(err(), NoticeText.problems(unsound.problems(), target(name()).toString(), style()));
       return Exit.BAD_INPUT;

@@ -18,6 +18,7 @@ import picocli.CommandLine.Spec;
       MeetCommand.class,
       WeighCommand.class,
       BriefCommand.class,
+      BuildUpCommand.class,
       VerifyCommand.class
     })
 final class Dayworth implements Runnable {

@@ -18,6 +18,7 @@ import java.util.Optional;
 import java.util.SortedSet;
 import java.util.function.BiFunction;
 import java.util.function.BooleanSupplier;
+import java.util.function.IntToLongFunction;
 import java.util.stream.IntStream;
 
 /**
@@ -33,7 +34,7 @@ final class BranchedPlans implements CheapestPlans {
 
   private final Network network;
   private final List<Charge> charges;
-  private final long nodesPerFinish;
+  private final IntToLongFunction nodesFor;
   private final BooleanSupplier isOver;
   private final List<Point> points;
   private final Curve curve;
@@ -43,7 +44,7 @@ final class BranchedPlans implements CheapestPlans {
    * Solves every finish.
    *
    * @param network with the convex money as spans
-   * @param nodesPerFinish relaxations that are solved for each finish on average
+   * @param nodesFor how many relaxations are solved for so many finishes together
    * @param isOver whether to stop before that
    * @param bare the same network without them: its curve tells what stops the project
    * @param rows from the longest and the shortest finish to all that are to be solved, from long to
@@ -54,11 +55,11 @@ final class BranchedPlans implements CheapestPlans {
       Network network,
       List<Charge> charges,
       Curve bare,
-      long nodesPerFinish,
+      IntToLongFunction nodesFor,
       BooleanSupplier isOver,
       BiFunction<Long, Long, SortedSet<Long>> rows,
       Watcher watcher) {
-    this.nodesPerFinish = nodesPerFinish;
+    this.nodesFor = nodesFor;
     this.isOver = isOver;
     this.network = network;
     this.charges = charges;
@@ -101,7 +102,7 @@ final class BranchedPlans implements CheapestPlans {
   private List<Point> solve(long[] durations) {
     try {
       return Branching.solve(
-          network, charges, durations, nodesPerFinish * durations.length, isOver);
+          network, charges, durations, nodesFor.applyAsLong(durations.length), isOver);
     } catch (Branching.BoundRefuted refuted) {
       throw new ProofFailed(
           "the finish at " + network.scale().text(refuted.duration()), refuted.getMessage());

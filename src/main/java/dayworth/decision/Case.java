@@ -1,5 +1,6 @@
 package dayworth.decision;
 
+import dayworth.buildup.BuildUp;
 import dayworth.contract.Due;
 import dayworth.contract.MomentMoney;
 import dayworth.contract.Terms;
@@ -24,6 +25,7 @@ import java.util.stream.IntStream;
  * @param terms what time is worth for the whole
  * @param momentMoney sections and running costs
  * @param progress how far the work is; empty where time counts from the start
+ * @param buildUp what working patterns buy in the activities whose labour is known
  * @param warnings doubtful input, sorted; they stand in every result
  * @param inputs the files it was read from, sorted by name
  * @param submission the paper in which it is put before a client
@@ -37,6 +39,7 @@ public record Case(
     Terms terms,
     MomentMoney momentMoney,
     Optional<Progress> progress,
+    BuildUp buildUp,
     List<Notice> warnings,
     List<InputFile> inputs,
     Submission submission) {
@@ -91,6 +94,7 @@ public record Case(
         terms,
         MomentMoney.none(network.scale()),
         Optional.empty(),
+        BuildUp.NONE,
         warnings,
         inputs);
   }
@@ -157,6 +161,7 @@ public record Case(
         terms.dueBy(due),
         momentMoney,
         progress,
+        buildUp,
         warnings,
         inputs,
         submission);

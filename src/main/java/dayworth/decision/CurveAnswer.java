@@ -24,6 +24,8 @@ import java.util.Optional;
  * @param unproved the rest, each with what is known of it; empty where all money is convex
  * @param isCut whether the search for proofs was ended by the clock
  * @param crossCheck the linear programme's agreement
+ * @param relaxed what direct cost would be at least if every measure could be taken in part, for
+ *     every finish; empty where there are no choices
  * @param evidence what rechecks it
  */
 public record CurveAnswer(
@@ -40,6 +42,7 @@ public record CurveAnswer(
     List<Unproved> unproved,
     boolean isCut,
     CrossCheck crossCheck,
+    Optional<Curve> relaxed,
     Evidence evidence) {
 
   public CurveAnswer {
@@ -74,6 +77,7 @@ public record CurveAnswer(
         unproved,
         isCut,
         crossCheck,
+        relaxed,
         evidence);
   }
 

@@ -69,7 +69,8 @@ final class CurveCounting {
       CrossCheck crossCheck,
       long slopeUnits,
       Optional<List<List<Flow.Entry>>> flows,
-      boolean isCut) {
+      boolean isCut,
+      Optional<Curve> relaxed) {
     NavigableSet<Long> durations = durations(of, curve.longest(), curve.shortest());
     curve.steps().forEach(step -> durations.add(step.to()));
     List<Finish> rows = finishes(durations.descendingSet());
@@ -98,6 +99,7 @@ final class CurveCounting {
         unproved,
         isCut,
         crossCheck,
+        relaxed,
         new Evidence(slopeUnits, flows, counted, asPlanned, crashEverything));
   }
 
@@ -177,7 +179,12 @@ final class CurveCounting {
     for (int k = 0; k < curve.steps().size(); k++) {
       Step step = curve.steps().get(k);
       Timing after = Timing.by(network, curve.planAfter(k + 1), step.to());
-      facts.add(new StepFacts(step, of.criticalCount(after), newlyCritical(before, after)));
+      facts.add(
+          new StepFacts(
+              step,
+              PlanChange.between(network, before.plan(), after.plan()),
+              of.criticalCount(after),
+              newlyCritical(before, after)));
       before = after;
     }
     return facts;

@@ -8,6 +8,7 @@ import dayworth.network.Network;
 import dayworth.network.Plan;
 import java.util.List;
 import java.util.NavigableSet;
+import java.util.Optional;
 import java.util.OptionalLong;
 import java.util.SortedSet;
 
@@ -21,6 +22,9 @@ public final class CurveQuestion {
   private final Watcher watcher;
   private final CheapestPlans cheapest;
   private final Curve curve;
+
+  /** The lower bound of direct cost where there are choices. */
+  private Optional<Curve> relaxed = Optional.empty();
 
   private CurveQuestion(Case of, OptionalLong at, Effort effort, Watcher watcher)
       throws FinishTooEarly {
@@ -62,12 +66,13 @@ public final class CurveQuestion {
       return convex;
     }
     Curve bare = new ConvexPlans(of.boundingNetwork(), watcher).curve();
+    relaxed = network.hasChoices() ? Optional.of(bare) : Optional.empty();
     requirePossible(bare, at);
     return new BranchedPlans(
         priced,
         money.charges(),
         bare,
-        effort.nodesFor(of),
+        finishes -> effort.nodesFor(of, finishes),
         effort.isOver(),
         (longest, shortest) -> {
           NavigableSet<Long> durations = CurveCounting.durations(of, longest, shortest);
@@ -98,7 +103,8 @@ public final class CurveQuestion {
         cheapest.crossCheck(crossChecks, watcher),
         Stepping.scaleFor(of.pricedNetwork()).orElseThrow().perUnit(),
         cheapest.flows(),
-        !cheapest.unproved().isEmpty() && effort.isOver().getAsBoolean());
+        !cheapest.unproved().isEmpty() && effort.isOver().getAsBoolean(),
+        relaxed);
   }
 
   private List<Plan> plans(SortedSet<Long> durations) {

@@ -15,15 +15,22 @@ public record Effort(OptionalLong nodes, BooleanSupplier isOver) {
   /** Counted in nodes alone, so that results are the same on every machine. */
   public static final Effort USUAL = new Effort(OptionalLong.empty(), () -> false);
 
-  private static final long MOST = 10_000;
-  private static final long LEAST = 20;
+  private static final long MOST_PER_FINISH = 10_000;
 
   /** A relaxation takes about as long as the square of the number of activities. */
-  private static final long NODES_TIMES_SQUARE = 20_000_000;
+  private static final long NODES_TIMES_SQUARE = 1_000_000_000;
 
-  /** Relaxations for each finish of a case. */
-  long nodesFor(Case of) {
+  /**
+   * Relaxations for all finishes of a case together.
+   *
+   * @param finishes how many there are
+   */
+  long nodesFor(Case of, int finishes) {
+    if (nodes.isPresent()) {
+      return Math.multiplyExact(nodes.getAsLong(), finishes);
+    }
     long size = Math.max(1, of.network().size());
-    return nodes.orElse(Math.max(LEAST, Math.min(MOST, NODES_TIMES_SQUARE / (size * size))));
+    long usual = NODES_TIMES_SQUARE / (size * size);
+    return Math.max(finishes, Math.min(MOST_PER_FINISH * finishes, usual));
   }
 }

@@ -1,5 +1,6 @@
 package dayworth.decision;
 
+import dayworth.network.Plan;
 import dayworth.value.Money;
 import java.math.BigInteger;
 import java.util.List;
@@ -10,7 +11,8 @@ import java.util.Optional;
  *
  * @param wish what was wanted
  * @param curve every finish; the plan asked for is the one that meets the wish
- * @param bought what is shortened against the plan as it stands, in file order
+ * @param bought what is done another way than in the plan as it stands, in file order
+ * @param packages the packages of measures that are paid for, by their index
  * @param chains critical chains that together pass what was bought, as far as room is for them; all
  *     critical chains if these are few
  * @param chainCount how many critical chains there are; exact
@@ -21,6 +23,7 @@ public record MeetAnswer(
     Wish wish,
     CurveAnswer curve,
     List<Bought> bought,
+    List<Integer> packages,
     List<List<Integer>> chains,
     BigInteger chainCount,
     Optional<Money> lastPrice,
@@ -28,6 +31,7 @@ public record MeetAnswer(
 
   public MeetAnswer {
     bought = List.copyOf(bought);
+    packages = List.copyOf(packages);
     chains = List.copyOf(chains);
   }
 
@@ -53,17 +57,23 @@ public record MeetAnswer(
   }
 
   /**
-   * An activity that is shortened.
+   * An activity that is shortened or done by a measure.
    *
    * @param activity index in the network
+   * @param measure by which it is done, by its index, or {@link Plan#NO_MEASURE}
    * @param ticks how much is taken out of its normal duration
-   * @param cost what all of it costs; below zero where crashing is cheaper
+   * @param cost what all of it costs, without packages; below zero where it saves money
    * @param onChains which of the answer's chains pass it, by their index
    */
-  public record Bought(int activity, long ticks, Money cost, List<Integer> onChains) {
+  public record Bought(int activity, int measure, long ticks, Money cost, List<Integer> onChains) {
 
     public Bought {
       onChains = List.copyOf(onChains);
+    }
+
+    /** The price of a tick; empty where none is taken out. */
+    public Optional<Money> pricePerTick() {
+      return ticks == 0 ? Optional.empty() : Optional.of(cost.dividedBy(ticks));
     }
   }
 }

@@ -60,7 +60,8 @@ public final class MeetQuestion {
     return new MeetAnswer(
         wish,
         answer,
-        shortened.stream().map(i -> bought(of.network().activity(i), i, timing, chains)).toList(),
+        shortened.stream().map(i -> bought(of.network(), i, timing, chains)).toList(),
+        List.copyOf(timing.plan().packages(of.network())),
         chains,
         critical.count(),
         lastPrice(answer.curve(), timing.finish()),
@@ -131,20 +132,26 @@ public final class MeetQuestion {
 
   private static List<Integer> shortened(Network network, Plan plan) {
     return IntStream.range(0, network.size())
-        .filter(i -> plan.duration(i) < network.activity(i).normal())
+        .filter(
+            i ->
+                plan.duration(i) < network.activity(i).normal()
+                    || plan.measure(i) != Plan.NO_MEASURE)
         .boxed()
         .toList();
   }
 
   private static MeetAnswer.Bought bought(
-      Activity activity, int index, Timing timing, List<List<Integer>> chains) {
-    long ticks = activity.normal() - timing.plan().duration(index);
+      Network network, int index, Timing timing, List<List<Integer>> chains) {
+    Plan plan = timing.plan();
+    Activity activity = network.activity(index);
+    long ticks = activity.normal() - plan.duration(index);
+    Money cost = plan.costOf(network, index).minus(activity.normalCost());
     List<Integer> on = new ArrayList<>();
     for (int c = 0; c < chains.size(); c++) {
       if (chains.get(c).contains(index)) {
         on.add(c);
       }
     }
-    return new MeetAnswer.Bought(index, ticks, activity.slope().times(ticks), on);
+    return new MeetAnswer.Bought(index, plan.measure(index), ticks, cost, on);
   }
 }

@@ -8,6 +8,7 @@ import dayworth.engine.proof.ProofChecker;
 import dayworth.engine.proof.ProofSheet;
 import dayworth.engine.proof.Verdict;
 import dayworth.engine.stepping.Descent;
+import dayworth.network.MeasurePackage;
 import dayworth.network.Network;
 import dayworth.network.Plan;
 import dayworth.value.Money;
@@ -71,22 +72,26 @@ final class PlanProving {
     }
     List<PlanProof.Block> blocks = new ArrayList<>(paid(of, plan).blocks());
     for (Branching.Leaf leaf : proof.leaves()) {
-      Network relaxed = leaf.relaxation().network();
-      Money alike = leaf.relaxation().fixed().plus(money.fixed());
-      ProofSheet sheet = ProofSheet.of(relaxed, leaf.plan(), finish, leaf.flow(), alike);
-      blocks.add(new PlanProof.Block(String.valueOf(blocks.size()), relaxed, sheet.withoutPlan()));
+      Money alike = leaf.fixed().plus(money.fixed());
+      ProofSheet sheet = ProofSheet.ofBound(leaf.network(), finish, leaf.flow(), alike);
+      blocks.add(new PlanProof.Block(String.valueOf(blocks.size()), leaf.network(), sheet));
     }
     return new PlanProof(blocks, List.of());
   }
 
   /** The first block alone where money is not convex: what the plan pays. */
   static PlanProof paid(Case of, Plan plan) {
-    ProofSheet paid = ProofSheet.ofPlan(of.network(), plan, other(of.momentMoney(), plan));
+    ProofSheet paid = ProofSheet.ofPlan(of.network(), plan, other(of, plan));
     return new PlanProof(List.of(new PlanProof.Block("plan", of.network(), paid)), List.of());
   }
 
-  private static Map<String, Money> other(MomentMoney money, Plan plan) {
+  private static Map<String, Money> other(Case of, Plan plan) {
+    MomentMoney money = of.momentMoney();
     Map<String, Money> other = new LinkedHashMap<>();
+    for (int index : plan.packages(of.network())) {
+      MeasurePackage paid = of.network().measures().packages().get(index);
+      other.put(paid.name(), paid.cost());
+    }
     money.running().forEach(cost -> other.put(cost.name(), money.of(cost, plan)));
     money
         .sections()

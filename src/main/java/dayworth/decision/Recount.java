@@ -141,7 +141,8 @@ public final class Recount {
         crossCheck(curve),
         claim.slopeUnits(),
         claim.flows(),
-        claim.isCut());
+        claim.isCut(),
+        Optional.empty());
   }
 
   private void requireSteps() throws ClaimRefuted {
@@ -166,7 +167,7 @@ public final class Recount {
       long finish = k == 0 ? claim.longest() : claim.steps().get(k - 1).to();
       String place = "evidence.breakpoint_plans[" + k + "]";
       require(place, ProofChecker.possible(network, claim.breakpoints().get(k), finish));
-      if (k > 0) {
+      if (k > 0 && !network.hasChoices()) {
         long[] changed = after(claim.breakpoints().get(k - 1).toArray(), claim.steps().get(k - 1));
         require(
             Arrays.equals(changed, claim.breakpoints().get(k).toArray()),
@@ -229,7 +230,9 @@ public final class Recount {
         extra = cost(next).minus(cost(before));
         before = next;
       }
-      steps.add(new Step(step.from(), step.to(), extra, step.changes()));
+      List<Change> changes =
+          network.hasChoices() ? changes(claim.breakpoints(), k) : step.changes();
+      steps.add(new Step(step.from(), step.to(), extra, changes));
     }
     Curve curve =
         new Curve(
@@ -246,6 +249,16 @@ public final class Recount {
       require(place, ProofChecker.possible(network, curve.planAfter(k), finish));
     }
     return curve;
+  }
+
+  /** What is between the plans of a step's two ends. */
+  private static List<Change> changes(List<Plan> breakpoints, int step) {
+    Plan before = breakpoints.get(step);
+    Plan after = breakpoints.get(step + 1);
+    return IntStream.range(0, before.size())
+        .filter(i -> before.duration(i) != after.duration(i))
+        .mapToObj(i -> new Change(i, before.duration(i) - after.duration(i)))
+        .toList();
   }
 
   /** Direct cost, spans and charges. */

@@ -51,7 +51,7 @@ public final class Ways {
     for (int i = 0; i < network.size(); i++) {
       add(i, measures.get(i), shorterServes[i]);
       first[i + 1] = all.size();
-      isChoice[i] = count(i) > (hasLine[i] ? 2 : 1);
+      isChoice[i] = hasLine[i] ? count(i) > 2 : !isNormalAlone(i);
     }
   }
 
@@ -83,7 +83,14 @@ public final class Ways {
     return hasLine[activity];
   }
 
-  /** Whether the activity has ways that are taken wholly or not at all. */
+  private boolean isNormalAlone(int i) {
+    Way only = all.get(first[i]);
+    return count(i) == 1
+        && only.measure() == Plan.NO_MEASURE
+        && only.duration() == network.activity(i).normal();
+  }
+
+  /** Whether the activity has other ways than its normal one and its line. */
   public boolean isChoice(int activity) {
     return isChoice[activity];
   }

@@ -135,19 +135,30 @@ public final class Plan {
   public Money directCost(Network network) {
     MoneySum sum = new MoneySum();
     for (int i = 0; i < durations.length; i++) {
-      if (measure(i) == NO_MEASURE) {
-        Activity activity = network.activity(i);
-        sum.add(activity.normalCost());
-        long shortened = activity.normal() - durations[i];
-        if (shortened != 0) {
-          sum.add(activity.crashExtra(), shortened, activity.mostShortening());
-        }
-      } else {
-        sum.add(network.measures().get(measure(i)).cost());
-      }
+      addCost(network, i, sum);
     }
     packages(network).forEach(index -> sum.add(network.measures().packages().get(index).cost()));
     return sum.total();
+  }
+
+  /** What an activity costs, without the packages that its measure may be in. */
+  public Money costOf(Network network, int activity) {
+    MoneySum sum = new MoneySum();
+    addCost(network, activity, sum);
+    return sum.total();
+  }
+
+  private void addCost(Network network, int i, MoneySum sum) {
+    if (measure(i) != NO_MEASURE) {
+      sum.add(network.measures().get(measure(i)).cost());
+      return;
+    }
+    Activity activity = network.activity(i);
+    sum.add(activity.normalCost());
+    long shortened = activity.normal() - durations[i];
+    if (shortened != 0) {
+      sum.add(activity.crashExtra(), shortened, activity.mostShortening());
+    }
   }
 
   /** The packages that are paid for, by their index, sorted. */

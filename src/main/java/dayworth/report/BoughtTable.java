@@ -3,12 +3,14 @@ package dayworth.report;
 import dayworth.decision.Case;
 import dayworth.decision.MeetAnswer;
 import dayworth.decision.MeetAnswer.Bought;
-import dayworth.network.Activity;
+import dayworth.network.MeasurePackage;
 import dayworth.network.Network;
+import dayworth.network.Plan;
 import java.math.BigDecimal;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.function.Function;
 import java.util.stream.Collectors;
 
@@ -36,7 +38,8 @@ final class BoughtTable {
     this.shown = all.subList(0, Math.min(MOST_ROWS, all.size()));
     List<BigDecimal> amounts = new ArrayList<>(List.of(answer.extra().cents()));
     shown.forEach(bought -> amounts.add(bought.cost().cents()));
-    shown.forEach(bought -> amounts.add(price(bought)));
+    shown.forEach(bought -> price(bought).ifPresent(amounts::add));
+    packages().forEach(each -> amounts.add(each.cost().cents()));
     this.look = MoneyLook.of(amounts);
   }
 
@@ -67,15 +70,30 @@ final class BoughtTable {
 
   private TextColumns columns(int width, int mostName) {
     TextColumns columns = new TextColumns(width);
-    columns.add("", false, column(bought -> id(bought.activity()), "all"));
-    if (shown.stream().anyMatch(bought -> !name(bought.activity(), mostName).isEmpty())) {
-      columns.add("", false, column(bought -> name(bought.activity(), mostName), ""));
+    columns.add(
+        "",
+        false,
+        column(bought -> id(bought.activity()), each -> Wording.safe(each.name()), "all"));
+    if (shown.stream().anyMatch(bought -> !what(bought, mostName).isEmpty())) {
+      columns.add("", false, column(bought -> what(bought, mostName), each -> "package", ""));
     }
-    columns.add(of.unit().word() + "s", true, column(this::fromTo, ""));
-    columns.add("bought", true, column(bought -> units(bought.ticks()), units(allTicks())));
-    columns.add("a " + of.unit().word(), true, column(bought -> look.text(price(bought)), ""));
-    columns.add("price", true, column(bought -> look.text(bought.cost().cents()), total()));
-    columns.add("on chain", false, column(BoughtTable::chains, ""));
+    columns.add(of.unit().word() + "s", true, column(this::fromTo, BoughtTable::nothing, ""));
+    columns.add(
+        "bought",
+        true,
+        column(bought -> units(bought.ticks()), BoughtTable::nothing, units(allTicks())));
+    columns.add(
+        "a " + of.unit().word(),
+        true,
+        column(bought -> price(bought).map(look::text).orElse(""), BoughtTable::nothing, ""));
+    columns.add(
+        "price",
+        true,
+        column(
+            bought -> look.text(bought.cost().cents()),
+            each -> look.text(each.cost().cents()),
+            total()));
+    columns.add("on chain", false, column(BoughtTable::chains, BoughtTable::nothing, ""));
     return columns;
   }
 
@@ -115,8 +133,10 @@ final class BoughtTable {
     return answer.bought().stream().noneMatch(bought -> bought.onChains().isEmpty());
   }
 
-  private List<String> column(Function<Bought, String> cell, String last) {
+  private List<String> column(
+      Function<Bought, String> cell, Function<MeasurePackage, String> ofPackage, String last) {
     List<String> cells = new ArrayList<>(shown.stream().map(cell).toList());
+    packages().stream().map(ofPackage).forEach(cells::add);
     cells.add(last);
     return cells;
   }
@@ -125,8 +145,21 @@ final class BoughtTable {
     return Wording.safe(network.activity(activity).id());
   }
 
-  private String name(int activity, int most) {
-    String name = Wording.safe(network.activity(activity).name());
+  private static String nothing(MeasurePackage each) {
+    return "";
+  }
+
+  private List<MeasurePackage> packages() {
+    return answer.packages().stream().map(network.measures().packages()::get).toList();
+  }
+
+  /** The measure where it is done by one, else the activity's name. */
+  private String what(Bought bought, int most) {
+    String name =
+        Wording.safe(
+            bought.measure() == Plan.NO_MEASURE
+                ? network.activity(bought.activity()).name()
+                : network.measures().get(bought.measure()).name());
     return name.length() <= most ? name : name.substring(0, most - 2).strip() + "..";
   }
 
@@ -147,9 +180,8 @@ final class BoughtTable {
     return look.text(answer.extra().cents());
   }
 
-  private BigDecimal price(Bought bought) {
-    Activity activity = network.activity(bought.activity());
-    return activity.slope().times(network.scale().ticksPerUnit()).cents();
+  private Optional<BigDecimal> price(Bought bought) {
+    return bought.pricePerTick().map(price -> price.times(network.scale().ticksPerUnit()).cents());
   }
 
   /** What pays by itself, or shortens the span of a running cost, need be on none. */

@@ -119,6 +119,10 @@ final class ClaimReader {
   }
 
   private List<Change> changes(JsonPlace at) throws ClaimRefuted {
+    if (network.hasChoices()) {
+      // Measures change too: what a step does is counted from the plans at its ends.
+      return List.of();
+    }
     Set<Integer> seen = new HashSet<>();
     List<Change> changes = new ArrayList<>();
     for (JsonPlace change : at.items()) {

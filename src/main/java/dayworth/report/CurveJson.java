@@ -4,9 +4,9 @@ import dayworth.contract.Due;
 import dayworth.decision.CrossCheck;
 import dayworth.decision.CurveAnswer;
 import dayworth.decision.Finish;
+import dayworth.decision.PlanChange;
 import dayworth.decision.Status;
 import dayworth.decision.StepFacts;
-import dayworth.engine.Change;
 import dayworth.network.Activity;
 import dayworth.network.Network;
 import dayworth.network.Timing;
@@ -114,16 +114,21 @@ final class CurveJson {
     json.number("to_duration", names.units(facts.step().to()));
     json.number("price_per_unit", perUnit(facts.step().pricePerTick()).cents());
     json.number("extra_cost", facts.step().extra().cents());
-    json.array("changes", facts.step().changes(), this::change);
+    json.array("changes", facts.changes(), this::change);
     json.number("critical_activities", facts.criticalAfter());
     json.texts("newly_critical", names.ids(facts.newlyCritical()));
   }
 
-  private void change(JsonText json, Change change) throws IOException {
+  private void change(JsonText json, PlanChange change) throws IOException {
     json.text("activity", names.id(change.activity()));
-    json.text("change", change.isRelaxation() ? "relax" : "compress");
+    json.text("change", StepsTable.word(change));
+    json.text("measure", MeasureNames.of(network, change.measure()));
     json.number("units", names.units(Math.abs(change.shortened())));
-    json.number("slope", perUnit(network.activity(change.activity()).slope()).cents());
+    if (change.pricePerTick().isPresent()) {
+      json.number("slope", perUnit(change.pricePerTick().get()).cents());
+    } else {
+      json.nothing("slope");
+    }
   }
 
   private Money perUnit(Money perTick) {
@@ -143,8 +148,9 @@ final class CurveJson {
     json.text("id", activity.id());
     json.text("name", activity.name());
     json.number("duration", names.units(duration));
+    json.text("measure", MeasureNames.of(network, timing.plan().measure(index)));
     json.number("units_compressed", names.units(activity.normal() - duration));
-    json.number("extra_cost", PlanTable.extraCost(activity, duration).cents());
+    json.number("extra_cost", PlanTable.extraCost(network, timing.plan(), index).cents());
     Status status = answer.of().status(index);
     if (dates.areKnown()) {
       long start = timing.start(index);

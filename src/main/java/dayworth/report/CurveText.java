@@ -41,6 +41,12 @@ public final class CurveText {
       lines.add("");
       lines.addAll(prices);
     }
+    lines.addAll(prose(new LumpText(answer).sentence(), used));
+    List<String> switches = new SwitchTable(answer).lines(used);
+    if (!switches.isEmpty()) {
+      lines.add("");
+      lines.addAll(switches);
+    }
     lines.addAll(prose(later(answer), used));
     lines.add("");
     lines.addAll(prose(new ObstacleText(answer.of(), answer.curve()).sentence(), used));
@@ -119,7 +125,6 @@ public final class CurveText {
         : finish + ", no better than " + asPlanned + ".";
   }
 
-  /** Empty where one finish alone has the least total. */
   /** Finishes that are left out of what is shown. */
   private static String later(CurveAnswer answer) {
     long longest = answer.rows().get(0).duration();
@@ -130,6 +135,7 @@ public final class CurveText {
             + ", save running cost or section money but cost more in all: see curve.csv.";
   }
 
+  /** Empty where one finish alone has the least total. */
   static String ties(CurveAnswer answer) {
     int count = answer.least().size();
     if (count < 2) {
@@ -214,7 +220,8 @@ public final class CurveText {
         answer.unproved().stream()
             .map(finish -> finish.gap().cents())
             .reduce(BigDecimal.ZERO, BigDecimal::max);
-    return "; the rest is at most " + MoneyLook.of(List.of(most)).text(most) + " too dear";
+    String cut = answer.isCut() ? ", when the time that was given was over" : "";
+    return "; the rest is at most " + MoneyLook.of(List.of(most)).text(most) + " too dear" + cut;
   }
 
   static String proof(CurveAnswer answer) {

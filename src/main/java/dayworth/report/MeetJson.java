@@ -55,6 +55,11 @@ final class MeetJson {
     json.number(
         "above_least_total", answer.finish().total().subtract(answer.curve().leastTotal().total()));
     json.array("bought", answer.bought(), this::bought);
+    json.texts(
+        "packages",
+        answer.packages().stream()
+            .map(index -> network.measures().packages().get(index).name())
+            .toList());
     json.number("critical_chains", new BigDecimal(answer.chainCount()));
     Iterable<Integer> chains = IntStream.range(0, answer.chains().size()).boxed().toList();
     json.array(
@@ -69,10 +74,17 @@ final class MeetJson {
   private void bought(JsonText json, MeetAnswer.Bought bought) throws IOException {
     Activity activity = network.activity(bought.activity());
     json.text("activity", activity.id());
+    json.text("measure", MeasureNames.of(network, bought.measure()));
     json.number("from_duration", names.units(activity.normal()));
     json.number("to_duration", names.units(activity.normal() - bought.ticks()));
     json.number("units", names.units(bought.ticks()));
-    json.number("price_per_unit", activity.slope().times(network.scale().ticksPerUnit()).cents());
+    if (bought.pricePerTick().isPresent()) {
+      json.number(
+          "price_per_unit",
+          bought.pricePerTick().get().times(network.scale().ticksPerUnit()).cents());
+    } else {
+      json.nothing("price_per_unit");
+    }
     json.number("cost", bought.cost().cents());
     json.texts("on_chains", bought.onChains().stream().map(c -> String.valueOf(c + 1)).toList());
   }

@@ -5,6 +5,7 @@ import dayworth.decision.CurveAnswer;
 import dayworth.decision.Status;
 import dayworth.network.Activity;
 import dayworth.network.Network;
+import dayworth.network.Plan;
 import dayworth.network.Timing;
 import dayworth.value.Money;
 import dayworth.value.TimeScale;
@@ -63,9 +64,9 @@ public final class PlanTable {
                 activity.id(),
                 activity.name(),
                 scale.text(duration),
-                CsvText.BLANK,
+                MeasureNames.of(of.network(), timing.plan().measure(index)),
                 scale.text(activity.normal() - duration),
-                CsvText.money(extraCost(activity, duration)),
+                CsvText.money(extraCost(of.network(), timing.plan(), index)),
                 status.started().isPresent() ? CsvText.BLANK : scale.text(start),
                 status.isFinished() ? CsvText.BLANK : scale.text(finish),
                 dates.start(status, start, finish),
@@ -89,7 +90,7 @@ public final class PlanTable {
   }
 
   /** What an activity costs above its normal cost; exact. */
-  static Money extraCost(Activity activity, long duration) {
-    return activity.slope().times(activity.normal() - duration);
+  static Money extraCost(Network network, Plan plan, int activity) {
+    return plan.costOf(network, activity).minus(network.activity(activity).normalCost());
   }
 }

@@ -2,7 +2,8 @@ package dayworth.report;
 
 import dayworth.decision.CurveAnswer;
 import dayworth.decision.Finish;
-import dayworth.engine.Change;
+import dayworth.decision.PlanChange;
+import dayworth.decision.StepFacts;
 import dayworth.engine.Step;
 import dayworth.value.Money;
 import java.math.BigDecimal;
@@ -19,7 +20,12 @@ final class PriceTable {
   private static final String INDENT = "    ";
 
   /** A step or, where the least total is inside it, a part of one. */
-  private record Part(Step step, long from, long to) {}
+  private record Part(StepFacts facts, long from, long to) {
+
+    Step step() {
+      return facts.step();
+    }
+  }
 
   private final CurveAnswer answer;
   private final List<Part> parts = new ArrayList<>();
@@ -30,15 +36,16 @@ final class PriceTable {
   PriceTable(CurveAnswer answer) {
     this.answer = answer;
     long least = answer.leastTotal().duration();
-    for (Step step : answer.curve().steps()) {
+    for (StepFacts facts : answer.steps()) {
+      Step step = facts.step();
       if (step.to() >= answer.latestShown()) {
         continue;
       }
       boolean inside = step.to() < least && least < step.from();
       if (inside) {
-        parts.add(new Part(step, step.from(), least));
+        parts.add(new Part(facts, step.from(), least));
       }
-      parts.add(new Part(step, inside ? least : step.from(), step.to()));
+      parts.add(new Part(facts, inside ? least : step.from(), step.to()));
     }
     stop = (int) parts.stream().filter(part -> part.to() >= least).count();
   }
@@ -77,9 +84,10 @@ final class PriceTable {
     if (hasWorth()) {
       columns.add("worth", true, column(shown, this::worth));
     }
-    columns.add("shortened", false, column(shown, part -> ids(part, c -> !c.isRelaxation())));
-    if (shown.stream().anyMatch(p -> p.step().changes().stream().anyMatch(Change::isRelaxation))) {
-      columns.add("given back", false, column(shown, part -> ids(part, Change::isRelaxation)));
+    columns.add("shortened", false, column(shown, part -> ids(part, c -> !c.isGivenBack())));
+    if (shown.stream()
+        .anyMatch(p -> p.facts().changes().stream().anyMatch(PlanChange::isGivenBack))) {
+      columns.add("given back", false, column(shown, part -> ids(part, PlanChange::isGivenBack)));
     }
     return columns;
   }
@@ -104,9 +112,9 @@ final class PriceTable {
     return perTick.times(answer.of().network().scale().ticksPerUnit());
   }
 
-  private String ids(Part part, Predicate<Change> which) {
+  private String ids(Part part, Predicate<PlanChange> which) {
     List<String> ids =
-        part.step().changes().stream()
+        part.facts().changes().stream()
             .filter(which)
             .map(change -> answer.of().network().activity(change.activity()).id())
             .toList();

@@ -16,7 +16,7 @@ import java.util.TreeMap;
 /** A result.json that was read, to be rechecked. */
 public final class ResultFile {
 
-  private static final Set<String> COMMANDS = Set.of("curve", "meet", "weigh", "check");
+  private static final Set<String> COMMANDS = Set.of("curve", "meet", "weigh", "check", "buildup");
 
   private final JsonPlace all;
   private final String command;

@@ -1,5 +1,6 @@
 package dayworth.report;
 
+import dayworth.decision.BuildUpAnswer;
 import dayworth.decision.Case;
 import dayworth.decision.CheckAnswer;
 import dayworth.decision.CurveAnswer;
@@ -38,6 +39,14 @@ public final class ResultJson {
         json -> {
           CaseJson.writeHead(json, answer.of(), "weigh", programVersion);
           new WeighJson(answer).write(json);
+        });
+  }
+
+  public static String ofBuildUp(BuildUpAnswer answer, String programVersion) {
+    return JsonText.object(
+        json -> {
+          CaseJson.writeHead(json, answer.of(), "buildup", programVersion);
+          new BuildUpJson(answer).write(json);
         });
   }
 

@@ -1,12 +1,13 @@
 package dayworth.report;
 
 import dayworth.decision.CurveAnswer;
+import dayworth.decision.PlanChange;
 import dayworth.decision.StepFacts;
-import dayworth.engine.Change;
 import dayworth.engine.Step;
 import dayworth.network.Activity;
 import dayworth.network.Network;
 import dayworth.value.TimeScale;
+import java.util.Locale;
 import java.util.stream.Collectors;
 
 /** The text of steps.csv: a row for each activity that a step changes, in file order. */
@@ -31,7 +32,7 @@ public final class StepsTable {
     Network network = answer.of().network();
     for (int i = 0; i < answer.steps().size(); i++) {
       StepFacts facts = answer.steps().get(i);
-      for (Change change : facts.step().changes()) {
+      for (PlanChange change : facts.changes()) {
         row(csv, i + 1, facts, change, network);
       }
     }
@@ -39,7 +40,7 @@ public final class StepsTable {
   }
 
   private static void row(
-      CsvText csv, int number, StepFacts facts, Change change, Network network) {
+      CsvText csv, int number, StepFacts facts, PlanChange change, Network network) {
     TimeScale scale = network.scale();
     Step step = facts.step();
     Activity activity = network.activity(change.activity());
@@ -49,13 +50,20 @@ public final class StepsTable {
         scale.text(step.to()),
         CsvText.money(step.pricePerTick().times(scale.ticksPerUnit())),
         activity.id(),
-        change.isRelaxation() ? "relax" : "compress",
-        CsvText.BLANK,
+        word(change),
+        MeasureNames.of(network, change.measure()),
         scale.text(Math.abs(change.shortened())),
-        CsvText.money(activity.slope().times(scale.ticksPerUnit())),
+        change
+            .pricePerTick()
+            .map(price -> CsvText.money(price.times(scale.ticksPerUnit())))
+            .orElse(CsvText.BLANK),
         Integer.toString(facts.criticalAfter()),
         facts.newlyCritical().stream()
             .map(index -> network.activity(index).id())
             .collect(Collectors.joining(";")));
+  }
+
+  static String word(PlanChange change) {
+    return change.kind().name().toLowerCase(Locale.ROOT);
   }
 }

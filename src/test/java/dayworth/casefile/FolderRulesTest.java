@@ -9,8 +9,6 @@ import java.nio.file.Path;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
-import org.junit.jupiter.params.ParameterizedTest;
-import org.junit.jupiter.params.provider.ValueSource;
 
 /** The folder itself, the names in it, and all problems together. */
 class FolderRulesTest {
@@ -43,14 +41,6 @@ class FolderRulesTest {
     assertEquals(
         List.of("activities.csv | cannot be read |  | a file one may read"),
         new CaseOnDisk(folder).problems());
-  }
-
-  @ParameterizedTest
-  @ValueSource(strings = {"labour.csv", "patterns.csv", "pay.csv", "output_loss.csv"})
-  void otherFilesOfACaseAreNotServedYet(String name) throws IOException {
-    assertEquals(
-        List.of(name + " | is not served yet |  | take it out of the folder"),
-        oneActivity().with(name, "x\n").problems());
   }
 
   @Test
@@ -86,7 +76,7 @@ class FolderRulesTest {
             A,5,x,6,100,
             B,y,100,,,AA
             """)
-        .with("pay.csv", "x");
+        .with("pay.csv", "pattern,above_hours,multiplier\nlong days,200,1.5\n");
     assertEquals(
         List.of(
             "activities.csv:2 crash_duration | longer than the normal duration | 6"
@@ -97,7 +87,8 @@ class FolderRulesTest {
                 + " | digits only, with a point before decimals",
             "activities.csv:3 predecessors | AA is no activity | AA | nearest is A",
             "links.csv:2 relation | no such relation | FX | one of FS, SS, FF, SF",
-            "pay.csv | is not served yet |  | take it out of the folder",
+            "pay.csv:2 above_hours | too large | 200"
+                + " | 0 or more, at most 168, the hours of a week",
             "terms.csv:2 term | no such term | damage_rate | nearest is damages_rate"),
         new CaseOnDisk(folder).problems());
   }

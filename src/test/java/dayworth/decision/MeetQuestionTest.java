@@ -9,6 +9,7 @@ import dayworth.contract.Terms;
 import dayworth.network.Activity;
 import dayworth.network.Link;
 import dayworth.network.Network;
+import dayworth.network.Plan;
 import dayworth.network.Relation;
 import dayworth.testing.OutsideSolver;
 import dayworth.testing.RandomNetworks;
@@ -53,8 +54,8 @@ class MeetQuestionTest {
     MeetAnswer answer = ask(new Wish.In(70));
     assertEquals(
         List.of(
-            new MeetAnswer.Bought(0, 20, Money.of(40), List.of(0)),
-            new MeetAnswer.Bought(2, 10, Money.of(5), List.of(1))),
+            new MeetAnswer.Bought(0, Plan.NO_MEASURE, 20, Money.of(40), List.of(0)),
+            new MeetAnswer.Bought(2, Plan.NO_MEASURE, 10, Money.of(5), List.of(1))),
         answer.bought());
     assertEquals(List.of(List.of(0, 1), List.of(2)), answer.chains());
     assertEquals(Money.of(45), answer.extra());
@@ -118,7 +119,9 @@ class MeetQuestionTest {
                 Activity.compressible("C", 9, Money.of(900), 7, Money.of(1200))),
             List.of(new Link(0, 1, Relation.FF, 2), new Link(1, 2, Relation.SS, 1)));
     MeetAnswer answer = MeetQuestion.ask(of(network), new Wish.In(12), 0, Watcher.NONE);
-    assertEquals(List.of(new MeetAnswer.Bought(0, 2, Money.of(200), List.of(0))), answer.bought());
+    assertEquals(
+        List.of(new MeetAnswer.Bought(0, Plan.NO_MEASURE, 2, Money.of(200), List.of(0))),
+        answer.bought());
     assertEquals(List.of(List.of(0, 1, 2)), answer.chains());
   }
 

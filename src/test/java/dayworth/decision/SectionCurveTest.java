@@ -3,6 +3,7 @@ package dayworth.decision;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dayworth.buildup.BuildUp;
 import dayworth.contract.Bonus;
 import dayworth.contract.Damages;
 import dayworth.contract.Due;
@@ -61,6 +62,7 @@ class SectionCurveTest {
             terms,
             money,
             Optional.empty(),
+            BuildUp.NONE,
             List.of(),
             List.of());
     return CurveQuestion.ask(of, OptionalLong.empty(), Long.MAX_VALUE, Watcher.NONE);

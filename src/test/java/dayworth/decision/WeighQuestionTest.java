@@ -3,6 +3,7 @@ package dayworth.decision;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dayworth.buildup.BuildUp;
 import dayworth.contract.Bonus;
 import dayworth.contract.Damages;
 import dayworth.contract.Due;
@@ -216,6 +217,7 @@ class WeighQuestionTest {
             terms,
             money,
             Optional.empty(),
+            BuildUp.NONE,
             List.of(),
             List.of());
     WeighAnswer answer = WeighQuestion.ask(of, Watcher.NONE);

@@ -124,6 +124,7 @@ class CurveTextTest {
             plain.unproved(),
             plain.isCut(),
             plain.crossCheck(),
+            plain.relaxed(),
             plain.evidence());
     List<String> lines = CurveText.lines(stopped, Style.PLAIN, 94);
     assertTrue(

@@ -14,6 +14,7 @@ import dayworth.decision.Evidence;
 import dayworth.decision.Finish;
 import dayworth.decision.InputFile;
 import dayworth.decision.Notice;
+import dayworth.decision.PlanChange;
 import dayworth.decision.StepFacts;
 import dayworth.decision.TimeUnit;
 import dayworth.engine.Change;
@@ -98,6 +99,12 @@ final class SeriesAnswer {
     return answer(CASE);
   }
 
+  private static List<PlanChange> changes(int activity, long shortened, long extra) {
+    return List.of(
+        new PlanChange(
+            activity, PlanChange.Kind.COMPRESS, Plan.NO_MEASURE, shortened, Money.of(extra)));
+  }
+
   static CurveAnswer answer(Case of) {
     Finish ten = finish(10, 160, 250, 10, Optional.of(20L), true);
     Finish nine = finish(9, 180, 225, 0, Optional.of(20L), false);
@@ -118,7 +125,9 @@ final class SeriesAnswer {
         ten,
         List.of(ten, nine, eight, seven),
         List.of(eight),
-        List.of(new StepFacts(first, 2, List.of()), new StepFacts(second, 2, List.of())),
+        List.of(
+            new StepFacts(first, changes(0, 2, 40), 2, List.of()),
+            new StepFacts(second, changes(1, 1, 30), 2, List.of())),
         Optional.of(nine),
         finish(7, 235, 175, 0, Optional.empty(), false),
         new CurveAnswer.AskedPlan(eight, Timing.earliest(NETWORK, atEight)),
@@ -132,6 +141,7 @@ final class SeriesAnswer {
             1,
             2,
             List.of()),
+        Optional.empty(),
         new Evidence(
             1,
             Optional.empty(),

@@ -79,7 +79,7 @@ class StatusReportTest {
     String first = json.substring(json.indexOf("{ \"id\" : \"A1\"", plan), json.indexOf('}', plan));
     assertEquals(
         "{ \"id\" : \"A1\", \"name\" : \"Marine works permit\", \"duration\" : 0,"
-            + " \"units_compressed\" : 0, \"extra_cost\" : 0.00,"
+            + " \"measure\" : \"\", \"units_compressed\" : 0, \"extra_cost\" : 0.00,"
             + " \"start_date\" : \"2027-03-15\", \"finish_date\" : \"2027-05-21\","
             + " \"critical\" : false ",
         first);

@@ -1,5 +1,6 @@
 package dayworth.testing;
 
+import dayworth.buildup.BuildUp;
 import dayworth.contract.Bonus;
 import dayworth.contract.Damages;
 import dayworth.contract.Due;
@@ -74,6 +75,7 @@ public final class LateDeck {
         terms,
         new MomentMoney(scale, Optional.empty(), sections, running),
         Optional.empty(),
+        BuildUp.NONE,
         List.of(),
         List.of());
   }

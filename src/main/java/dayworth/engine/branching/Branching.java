@@ -123,6 +123,9 @@ public final class Branching {
    */
   public static Optional<Proof> prove(
       Network network, List<Charge> charges, long duration, long most) {
+    if (network.hasChoices()) {
+      return WayProof.of(network, charges, duration, most);
+    }
     List<Leaf> leaves = new ArrayList<>();
     Branching branching =
         new Branching(network, charges, new long[] {duration}, Optional.of(leaves));
@@ -146,10 +149,11 @@ public final class Branching {
   /**
    * A branch that was not split further.
    *
-   * @param plan the cheapest of its convex problem
-   * @param flow proves that
+   * @param network its convex problem
+   * @param flow proves what that costs at least
+   * @param fixed what comes on top
    */
-  public record Leaf(Relaxation relaxation, Plan plan, Flow flow) {}
+  public record Leaf(Network network, Flow flow, Money fixed) {}
 
   private void run(long most) {
     mostNodes = most;
@@ -219,7 +223,7 @@ public final class Branching {
       best.get(row).offer(plan, ChargedMoney.cost(network, charges, plan), node.branch());
       Money bound = relaxation.cost(plan);
       if (leaves.isPresent() && best.get(row).beats(bound)) {
-        leaves.get().add(new Leaf(relaxation, plan, descent.flow()));
+        leaves.get().add(new Leaf(relaxation.network(), descent.flow(), relaxation.fixed()));
       }
       if (!best.get(row).beats(bound)) {
         rows.add(row);
@@ -274,11 +278,15 @@ public final class Branching {
     List<Point> points = new ArrayList<>();
     Optional<LeastChanged> plans = Optional.empty();
     Plan before = Plan.allNormal(network);
+    Relaxation relaxed = best.get(0).branch.relaxation(network, charges, fence);
     for (int row = 0; row < durations.length && best.get(row).plan.isPresent(); row++) {
       Best of = best.get(row);
       Plan found = of.plan.get();
       if (plans.isEmpty() || !plans.get().serves(of.branch, found)) {
-        plans = Optional.of(new LeastChanged(network, charges, fence, of.branch, found));
+        if (row == 0 || !of.branch.equals(best.get(row - 1).branch)) {
+          relaxed = of.branch.relaxation(network, charges, fence);
+        }
+        plans = Optional.of(new LeastChanged(network, charges, of.branch, relaxed, found));
       }
       before = plans.get().within(durations[row], before, of.cost).orElse(found);
       Money bound = of.leftOpen.map(of.cost::min).orElse(of.cost);

@@ -1,6 +1,7 @@
 package dayworth.engine.branching;
 
 import dayworth.engine.Ways;
+import dayworth.engine.proof.ProofChecker;
 import dayworth.engine.stepping.Descent;
 import dayworth.network.Activity;
 import dayworth.network.Measures;
@@ -24,17 +25,23 @@ final class LeastChanged {
   private final Plan found;
   private final Descent descent;
 
-  LeastChanged(Network network, List<Charge> charges, Money fence, Branch branch, Plan found) {
+  /**
+   * Prepares.
+   *
+   * @param relaxed the branch's convex problem
+   */
+  LeastChanged(
+      Network network, List<Charge> charges, Branch branch, Relaxation relaxed, Plan found) {
     this.network = network;
     this.charges = charges;
     this.branch = branch;
     this.found = found;
-    Network relaxed = branch.relaxation(network, charges, fence).network();
+    Network open = relaxed.network();
     this.descent =
         new Descent(
             branch.opening().ways().isPlain()
-                ? relaxed
-                : relaxed.withActivities(settled(branch.opening().ways()), Measures.NONE));
+                ? open
+                : open.withActivities(settled(branch.opening().ways()), Measures.NONE));
   }
 
   /** Activities with a choice take the way that was found; what goes along its line stays open. */
@@ -42,9 +49,9 @@ final class LeastChanged {
     List<Activity> settled = new ArrayList<>();
     for (int i = 0; i < network.size(); i++) {
       Activity activity = network.activity(i);
-      boolean onLine = found.measure(i) == Plan.NO_MEASURE && activity.divisible();
+      boolean onLine = found.measure(i) == Plan.NO_MEASURE && ways.hasLine(i);
       settled.add(
-          onLine || !ways.isChoice(i)
+          onLine
               ? activity
               : new Activity(
                   activity.id(),
@@ -69,9 +76,8 @@ final class LeastChanged {
     for (int i = 0; i < network.size(); i++) {
       boolean same =
           found.measure(i) == like.measure(i)
-              && (!ways.isChoice(i)
-                  || network.activity(i).divisible()
-                  || found.duration(i) == like.duration(i));
+              && (found.duration(i) == like.duration(i)
+                  || (found.measure(i) == Plan.NO_MEASURE && ways.hasLine(i)));
       if (!same) {
         return false;
       }
@@ -89,6 +95,7 @@ final class LeastChanged {
         .within(duration, before)
         .map(plan -> plan.withMeasuresOf(found))
         .map(plan -> plan.isScheduled() ? plan : Timing.earliest(network, plan).scheduled())
+        .filter(plan -> ProofChecker.possible(network, plan, duration).isEmpty())
         .filter(plan -> ChargedMoney.cost(network, charges, plan).equals(cost));
   }
 }

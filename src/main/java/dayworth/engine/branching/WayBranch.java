@@ -1,5 +1,6 @@
 package dayworth.engine.branching;
 
+import dayworth.engine.measures.BoundedShare;
 import dayworth.engine.measures.Incumbent;
 import dayworth.engine.measures.WaySearch;
 import dayworth.engine.proof.ProofChecker;
@@ -150,6 +151,34 @@ final class WayBranch {
         isOpen = bound.isPresent() && outcome.unresolved().isEmpty();
       }
     }
+  }
+
+  /**
+   * Splits the branch for one finish into shares that no cheaper plan is in.
+   *
+   * @param cost of the plan that is known
+   * @param most how many shares are looked at, at most
+   * @param shares those that were bounded; not all of them if {@link #halves} is present
+   * @return how many were looked at; {@code most} or more if that was not enough
+   */
+  long splitUp(long duration, Money cost, long most, List<BoundedShare> shares) {
+    Optional<Narrowing.State> root = search.reach(duration);
+    if (root.isEmpty()) {
+      return 1;
+    }
+    BigInteger closedFrom = scaled(cost.minus(Point.ROUNDING).minus(relaxation.fixedByCharges()));
+    if (search.boundAt(root.get()).compareTo(closedFrom) < 0
+        && isSplitFor(search.planAt(root.get()))) {
+      return 1;
+    }
+    WaySearch.Outcome outcome = search.splitUp(root.get(), closedFrom, most, shares::add);
+    outcome.unresolved().ifPresent(this::splitFor);
+    return outcome.nodes();
+  }
+
+  /** What comes on top of the shares' networks. */
+  Money fixed() {
+    return relaxation.fixed();
   }
 
   private void splitFor(WaySearch.Unresolved left) {

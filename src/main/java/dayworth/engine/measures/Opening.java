@@ -31,6 +31,12 @@ public final class Opening {
   /** What each way costs beside its own cost while its package is undecided. */
   private final Money[] share;
 
+  /** Of each way with its share. */
+  private final Money[] cost;
+
+  /** The ways on the hull of each activity, from short to long. */
+  private final int[][] hull;
+
   private Opening(
       Network network, Ways ways, PackageState[] packages, boolean[] open, boolean[] line) {
     this.network = network;
@@ -39,6 +45,10 @@ public final class Opening {
     this.open = open;
     this.line = line;
     this.share = shares();
+    this.cost = new Money[ways.count()];
+    Arrays.setAll(cost, way -> ways.get(way).cost().plus(share[way]));
+    this.hull = new int[network.size()][];
+    Arrays.setAll(hull, this::hullOf);
   }
 
   /** All plans. */
@@ -116,7 +126,7 @@ public final class Opening {
 
   /** What an activity pays for a way: its cost and a share of an undecided package. */
   public Money cost(int way) {
-    return ways.get(way).cost().plus(share[way]);
+    return cost[way];
   }
 
   /** The same of each way in scaled units, rounded down; only to compare. */
@@ -159,14 +169,14 @@ public final class Opening {
     if (way >= 0) {
       return shareIn(index, way);
     }
-    int[] hull = hull(activity);
-    for (int k = 1; k < hull.length; k++) {
-      long shorter = duration(hull[k - 1]);
-      long longer = duration(hull[k]);
+    int[] on = hull[activity];
+    for (int k = 1; k < on.length; k++) {
+      long shorter = duration(on[k - 1]);
+      long longer = duration(on[k]);
       if (longer > duration && shorter < duration) {
-        return shareIn(index, hull[k - 1])
+        return shareIn(index, on[k - 1])
             .times(longer - duration)
-            .plus(shareIn(index, hull[k]).times(duration - shorter))
+            .plus(shareIn(index, on[k]).times(duration - shorter))
             .dividedBy(longer - shorter);
       }
     }
@@ -196,6 +206,10 @@ public final class Opening {
    * dimensions").
    */
   public int[] hull(int activity) {
+    return hull[activity].clone();
+  }
+
+  private int[] hullOf(int activity) {
     List<Integer> hull = new ArrayList<>();
     for (int way = ways.first(activity); way < ways.first(activity + 1); way++) {
       if (!open[way]) {
@@ -219,7 +233,9 @@ public final class Opening {
 
   /** Whether the middle one of three ways lies above the line through the other two. */
   private boolean isAbove(int shorter, int middle, int longer) {
-    return fall(shorter, middle).compareTo(fall(middle, longer)) < 0;
+    Money first = cost[shorter].minus(cost[middle]).times(duration(longer) - duration(middle));
+    Money second = cost[middle].minus(cost[longer]).times(duration(middle) - duration(shorter));
+    return first.compareTo(second) < 0;
   }
 
   /** By how much a tick more is cheaper from one way to a longer one. */

@@ -1,5 +1,6 @@
 package dayworth.engine.measures;
 
+import dayworth.engine.Flow;
 import dayworth.engine.Ways;
 import dayworth.engine.proof.WayBound;
 import dayworth.engine.stepping.Narrowing;
@@ -13,6 +14,7 @@ import java.util.Arrays;
 import java.util.Deque;
 import java.util.Optional;
 import java.util.function.BooleanSupplier;
+import java.util.function.Consumer;
 
 /**
  * The cheapest choice of ways for one finish after the other.
@@ -173,6 +175,55 @@ public final class WaySearch {
       }
     }
     return new Outcome(Optional.ofNullable(leftOpen), unresolved, nodes);
+  }
+
+  /**
+   * Splits all plans of the opening for a finish until each share is bounded from {@code
+   * closedFrom} on; no way is closed, so that the shares together hold every plan by how they were
+   * split alone.
+   *
+   * @param root from {@link #reach}
+   * @param closedFrom scaled
+   * @param most how many shares are looked at, at most
+   * @param shares is told of every share that is bounded
+   * @return what is left; its bound is empty if all are bounded
+   */
+  public Outcome splitUp(
+      Narrowing.State root, BigInteger closedFrom, long most, Consumer<BoundedShare> shares) {
+    waiting.clear();
+    leftOpen = null;
+    unresolved = Optional.empty();
+    nodes = 0;
+    waiting.push(new Node(root, opening.open(), -1, BigInteger.ZERO));
+    while (!waiting.isEmpty()) {
+      Node node = waiting.pop();
+      if (nodes++ >= most) {
+        leave(node.bound);
+        continue;
+      }
+      narrowing.goBackTo(node.from);
+      if (node.activity >= 0 && !narrow(node.activity, node.allowed)) {
+        continue;
+      }
+      Flow flow = narrowing.flow();
+      WayBound.Proven proven = counting.of(flow);
+      BigInteger bound = proven.atLeast(root.finish(), node.allowed);
+      if (bound.compareTo(closedFrom) >= 0) {
+        shares.accept(BoundedShare.of(network, opening, proven, node.allowed, flow));
+      } else {
+        split(node.allowed, bound, new Closed(closedFrom));
+      }
+    }
+    return new Outcome(Optional.ofNullable(leftOpen), unresolved, nodes);
+  }
+
+  /** A plan is known that cannot be bettered. */
+  private record Closed(BigInteger closedFrom) implements Incumbent {
+
+    @Override
+    public void offer(Plan plan) {
+      // No better one can come.
+    }
   }
 
   private boolean leave(BigInteger bound) {

@@ -90,7 +90,7 @@ public record ProofSheet(List<Row> rows) {
   public static ProofSheet of(Network network, Plan plan, long finish, Flow flow, Money alike) {
     List<Arc> arcs = Arcs.of(network, finish, flow);
     for (int decimals = FEWEST_DECIMALS; decimals <= MOST_DECIMALS; decimals += 3) {
-      Writer writer = new Writer(network, plan, decimals);
+      Writer writer = new Writer(network, Optional.of(plan), decimals);
       List<Row> rows = writer.rows(arcs, flow);
       if (!alike.isZero()) {
         Optional<BigDecimal> cost = Optional.of(writer.number(alike, RoundingMode.CEILING));
@@ -108,14 +108,40 @@ public record ProofSheet(List<Row> rows) {
     throw new IllegalArgumentException("the plan and the flow do not prove each other");
   }
 
+  /**
+   * What a flow bounds alone, with money that every plan pays alike.
+   *
+   * @param finish ticks within which the plans finish
+   * @throws IllegalArgumentException if the flow is none
+   */
+  public static ProofSheet ofBound(Network network, long finish, Flow flow, Money alike) {
+    FlowBound counted = new ProofChecker(network).bound(flow);
+    if (counted.fault().isPresent()) {
+      throw new IllegalArgumentException("no flow: " + counted.fault().get());
+    }
+    BigDecimal exact = counted.at(finish).plus(alike).rounded(MOST_DECIMALS, RoundingMode.FLOOR);
+    List<Arc> arcs = Arcs.of(network, finish, flow);
+    for (int decimals = FEWEST_DECIMALS; decimals <= MOST_DECIMALS; decimals += 3) {
+      Writer writer = new Writer(network, Optional.empty(), decimals);
+      List<Row> rows = writer.rows(arcs, flow);
+      if (!alike.isZero()) {
+        Optional<BigDecimal> cost = Optional.of(writer.number(alike, RoundingMode.FLOOR));
+        rows.add(0, money(Kind.FIXED, -1, "", Optional.empty(), cost));
+      }
+      BigDecimal lost = exact.subtract(sum(rows, Row::bound));
+      if (lost.abs().compareTo(HALF_A_CENT) < 0) {
+        return new ProofSheet(rows);
+      }
+    }
+    throw new IllegalArgumentException("the flow cannot be written in decimals");
+  }
+
   /** What a plan pays alone, with nothing that bounds it. */
   public static ProofSheet ofPlan(Network network, Plan plan, Map<String, Money> other) {
-    Writer writer = new Writer(network, plan, FEWEST_DECIMALS);
+    Writer writer = new Writer(network, Optional.of(plan), FEWEST_DECIMALS);
     List<Row> rows = new ArrayList<>();
     for (int i = 0; i < network.size(); i++) {
-      Activity activity = network.activity(i);
-      long shortened = activity.normal() - plan.duration(i);
-      Money cost = activity.normalCost().plus(activity.slope().times(shortened));
+      Money cost = plan.costOf(network, i);
       if (!cost.isZero()) {
         BigDecimal number = writer.number(cost, RoundingMode.HALF_UP);
         rows.add(money(Kind.FIXED, i, "", Optional.of(number), Optional.empty()));
@@ -131,26 +157,6 @@ public record ProofSheet(List<Row> rows) {
                     Optional.of(writer.number(cost, RoundingMode.HALF_UP)),
                     Optional.empty())));
     return new ProofSheet(rows);
-  }
-
-  /** The bounds alone. */
-  public ProofSheet withoutPlan() {
-    return new ProofSheet(
-        rows.stream()
-            .filter(row -> row.bound().isPresent())
-            .map(
-                row ->
-                    new Row(
-                        row.kind(),
-                        row.arc(),
-                        row.activity(),
-                        row.name(),
-                        row.length(),
-                        row.flow(),
-                        row.capacity(),
-                        Optional.empty(),
-                        row.bound()))
-            .toList());
   }
 
   /** The total of the column that the plan pays. */
@@ -200,7 +206,7 @@ public record ProofSheet(List<Row> rows) {
   }
 
   /** Writes the rows with a number of decimals. */
-  private record Writer(Network network, Plan plan, int decimals) {
+  private record Writer(Network network, Optional<Plan> plan, int decimals) {
 
     List<Row> rows(List<Arc> arcs, Flow flow) {
       List<Row> rows = new ArrayList<>();
@@ -209,7 +215,7 @@ public record ProofSheet(List<Row> rows) {
         Money least = activity.normalCost().min(activity.crashCost());
         if (!least.isZero()) {
           Optional<BigDecimal> cost = Optional.of(number(least, RoundingMode.CEILING));
-          rows.add(money(Kind.FIXED, i, "", cost, cost));
+          rows.add(money(Kind.FIXED, i, "", plan.isPresent() ? cost : Optional.empty(), cost));
         }
       }
       List<BigDecimal> amounts = DecimalFlow.of(arcs, network, flow.scale().perUnit(), decimals);
@@ -239,15 +245,19 @@ public record ProofSheet(List<Row> rows) {
 
     /** What the plan pays where it falls short of an arc that has a price. */
     private Money paid(Arc arc) {
+      if (plan.isEmpty()) {
+        return Money.ZERO;
+      }
+      Plan of = plan.get();
       return switch (arc.over()) {
         case SLOPE, BACK_OVER_CRASH -> {
           Activity activity = network.activity(arc.index());
           long from = arc.over() == Arc.Over.SLOPE ? activity.normal() : activity.crash();
-          yield activity.slope().times(from - plan.duration(arc.index()));
+          yield activity.slope().times(from - of.duration(arc.index()));
         }
         case SPAN -> {
           Span span = network.spans().get(arc.index());
-          yield span.rate().times(plan.charged(span));
+          yield span.rate().times(of.charged(span));
         }
         default -> Money.ZERO;
       };

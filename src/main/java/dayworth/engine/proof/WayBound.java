@@ -204,6 +204,11 @@ public final class WayBound {
       return sum.total().add(lengths.total()).add(paid);
     }
 
+    /** What an activity takes in at its start and gives out at its finish, per tick, scaled. */
+    public long through(int activity) {
+      return atStart[activity];
+    }
+
     /** The allowed way of an activity for which cost and flow × duration are least. */
     public int best(int i, boolean[] allowed) {
       int best = -1;

@@ -13,18 +13,22 @@ import java.util.List;
  * is kept: t(v) − t(u) ≥ its length. Make t(to) − t(from) smaller, at the least cost.
  *
  * <p><b>Method.</b> Primal-dual successive longest paths (Kelley 1961; Fulkerson 1961; the view by
- * minimum cuts is Phillips and Dessouky 1977). Known is the set of events that are reached from
+ * minimum cuts is Phillips and Dessouky 1977). A set of events holds all that are reached from
  * {@code from} over half-arcs with room and no slack. While {@code to} is outside, the set moves
  * later as one until the next half-arc out of it becomes tight, and grows over it: the half-arcs
  * between set and rest are a minimum cut, and what flows over it is the price of a tick. When
- * {@code to} is reached, a maximum flow is sent over the half-arcs without slack ({@link
- * TightFlow}), and what is then no longer reached leaves the set.
+ * {@code to} has joined, a maximum flow is sent over the half-arcs without slack ({@link
+ * TightFlow}), and the events that still lead to {@code to} leave the set. Others stay, though some
+ * may not be reached any more: moving them along costs nothing and saves most of them from leaving
+ * and joining again. Only when {@code to} joins by way of one of these, all such are let go of.
  *
- * <p><b>Invariant.</b> Every half-arc with room is kept by the times; half-arcs with flow in both
- * directions have no slack; so times and flow are cheapest for the present t(to) − t(from).
+ * <p><b>Invariant.</b> Every half-arc with room is kept by the times, and where the set waits, none
+ * without slack leads out of it; half-arcs with flow in both directions have no slack; so times and
+ * flow are cheapest for the present t(to) − t(from).
  *
- * <p><b>Cost.</b> For each change of price the half-arcs of the events reached, a few times over;
- * for each event that joins or leaves its half-arcs and their places in a queue. All numbers are
+ * <p><b>Cost.</b> For each change of price the half-arcs of the events that move and lead to {@code
+ * to}, a few times over; for each event that joins or leaves its half-arcs and their places in a
+ * queue; at most once for each change of price the half-arcs of all that move. All numbers are
  * whole.
  */
 final class Squeeze {
@@ -61,10 +65,11 @@ final class Squeeze {
 
   private final ArcNetwork net;
 
-  /** Of an event that is not reached its time; of one that is its time less the present shift. */
+  /** Of an event that does not move its time; of one that does its time less the present shift. */
   private final long[] time;
 
-  private final Reached reached;
+  private final MovingSet moving;
+  private final TightPart part;
   private final TightFlow flow;
   private final ArrivalQueue queue = new ArrivalQueue();
 
@@ -79,13 +84,14 @@ final class Squeeze {
   Squeeze(ArcNetwork net, long[] times) {
     this.net = net;
     this.time = times.clone();
-    this.reached = new Reached(net, time);
-    this.flow = new TightFlow(net, time, reached);
+    this.moving = new MovingSet(net, time);
+    this.part = new TightPart(net, time, moving);
+    this.flow = new TightFlow(part, net.events());
   }
 
   /** The present time of an event. */
   long time(int event) {
-    return reached.holds(event) ? time[event] + shift : time[event];
+    return moving.holds(event) ? time[event] + shift : time[event];
   }
 
   /** How much the last squeeze sent. */
@@ -120,22 +126,30 @@ final class Squeeze {
       if (!reach(from, to, close) || time(to) - time(from) <= close) {
         return End.CLOSE_ENOUGH;
       }
+      int source = part.pick(from, to);
+      if (source < 0) {
+        moving.sweep();
+        leave();
+        continue;
+      }
       long length = time(to) - time(from);
       listener.arrived(length);
-      sent += flow.send(from, to, most == UNLIMITED ? UNLIMITED : most - sent);
+      sent += flow.send(source, most == UNLIMITED ? UNLIMITED : most - sent);
       if (flow.isHeld()) {
         return End.HELD;
       }
       listener.priced(length, sent);
-      reached.sweep();
-      leave();
+      if (sent < most) {
+        part.letGoOfLeading();
+        leave();
+      }
     }
     return End.AMOUNT_SENT;
   }
 
   /** Lets go of all events; they keep the times they have come to. */
   void settle() {
-    reached.clear(shift);
+    moving.clear(shift);
     queue.clear();
     tightCount = 0;
     shift = 0;
@@ -155,7 +169,7 @@ final class Squeeze {
   private boolean reach(int from, int to, long close) {
     while (true) {
       spread();
-      if (reached.holds(to)) {
+      if (moving.holds(to)) {
         return true;
       }
       long enough = time[to] - time[from] - close;
@@ -167,14 +181,14 @@ final class Squeeze {
     }
   }
 
-  /** Adds all that is reached at the present shift. */
+  /** Adds all that is reached from the set at the present shift. */
   private void spread() {
     while (tightCount > 0 || (!queue.isEmpty() && queue.leastKey() <= shift)) {
       int half = tightCount > 0 ? tight[--tightCount] : queue.pop();
       int tail = net.head[net.mate[half]];
       int head = net.head[half];
-      if (!reached.holds(head)
-          && reached.holds(tail)
+      if (!moving.holds(head)
+          && moving.holds(tail)
           && net.room[half] > 0
           && time[head] - time[tail] - net.length[half] == shift) {
         join(head);
@@ -184,10 +198,10 @@ final class Squeeze {
 
   private void join(int event) {
     time[event] -= shift;
-    reached.add(event);
+    moving.add(event);
     for (int out = net.first[event]; out < net.first[event + 1]; out++) {
       int head = net.head[out];
-      if (net.room[out] > 0 && !reached.holds(head)) {
+      if (net.room[out] > 0 && !moving.holds(head)) {
         await(out, time[head] - time[event] - net.length[out]);
       }
     }
@@ -204,17 +218,17 @@ final class Squeeze {
     tight[tightCount++] = half;
   }
 
-  /** Gives the events that are no longer reached their own time again. */
+  /** Gives the events that were let go of their own time again. */
   private void leave() {
-    for (int k = 0; k < reached.lostCount(); k++) {
-      time[reached.lost(k)] += shift;
+    for (int k = 0; k < moving.lostCount(); k++) {
+      time[moving.lost(k)] += shift;
     }
-    for (int k = 0; k < reached.lostCount(); k++) {
-      int event = reached.lost(k);
+    for (int k = 0; k < moving.lostCount(); k++) {
+      int event = moving.lost(k);
       for (int out = net.first[event]; out < net.first[event + 1]; out++) {
         int in = net.mate[out];
         int tail = net.head[out];
-        if (net.room[in] > 0 && reached.holds(tail)) {
+        if (net.room[in] > 0 && moving.holds(tail)) {
           queue.push(time[event] - time[tail] - net.length[in], in);
         }
       }

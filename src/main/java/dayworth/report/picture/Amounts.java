@@ -2,7 +2,9 @@ package dayworth.report.picture;
 
 import dayworth.decision.CurveAnswer;
 import dayworth.decision.Finish;
+import dayworth.engine.Curve;
 import java.math.BigDecimal;
+import java.util.Optional;
 
 /**
  * The parts of a finish's money as the pictures show them: without the direct cost that the curve's
@@ -12,16 +14,30 @@ final class Amounts {
 
   private final BigDecimal firstDirect;
   private final BigDecimal fixed;
+  private final Optional<Curve> relaxed;
 
   Amounts(CurveAnswer answer) {
     Finish first = answer.rows().get(0);
     firstDirect = first.direct().cents();
     fixed = first.other().fixed().cents();
+    relaxed = answer.relaxed();
   }
 
   /** Direct cost above that of the first row. */
   BigDecimal extraDirect(Finish finish) {
     return finish.direct().cents().subtract(firstDirect);
+  }
+
+  /** The same of what direct cost is at least; nothing where that is not known. */
+  BigDecimal leastExtraDirect(Finish finish) {
+    return relaxed
+        .map(
+            curve ->
+                curve
+                    .costAt(Math.max(curve.shortest(), finish.duration()))
+                    .cents()
+                    .subtract(firstDirect))
+        .orElse(BigDecimal.ZERO);
   }
 
   BigDecimal timeRelated(Finish finish) {

@@ -37,7 +37,7 @@ final class CompressionMap implements Picture {
     rows = MapRows.of(answer, timings);
     wording = new MapWording(answer, words, columns, timings, rows);
     heading = new Heading(layout, wording.title(), wording.note());
-    legend = new MapLegend(layout, words);
+    legend = new MapLegend(layout, words, rows.haveMeasures());
     plot =
         layout.plot(heading.height() + FIGURES_ABOVE, Math.max(1, rows.shown().size()) * ROW + 4);
     finishes = new FinishAxis(answer, layout, plot, words);
@@ -90,7 +90,7 @@ final class CompressionMap implements Picture {
     for (int i = 0; i < rows.shown().size(); i++) {
       MapRow row = rows.shown().get(i);
       cells.writeFigures(sheet, row, top(i));
-      paintWords(sheet, row.activity(), Math.min(WIDEST_ID, idWidth), top(i) + 13);
+      paintWords(sheet, row, Math.min(WIDEST_ID, idWidth), top(i) + 13);
     }
     legend.paint(sheet, plot.bottom() + AXIS_BELOW);
   }
@@ -99,14 +99,15 @@ final class CompressionMap implements Picture {
     return plot.y() + 2 + row * ROW;
   }
 
-  private void paintWords(Sheet sheet, Activity activity, double idWidth, double baseline) {
+  private void paintWords(Sheet sheet, MapRow row, double idWidth, double baseline) {
+    Activity activity = row.activity();
     String id = Type.NAME.fit(Words.safe(activity.id()), idWidth);
     sheet.text(Type.NAME, Look.INK, Sheet.Anchor.START, Layout.MARGIN, baseline, id);
     double from = Layout.MARGIN + idWidth + ID_GAP;
     String name = Type.AXIS.fit(Words.safe(activity.name()), plot.x() - 8 - from);
     sheet.text(Type.AXIS, Look.INK, Sheet.Anchor.START, from, baseline, name);
     double room = layout.width() - plot.right() - RIGHT - 4;
-    String price = Type.AXIS.fit(wording.price(activity), room);
+    String price = Type.AXIS.fit(wording.price(row), room);
     sheet.text(Type.AXIS, Look.QUIET, Sheet.Anchor.START, plot.right() + RIGHT, baseline, price);
   }
 }

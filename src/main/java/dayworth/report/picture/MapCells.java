@@ -71,6 +71,9 @@ final class MapCells {
     if (row.isAtShortest(column)) {
       ink.cap(box);
     }
+    if (row.isByMeasure(column)) {
+      ink.measure(box);
+    }
   }
 
   /** One frame around neighbours that are all given back; without figures their tones show. */

@@ -12,6 +12,7 @@ final class MapInk {
   static final double BAND = 2.4;
 
   private static final double CAP = 2.6;
+  private static final double NOTCH = 4;
   private static final double HATCH_EVERY = 6;
 
   private final List<List<Box>> tones = new ArrayList<>();
@@ -19,6 +20,7 @@ final class MapInk {
   private final List<Box> plates = new ArrayList<>();
   private final List<Box> relaxed = new ArrayList<>();
   private final List<Box> caps = new ArrayList<>();
+  private final List<Box> notches = new ArrayList<>();
   private final List<Box> bands = new ArrayList<>();
   private final List<double[]> hatches = new ArrayList<>();
 
@@ -40,6 +42,11 @@ final class MapInk {
 
   void cap(Box box) {
     caps.add(new Box(box.x(), box.y(), box.width(), CAP));
+  }
+
+  /** A notch in the corner: it is done by a measure. */
+  void measure(Box box) {
+    notches.add(new Box(box.x(), box.bottom() - NOTCH, Math.min(NOTCH, box.width()), NOTCH));
   }
 
   /** Paper, so that a figure in a frame can be read. */
@@ -66,6 +73,7 @@ final class MapInk {
       sheet.fill(Look.OCHRE.get(tone), tones.get(tone));
     }
     sheet.fill(Look.INK, caps);
+    sheet.fill(Look.INK, notches);
     sheet.fill(Look.PAPER, plates);
     sheet.frames(Pen.RELAXED, relaxed);
     for (Box band : bands) {

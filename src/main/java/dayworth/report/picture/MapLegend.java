@@ -3,7 +3,7 @@ package dayworth.report.picture;
 import java.util.ArrayList;
 import java.util.List;
 
-/** The five marks of the compression map; no other picture needs a legend. */
+/** The marks of the compression map; no other picture needs a legend. */
 final class MapLegend {
 
   private static final double MARK = 24;
@@ -16,11 +16,13 @@ final class MapLegend {
   private record Mark(String text, double x, double y) {}
 
   private final Words words;
+  private final boolean haveMeasures;
   private final List<Mark> marks = new ArrayList<>();
   private double bottom;
 
-  MapLegend(Layout layout, Words words) {
+  MapLegend(Layout layout, Words words, boolean haveMeasures) {
     this.words = words;
+    this.haveMeasures = haveMeasures;
     double x = Layout.MARGIN;
     double y = 0;
     for (String text : texts()) {
@@ -36,12 +38,18 @@ final class MapLegend {
   }
 
   private List<String> texts() {
-    return List.of(
-        "So many " + words.units() + " bought: the fuller, the nearer the limit",
-        "At its shortest: nothing more to buy",
-        "Fewer than at the finish before: given back",
-        "Has float",
-        "Critical: no float");
+    List<String> texts =
+        new ArrayList<>(
+            List.of(
+                "So many " + words.units() + " bought: the fuller, the nearer the limit",
+                "At its shortest: nothing more to buy",
+                "Fewer than at the finish before: given back",
+                "Has float",
+                "Critical: no float"));
+    if (haveMeasures) {
+      texts.add("Done by a measure");
+    }
+    return texts;
   }
 
   double height() {
@@ -76,9 +84,13 @@ final class MapLegend {
         ink.relaxed(box);
       }
       case 3 -> ink.hatch(box);
-      default -> {
+      case 4 -> {
         ink.riser(box.x() + MapInk.BAND / 2, box.y(), box.height());
         ink.critical(box.x(), box.right(), box.bottom());
+      }
+      default -> {
+        ink.bought(box, 1);
+        ink.measure(box);
       }
     }
     ink.paint(sheet);

@@ -1,6 +1,7 @@
 package dayworth.report.picture;
 
 import dayworth.network.Activity;
+import dayworth.network.Plan;
 import dayworth.network.Timing;
 import java.util.List;
 
@@ -9,13 +10,19 @@ import java.util.List;
  *
  * @param index in the network
  * @param activity itself
+ * @param most ticks that it can be shorter than normal, along its line or by a measure
  * @param timings the plans of the columns
  */
-record MapRow(int index, Activity activity, List<Timing> timings) {
+record MapRow(int index, Activity activity, long most, List<Timing> timings) {
 
   /** Ticks that the activity is shorter than normal. */
   long bought(int column) {
     return activity.normal() - timings.get(column).plan().duration(index);
+  }
+
+  /** Whether it is done by a measure. */
+  boolean isByMeasure(int column) {
+    return timings.get(column).plan().measure(index) != Plan.NO_MEASURE;
   }
 
   boolean isCritical(int column) {
@@ -23,7 +30,7 @@ record MapRow(int index, Activity activity, List<Timing> timings) {
   }
 
   boolean isAtShortest(int column) {
-    return activity.isCompressible() && bought(column) == activity.mostShortening();
+    return most > 0 && bought(column) == most;
   }
 
   /** Whether less is bought than at the next longer finish. */
@@ -53,12 +60,21 @@ record MapRow(int index, Activity activity, List<Timing> timings) {
 
   /** Whether anything can be seen of it besides float. */
   boolean isTold() {
-    return mostBought() > 0 || criticalColumns() > 0;
+    return mostBought() > 0 || criticalColumns() > 0 || isEverByMeasure();
+  }
+
+  private boolean isEverByMeasure() {
+    for (int column = 0; column < timings.size(); column++) {
+      if (isByMeasure(column)) {
+        return true;
+      }
+    }
+    return false;
   }
 
   /** 0 for hardly compressed to {@code tones} - 1 for as far as it will go. */
   int tone(int column, int tones) {
-    double share = bought(column) / (double) activity.mostShortening();
+    double share = bought(column) / (double) most;
     return Math.max(0, (int) Math.ceil(share * tones) - 1);
   }
 }

@@ -1,11 +1,15 @@
 package dayworth.report.picture;
 
 import dayworth.decision.CurveAnswer;
+import dayworth.engine.Ways;
+import dayworth.network.Activity;
 import dayworth.network.Network;
+import dayworth.network.Plan;
 import dayworth.network.Timing;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.stream.IntStream;
 
 /**
  * The activities that are rows of the compression map, in file order: those that are shortened or
@@ -23,11 +27,19 @@ record MapRows(List<MapRow> shown, int quiet, int crowded) {
     shown = List.copyOf(shown);
   }
 
+  /** Whether some activity is done by a measure in some column. */
+  boolean haveMeasures() {
+    return shown.stream()
+        .anyMatch(row -> IntStream.range(0, row.timings().size()).anyMatch(row::isByMeasure));
+  }
+
   static MapRows of(CurveAnswer answer, List<Timing> timings) {
     Network network = answer.of().network();
+    Plan shortest = Ways.of(network).shortest();
     List<MapRow> told = new ArrayList<>();
     for (int i = 0; i < network.size(); i++) {
-      MapRow row = new MapRow(i, network.activity(i), timings);
+      Activity activity = network.activity(i);
+      MapRow row = new MapRow(i, activity, activity.normal() - shortest.duration(i), timings);
       if (row.isTold() && answer.of().isToGo(i)) {
         told.add(row);
       }

@@ -92,11 +92,22 @@ final class MapWording {
   }
 
   /** What a unit of it costs and how much there is to buy. */
-  String price(Activity activity) {
+  String price(MapRow row) {
+    Activity activity = row.activity();
+    TimeScale scale = answer.of().network().scale();
+    int measures = answer.of().network().measures().of(row.index()).length;
+    if (measures > 0) {
+      return Words.count(measures, "measure", "measures")
+          + (row.most() > 0 ? ", up to " + words.figure(row.most()) : "");
+    }
     if (!activity.isCompressible()) {
       return "cannot be shortened";
     }
-    TimeScale scale = answer.of().network().scale();
+    if (!activity.divisible()) {
+      return words.amount(activity.crashExtra().cents())
+          + " for all "
+          + words.figure(activity.mostShortening());
+    }
     return words.amount(activity.slope().times(scale.ticksPerUnit()).cents())
         + ", up to "
         + words.figure(activity.mostShortening());

@@ -50,6 +50,15 @@ record MoneyLine(
         lines.add(part);
       }
     }
+    if (answer.relaxed().isPresent()) {
+      lines.add(
+          new MoneyLine(
+              Pen.LEAST_DIRECT,
+              Look.QUIET,
+              "If measures could be split",
+              amounts::leastExtraDirect,
+              false));
+    }
     lines.add(
         new MoneyLine(Pen.DIRECT, Look.INK, "Extra direct cost", amounts::extraDirect, false));
     lines.add(new MoneyLine(Pen.TOTAL, Look.PLUM, "Total", amounts::total, false));

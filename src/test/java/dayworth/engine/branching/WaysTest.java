@@ -3,6 +3,7 @@ package dayworth.engine.branching;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import dayworth.engine.proof.ProofChecker;
 import dayworth.network.Network;
 import dayworth.testing.BruteForce;
 import dayworth.testing.RandomMeasures;
@@ -10,6 +11,7 @@ import dayworth.testing.RandomNetworks;
 import dayworth.value.Money;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.stream.LongStream;
 import org.junit.jupiter.api.Test;
 
@@ -42,6 +44,10 @@ class WaysTest {
         assertEquals(least, point.cost(), where);
         assertTrue(point.isProved(), where);
         assertEquals(least, point.plan().directCost(network), where);
+        assertEquals(
+            Optional.empty(),
+            ProofChecker.possible(network, point.plan(), point.duration()),
+            where);
       }
     }
   }

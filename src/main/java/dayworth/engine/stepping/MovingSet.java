@@ -1,12 +1,13 @@
 package dayworth.engine.stepping;
 
 /**
- * The events that are reached from one event over half-arcs with room and no slack.
+ * The events that a {@link Squeeze} moves as one.
  *
- * <p>Events are added as they are reached; after flow has taken room away, {@link #sweep} finds
- * anew what is still reached, and the rest is lost. A sweep costs the half-arcs of all events held.
+ * <p>All events that are reached from the first one over half-arcs with room and no slack are held.
+ * So may others be that were reached before flow took room away: to find out costs the half-arcs of
+ * all events held, and most will be reached again soon. {@link #sweep} finds out.
  */
-final class Reached {
+final class MovingSet {
 
   private static final byte OUTSIDE = 0;
   private static final byte HELD = 1;
@@ -14,21 +15,24 @@ final class Reached {
   /** Held before the sweep and not yet reached again. */
   private static final byte IN_DOUBT = 2;
 
+  /** Not held any more, but still among the members. */
+  private static final byte LET_GO = 3;
+
   private final ArcNetwork net;
   private final long[] time;
   private final byte[] state;
 
-  /** The events held, in the order in which they were reached. */
+  /** The events held and some that were let go of, in the order in which they were added. */
   private int[] members;
 
   private int count;
 
-  /** What the last sweep lost. */
+  /** What the set lost last. */
   private int[] lost;
 
   private int lostCount;
 
-  Reached(ArcNetwork net, long[] time) {
+  MovingSet(ArcNetwork net, long[] time) {
     this.net = net;
     this.time = time;
     state = new byte[net.events()];
@@ -41,8 +45,20 @@ final class Reached {
   }
 
   void add(int event) {
+    if (state[event] != LET_GO) {
+      members[count++] = event;
+    }
     state[event] = HELD;
-    members[count++] = event;
+  }
+
+  /** Begins a new list of what is lost. */
+  void forgetLost() {
+    lostCount = 0;
+  }
+
+  void letGo(int event) {
+    state[event] = LET_GO;
+    lost[lostCount++] = event;
   }
 
   /** Keeps what can still be reached from the first event that was added. */
@@ -50,7 +66,7 @@ final class Reached {
     int[] before = members;
     int countBefore = count;
     for (int k = 0; k < countBefore; k++) {
-      state[before[k]] = IN_DOUBT;
+      state[before[k]] = state[before[k]] == HELD ? IN_DOUBT : OUTSIDE;
     }
     members = lost;
     count = 0;
@@ -90,8 +106,11 @@ final class Reached {
   /** Lets go of all events; they move by {@code shift}. */
   void clear(long shift) {
     for (int k = 0; k < count; k++) {
-      time[members[k]] += shift;
-      state[members[k]] = OUTSIDE;
+      int event = members[k];
+      if (state[event] == HELD) {
+        time[event] += shift;
+      }
+      state[event] = OUTSIDE;
     }
     count = 0;
     lostCount = 0;

@@ -1,0 +1,168 @@
+package dayworth.report;
+
+import dayworth.buildup.ActivityBuildUp;
+import dayworth.buildup.OutputLoss;
+import dayworth.buildup.Pattern;
+import dayworth.buildup.Way;
+import dayworth.decision.BuildUpAnswer;
+import dayworth.decision.Case;
+import dayworth.value.Money;
+import dayworth.value.Quantity;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.stream.Collectors;
+
+/** The short answer of {@code dayworth buildup} for a terminal. */
+public final class BuildUpText {
+
+  private final BuildUpAnswer answer;
+  private final Case of;
+  private final Style style;
+  private final int width;
+
+  private BuildUpText(BuildUpAnswer answer, Style style, int width) {
+    this.answer = answer;
+    this.of = answer.of();
+    this.style = style;
+    this.width = Math.min(width, CurveText.WIDEST);
+  }
+
+  /**
+   * The lines of the answer; the first says it all.
+   *
+   * @param width columns of the terminal
+   */
+  public static List<String> lines(BuildUpAnswer answer, Style style, int width) {
+    return new BuildUpText(answer, style, width).lines();
+  }
+
+  /** What is said where there is nothing to build up. */
+  public static String nothing(Case of) {
+    boolean known = of.inputs().stream().anyMatch(input -> input.name().equals("labour.csv"));
+    return known
+        ? "No work with labour is to go, so there is nothing to build up."
+        : "There is nothing to build up: the case has no labour.csv.";
+  }
+
+  private List<String> lines() {
+    List<String> lines = new ArrayList<>();
+    lines.add(style.bold(Wording.answer(sentence(), of.currency(), width)));
+    lines.add("");
+    if (answer.asked().isEmpty()) {
+      lines.addAll(new SpellSummary(answer).lines(width));
+    } else {
+      lines.addAll(new SpellLines(answer, answer.shown().get(0)).lines(width));
+    }
+    lines.add("");
+    losses().forEach(text -> prose(lines, text));
+    lines.add("");
+    cautions().forEach(text -> prose(lines, text));
+    prose(lines, CautionText.WHO_DECIDES);
+    lines.add("");
+    return lines;
+  }
+
+  private String sentence() {
+    List<WayFigures> offered =
+        answer.shown().stream()
+            .flatMap(built -> built.measures().map(way -> new WayFigures(built, way)))
+            .filter(figures -> figures.saved().signum() > 0)
+            .toList();
+    if (offered.isEmpty()) {
+      return "No pattern buys any time.";
+    }
+    Money least =
+        offered.stream().flatMap(f -> f.perUnitSaved().stream()).min(Money::compareTo).get();
+    String price = MoneyLook.of(List.of(least.cents())).text(least.cents());
+    String from = "from " + price + " for each " + of.unit().word() + " saved.";
+    if (answer.asked().isPresent()) {
+      ActivityBuildUp built = answer.shown().get(0);
+      return Wording.safe(id(built))
+          + " can be done faster in "
+          + Wording.count(offered.size(), "way", "ways")
+          + ", "
+          + from;
+    }
+    long activities = offered.stream().map(f -> f.built().activity()).distinct().count();
+    return "Working patterns buy time in "
+        + Wording.count((int) activities, "activity", "activities")
+        + ": "
+        + Wording.count(offered.size(), "measure", "measures")
+        + ", "
+        + from;
+  }
+
+  /** Every loss is an assumption: whose, stands beside the answer. */
+  private List<String> losses() {
+    Map<String, List<String>> bySource = new LinkedHashMap<>();
+    for (Pattern pattern : answer.all().bought()) {
+      String name = Wording.safe(pattern.name());
+      bySource
+          .computeIfAbsent(sources(pattern.loss()), source -> new ArrayList<>())
+          .add(name + " " + loss(pattern.loss()));
+    }
+    List<String> texts = new ArrayList<>();
+    bySource.forEach(
+        (source, losses) -> texts.add("Output lost: " + String.join("; ", losses) + source + "."));
+    Quantity factor = answer.all().lossFactor();
+    if (!factor.equals(Quantity.ONE)) {
+      String times = WayFigures.number(factor).toPlainString();
+      texts.add("These are the case's losses times " + times + " (--loss-factor).");
+    }
+    return texts;
+  }
+
+  private static String sources(OutputLoss loss) {
+    List<String> sources = loss.sources(loss.weeks().size());
+    return loss.weeks().isEmpty()
+        ? ""
+        : sources.stream()
+            .map(source -> source.isEmpty() ? "no source given" : Wording.safe(source))
+            .collect(Collectors.joining("; ", ". Source: ", ""));
+  }
+
+  private static String loss(OutputLoss loss) {
+    if (loss.weeks().isEmpty()) {
+      return "none, for none is given";
+    }
+    int last = loss.weeks().size();
+    String first = percent(loss, 1);
+    return loss.in(1).equals(loss.in(last))
+        ? first
+        : first + " in week 1 to " + percent(loss, last) + " from week " + last + " on";
+  }
+
+  private static String percent(OutputLoss loss, int week) {
+    Quantity percent = loss.in(week).times(Quantity.of(100));
+    return WayFigures.number(percent).toPlainString() + " %";
+  }
+
+  private List<String> cautions() {
+    List<String> texts = new ArrayList<>();
+    for (Pattern pattern : answer.all().bought()) {
+      List<String> of =
+          answer.cautions(pattern).stream()
+              .map(caution -> CautionText.of(caution, pattern))
+              .toList();
+      if (!of.isEmpty()) {
+        texts.add("Caution, " + Wording.safe(pattern.name()) + ": " + String.join("; ", of) + ".");
+      }
+    }
+    return texts;
+  }
+
+  private String id(ActivityBuildUp built) {
+    return of.network().activity(built.activity()).id();
+  }
+
+  private void prose(List<String> lines, String text) {
+    lines.addAll(Wording.wrap(text, Wording.INDENT, width));
+  }
+
+  /** Weeks of a spell, as lists name them. */
+  static String weeks(Way way) {
+    return way.spell().roundedWeeks().toPlainString();
+  }
+}
