@@ -59,6 +59,7 @@ public record Case(
       Terms terms,
       MomentMoney momentMoney,
       Optional<Progress> progress,
+      BuildUp buildUp,
       List<Notice> warnings,
       List<InputFile> inputs) {
     this(
@@ -70,6 +71,7 @@ public record Case(
         terms,
         momentMoney,
         progress,
+        buildUp,
         warnings,
         inputs,
         Submission.NONE);
