@@ -4,6 +4,7 @@ import dayworth.decision.Finish;
 import dayworth.report.brief.page.Picture;
 import dayworth.report.brief.svg.Drawing;
 import dayworth.report.brief.svg.Drawing.Anchor;
+import dayworth.report.brief.svg.Face;
 import dayworth.report.brief.svg.Hatch;
 import java.math.BigDecimal;
 import java.util.ArrayList;
@@ -19,6 +20,7 @@ final class ChoicePicture {
   private static final double BASE = 206;
   private static final double TOP = 42;
   private static final double GAP = 1.6;
+  private static final double NARROW_BAR = 44;
 
   private final Words words;
   private final Outcome outcome;
@@ -68,12 +70,10 @@ final class ChoicePicture {
     double bar = Math.min(widest, column - 18);
     drawing.line("g0", first, BASE, width, BASE);
     for (int i = 0; i < choices.size(); i++) {
-      stack(drawing, choices.get(i), first + column * (i + 0.5), bar, first > 0);
+      stack(drawing, choices.get(i), first + column * (i + 0.5), bar, column);
     }
     if (first > 0) {
-      double total =
-          dayworth.report.brief.svg.Face.SEMIBOLD.width(
-              words.money(outcome.depends(choices.get(0))), 17);
+      double total = Face.SEMIBOLD.width(words.money(outcome.depends(choices.get(0))), 17);
       names(drawing, first + column / 2 - Math.max(bar, total) / 2 - 10);
     } else {
       legend(drawing);
@@ -92,7 +92,8 @@ final class ChoicePicture {
 
   private record Piece(String name, String ink, String kind, BigDecimal amount) {}
 
-  private void stack(Drawing drawing, Finish finish, double x, double bar, boolean large) {
+  private void stack(Drawing drawing, Finish finish, double x, double bar, double column) {
+    boolean large = bar > NARROW_BAR;
     BigDecimal sum = BigDecimal.ZERO;
     double left = x - bar / 2;
     for (Piece piece : pieces(finish)) {
@@ -116,7 +117,11 @@ final class ChoicePicture {
     drawing.line("tot", left - 8, total, x + bar / 2 + 8, total);
     String style = large ? "big plum" : "b plum";
     double above = Math.min(scale.y(sum), total) - (large ? 8 : 6);
-    drawing.text(style, Anchor.MIDDLE, x, above, words.money(outcome.depends(finish)));
+    String text = words.money(outcome.depends(finish));
+    // Where amounts have no room beside each other, the table below has them.
+    if (large || Face.SEMIBOLD.width(text, 13) <= column - 4) {
+      drawing.text(style, Anchor.MIDDLE, x, above, text);
+    }
   }
 
   private static void piece(Drawing drawing, String kind, double x, double y, double w, double h) {
@@ -185,7 +190,7 @@ final class ChoicePicture {
         String name = piece.name().replace(" cost", "");
         piece(drawing, piece.kind(), x, BASE + 10, 12, 12);
         drawing.text("a", Anchor.START, x + 16, BASE + 20, name);
-        x += 16 + dayworth.report.brief.svg.Face.MEDIUM.width(name, 12) + 12;
+        x += 16 + Face.MEDIUM.width(name, 12) + 12;
       }
     }
   }

@@ -87,9 +87,22 @@ final class StepWhy {
         + all.substring(1);
   }
 
+  /**
+   * Only where that activity alone makes the price, and no other of the chain has a lower slope.
+   */
   private String cheapest(StepReason reason) {
-    boolean single = reason.shortened().size() == 1 && reason.givenBack().isEmpty();
-    return single
+    if (reason.shortened().size() != 1 || !reason.givenBack().isEmpty()) {
+      return "";
+    }
+    int activity = reason.shortened().get(0).activity();
+    Money price = network.activity(activity).slope();
+    boolean makesIt =
+        price.equals(reason.step().pricePerTick())
+            && network.measures().isNone()
+            && reason.chains().get(0).stream()
+                .filter(i -> reason.before().duration(i) > network.activity(i).crash())
+                .allMatch(i -> network.activity(i).slope().compareTo(price) >= 0);
+    return makesIt
         ? " Its cheapest " + words.unit() + " is in " + id(reason.shortened().get(0)) + "."
         : "";
   }
