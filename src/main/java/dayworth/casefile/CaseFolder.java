@@ -35,8 +35,11 @@ final class CaseFolder {
           MeasureTable.FILE,
           PackageTable.FILE);
 
+  /** No figure hangs on these, so that results do not carry their digests. */
+  private static final Set<String> BESIDE = Set.of(NotesText.FILE);
+
   /** Only other commands use these. */
-  private static final Set<String> LEFT_ALONE = Set.of("ranges.csv", "notes.md");
+  private static final Set<String> LEFT_ALONE = Set.of("ranges.csv");
 
   private static final String BYTE_ORDER_MARK = "\uFEFF";
 
@@ -80,9 +83,9 @@ final class CaseFolder {
   }
 
   private void checkName(String name) {
-    if (!SERVED.contains(name) && !LEFT_ALONE.contains(name)) {
+    if (!SERVED.contains(name) && !LEFT_ALONE.contains(name) && !BESIDE.contains(name)) {
       List<String> known = new ArrayList<>(SERVED);
-      LEFT_ALONE.stream().sorted().forEach(known::add);
+      Stream.of(LEFT_ALONE, BESIDE).flatMap(Set::stream).sorted().forEach(known::add);
       new Nearest(known)
           .to(name)
           .filter(near -> name.length() > 4)
@@ -99,18 +102,30 @@ final class CaseFolder {
 
   /** The text of a file without its byte order mark; empty if there is none or it is faulty. */
   Optional<String> text(String name) {
+    Optional<byte[]> bytes = bytes(name);
+    bytes.ifPresent(some -> inputs.add(new InputFile(name, digest(some))));
+    return bytes.flatMap(some -> decoded(name, some));
+  }
+
+  /** The text of a file that no figure hangs on, likewise. */
+  Optional<String> textBeside(String name) {
+    return bytes(name).flatMap(bytes -> decoded(name, bytes));
+  }
+
+  private Optional<byte[]> bytes(String name) {
     Path file = folder.resolve(name);
     if (!Files.exists(file)) {
       return Optional.empty();
     }
-    byte[] bytes;
     try {
-      bytes = Files.readAllBytes(file);
+      return Optional.of(Files.readAllBytes(file));
     } catch (IOException e) {
       findings.problem(Place.whole(name).notice("cannot be read", "", "a file one may read"));
       return Optional.empty();
     }
-    inputs.add(new InputFile(name, digest(bytes)));
+  }
+
+  private Optional<String> decoded(String name, byte[] bytes) {
     try {
       String text = StandardCharsets.UTF_8.newDecoder().decode(ByteBuffer.wrap(bytes)).toString();
       return Optional.of(text.startsWith(BYTE_ORDER_MARK) ? text.substring(1) : text);

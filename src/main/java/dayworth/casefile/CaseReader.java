@@ -4,7 +4,9 @@ import dayworth.buildup.BuildUp;
 import dayworth.contract.MomentMoney;
 import dayworth.decision.Case;
 import dayworth.decision.InputFile;
+import dayworth.decision.Notes;
 import dayworth.decision.Progress;
+import dayworth.decision.Submission;
 import dayworth.decision.WorkToGo;
 import dayworth.network.Activity;
 import dayworth.network.Link;
@@ -70,6 +72,7 @@ public final class CaseReader {
     Optional<String> runningText = folder.text(RunningTable.FILE);
     Optional<String> sectionText = folder.text(SectionTable.FILE);
     Optional<String> termText = folder.text(TermsTable.FILE);
+    Optional<String> noteText = folder.textBeside(NotesText.FILE);
     TermsTable terms = TermsTable.read(termText, findings);
     LabourTable labour = LabourTable.of(labourText, findings);
     Optional<List<ActivityRow>> stated =
@@ -82,6 +85,7 @@ public final class CaseReader {
     List<LinkRow> links = LinkTable.read(known, linkText, findings);
     List<LocalDate> holidays = HolidayTable.read(holidayText, findings);
     DateRules.check(known.orElse(List.of()), holidays, terms, findings);
+    Notes notes = noteText.map(text -> NotesText.read(text, findings)).orElse(Notes.NONE);
     List<ProgressRow> progress = ProgressTable.read(known, progressText, findings);
     List<SectionRow> sections = SectionTable.read(ids, terms, sectionText, findings);
     List<RunningRow> running = RunningTable.read(ids, terms, runningText, findings);
@@ -107,6 +111,7 @@ public final class CaseReader {
             running,
             measures,
             packages,
+            notes,
             buildUp,
             atLeast);
     if (findings.hasProblems()) {
@@ -125,6 +130,7 @@ public final class CaseReader {
       List<RunningRow> running,
       List<MeasureRow> measures,
       PackageTable packages,
+      Notes notes,
       BuildUp buildUp,
       TimeScale atLeast) {
     TimeScale scale =
@@ -168,7 +174,20 @@ public final class CaseReader {
         progress,
         buildUp,
         findings.warnings(),
-        folder.inputs());
+        folder.inputs(),
+        submission(terms, notes));
+  }
+
+  private static Submission submission(TermsTable terms, Notes notes) {
+    return new Submission(
+        terms.basis(),
+        terms.text("prepared_for").orElse(""),
+        terms.text("prepared_by").orElse(""),
+        terms.text("reference").orElse(""),
+        terms.validUntil(),
+        terms.number("on_cost_percent"),
+        terms.number("proposal_cost").map(Money::of),
+        notes);
   }
 
   private void checkSomethingIsToGo(Optional<Progress> progress) {

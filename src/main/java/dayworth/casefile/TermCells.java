@@ -2,11 +2,10 @@ package dayworth.casefile;
 
 import dayworth.contract.PartWeek;
 import dayworth.contract.Per;
+import dayworth.decision.Basis;
 import dayworth.decision.TimeUnit;
 import java.util.List;
 import java.util.Map;
-import java.util.Set;
-import java.util.stream.Stream;
 
 /** The terms that terms.csv may have, each with the parser of its value. */
 final class TermCells {
@@ -50,32 +49,32 @@ final class TermCells {
           Map.entry("bonus_rate", MoneyCell.AMOUNT),
           Map.entry("bonus_per", PER),
           Map.entry("bonus_cap", MoneyCell.ABOVE_ZERO),
-          Map.entry("bonus_cap_units", TimeCell.DURATION));
-
-  private static final Set<String> NOT_YET =
-      Set.of(
-          "basis",
-          "prepared_for",
-          "prepared_by",
-          "reference",
-          "valid_until",
-          "on_cost_percent",
-          "proposal_cost");
+          Map.entry("bonus_cap_units", TimeCell.DURATION),
+          Map.entry("basis", basis()),
+          Map.entry("prepared_for", (text, style) -> text),
+          Map.entry("prepared_by", (text, style) -> text),
+          Map.entry("reference", (text, style) -> text),
+          Map.entry("valid_until", DateCell.DATE),
+          Map.entry("on_cost_percent", PercentCell.PERCENT),
+          Map.entry("proposal_cost", MoneyCell.AMOUNT));
 
   private TermCells() {}
 
-  /** Every name, served or not yet. */
+  private static WordCell<Basis> basis() {
+    WordCell<Basis> cell = WordCell.of("basis");
+    for (Basis basis : Basis.values()) {
+      cell = cell.with(basis.word(), basis);
+    }
+    return cell;
+  }
+
+  /** Every name. */
   static List<String> names() {
-    return Stream.concat(SERVED.keySet().stream(), NOT_YET.stream()).sorted().toList();
+    return SERVED.keySet().stream().sorted().toList();
   }
 
   static boolean isServed(String term) {
     return SERVED.containsKey(term);
-  }
-
-  /** Whether cases may use the term one day. */
-  static boolean isNotYetServed(String term) {
-    return NOT_YET.contains(term);
   }
 
   /** The parser of a term that is served. */
@@ -88,6 +87,7 @@ final class TermCells {
     CellParser<?> parser = SERVED.get(term);
     return parser instanceof MoneyCell
         || parser instanceof TimeCell
+        || parser instanceof PercentCell
         || parser instanceof Moment.Parser;
   }
 }

@@ -2,6 +2,7 @@ package dayworth.casefile;
 
 import dayworth.contract.PartWeek;
 import dayworth.contract.Per;
+import dayworth.decision.Basis;
 import dayworth.decision.TimeUnit;
 import java.math.BigDecimal;
 import java.time.DayOfWeek;
@@ -63,6 +64,15 @@ final class TermsTable {
     return Optional.ofNullable((PartWeek) values.get("damages_part_week"));
   }
 
+  Optional<Basis> basis() {
+    return Optional.ofNullable((Basis) values.get("basis"));
+  }
+
+  /** The last day on which an offer can be accepted. */
+  Optional<LocalDate> validUntil() {
+    return Optional.ofNullable((LocalDate) values.get("valid_until"));
+  }
+
   Optional<Moment> moment(String term) {
     return Optional.ofNullable((Moment) values.get(term));
   }
@@ -108,8 +118,6 @@ final class TermsTable {
       if (term.isEmpty()) {
         findings.problem(
             new Place(FILE, row.line(), "term").notice("blank", "", "each row needs a term"));
-      } else if (TermCells.isNotYetServed(term)) {
-        findings.problem(place.notice("this term is not served yet", term, "take the row out"));
       } else if (!TermCells.isServed(term)) {
         String right = nearest.hint(term, "one of " + String.join(", ", TermCells.names()));
         nearest.to(term).ifPresent(given::add);

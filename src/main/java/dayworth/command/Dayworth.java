@@ -17,6 +17,7 @@ import picocli.CommandLine.Spec;
       CurveCommand.class,
       MeetCommand.class,
       WeighCommand.class,
+      BriefCommand.class,
       BuildUpCommand.class,
       VerifyCommand.class
     })

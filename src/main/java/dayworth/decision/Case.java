@@ -28,6 +28,7 @@ import java.util.stream.IntStream;
  * @param buildUp what working patterns buy in the activities whose labour is known
  * @param warnings doubtful input, sorted; they stand in every result
  * @param inputs the files it was read from, sorted by name
+ * @param submission the paper in which it is put before a client
  */
 public record Case(
     String name,
@@ -40,11 +41,40 @@ public record Case(
     Optional<Progress> progress,
     BuildUp buildUp,
     List<Notice> warnings,
-    List<InputFile> inputs) {
+    List<InputFile> inputs,
+    Submission submission) {
 
   public Case {
     warnings = List.copyOf(warnings);
     inputs = List.copyOf(inputs);
+  }
+
+  /** A case of which no paper is known. */
+  public Case(
+      String name,
+      String title,
+      String currency,
+      TimeUnit unit,
+      Network network,
+      Terms terms,
+      MomentMoney momentMoney,
+      Optional<Progress> progress,
+      BuildUp buildUp,
+      List<Notice> warnings,
+      List<InputFile> inputs) {
+    this(
+        name,
+        title,
+        currency,
+        unit,
+        network,
+        terms,
+        momentMoney,
+        progress,
+        buildUp,
+        warnings,
+        inputs,
+        Submission.NONE);
   }
 
   /** A case of which nothing has started, without sections and running costs. */
@@ -135,6 +165,7 @@ public record Case(
         progress,
         buildUp,
         warnings,
-        inputs);
+        inputs,
+        submission);
   }
 }

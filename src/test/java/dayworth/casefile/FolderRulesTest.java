@@ -47,7 +47,6 @@ class FolderRulesTest {
   void otherFilesAreLeftAlone() throws IOException {
     oneActivity()
         .with("ranges.csv", "x")
-        .with("notes.md", "x")
         .with("README.txt", "x")
         .with("sketch.pdf", "x")
         .with("x.csv", "x");

@@ -10,7 +10,10 @@ import dayworth.contract.PartWeek;
 import dayworth.contract.Per;
 import dayworth.contract.Terms;
 import dayworth.contract.TimeRelated;
+import dayworth.decision.Basis;
 import dayworth.decision.Case;
+import dayworth.decision.Notes;
+import dayworth.decision.Submission;
 import dayworth.decision.TimeUnit;
 import dayworth.value.Money;
 import dayworth.value.TimeScale;
@@ -23,8 +26,6 @@ import java.util.List;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
-import org.junit.jupiter.params.ParameterizedTest;
-import org.junit.jupiter.params.provider.ValueSource;
 
 /** Each rule for terms.csv. */
 class TermRulesTest {
@@ -117,21 +118,56 @@ class TermRulesTest {
         "terms.csv:3 title | a second row of this term | title | line 2 has it");
   }
 
-  @ParameterizedTest
-  @ValueSource(
-      strings = {
-        "basis",
-        "prepared_for",
-        "prepared_by",
-        "reference",
-        "valid_until",
-        "on_cost_percent",
-        "proposal_cost"
-      })
-  void otherTermsAreNotServedYet(String term) throws IOException {
+  @Test
+  void termsOfTheBriefAreReadAsTheyStand() throws IOException {
+    Submission read =
+        terms(
+                """
+                basis,under protest
+                prepared_for,The harbour board
+                prepared_by,The builder
+                reference,HB-7
+                valid_until,2026-09-18
+                on_cost_percent,12.5
+                proposal_cost,1800
+                """)
+            .sound()
+            .submission();
+    assertEquals(Optional.of(Basis.UNDER_PROTEST), read.basis());
+    assertEquals("The harbour board", read.preparedFor());
+    assertEquals("The builder", read.preparedBy());
+    assertEquals("HB-7", read.reference());
+    assertEquals(Optional.of(LocalDate.of(2026, 9, 18)), read.validUntil());
+    assertEquals(Optional.of(new BigDecimal("12.5")), read.onCostPercent());
+    assertEquals(Optional.of(Money.of(1800)), read.proposalCost());
+    assertEquals(Notes.NONE, read.notes());
+  }
+
+  @Test
+  void aFaultyTermOfTheBriefIsPlacedAtItsTerm() throws IOException {
     expect(
-        term + ",5\n",
-        "terms.csv:2 " + term + " | this term is not served yet | " + term + " | take the row out");
+        """
+        basis,goodwill
+        valid_until,soon
+        on_cost_percent,-3
+        proposal_cost,much
+        """,
+        "terms.csv:2 basis | no such basis | goodwill"
+            + " | one of mitigation, own recovery, agreed, directed, under protest",
+        "terms.csv:3 valid_until | not a date | soon | year-month-day, such as 2026-09-07",
+        "terms.csv:4 on_cost_percent | negative | -3 | 0 or more",
+        "terms.csv:5 proposal_cost | not a number | much | digits only, with a point before"
+            + " decimals");
+    expect(
+        "on_cost_percent,12 %\n",
+        "terms.csv:2 on_cost_percent | a per cent sign | 12 % | write 12");
+    expect(
+        "on_cost_percent,1000.1\n",
+        "terms.csv:2 on_cost_percent | too much | 1000.1 | at most 1000");
+    expect(
+        "on_cost_percent,0.00001\n",
+        "terms.csv:2 on_cost_percent | too many decimals | 0.00001"
+            + " | a percentage has at most 4 decimals");
   }
 
   @Test
