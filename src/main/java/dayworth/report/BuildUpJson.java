@@ -27,7 +27,6 @@ final class BuildUpJson {
   }
 
   void write(JsonText json) throws IOException {
-    number(json, "loss_factor", answer.all().lossFactor());
     json.array("patterns", answer.all().patterns(), this::pattern);
     json.array("activities", answer.all().activities(), this::activity);
     json.text("who_decides", CautionText.WHO_DECIDES);

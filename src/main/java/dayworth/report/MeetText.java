@@ -41,6 +41,7 @@ public final class MeetText {
     lines.add(style.bold(Wording.answer(text.sentence(), text.of.currency(), text.width)));
     lines.add("");
     text.add(lines, text.facts());
+    LossText.factor(text.of).ifPresent(said -> text.add(lines, said));
     if (!answer.bought().isEmpty()) {
       lines.add("");
       lines.addAll(text.bought.lines(text.width));

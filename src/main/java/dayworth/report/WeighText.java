@@ -44,6 +44,7 @@ public final class WeighText {
     String sentence = sentence(granted);
     lines.add(style.bold(Wording.answer(sentence, of.currency(), width)));
     lines.add("");
+    LossText.factor(of).ifPresent(text -> prose(lines, text));
     lines.addAll(table.lines(width));
     if (!CurveText.ties(granted.curve()).isEmpty()) {
       prose(lines, CurveText.ties(granted.curve()));
