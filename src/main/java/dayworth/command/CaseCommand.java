@@ -3,6 +3,7 @@ package dayworth.command;
 import dayworth.casefile.CaseReader;
 import dayworth.casefile.Reading;
 import dayworth.decision.Case;
+import dayworth.decision.LossScaling;
 import dayworth.decision.ProofFailed;
 import dayworth.report.CurveText;
 import dayworth.report.NoticeText;
@@ -50,6 +51,14 @@ abstract class CaseCommand implements Callable<Integer> {
 
   /** How fine the time scale must be for the question. */
   abstract TimeScale finest();
+
+  /** The case as it is read with its losses of output multiplied by other factors. */
+  final LossScaling otherLosses() {
+    return factor ->
+        CaseReader.read(folder, finest(), factor) instanceof Reading.Sound sound
+            ? Optional.of(sound.of())
+            : Optional.empty();
+  }
 
   abstract int answer(Case read) throws ResultsNotWritten;
 

@@ -40,7 +40,7 @@ final class LossFactor {
   /** Refuses a factor that would change nothing: nobody may take the answer for another one. */
   void requireLabour(BuildUp buildUp) {
     if (buildUp.isNone() && !value().equals(Quantity.ONE)) {
-      throw wrong("wants a case with losses to multiply: this one has no labour.csv");
+      throw wrong("wants a case with losses to multiply: this one has no labour");
     }
   }
 

@@ -1,7 +1,6 @@
 package dayworth.report;
 
 import dayworth.buildup.ActivityBuildUp;
-import dayworth.buildup.Pattern;
 import dayworth.buildup.Way;
 import dayworth.decision.BuildUpAnswer;
 import dayworth.decision.Case;
@@ -91,17 +90,9 @@ public final class BuildUpText {
   }
 
   private List<String> cautions() {
-    List<String> texts = new ArrayList<>();
-    for (Pattern pattern : answer.all().bought()) {
-      List<String> of =
-          answer.cautions(pattern).stream()
-              .map(caution -> CautionText.of(caution, pattern))
-              .toList();
-      if (!of.isEmpty()) {
-        texts.add("Caution, " + Wording.safe(pattern.name()) + ": " + String.join("; ", of) + ".");
-      }
-    }
-    return texts;
+    return answer.all().bought().stream()
+        .flatMap(pattern -> CautionText.of(pattern, answer.cautions(pattern)).stream())
+        .toList();
   }
 
   private String id(ActivityBuildUp built) {

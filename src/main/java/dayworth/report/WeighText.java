@@ -54,6 +54,7 @@ public final class WeighText {
       prose(lines, table.leftOut());
     }
     lines.addAll(new HowFar(granted, style, width).lines());
+    answer.byLoss().ifPresent(best -> lines.addAll(new LossRanges(best, style, width).lines()));
     answer.claimed().ifPresent(claimed -> claimed(lines, claimed));
     lines.add("");
     prose(lines, CurveText.proof(granted.curve()));
