@@ -2,6 +2,7 @@ package dayworth.report;
 
 import dayworth.decision.ClaimRefuted;
 import dayworth.decision.Fault;
+import dayworth.engine.Ways;
 import dayworth.network.Activity;
 import dayworth.network.Network;
 import dayworth.value.Money;
@@ -26,9 +27,11 @@ final class BlockCheck {
   private final List<Fault> faults = new ArrayList<>();
 
   private final Network network;
+  private final Ways ways;
 
   private BlockCheck(Network network) {
     this.network = network;
+    this.ways = Ways.of(network);
   }
 
   /**
@@ -105,10 +108,13 @@ final class BlockCheck {
     return sum;
   }
 
-  /** What a row about an activity says of the activity itself. */
+  /**
+   * What a row about an activity says of the activity itself. Where it has a choice of ways a
+   * branch prices those that it leaves open, which is not the activity's own line.
+   */
   private void ofCase(JsonPlace row) throws ClaimRefuted {
     OptionalInt index = network.indexOf(row.get("activity").text());
-    if (index.isEmpty()) {
+    if (index.isEmpty() || ways.isChoice(index.getAsInt())) {
       return;
     }
     Activity activity = network.activity(index.getAsInt());

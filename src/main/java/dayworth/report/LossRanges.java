@@ -66,9 +66,9 @@ final class LossRanges {
         + factor(all.to())
         + " times the case's, "
         + Wording.when(all.from().curve().of(), all.from().best().duration(), "", "")
-        + " is best: "
-        + saved(all)
-        + " better than carrying on.";
+        + " is best, "
+        + note(all)
+        + ".";
   }
 
   private void table(List<String> lines) {
@@ -116,9 +116,10 @@ final class LossRanges {
   private String note(Range range) {
     String here =
         range.holds(best.now())
-            ? ", this answer: " + WayFigures.number(best.now()).toPlainString()
+            ? "; this answer: " + WayFigures.number(best.now()).toPlainString()
             : "";
-    return saved(range) + " better" + here;
+    boolean gains = range.from().saved().signum() > 0 || range.to().saved().signum() > 0;
+    return (gains ? saved(range) + " better" : "no better") + " than carrying on" + here;
   }
 
   private String saved(Range range) {
