@@ -46,7 +46,7 @@ public record BestByLoss(Quantity now, boolean isBounded, boolean isNarrowed, Li
               .get()
               .finishDate(best().duration())
               .equals(other.calendar().finishDate(other.best().duration()))
-          : wholeUnits().equals(other.wholeUnits());
+          : wholeUnits().compareTo(other.wholeUnits()) == 0;
     }
 
     private WorkingCalendar calendar() {

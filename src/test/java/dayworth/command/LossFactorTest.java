@@ -36,8 +36,11 @@ class LossFactorTest {
     put("labour.csv", "activity,labour_hours,crew,rate,other_cost\nA,480,6,40,1000\n");
     put(
         "patterns.csv",
-        "pattern,hours_per_week,days_per_week,week_cost,weeks_max\n"
-            + "normal,40,5,,\nlong days,50,5,450,1\n");
+        """
+        pattern,hours_per_week,days_per_week,week_cost,weeks_max
+        normal,40,5,,
+        long days,50,5,450,1
+        """);
     put("pay.csv", "pattern,above_hours,multiplier\nlong days,40,1.5\n");
     put("output_loss.csv", "pattern,week,loss,source\nlong days,1,0.04,site diary\n");
     put("terms.csv", "term,value\ntime_related_cost,2000\n");
