@@ -108,13 +108,14 @@ final class BlockCheck {
     return sum;
   }
 
-  /**
-   * What a row about an activity says of the activity itself. Where it has a choice of ways a
-   * branch prices those that it leaves open, which is not the activity's own line.
-   */
+  /** What a row about an activity says of the activity itself. */
   private void ofCase(JsonPlace row) throws ClaimRefuted {
     OptionalInt index = network.indexOf(row.get("activity").text());
-    if (index.isEmpty() || ways.isChoice(index.getAsInt())) {
+    if (index.isEmpty()) {
+      return;
+    }
+    if (network.hasChoices()) {
+      ofAnEnd(row, index.getAsInt());
       return;
     }
     Activity activity = network.activity(index.getAsInt());
@@ -136,16 +137,45 @@ final class BlockCheck {
     }
   }
 
+  /**
+   * Where measures are chosen a branch takes of each line the end that is cheaper beside the flow.
+   * What it takes of an activity with a choice, the case alone does not tell.
+   */
+  private void ofAnEnd(JsonPlace row, int index) throws ClaimRefuted {
+    if (ways.isChoice(index)) {
+      return;
+    }
+    Activity activity = network.activity(index);
+    String kind = row.get("kind").text();
+    if (kind.equals("fixed")) {
+      Money cost = Money.of(row.get("bound").number());
+      if (!isNear(cost, activity.normalCost()) && !isNear(cost, activity.crashCost())) {
+        wrong(row.get("bound"), activity.normalCost() + " or " + activity.crashCost());
+      }
+    } else if (kind.equals("not shorter") || kind.equals("not longer")) {
+      BigDecimal length = row.get("length").number().abs();
+      BigDecimal normal = network.scale().units(activity.normal());
+      BigDecimal crash = network.scale().units(activity.crash());
+      if (length.compareTo(normal) != 0 && length.compareTo(crash) != 0) {
+        wrong(row.get("length"), normal + " or " + crash);
+      }
+    }
+  }
+
   private Money perUnit(Money perTick) {
     return perTick.times(network.scale().ticksPerUnit());
   }
 
   /** Fractions without a last digit are written with six decimals or more. */
   private void price(JsonPlace found, Money right) throws ClaimRefuted {
-    Money apart = Money.of(found.number()).minus(right);
-    if (apart.max(apart.negate()).compareTo(Money.of(LAST_DIGIT)) >= 0) {
+    if (!isNear(Money.of(found.number()), right)) {
       wrong(found, right.toString());
     }
+  }
+
+  private static boolean isNear(Money found, Money right) {
+    Money apart = found.minus(right);
+    return apart.max(apart.negate()).compareTo(Money.of(LAST_DIGIT)) < 0;
   }
 
   private void equal(JsonPlace found, BigDecimal right) throws ClaimRefuted {
