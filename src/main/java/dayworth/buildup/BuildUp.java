@@ -19,6 +19,9 @@ public record BuildUp(
   /** No labour is known. */
   public static final BuildUp NONE = new BuildUp(Quantity.ONE, List.of(), List.of());
 
+  /** Losses are never multiplied by more: it bounds what a result may claim. */
+  public static final Quantity MOST_LOSS_FACTOR = Quantity.of(100);
+
   /** In what durations are counted here. */
   public static final TimeScale SCALE = new TimeScale(TimeScale.MOST_DECIMALS);
 
@@ -30,9 +33,20 @@ public record BuildUp(
     activities = List.copyOf(activities);
   }
 
+  /** Whether no labour is known, so that no answer rests on any loss of output. */
+  public boolean isNone() {
+    return patterns.isEmpty();
+  }
+
   /** Of one activity; empty if its labour is not known or it is finished. */
   public Optional<ActivityBuildUp> of(int activity) {
     return activities.stream().filter(one -> one.activity() == activity).findFirst();
+  }
+
+  /** The spell that a measure of an activity stands for; empty where it is built up from none. */
+  public Optional<Way> spell(int activity, String measure) {
+    return of(activity)
+        .flatMap(built -> built.measures().filter(way -> way.name().equals(measure)).findFirst());
   }
 
   /** The patterns that can be bought. */

@@ -8,7 +8,6 @@ import dayworth.report.CurveText;
 import dayworth.report.ResultJson;
 import dayworth.report.ResultsNotWritten;
 import dayworth.report.picture.BuildUpPictures;
-import dayworth.value.Quantity;
 import dayworth.value.TimeScale;
 import java.nio.file.Path;
 import java.util.ArrayList;
@@ -20,7 +19,6 @@ import java.util.Optional;
 import java.util.OptionalInt;
 import java.util.Set;
 import picocli.CommandLine.Command;
-import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 
 /** {@code dayworth buildup}. */
@@ -38,16 +36,9 @@ final class BuildUpCommand extends CaseCommand {
   @Option(names = "--no-pictures", description = "Write no pictures, only tables.")
   private boolean noPictures;
 
-  @Mixin private LossFactor lossFactor;
-
   @Override
   TimeScale finest() {
     return TimeScale.WHOLE;
-  }
-
-  @Override
-  Quantity lossFactor() {
-    return lossFactor.value();
   }
 
   @Override

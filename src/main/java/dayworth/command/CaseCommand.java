@@ -3,13 +3,13 @@ package dayworth.command;
 import dayworth.casefile.CaseReader;
 import dayworth.casefile.Reading;
 import dayworth.decision.Case;
+import dayworth.decision.LossScaling;
 import dayworth.decision.ProofFailed;
 import dayworth.report.CurveText;
 import dayworth.report.NoticeText;
 import dayworth.report.ResultSet;
 import dayworth.report.ResultsNotWritten;
 import dayworth.report.Style;
-import dayworth.value.Quantity;
 import dayworth.value.TimeScale;
 import java.io.PrintWriter;
 import java.nio.file.Path;
@@ -20,6 +20,7 @@ import java.util.Set;
 import java.util.concurrent.Callable;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
@@ -46,24 +47,30 @@ abstract class CaseCommand implements Callable<Integer> {
   @Option(names = "--quiet", description = "Print no answer, only problems and warnings.")
   private boolean quiet;
 
+  @Mixin private LossFactor lossFactor = new LossFactor();
+
   /** How fine the time scale must be for the question. */
   abstract TimeScale finest();
 
-  /** What all losses of output are multiplied by. */
-  Quantity lossFactor() {
-    return Quantity.ONE;
+  /** The case as it is read with its losses of output multiplied by other factors. */
+  final LossScaling otherLosses() {
+    return factor ->
+        CaseReader.read(folder, finest(), factor) instanceof Reading.Sound sound
+            ? Optional.of(sound.of())
+            : Optional.empty();
   }
 
   abstract int answer(Case read) throws ResultsNotWritten;
 
   @Override
   public Integer call() {
-    Reading reading = CaseReader.read(folder, finest(), lossFactor());
+    Reading reading = CaseReader.read(folder, finest(), lossFactor.value());
     if (reading instanceof Reading.Unsound unsound) {
       print(err(), NoticeText.problems(unsound.problems(), target(name()).toString(), style()));
       return Exit.BAD_INPUT;
     }
     Case read = ((Reading.Sound) reading).of();
+    lossFactor.requireLabour(read.buildUp());
     if (!read.warnings().isEmpty()) {
       print(err(), NoticeText.warnings(read.warnings(), CurveText.WIDEST));
     }

@@ -1,5 +1,6 @@
 package dayworth.command;
 
+import dayworth.buildup.BuildUp;
 import dayworth.value.Quantity;
 import java.math.BigDecimal;
 import java.util.Optional;
@@ -11,7 +12,8 @@ import picocli.CommandLine.Spec;
 /** The option that scales all losses of output, for every question that uses labour. */
 final class LossFactor {
 
-  private static final BigDecimal MOST = BigDecimal.valueOf(100);
+  /** As many as results write, so that they name exactly what they were computed with. */
+  private static final int MOST_DECIMALS = 6;
 
   @Spec(Spec.Target.MIXEE)
   private CommandSpec spec;
@@ -25,10 +27,24 @@ final class LossFactor {
 
   /** The factor, at least 0. */
   Quantity value() {
-    if (given.filter(factor -> factor.signum() < 0 || factor.compareTo(MOST) > 0).isPresent()) {
-      throw new CommandLine.ParameterException(
-          spec.commandLine(), "--loss-factor wants 0 or more, at most " + MOST);
+    Quantity factor = given.map(Quantity::of).orElse(Quantity.ONE);
+    if (factor.signum() < 0 || factor.compareTo(BuildUp.MOST_LOSS_FACTOR) > 0) {
+      throw wrong("wants 0 or more, at most " + BuildUp.MOST_LOSS_FACTOR);
     }
-    return given.map(Quantity::of).orElse(Quantity.ONE);
+    if (given.filter(text -> text.stripTrailingZeros().scale() > MOST_DECIMALS).isPresent()) {
+      throw wrong("wants at most " + MOST_DECIMALS + " decimals");
+    }
+    return factor;
+  }
+
+  /** Refuses a factor that would change nothing: nobody may take the answer for another one. */
+  void requireLabour(BuildUp buildUp) {
+    if (buildUp.isNone() && !value().equals(Quantity.ONE)) {
+      throw wrong("wants a case with losses to multiply: this one has no labour");
+    }
+  }
+
+  private CommandLine.ParameterException wrong(String why) {
+    return new CommandLine.ParameterException(spec.commandLine(), "--loss-factor " + why);
   }
 }

@@ -72,7 +72,7 @@ final class VerifyCommand implements Callable<Integer> {
           .println("\n  Its figures were not recounted: they belong to other input.");
       return Exit.NO_ANSWER;
     }
-    Reading reading = CaseReader.read(known, read.scale());
+    Reading reading = CaseReader.read(known, read.scale(), read.lossFactor());
     if (reading instanceof Reading.Unsound unsound) {
       CaseCommand.print(
           spec.commandLine().getErr(),

@@ -40,7 +40,7 @@ final class WeighCommand extends CaseCommand {
 
   private WeighAnswer ask(Case read) {
     try (ProgressLine progress = ProgressLine.start(err(), isTerminal())) {
-      return WeighQuestion.ask(read, effort.from(), progress);
+      return WeighQuestion.ask(read, otherLosses(), effort.from(), progress);
     }
   }
 }

@@ -8,10 +8,15 @@ import java.util.Optional;
  *
  * @param granted under the contract finish as it is
  * @param claimed as if the claimed extension of time were granted; empty without one
+ * @param byLoss the best finish by what all losses of output are multiplied by, without the
+ *     extension; empty where the answer rests on none
  * @param byExtension the best finish for each extension, in working days; empty without a claim
  */
 public record WeighAnswer(
-    Weighing granted, Optional<Weighing> claimed, List<ByExtension> byExtension) {
+    Weighing granted,
+    Optional<Weighing> claimed,
+    Optional<BestByLoss> byLoss,
+    List<ByExtension> byExtension) {
 
   public WeighAnswer {
     byExtension = List.copyOf(byExtension);

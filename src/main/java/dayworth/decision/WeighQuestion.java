@@ -21,16 +21,21 @@ public final class WeighQuestion {
    * @throws ProofFailed if a check refutes what was computed
    */
   public static WeighAnswer ask(Case of, Watcher watcher) {
-    return ask(of, Effort.USUAL, watcher);
+    return ask(of, LossScaling.NONE, Effort.USUAL, watcher);
   }
 
-  /** The same with a stated effort. */
-  public static WeighAnswer ask(Case of, Effort effort, Watcher watcher) {
+  /**
+   * The same with a stated effort.
+   *
+   * @param scaling the case under other losses of output
+   */
+  public static WeighAnswer ask(Case of, LossScaling scaling, Effort effort, Watcher watcher) {
     Weighing granted = weigh(of, effort, watcher);
     Optional<Extension> extension = of.terms().extension();
     return new WeighAnswer(
         granted,
         extension.map(claimed -> weigh(of.dueBy(claimed.due()), effort, watcher)),
+        LossSweep.of(granted.curve(), scaling, effort, watcher),
         extension.map(claimed -> ExtensionSweep.of(granted.curve(), claimed)).orElse(List.of()));
   }
 

@@ -2,6 +2,7 @@ package dayworth.report;
 
 import dayworth.decision.ClaimRefuted;
 import dayworth.decision.Fault;
+import dayworth.engine.Ways;
 import dayworth.network.Activity;
 import dayworth.network.Network;
 import dayworth.value.Money;
@@ -26,9 +27,11 @@ final class BlockCheck {
   private final List<Fault> faults = new ArrayList<>();
 
   private final Network network;
+  private final Ways ways;
 
   private BlockCheck(Network network) {
     this.network = network;
+    this.ways = Ways.of(network);
   }
 
   /**
@@ -111,6 +114,10 @@ final class BlockCheck {
     if (index.isEmpty()) {
       return;
     }
+    if (network.hasChoices()) {
+      ofAnEnd(row, index.getAsInt());
+      return;
+    }
     Activity activity = network.activity(index.getAsInt());
     switch (row.get("kind").text()) {
       case "fixed" -> price(row.get("bound"), activity.normalCost().min(activity.crashCost()));
@@ -130,16 +137,45 @@ final class BlockCheck {
     }
   }
 
+  /**
+   * Where measures are chosen a branch takes of each line the end that is cheaper beside the flow.
+   * What it takes of an activity with a choice, the case alone does not tell.
+   */
+  private void ofAnEnd(JsonPlace row, int index) throws ClaimRefuted {
+    if (ways.isChoice(index)) {
+      return;
+    }
+    Activity activity = network.activity(index);
+    String kind = row.get("kind").text();
+    if (kind.equals("fixed")) {
+      Money cost = Money.of(row.get("bound").number());
+      if (!isNear(cost, activity.normalCost()) && !isNear(cost, activity.crashCost())) {
+        wrong(row.get("bound"), activity.normalCost() + " or " + activity.crashCost());
+      }
+    } else if (kind.equals("not shorter") || kind.equals("not longer")) {
+      BigDecimal length = row.get("length").number().abs();
+      BigDecimal normal = network.scale().units(activity.normal());
+      BigDecimal crash = network.scale().units(activity.crash());
+      if (length.compareTo(normal) != 0 && length.compareTo(crash) != 0) {
+        wrong(row.get("length"), normal + " or " + crash);
+      }
+    }
+  }
+
   private Money perUnit(Money perTick) {
     return perTick.times(network.scale().ticksPerUnit());
   }
 
   /** Fractions without a last digit are written with six decimals or more. */
   private void price(JsonPlace found, Money right) throws ClaimRefuted {
-    Money apart = Money.of(found.number()).minus(right);
-    if (apart.max(apart.negate()).compareTo(Money.of(LAST_DIGIT)) >= 0) {
+    if (!isNear(Money.of(found.number()), right)) {
       wrong(found, right.toString());
     }
+  }
+
+  private static boolean isNear(Money found, Money right) {
+    Money apart = found.minus(right);
+    return apart.max(apart.negate()).compareTo(Money.of(LAST_DIGIT)) < 0;
   }
 
   private void equal(JsonPlace found, BigDecimal right) throws ClaimRefuted {

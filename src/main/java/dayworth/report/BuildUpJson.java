@@ -27,7 +27,6 @@ final class BuildUpJson {
   }
 
   void write(JsonText json) throws IOException {
-    number(json, "loss_factor", answer.all().lossFactor());
     json.array("patterns", answer.all().patterns(), this::pattern);
     json.array("activities", answer.all().activities(), this::activity);
     json.text("who_decides", CautionText.WHO_DECIDES);
@@ -85,7 +84,6 @@ final class BuildUpJson {
   private static void way(JsonText json, ActivityBuildUp built, Way way) throws IOException {
     WayFigures figures = new WayFigures(built, way);
     Spell spell = way.spell();
-    ExtraCost extra = spell.extra();
     json.text("measure", way.name());
     json.text("pattern", spell.pattern().name());
     json.number("weeks", spell.roundedWeeks());
@@ -96,12 +94,7 @@ final class BuildUpJson {
     number(json, "hours_lost", spell.hoursLost());
     number(json, "hours_crowded", spell.hoursCrowded());
     money(json, "pay", spell.pay());
-    money(json, "premium", extra.premium());
-    money(json, "lost_output", extra.lostOutput());
-    money(json, "extra_hours", extra.extraHours());
-    money(json, "supervision", extra.supervision());
-    money(json, "once_cost", extra.once());
-    money(json, "extra_cost", extra.total());
+    extra(json, spell.extra());
     money(json, "cost", way.cost());
     Optional<Money> price = figures.perUnitSaved();
     if (price.isPresent()) {
@@ -114,6 +107,16 @@ final class BuildUpJson {
       json.text("dominated_by", figures.dominator().get());
     }
     json.texts("loss_sources", spell.lossSources());
+  }
+
+  /** The lines of what a spell costs more, and their sum. */
+  static void extra(JsonText json, ExtraCost extra) throws IOException {
+    money(json, "premium", extra.premium());
+    money(json, "lost_output", extra.lostOutput());
+    money(json, "extra_hours", extra.extraHours());
+    money(json, "supervision", extra.supervision());
+    money(json, "once_cost", extra.once());
+    money(json, "extra_cost", extra.total());
   }
 
   private static void number(JsonText json, String name, Quantity number) throws IOException {

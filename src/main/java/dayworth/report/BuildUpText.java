@@ -1,18 +1,12 @@
 package dayworth.report;
 
 import dayworth.buildup.ActivityBuildUp;
-import dayworth.buildup.OutputLoss;
-import dayworth.buildup.Pattern;
 import dayworth.buildup.Way;
 import dayworth.decision.BuildUpAnswer;
 import dayworth.decision.Case;
 import dayworth.value.Money;
-import dayworth.value.Quantity;
 import java.util.ArrayList;
-import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Map;
-import java.util.stream.Collectors;
 
 /** The short answer of {@code dayworth buildup} for a terminal. */
 public final class BuildUpText {
@@ -56,7 +50,8 @@ public final class BuildUpText {
       lines.addAll(new SpellLines(answer, answer.shown().get(0)).lines(width));
     }
     lines.add("");
-    losses().forEach(text -> prose(lines, text));
+    LossText.of(answer.all().bought()).forEach(text -> prose(lines, text));
+    LossText.factor(of).ifPresent(text -> prose(lines, text));
     lines.add("");
     cautions().forEach(text -> prose(lines, text));
     prose(lines, CautionText.WHO_DECIDES);
@@ -94,63 +89,10 @@ public final class BuildUpText {
         + from;
   }
 
-  /** Every loss is an assumption: whose, stands beside the answer. */
-  private List<String> losses() {
-    Map<String, List<String>> bySource = new LinkedHashMap<>();
-    for (Pattern pattern : answer.all().bought()) {
-      String name = Wording.safe(pattern.name());
-      bySource
-          .computeIfAbsent(sources(pattern.loss()), source -> new ArrayList<>())
-          .add(name + " " + loss(pattern.loss()));
-    }
-    List<String> texts = new ArrayList<>();
-    bySource.forEach(
-        (source, losses) -> texts.add("Output lost: " + String.join("; ", losses) + source + "."));
-    Quantity factor = answer.all().lossFactor();
-    if (!factor.equals(Quantity.ONE)) {
-      String times = WayFigures.number(factor).toPlainString();
-      texts.add("These are the case's losses times " + times + " (--loss-factor).");
-    }
-    return texts;
-  }
-
-  private static String sources(OutputLoss loss) {
-    List<String> sources = loss.sources(loss.weeks().size());
-    return loss.weeks().isEmpty()
-        ? ""
-        : sources.stream()
-            .map(source -> source.isEmpty() ? "no source given" : Wording.safe(source))
-            .collect(Collectors.joining("; ", ". Source: ", ""));
-  }
-
-  private static String loss(OutputLoss loss) {
-    if (loss.weeks().isEmpty()) {
-      return "none, for none is given";
-    }
-    int last = loss.weeks().size();
-    String first = percent(loss, 1);
-    return loss.in(1).equals(loss.in(last))
-        ? first
-        : first + " in week 1 to " + percent(loss, last) + " from week " + last + " on";
-  }
-
-  private static String percent(OutputLoss loss, int week) {
-    Quantity percent = loss.in(week).times(Quantity.of(100));
-    return WayFigures.number(percent).toPlainString() + " %";
-  }
-
   private List<String> cautions() {
-    List<String> texts = new ArrayList<>();
-    for (Pattern pattern : answer.all().bought()) {
-      List<String> of =
-          answer.cautions(pattern).stream()
-              .map(caution -> CautionText.of(caution, pattern))
-              .toList();
-      if (!of.isEmpty()) {
-        texts.add("Caution, " + Wording.safe(pattern.name()) + ": " + String.join("; ", of) + ".");
-      }
-    }
-    return texts;
+    return answer.all().bought().stream()
+        .flatMap(pattern -> CautionText.of(pattern, answer.cautions(pattern)).stream())
+        .toList();
   }
 
   private String id(ActivityBuildUp built) {

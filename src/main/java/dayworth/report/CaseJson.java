@@ -1,5 +1,7 @@
 package dayworth.report;
 
+import dayworth.buildup.BuildUp;
+import dayworth.buildup.OutputLoss;
 import dayworth.decision.Case;
 import dayworth.decision.Progress;
 import dayworth.network.Network;
@@ -40,6 +42,9 @@ final class CaseJson {
       Progress progress = of.progress().get();
       json.object("status", members -> new StatusJson(of, progress).write(members));
     }
+    if (!of.buildUp().isNone()) {
+      losses(json, of.buildUp());
+    }
     json.array(
         "inputs",
         of.inputs(),
@@ -57,6 +62,19 @@ final class CaseJson {
           members.text("wrong", warning.wrong());
           members.text("found", warning.found());
           members.text("right", warning.right());
+        });
+  }
+
+  /** What was assumed of the output that is lost, by whom: an answer is worth no more than that. */
+  private static void losses(JsonText json, BuildUp buildUp) throws IOException {
+    json.number("loss_factor", WayFigures.number(buildUp.lossFactor()));
+    json.array(
+        "loss_sources",
+        buildUp.bought(),
+        (members, pattern) -> {
+          OutputLoss loss = pattern.loss();
+          members.text("pattern", pattern.name());
+          members.texts("sources", loss.sources(loss.weeks().size()));
         });
   }
 

@@ -2,6 +2,9 @@ package dayworth.report;
 
 import dayworth.buildup.Caution;
 import dayworth.buildup.Pattern;
+import java.util.List;
+import java.util.Optional;
+import java.util.stream.Collectors;
 
 /**
  * What is said beside a pattern that asks for care, with the published figures and where they are
@@ -17,6 +20,18 @@ final class CautionText {
   private static final String DEMBE = "(Dembe et al. 2005, Occup Environ Med 62:588-597)";
 
   private CautionText() {}
+
+  /** All that a pattern asks care for; empty where that is nothing. */
+  static Optional<String> of(Pattern pattern, List<Caution> cautions) {
+    return cautions.isEmpty()
+        ? Optional.empty()
+        : Optional.of(
+            cautions.stream()
+                .map(caution -> of(caution, pattern))
+                .collect(
+                    Collectors.joining(
+                        "; ", "Caution, " + Wording.safe(pattern.name()) + ": ", ".")));
+  }
 
   static String of(Caution caution, Pattern pattern) {
     String hours = WayFigures.number(pattern.hoursPerWeek()).toPlainString();

@@ -46,6 +46,7 @@ public final class CheckText {
     if (!status.isEmpty()) {
       text.add(lines, status);
     }
+    LossText.factor(text.of).ifPresent(said -> text.add(lines, said));
     lines.addAll(text.facts());
     return lines;
   }

@@ -32,6 +32,7 @@ public final class CurveText {
     String sentence = sentence(answer, finishes.look(), used);
     lines.add(style.bold(Wording.answer(sentence, answer.of().currency(), used)));
     lines.addAll(prose(Wording.status(answer.of()), used));
+    lines.addAll(prose(LossText.factor(answer.of()).orElse(""), used));
     lines.add("");
     lines.addAll(finishes.lines(style, used));
     lines.addAll(prose(ties(answer), used));

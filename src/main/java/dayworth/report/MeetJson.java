@@ -1,11 +1,14 @@
 package dayworth.report;
 
+import dayworth.buildup.Spell;
+import dayworth.buildup.Way;
 import dayworth.decision.MeetAnswer;
 import dayworth.decision.PlanProof;
 import dayworth.decision.Wish;
 import dayworth.engine.proof.ProofSheet;
 import dayworth.network.Activity;
 import dayworth.network.Network;
+import dayworth.network.Plan;
 import java.io.IOException;
 import java.math.BigDecimal;
 import java.util.Optional;
@@ -86,7 +89,19 @@ final class MeetJson {
       json.nothing("price_per_unit");
     }
     json.number("cost", bought.cost().cents());
+    if (bought.measure() != Plan.NO_MEASURE) {
+      String measure = network.measures().get(bought.measure()).name();
+      Optional<Way> spell = answer.of().buildUp().spell(bought.activity(), measure);
+      if (spell.isPresent()) {
+        json.object("built_up", members -> builtUp(members, spell.get().spell()));
+      }
+    }
     json.texts("on_chains", bought.onChains().stream().map(c -> String.valueOf(c + 1)).toList());
+  }
+
+  private static void builtUp(JsonText json, Spell spell) throws IOException {
+    BuildUpJson.extra(json, spell.extra());
+    json.texts("loss_sources", spell.lossSources());
   }
 
   private void proof(JsonText json) throws IOException {

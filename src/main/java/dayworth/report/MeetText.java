@@ -7,6 +7,7 @@ import dayworth.decision.FinishTooEarly;
 import dayworth.decision.MeetAnswer;
 import dayworth.decision.PlanProof;
 import dayworth.decision.Wish;
+import dayworth.network.Plan;
 import dayworth.value.Money;
 import java.math.BigDecimal;
 import java.util.ArrayList;
@@ -41,15 +42,35 @@ public final class MeetText {
     lines.add(style.bold(Wording.answer(text.sentence(), text.of.currency(), text.width)));
     lines.add("");
     text.add(lines, text.facts());
+    LossText.factor(text.of).ifPresent(said -> text.add(lines, said));
     if (!answer.bought().isEmpty()) {
       lines.add("");
       lines.addAll(text.bought.lines(text.width));
     }
+    lines.addAll(text.reasons());
     lines.add("");
     lines.addAll(text.bought.chains(text.width));
     lines.add("");
     text.add(lines, CurveText.proof(answer.curve()));
     text.add(lines, text.sheet(folder));
+    return lines;
+  }
+
+  /** Nothing where no measure in use is built up from labour hours. */
+  private List<String> reasons() {
+    SpellReasons reasons =
+        new SpellReasons(
+            of,
+            answer.bought().stream()
+                .map(MeetAnswer.Bought::measure)
+                .filter(measure -> measure != Plan.NO_MEASURE)
+                .toList());
+    List<String> lines = new ArrayList<>();
+    if (!reasons.isEmpty()) {
+      lines.add("");
+      add(lines, reasons.sentences());
+      add(lines, reasons.cautions());
+    }
     return lines;
   }
 

@@ -84,7 +84,8 @@ final class ResultCheck {
     faults.addAll(
         ResultComparison.ofPart(sheet.get("blocks").items().get(0), ought.items().get(0).value()));
     checked.add("each branch of the proof sheet: it balances, and allows no less than the plan");
-    unchecked.add("that the branches leave no plan out, their lags, and how each prices sections");
+    unchecked.add(
+        "that the branches leave no plan out, their lags, and how each prices choices and sections");
   }
 
   private void tell(CurveAnswer answer) {

@@ -1,15 +1,18 @@
 package dayworth.report;
 
 import com.fasterxml.jackson.core.JsonProcessingException;
+import dayworth.buildup.BuildUp;
 import dayworth.decision.Case;
 import dayworth.decision.ClaimRefuted;
 import dayworth.decision.Fault;
 import dayworth.decision.InputFile;
+import dayworth.value.Quantity;
 import dayworth.value.TimeScale;
 import java.io.IOException;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 import java.util.TreeMap;
 
@@ -23,6 +26,7 @@ public final class ResultFile {
   private final String programVersion;
   private final String caseName;
   private final TimeScale scale;
+  private final Quantity lossFactor;
   private final Map<String, String> digests = new TreeMap<>();
 
   private ResultFile(JsonPlace all) throws ClaimRefuted, NoResult {
@@ -37,6 +41,19 @@ public final class ResultFile {
       digests.put(input.get("name").text(), input.get("sha256").text());
     }
     this.scale = all.find("evidence").isPresent() ? decimals(all.get("evidence")) : TimeScale.WHOLE;
+    this.lossFactor = factor(all.find("loss_factor"));
+  }
+
+  /** Without labour a result has none. */
+  private static Quantity factor(Optional<JsonPlace> found) throws ClaimRefuted {
+    if (found.isEmpty()) {
+      return Quantity.ONE;
+    }
+    Quantity factor = Quantity.of(found.get().number());
+    if (factor.signum() < 0 || factor.compareTo(BuildUp.MOST_LOSS_FACTOR) > 0) {
+      throw found.get().wrong("0 to " + BuildUp.MOST_LOSS_FACTOR);
+    }
+    return factor;
   }
 
   private static TimeScale decimals(JsonPlace evidence) throws ClaimRefuted {
@@ -86,6 +103,11 @@ public final class ResultFile {
   /** How fine its times are. */
   public TimeScale scale() {
     return scale;
+  }
+
+  /** What all losses of output were multiplied by. */
+  public Quantity lossFactor() {
+    return lossFactor;
   }
 
   /** Where the files that are there differ from those that the result was computed from. */

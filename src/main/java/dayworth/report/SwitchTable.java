@@ -6,6 +6,7 @@ import dayworth.decision.StepFacts;
 import dayworth.network.Measure;
 import dayworth.network.Network;
 import dayworth.network.Plan;
+import dayworth.value.Money;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -15,7 +16,7 @@ final class SwitchTable {
   private static final int MOST_ROWS = 14;
   private static final String INDENT = "    ";
 
-  private record Row(long finish, PlanChange.Kind kind, Measure measure) {}
+  private record Row(long finish, PlanChange.Kind kind, int index, Measure measure) {}
 
   private final CurveAnswer answer;
   private final Network network;
@@ -52,7 +53,7 @@ final class SwitchTable {
   }
 
   private void add(long finish, PlanChange.Kind kind, int measure) {
-    rows.add(new Row(finish, kind, network.measures().get(measure)));
+    rows.add(new Row(finish, kind, measure, network.measures().get(measure)));
   }
 
   /** No lines where no measure is ever used. */
@@ -69,13 +70,36 @@ final class SwitchTable {
     columns.add("", false, shown.stream().map(row -> word(row.kind())).toList());
     columns.add("", false, shown.stream().map(row -> id(row.measure())).toList());
     columns.add("", false, shown.stream().map(row -> name(row.measure())).toList());
+    columns.add("extra", true, shown.stream().map(row -> extra(row.measure())).toList());
     List<String> lines = new ArrayList<>(List.of("  Where measures come and go"));
-    columns.lines().stream().skip(1).forEach(line -> lines.add(INDENT + line));
+    columns.lines().forEach(line -> lines.add(INDENT + line));
     if (shown.size() < rows.size()) {
       int left = rows.size() - shown.size();
       lines.add(INDENT + Wording.count(left, "row is", "rows are") + " left out: see steps.csv");
     }
+    lines.addAll(reasons(shown, width));
     return lines;
+  }
+
+  /** Of spells: where their cost comes from, and where their losses are known from. */
+  private List<String> reasons(List<Row> shown, int width) {
+    SpellReasons reasons =
+        new SpellReasons(answer.of(), shown.stream().map(Row::index).distinct().toList());
+    List<String> lines = new ArrayList<>();
+    if (!reasons.isEmpty()) {
+      lines.add("  What the working patterns among them cost more; buildup has the whole sums");
+      reasons.table(width - INDENT.length()).forEach(line -> lines.add(INDENT + line));
+      reasons.losses().forEach(text -> lines.addAll(Wording.wrap(text, Wording.INDENT, width)));
+    }
+    return lines;
+  }
+
+  /**
+   * Against the normal way, without its package; whole, as steps.csv and buildup have the cents.
+   */
+  private String extra(Measure measure) {
+    Money more = measure.cost().minus(network.activity(measure.activity()).normalCost());
+    return new MoneyLook(0).text(more.cents());
   }
 
   private static String word(PlanChange.Kind kind) {

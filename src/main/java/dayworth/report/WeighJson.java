@@ -1,8 +1,11 @@
 package dayworth.report;
 
+import dayworth.decision.BestByLoss;
 import dayworth.decision.BestByRate;
+import dayworth.decision.Case;
 import dayworth.decision.Choice;
 import dayworth.decision.Finish;
+import dayworth.decision.LossSweep;
 import dayworth.decision.WeighAnswer;
 import dayworth.decision.Weighing;
 import dayworth.value.Money;
@@ -27,6 +30,9 @@ final class WeighJson {
   }
 
   void write(JsonText json) throws IOException {
+    if (answer.byLoss().isPresent()) {
+      json.object("by_loss_factor", members -> byLoss(members, answer.byLoss().get()));
+    }
     json.object("without_extension", members -> weighing(members, answer.granted()));
     if (answer.claimed().isPresent()) {
       json.object("with_extension", members -> weighing(members, answer.claimed().get()));
@@ -43,6 +49,38 @@ final class WeighJson {
             finish(members, extension.best());
           });
     }
+  }
+
+  private void byLoss(JsonText json, BestByLoss best) throws IOException {
+    json.number("now", WayFigures.number(best.now()));
+    json.number("sought_to", WayFigures.number(LossSweep.STEP));
+    json.yesNo("all_sought_so_far", best.isNarrowed());
+    json.yesNo("no_output_beyond", best.isBounded());
+    json.array(
+        "ranges",
+        best.ranges(),
+        (members, range) -> {
+          members.number("from", WayFigures.number(range.from().factor()));
+          members.number("to", WayFigures.number(range.to().factor()));
+          best(members, range.from());
+        });
+    json.array("tried", best.tried(), this::tried);
+  }
+
+  /** In the time scale of its own case, which the losses may make finer. */
+  private static void best(JsonText json, BestByLoss.Tried tried) throws IOException {
+    Case of = tried.curve().of();
+    json.number("duration", of.network().scale().units(tried.best().duration()));
+    if (of.terms().calendar().isPresent()) {
+      json.text("finish_date", new Dates(of).finish(tried.best().duration()));
+    }
+  }
+
+  private void tried(JsonText json, BestByLoss.Tried tried) throws IOException {
+    json.number("loss_factor", WayFigures.number(tried.factor()));
+    new CurveJson(tried.curve()).finish(json, tried.best());
+    json.number("saved_against_as_it_stands", tried.saved());
+    json.yesNo("proved", tried.curve().provedRows() == tried.curve().rows().size());
   }
 
   private void weighing(JsonText json, Weighing weighing) throws IOException {

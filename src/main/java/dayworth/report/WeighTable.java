@@ -1,6 +1,9 @@
 package dayworth.report;
 
+import dayworth.decision.BestByLoss;
+import dayworth.decision.Case;
 import dayworth.decision.Choice;
+import dayworth.decision.CurveAnswer;
 import dayworth.decision.Finish;
 import dayworth.decision.WeighAnswer;
 import dayworth.decision.Weighing;
@@ -28,7 +31,8 @@ public final class WeighTable {
           "damages",
           "bonus",
           "total_cost",
-          "saved_against_as_it_stands");
+          "saved_against_as_it_stands",
+          "loss_factor");
 
   private WeighTable() {}
 
@@ -36,23 +40,30 @@ public final class WeighTable {
     WeighTable table = new WeighTable();
     table.add(answer.granted(), "without");
     answer.claimed().ifPresent(claimed -> table.add(claimed, "with"));
+    answer.byLoss().ifPresent(best -> best.tried().forEach(table::add));
     return table.csv.toString();
   }
 
   private void add(Weighing weighing, String extension) {
-    weighing.choices().forEach(choice -> add(weighing, extension, choice));
+    for (Choice choice : weighing.choices()) {
+      add(weighing.curve(), extension, name(choice), choice.finish());
+    }
   }
 
-  private void add(Weighing weighing, String extension, Choice choice) {
-    Lateness late = new Lateness(weighing.curve().of());
-    Dates dates = new Dates(weighing.curve().of());
-    Finish planned = weighing.asItStands();
-    Finish finish = choice.finish();
+  private void add(BestByLoss.Tried tried) {
+    add(tried.curve(), "without", "least_total_by_loss_factor", tried.best());
+  }
+
+  private void add(CurveAnswer curve, String extension, String choice, Finish finish) {
+    Case of = curve.of();
+    Lateness late = new Lateness(of);
+    Dates dates = new Dates(of);
+    Finish planned = curve.asPlanned();
     BigDecimal time = finish.other().timeRelated().cents();
     csv.row(
         extension,
-        name(choice),
-        weighing.curve().of().network().scale().text(finish.duration()),
+        choice,
+        of.network().scale().text(finish.duration()),
         dates.finish(finish.duration()),
         late.units(finish).map(BigDecimal::toPlainString).orElse(CsvText.BLANK),
         late.calendarDays(finish).map(Object::toString).orElse(CsvText.BLANK),
@@ -66,7 +77,10 @@ public final class WeighTable {
         CsvText.money(finish.other().damages()),
         CsvText.money(finish.other().bonus()),
         text(finish.total()),
-        text(weighing.saved(finish)));
+        text(planned.total().subtract(finish.total())),
+        of.buildUp().isNone()
+            ? CsvText.BLANK
+            : WayFigures.number(of.buildUp().lossFactor()).toPlainString());
   }
 
   /** A kind of choice as files name it. */

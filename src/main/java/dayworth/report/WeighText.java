@@ -44,6 +44,7 @@ public final class WeighText {
     String sentence = sentence(granted);
     lines.add(style.bold(Wording.answer(sentence, of.currency(), width)));
     lines.add("");
+    LossText.factor(of).ifPresent(text -> prose(lines, text));
     lines.addAll(table.lines(width));
     if (!CurveText.ties(granted.curve()).isEmpty()) {
       prose(lines, CurveText.ties(granted.curve()));
@@ -53,6 +54,7 @@ public final class WeighText {
       prose(lines, table.leftOut());
     }
     lines.addAll(new HowFar(granted, style, width).lines());
+    answer.byLoss().ifPresent(best -> lines.addAll(new LossRanges(best, style, width).lines()));
     answer.claimed().ifPresent(claimed -> claimed(lines, claimed));
     lines.add("");
     prose(lines, CurveText.proof(granted.curve()));

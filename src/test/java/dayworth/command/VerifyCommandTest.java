@@ -56,7 +56,8 @@ class VerifyCommandTest {
           {"ferry-berth-core", "--in", "170.25"},
           {"ferry-berth-core", "--in", "500"},
           {"ferry-berth-status", "--in", "120"},
-          {"ferry-berth-status", "--within", "30000"}
+          {"ferry-berth-status", "--within", "30000"},
+          {"ferry-berth", "--in", "172"}
         }) {
       String demo = RealJar.demo(wish[0]);
       Run meet = jar.run("meet", demo, wish[1], wish[2], "--no-pictures", "--crosscheck", "none");

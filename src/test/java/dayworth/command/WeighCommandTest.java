@@ -55,15 +55,15 @@ class WeighCommandTest {
         "extension,choice,duration,finish_date,late,late_calendar_days,direct_cost,"
             + "extra_direct_cost,running_cost,running_cost_saved,time_related_cost,"
             + "time_related_cost_saved,fixed_cost,damages,bonus,total_cost,"
-            + "saved_against_as_it_stands",
+            + "saved_against_as_it_stands,loss_factor",
         rows.get(0));
     assertEquals(
         "without,as_it_stands,19,,2,,66000.00,0.00,0.00,0.00,9500.00,0.00,0.00,1400.00,0.00,"
-            + "76900.00,0.00",
+            + "76900.00,0.00,",
         rows.get(1));
     assertEquals(
         "without,least_total,16,,-1,,67300.00,1300.00,0.00,0.00,8000.00,1500.00,0.00,0.00,500.00,"
-            + "74800.00,2100.00",
+            + "74800.00,2100.00,",
         rows.get(2));
     Run json = jar.run("weigh", RealJar.demo("starter"), "--json");
     assertEquals(Files.readString(output.resolve("result.json")), json.out());
