@@ -17,12 +17,12 @@ final class HoldingDate {
   private HoldingDate() {}
 
   static void report(ReadCase read, Findings findings) {
-    Network network = read.network();
+    Network network = read.reachable();
     ShortestFinish shortest = ShortestFinish.of(network);
     int holder = shortest.origin();
     if (holder == ShortestFinish.NONE
         || network.activities().stream().noneMatch(Activity::isCompressible)
-        || Timing.earliest(network, Plan.allNormal(network)).finish() > shortest.ticks()) {
+        || asItStands(read.network()) > shortest.ticks()) {
       return;
     }
     long byThen = read.work().earliestStart(holder);
@@ -48,6 +48,10 @@ final class HoldingDate {
       findings.warning(
           read.place(holder, "not_before").notice("compression gains nothing", found, right));
     }
+  }
+
+  private static long asItStands(Network network) {
+    return Timing.earliest(network, Plan.allNormal(network)).finish();
   }
 
   private static String finish(ReadCase read, long ticks) {

@@ -21,7 +21,7 @@ final class ImpliedLinks {
 
   static void report(ReadCase read, Findings findings) {
     ImpliedLinks rule = new ImpliedLinks(read, findings);
-    PlainChains chains = new PlainChains(read.network());
+    PlainChains chains = new PlainChains(read.reachable());
     for (int source = 0; source < read.network().size(); source++) {
       if (chains.layFrom(source)) {
         rule.report(chains);

@@ -1,6 +1,7 @@
 package dayworth.casefile;
 
 import dayworth.decision.WorkToGo;
+import dayworth.engine.Ways;
 import dayworth.network.Network;
 import dayworth.value.WorkingCalendar;
 import java.util.List;
@@ -32,6 +33,11 @@ record ReadCase(
   /** Of the work to go. */
   Network network() {
     return work.network();
+  }
+
+  /** The same where each activity takes any duration that its ways bound. */
+  Network reachable() {
+    return Ways.reachable(network());
   }
 
   Place place(int activity, String column) {

@@ -3,6 +3,7 @@ package dayworth.decision;
 import dayworth.engine.Change;
 import dayworth.engine.Curve;
 import dayworth.engine.Flow;
+import dayworth.engine.Obstacle;
 import dayworth.engine.Step;
 import dayworth.engine.branching.Branching;
 import dayworth.engine.branching.Charge;
@@ -138,7 +139,14 @@ final class BranchedPlans implements CheapestPlans {
     }
     Point first = points.get(0);
     return new Curve(
-        network, first.duration(), first.plan(), first.cost(), steps, bare.obstacles(), plans);
+        network, first.duration(), first.plan(), first.cost(), steps, obstacles(bare), plans);
+  }
+
+  /** The chain stops the project as a whole; where ways are what stops it before, none does. */
+  private List<Obstacle> obstacles(Curve bare) {
+    return points.get(points.size() - 1).duration() == bare.shortest()
+        ? bare.obstacles()
+        : List.of();
   }
 
   private Step step(Point from, Point to) {

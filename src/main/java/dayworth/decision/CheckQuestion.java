@@ -1,7 +1,6 @@
 package dayworth.decision;
 
-import dayworth.engine.Curve;
-import dayworth.engine.PieceWitness;
+import dayworth.engine.Ways;
 import dayworth.engine.stepping.Stepping;
 import dayworth.network.CriticalChains;
 import dayworth.network.Network;
@@ -25,17 +24,17 @@ public final class CheckQuestion {
     Network network = of.network();
     Timing asPlanned = Timing.earliest(network, Plan.allNormal(network));
     CriticalChains chains = CriticalChains.of(network, asPlanned, i -> of.isCritical(asPlanned, i));
-    Curve curve = Stepping.curve(network, PieceWitness.NONE);
+    long shortest = Stepping.shortest(Ways.reachable(network));
     return new CheckAnswer(
         of,
         asPlanned,
-        curve.shortest(),
+        shortest,
         chains.count(),
         chains.first(FIRST_CHAINS),
         nearCritical(of, asPlanned),
         toGo(of, network.openStarts()),
         toGo(of, network.openEnds()),
-        neverCritical(network, asPlanned, curve.shortest()));
+        neverCritical(network, asPlanned, shortest));
   }
 
   private static List<Integer> toGo(Case of, List<Integer> activities) {
@@ -54,9 +53,11 @@ public final class CheckQuestion {
   private static List<CheckAnswer.NeverCritical> neverCritical(
       Network network, Timing asPlanned, long shortest) {
     List<CheckAnswer.NeverCritical> never = new ArrayList<>();
+    Network reachable = Ways.reachable(network);
     for (int i = 0; i < network.size(); i++) {
-      long through = asPlanned.finish() - asPlanned.totalFloat(i);
-      if (network.activity(i).isCompressible() && through < shortest) {
+      long longer = reachable.activity(i).normal() - network.activity(i).normal();
+      long through = asPlanned.finish() - asPlanned.totalFloat(i) + longer;
+      if (reachable.activity(i).isCompressible() && through < shortest) {
         never.add(new CheckAnswer.NeverCritical(i, through));
       }
     }

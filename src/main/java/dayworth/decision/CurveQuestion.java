@@ -68,18 +68,23 @@ public final class CurveQuestion {
     Curve bare = new ConvexPlans(of.boundingNetwork(), watcher).curve();
     relaxed = network.hasChoices() ? Optional.of(bare) : Optional.empty();
     requirePossible(bare, at);
-    return new BranchedPlans(
-        priced,
-        money.charges(),
-        bare,
-        finishes -> effort.nodesFor(of, finishes),
-        effort.isOver(),
-        (longest, shortest) -> {
-          NavigableSet<Long> durations = CurveCounting.durations(of, longest, shortest);
-          at.ifPresent(asked -> durations.add(Math.min(asked, longest)));
-          return durations.descendingSet();
-        },
-        watcher);
+    BranchedPlans branched =
+        new BranchedPlans(
+            priced,
+            money.charges(),
+            bare,
+            finishes -> effort.nodesFor(of, finishes),
+            effort.isOver(),
+            (longest, shortest) -> {
+              NavigableSet<Long> durations = CurveCounting.durations(of, longest, shortest);
+              at.ifPresent(asked -> durations.add(Math.min(asked, longest)));
+              return durations.descendingSet();
+            },
+            watcher);
+    if (at.isPresent() && at.getAsLong() < branched.curve().shortest()) {
+      throw new FinishTooEarly(of, branched.curve(), at.getAsLong());
+    }
+    return branched;
   }
 
   private void requirePossible(Curve possible, OptionalLong at) throws FinishTooEarly {

@@ -1,6 +1,7 @@
 package dayworth.decision;
 
 import dayworth.contract.Section;
+import dayworth.engine.Ways;
 import dayworth.engine.branching.Branching;
 import dayworth.engine.branching.Point;
 import dayworth.engine.stepping.Stepping;
@@ -60,7 +61,8 @@ final class SectionChoices {
   }
 
   private boolean canBeOnTime(Section section) {
-    return Stepping.earliestFinish(of.network(), section.activity()) <= section.due().ticks();
+    return Stepping.earliestFinish(Ways.reachable(of.network()), section.activity())
+        <= section.due().ticks();
   }
 
   /** Empty also where the limit on branches leaves open what is cheapest: then none is named. */
@@ -99,11 +101,15 @@ final class SectionChoices {
         new HeldSections(of.pricedNetwork())
             .with(section, Math.max(0, finish - section.due().ticks()));
     Network network = held.network();
-    if (Stepping.shortest(network) > finish) {
+    if (Stepping.shortest(Ways.reachable(network)) > finish) {
       return Optional.empty();
     }
-    Point point =
-        Branching.solve(network, of.momentMoney().charges(), new long[] {finish}, PROBLEMS).get(0);
+    List<Point> points =
+        Branching.solve(network, of.momentMoney().charges(), new long[] {finish}, PROBLEMS);
+    if (points.isEmpty()) {
+      throw new NotProved();
+    }
+    Point point = points.get(0);
     if (!point.isProved()) {
       throw new NotProved();
     }

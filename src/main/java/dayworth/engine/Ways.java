@@ -3,6 +3,7 @@ package dayworth.engine;
 import dayworth.network.Activity;
 import dayworth.network.Link;
 import dayworth.network.Measure;
+import dayworth.network.Measures;
 import dayworth.network.Network;
 import dayworth.network.Plan;
 import dayworth.value.Money;
@@ -57,6 +58,35 @@ public final class Ways {
 
   public static Ways of(Network network) {
     return new Ways(network);
+  }
+
+  /**
+   * The network where each activity can take any duration from its shortest way to its longest; it
+   * tells what is possible, not what it costs. The network itself where it has no choices.
+   */
+  public static Network reachable(Network network) {
+    if (!network.hasChoices()) {
+      return network;
+    }
+    Ways ways = of(network);
+    List<Activity> activities = new ArrayList<>();
+    for (int i = 0; i < network.size(); i++) {
+      Activity activity = network.activity(i);
+      long shortest = ways.get(ways.first(i)).duration();
+      long longest = ways.get(ways.first(i) + ways.count(i) - 1).duration();
+      activities.add(
+          new Activity(
+              activity.id(),
+              activity.name(),
+              activity.group(),
+              Math.max(longest, activity.normal()),
+              shortest,
+              Money.ZERO,
+              Money.ZERO,
+              activity.notBefore(),
+              activity.notFinishedBefore()));
+    }
+    return network.withActivities(activities, Measures.NONE);
   }
 
   /** How many ways there are in all. */

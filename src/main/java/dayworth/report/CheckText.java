@@ -5,6 +5,7 @@ import dayworth.decision.Case;
 import dayworth.decision.CheckAnswer;
 import dayworth.decision.CheckAnswer.NeverCritical;
 import dayworth.decision.TimeUnit;
+import dayworth.engine.Ways;
 import dayworth.network.Activity;
 import dayworth.network.Link;
 import dayworth.network.Network;
@@ -91,7 +92,9 @@ public final class CheckText {
 
   private List<String> facts() {
     List<String> lines = new ArrayList<>();
-    int compressible = (int) network.activities().stream().filter(Activity::isCompressible).count();
+    Network reachable = Ways.reachable(network);
+    int compressible =
+        (int) reachable.activities().stream().filter(Activity::isCompressible).count();
     int waits = (int) network.links().stream().mapToLong(Link::lag).filter(l -> l != 0).count();
     add(
         lines,
