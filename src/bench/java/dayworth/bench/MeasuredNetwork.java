@@ -33,7 +33,7 @@ final class MeasuredNetwork {
     List<Link> links = new ArrayList<>();
     List<Measure> measures = new ArrayList<>();
     for (int i = 0; i < size; i++) {
-      long normal = 10 + random.nextInt(31);
+      long normal = 10L + random.nextInt(31);
       long cost = 1_000L * (5 + random.nextInt(46));
       activities.add(Activity.fixed("A" + i, normal, Money.of(cost)));
       addMeasures(i, normal, cost, random, measures);
@@ -53,7 +53,7 @@ final class MeasuredNetwork {
     long duration = normal;
     long dearer = cost;
     for (int m = 1; m <= MEASURES && duration > 2; m++) {
-      long shorter = 1 + random.nextInt(Math.max(1, (int) (duration / 5)));
+      long shorter = 1L + random.nextInt(Math.max(1, (int) (duration / 5)));
       duration -= shorter;
       dearer += 10L * (5 + random.nextInt(90)) * shorter;
       measures.add(

@@ -145,6 +145,11 @@ public final class Recount {
         claim.rows() + " finishes",
         "one for each unit from " + text(curve.longest()) + " to " + text(curve.shortest()));
     requireRowPlans(curve);
+    require(
+        !of.isConvex() || claim.relaxations() == 0,
+        "evidence.relaxations",
+        String.valueOf(claim.relaxations()),
+        "0, as nothing was branched on");
     if (isSearched(of, claim.relaxations())) {
       requireNoneCheaper(curve);
     }
