@@ -9,6 +9,7 @@ import dayworth.report.CurveText;
 import dayworth.report.ResultJson;
 import dayworth.report.ResultsNotWritten;
 import dayworth.report.brief.Brief;
+import dayworth.value.Quantity;
 import dayworth.value.TimeScale;
 import java.nio.file.Path;
 import java.util.ArrayList;
@@ -17,6 +18,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalLong;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 
 /** {@code dayworth brief}. */
@@ -36,6 +38,10 @@ final class BriefCommand extends CaseCommand {
       description = "A page that needs nothing else, or its text as Markdown; html if not given.")
   private Form as = Form.html;
 
+  @Mixin private EffortOptions effort = new EffortOptions();
+
+  @Mixin private LossFactor lossFactor;
+
   /** How the brief is written; the names are those of the command line. */
   enum Form {
     html,
@@ -45,6 +51,11 @@ final class BriefCommand extends CaseCommand {
   @Override
   TimeScale finest() {
     return plan.map(WhichPlan::scale).orElse(TimeScale.WHOLE);
+  }
+
+  @Override
+  Quantity lossFactor() {
+    return lossFactor.value();
   }
 
   @Override
@@ -62,7 +73,7 @@ final class BriefCommand extends CaseCommand {
 
   private BriefAnswer ask(Case read, OptionalLong at) throws FinishTooEarly {
     try (ProgressLine progress = ProgressLine.start(err(), isTerminal())) {
-      return BriefQuestion.ask(read, at, progress);
+      return BriefQuestion.ask(read, at, effort.from(), progress);
     }
   }
 
