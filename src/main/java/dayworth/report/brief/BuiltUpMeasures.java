@@ -23,7 +23,6 @@ import dayworth.report.brief.page.Table.Column;
 import dayworth.report.brief.page.Table.Row;
 import dayworth.value.Money;
 import dayworth.value.Quantity;
-import java.math.BigDecimal;
 import java.math.RoundingMode;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
@@ -41,10 +40,8 @@ final class BuiltUpMeasures {
   private static final int MOST_TABLES = 12;
 
   private static final int MOST_IDS = 6;
-  private static final int DECIMALS = 3;
   private static final Quantity HUNDRED = Quantity.of(100);
 
-  private final BriefAnswer answer;
   private final Words words;
   private final Numbering numbering;
   private final BuildUp all;
@@ -55,7 +52,6 @@ final class BuiltUpMeasures {
   private record Used(int activity, ActivityBuildUp built, Way way) {}
 
   BuiltUpMeasures(BriefAnswer answer, Words words, Numbering numbering) {
-    this.answer = answer;
     this.words = words;
     this.numbering = numbering;
     this.all = answer.of().buildUp();
@@ -182,21 +178,21 @@ final class BuiltUpMeasures {
             : ", then "
                 + weeks(spell.weeksAfter())
                 + " of "
-                + number(all.patterns().get(0).hoursPerWeek())
+                + Words.decimals(all.patterns().get(0).hoursPerWeek())
                 + " hours by the normal crew";
     return Words.capital(weeks(spell.weeks()))
         + " of "
-        + number(pattern.hoursPerWeek())
+        + Words.decimals(pattern.hoursPerWeek())
         + " hours a week for each of "
-        + number(workers)
+        + Words.decimals(workers)
         + " workers, on "
-        + number(pattern.daysPerWeek())
+        + Words.decimals(pattern.daysPerWeek())
         + " days a week"
         + after
         + "; "
-        + number(spell.hoursWorked())
+        + Words.decimals(spell.hoursWorked())
         + " hours worked in all for "
-        + number(one.built().labour().hours())
+        + Words.decimals(one.built().labour().hours())
         + " hours of output.";
   }
 
@@ -276,21 +272,16 @@ final class BuiltUpMeasures {
   }
 
   private static String hours(Quantity hours) {
-    String number = number(hours);
+    String number = Words.decimals(hours);
     return number + (number.equals("1") ? " hour" : " hours");
   }
 
   private static String weeks(Quantity weeks) {
-    String number = number(weeks);
+    String number = Words.decimals(weeks);
     return number + (number.equals("1") ? " week" : " weeks");
   }
 
   private static String percent(Quantity share) {
-    return number(share.times(HUNDRED)) + " %";
-  }
-
-  private static String number(Quantity quantity) {
-    BigDecimal rounded = quantity.rounded(DECIMALS, RoundingMode.HALF_UP).stripTrailingZeros();
-    return Words.grouped(rounded.scale() < 0 ? rounded.setScale(0) : rounded);
+    return Words.decimals(share.times(HUNDRED)) + " %";
   }
 }

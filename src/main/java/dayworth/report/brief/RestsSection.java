@@ -121,7 +121,7 @@ final class RestsSection {
       all.add(
           new Statement(
               "All losses of output were multiplied by "
-                  + of.buildUp().lossFactor()
+                  + Words.decimals(of.buildUp().lossFactor())
                   + " for this paper; curve.csv and its fellows keep to the case's own losses.",
               "output_loss.csv, --loss-factor"));
     }
