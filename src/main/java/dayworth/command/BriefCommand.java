@@ -17,6 +17,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalLong;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 
 /** {@code dayworth brief}. */
@@ -35,6 +36,8 @@ final class BriefCommand extends CaseCommand {
       paramLabel = "html|md",
       description = "A page that needs nothing else, or its text as Markdown; html if not given.")
   private Form as = Form.html;
+
+  @Mixin private EffortOptions effort = new EffortOptions();
 
   /** How the brief is written; the names are those of the command line. */
   enum Form {
@@ -62,7 +65,7 @@ final class BriefCommand extends CaseCommand {
 
   private BriefAnswer ask(Case read, OptionalLong at) throws FinishTooEarly {
     try (ProgressLine progress = ProgressLine.start(err(), isTerminal())) {
-      return BriefQuestion.ask(read, at, progress);
+      return BriefQuestion.ask(read, at, effort.from(), progress);
     }
   }
 

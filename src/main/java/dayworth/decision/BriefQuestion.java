@@ -43,9 +43,15 @@ public final class BriefQuestion {
    * @throws FinishTooEarly if the project cannot finish within {@code at}
    */
   public static BriefAnswer ask(Case of, OptionalLong at, Watcher watcher) throws FinishTooEarly {
-    WeighAnswer weigh = WeighQuestion.ask(of, watcher);
+    return ask(of, at, Effort.USUAL, watcher);
+  }
+
+  /** The same with a stated effort. */
+  public static BriefAnswer ask(Case of, OptionalLong at, Effort effort, Watcher watcher)
+      throws FinishTooEarly {
+    WeighAnswer weigh = WeighQuestion.ask(of, LossScaling.NONE, effort, watcher);
     long finish = at.orElse(weigh.granted().best().duration());
-    MeetAnswer chosen = MeetQuestion.ask(of, new Wish.In(finish), 0, watcher);
+    MeetAnswer chosen = MeetQuestion.ask(of, new Wish.In(finish), 0, effort, watcher);
     watcher.now("writing the brief");
     return new BriefQuestion(of, weigh, chosen).answer();
   }

@@ -10,10 +10,10 @@ import java.util.stream.Collectors;
  * What is said beside a pattern that asks for care, with the published figures and where they are
  * from. Nothing here calls a pattern lawful or safe.
  */
-final class CautionText {
+public final class CautionText {
 
   /** Whose decision it is. */
-  static final String WHO_DECIDES =
+  public static final String WHO_DECIDES =
       "These are published findings, not a judgement of any pattern. Local working-time rules,"
           + " agreements and the competent person decide what may be worked, and how.";
 
@@ -33,7 +33,8 @@ final class CautionText {
                         "; ", "Caution, " + Wording.safe(pattern.name()) + ": ", ".")));
   }
 
-  static String of(Caution caution, Pattern pattern) {
+  /** What was found, in words that follow a colon. */
+  public static String of(Caution caution, Pattern pattern) {
     String hours = WayFigures.number(pattern.hoursPerWeek()).toPlainString();
     return switch (caution) {
       case LONG_WEEK ->

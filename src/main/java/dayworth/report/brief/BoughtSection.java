@@ -64,6 +64,8 @@ final class BoughtSection {
       parts.add(new Part.Prose(List.of("Nothing is bought: the work goes on at its normal pace.")));
     } else {
       parts.add(new Part.Sheet(bought()));
+      offChains().ifPresent(parts::add);
+      parts.addAll(new BuiltUpMeasures(answer, words, numbering).parts());
       unexplained().ifPresent(parts::add);
       parts.addAll(price());
     }
@@ -214,9 +216,36 @@ final class BoughtSection {
 
   private String onChains(Bought one) {
     List<String> on = names.passing(answer.chosen().chains(), one.activity());
-    return on.isEmpty()
-        ? "none that is critical"
-        : Words.list(on, MOST_CHAINS_NAMED).replace(" and ", ", ");
+    if (on.isEmpty()) {
+      return isCritical(one.activity()) ? "one that is not listed here" : "none, it has float";
+    }
+    return Words.list(on, MOST_CHAINS_NAMED).replace(" and ", ", ");
+  }
+
+  private boolean isCritical(int activity) {
+    return answer.of().isCritical(answer.chosen().curve().asked().timing(), activity);
+  }
+
+  /** Money that hangs on moments makes it pay to shorten what does not hold the finish. */
+  private Optional<Part> offChains() {
+    List<Integer> off =
+        answer.chosen().bought().stream()
+            .map(Bought::activity)
+            .filter(i -> !isCritical(i))
+            .toList();
+    if (off.isEmpty() || answer.of().momentMoney().isNone()) {
+      return Optional.empty();
+    }
+    String ids = Words.list(off.stream().map(words::id).toList(), 6);
+    return Optional.of(
+        new Part.Prose(
+            List.of(
+                ids
+                    + (off.size() == 1 ? " does" : " do")
+                    + " not hold the finish: "
+                    + (off.size() == 1 ? "it is" : "they are")
+                    + " done faster for the running cost and the money of sections that hang on"
+                    + " when single activities are done.")));
   }
 
   // Cost and price

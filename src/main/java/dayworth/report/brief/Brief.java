@@ -6,6 +6,7 @@ import dayworth.report.brief.page.Document;
 import dayworth.report.brief.page.HtmlPage;
 import dayworth.report.brief.page.MarkdownPage;
 import dayworth.report.brief.page.Section;
+import dayworth.value.Quantity;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
@@ -58,6 +59,14 @@ public final class Brief {
             ExplorerBar.style(axis, narrow)));
   }
 
+  /** The other files are written with the losses of the case itself. */
+  private String closing() {
+    return answer.of().buildUp().lossFactor().equals(Quantity.ONE)
+        ? "Written by dayworth brief. The figures are those of curve.csv, steps.csv and plan.csv, to"
+            + " the cent; dayworth verify checks them again."
+        : "Written by dayworth brief with another loss of output than the case's own.";
+  }
+
   Document document() {
     Numbering numbering = new Numbering();
     HeadOfBrief head = new HeadOfBrief(answer, words, outcome);
@@ -82,7 +91,6 @@ public final class Brief {
         head.lede(),
         head.facts(),
         sections,
-        "Written by dayworth brief. The figures are those of curve.csv, steps.csv and plan.csv, to"
-            + " the cent; dayworth verify checks them again.");
+        closing());
   }
 }

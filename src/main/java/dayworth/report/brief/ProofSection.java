@@ -60,7 +60,14 @@ final class ProofSection {
       parts.add(new Part.Sheet(branches(name)));
     }
     parts.add(new Part.Sheet(finishes()));
-    return new Section("proof", "No cheaper plan exists", parts);
+    String title =
+        isProved() ? "No cheaper plan exists" : "How much cheaper another plan could be at most";
+    return new Section("proof", title, parts);
+  }
+
+  private boolean isProved() {
+    return proof.blocks().size() == 1
+        || cents(proof.bound()).compareTo(cents(proof.planCost())) >= 0;
   }
 
   // One flow proves it
@@ -216,16 +223,32 @@ final class ProofSection {
   // Branches prove it
 
   private String branchedClaim(String name) {
-    return "Part of the money goes by calendar days or begun weeks, so no single sheet can prove the"
-        + " plan. All plans were divided into "
+    List<String> whys = new ArrayList<>();
+    List<String> by = new ArrayList<>();
+    if (answer.of().network().hasChoices()) {
+      whys.add("measures are taken wholly or not at all");
+      by.add("which measures they take");
+    }
+    if (!answer.of().momentMoney().charges().isEmpty()) {
+      whys.add("part of the money goes by calendar days or begun weeks");
+      by.add("when the dates in question come");
+    }
+    return Words.capital(Words.list(whys, 2))
+        + ", so no single sheet can prove the plan. All plans were divided into "
         + proof.branchCount()
-        + " groups by when the dates in question come; "
+        + " groups by "
+        + Words.list(by, 2)
+        + "; "
         + name
         + " gives for each what its plans cost at least, none less than "
         + words.money(cents(proof.bound()))
         + ", and this plan costs "
         + words.money(cents(proof.planCost()))
-        + ".";
+        + (isProved()
+            ? "."
+            : ". Within the effort allowed, a plan cheaper by at most "
+                + words.money(cents(proof.planCost()).subtract(cents(proof.bound())))
+                + " could not be ruled out.");
   }
 
   private Table branches(String name) {

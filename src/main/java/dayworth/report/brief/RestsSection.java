@@ -13,6 +13,7 @@ import dayworth.network.Link;
 import dayworth.network.Relation;
 import dayworth.report.brief.page.Part;
 import dayworth.report.brief.page.Part.Statement;
+import dayworth.value.Quantity;
 import java.math.BigDecimal;
 import java.time.DayOfWeek;
 import java.time.format.TextStyle;
@@ -20,6 +21,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
+import java.util.stream.Stream;
 
 /** What the answer rests on, what the client must do, and what must be heeded. */
 final class RestsSection {
@@ -79,11 +81,7 @@ final class RestsSection {
               "notes.md, Assumptions: nothing there"));
     }
     all.add(calendar());
-    all.add(
-        new Statement(
-            "Between its normal and its crash duration each activity can be shortened bit by bit at"
-                + " an even price.",
-            "activities.csv"));
+    all.addAll(shortening());
     all.addAll(lags());
     all.addAll(money());
     all.add(
@@ -95,6 +93,38 @@ final class RestsSection {
         new Statement(
             "Work is done without a break, and takes no longer than its normal duration.",
             "limit of the method"));
+    return all;
+  }
+
+  private List<Statement> shortening() {
+    List<Statement> all = new ArrayList<>();
+    all.add(
+        new Statement(
+            "Between its normal and its crash duration "
+                + (of.network().measures().isNone() ? "each" : "an")
+                + " activity can be shortened bit by bit at an even price.",
+            "activities.csv"));
+    if (!of.network().measures().isNone()) {
+      String files =
+          Words.list(
+              Stream.of("measures.csv", "labour.csv", "patterns.csv").filter(this::has).toList(),
+              3);
+      all.add(
+          new Statement(
+              "A measure is taken wholly or not at all, one at most for an activity, and the price"
+                  + " of "
+                  + words.aUnit()
+                  + " by it is an average. A package is paid once, whatever uses it.",
+              files));
+    }
+    if (!of.buildUp().lossFactor().equals(Quantity.ONE)) {
+      all.add(
+          new Statement(
+              "All losses of output were multiplied by "
+                  + Words.decimals(of.buildUp().lossFactor())
+                  + " for this paper; curve.csv and its fellows keep to the case's own losses.",
+              "output_loss.csv, --loss-factor"));
+    }
     return all;
   }
 

@@ -25,17 +25,24 @@ final class StepWhy {
   private final Words words;
   private final ChainNames names;
   private final List<StepReason> reasons;
+  private final boolean isProved;
 
   StepWhy(BriefAnswer answer, Words words, ChainNames names) {
     this.network = answer.of().network();
     this.words = words;
     this.names = names;
     this.reasons = answer.reasons();
+    this.isProved = answer.curve().unproved().isEmpty();
   }
 
   String of(int k) {
     StepReason reason = reasons.get(k);
     List<String> said = new ArrayList<>();
+    if (reason.step().changes().isEmpty() && reason.before().equals(reason.after())) {
+      return "Nothing need be bought: the same plan is done in "
+          + words.time(reason.step().to())
+          + " already.";
+    }
     exhausted(k).ifPresent(said::add);
     said.add(held(k, reason));
     if (reason.givenBack().isEmpty()) {
@@ -52,10 +59,11 @@ final class StepWhy {
       return Optional.empty();
     }
     List<Integer> now = reasons.get(k).shortened().stream().map(Change::activity).toList();
+    List<Integer> back = reasons.get(k).givenBack().stream().map(Change::activity).toList();
     List<Integer> out =
         reasons.get(k - 1).shortened().stream()
             .map(Change::activity)
-            .filter(i -> !now.contains(i))
+            .filter(i -> !now.contains(i) && !back.contains(i))
             .filter(i -> reasons.get(k).before().duration(i) == network.activity(i).crash())
             .toList();
     return out.isEmpty()
@@ -70,6 +78,9 @@ final class StepWhy {
     List<List<Integer>> joined = joined(k);
     if (one) {
       return "One chain holds the finish." + cheapest(reason);
+    }
+    if (reason.chainCount().signum() == 0) {
+      return "The plan so far is done earlier than " + words.time(reason.step().from()) + ".";
     }
     String all =
         Words.capital(FinishTelling.chainCount(reason.chainCount()))
@@ -134,7 +145,9 @@ final class StepWhy {
     }
     return Optional.of(
         ids(shortened)
-            + " together do it, and nothing else does it for less."
+            + (isProved
+                ? " together do it, and nothing else does it for less."
+                : " together do it.")
             + common(reason).map(text -> " " + text).orElse(""));
   }
 
@@ -169,6 +182,7 @@ final class StepWhy {
     boolean even =
         reason.step().changes().stream()
             .allMatch(change -> Math.abs(change.shortened()) == reason.step().ticks());
+    List<Integer> slack = new ArrayList<>();
     for (Change back : reason.givenBack()) {
       Optional<List<Integer>> chain =
           reason.chains().stream()
@@ -192,12 +206,15 @@ final class StepWhy {
                 + words.aUnit()
                 + " back each time.");
       } else {
-        said.add(
-            id(back)
-                + " need no longer be as short and gets "
-                + words.aUnit().replaceFirst("^an? ", "")
-                + "s back.");
+        slack.add(back.activity());
       }
+    }
+    if (!slack.isEmpty()) {
+      said.add(
+          ids(slack)
+              + (slack.size() == 1
+                  ? " need not be as short any more and gets time back."
+                  : " need not be as short any more and get time back."));
     }
   }
 

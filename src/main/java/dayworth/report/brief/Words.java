@@ -8,6 +8,7 @@ import dayworth.decision.Finish;
 import dayworth.decision.TimeUnit;
 import dayworth.network.Activity;
 import dayworth.value.Money;
+import dayworth.value.Quantity;
 import dayworth.value.TimeScale;
 import dayworth.value.WorkingCalendar;
 import java.math.BigDecimal;
@@ -139,6 +140,12 @@ final class Words {
   static String grouped(BigDecimal number) {
     String text = String.format(Locale.ROOT, "%,." + Math.max(0, number.scale()) + "f", number);
     return text.startsWith("-") ? "−" + text.substring(1) : text;
+  }
+
+  /** Hours, weeks and shares, with as many decimals as they need, at most three. */
+  static String decimals(Quantity quantity) {
+    BigDecimal rounded = quantity.rounded(3, RoundingMode.HALF_UP).stripTrailingZeros();
+    return grouped(rounded.scale() < 0 ? rounded.setScale(0) : rounded);
   }
 
   /** What a rate is for one of. */

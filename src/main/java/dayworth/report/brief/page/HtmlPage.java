@@ -92,13 +92,14 @@ public final class HtmlPage {
     return colon < 0 ? document.title() : document.title().substring(0, colon);
   }
 
+  /** An escape takes one space after it along, so it brings one. */
   static String cssString(String text) {
     StringBuilder css = new StringBuilder("\"");
     text.codePoints()
         .forEach(
             c -> {
               boolean plain = (Character.isLetterOrDigit(c) && c < 128) || c == ' ' || c == ',';
-              css.append(plain ? Character.toString(c) : String.format("\\%06X", c));
+              css.append(plain ? Character.toString(c) : String.format("\\%06X ", c));
             });
     return css.append('"').toString();
   }
