@@ -127,15 +127,20 @@ final class BuiltUpMeasures {
     rows.add(
         row(
             "Lost output",
-            hours(spell.hoursLost()) + " that yield nothing, at the straight rate",
+            spell.hoursLost().signum() == 0
+                ? "none"
+                : hours(spell.hoursLost()) + " that yield nothing, at the straight rate",
             extra.lostOutput()));
     rows.add(
         row(
             "Extra hours",
-            hours(spell.hoursCrowded()) + " more for the same output, because the crew is crowded",
+            spell.hoursCrowded().signum() == 0
+                ? "none: the crew is not crowded"
+                : hours(spell.hoursCrowded())
+                    + " more for the same output, because the crew is crowded",
             extra.extraHours()));
     rows.add(row("Supervision", supervision(spell), extra.supervision()));
-    rows.add(row("Once", "paid once for the spell", extra.once()));
+    rows.add(row("Once", extra.once().isZero() ? "none" : "paid once for the spell", extra.once()));
     Row sum = row("Sum", "more than at the normal pattern throughout", extra.total());
     rows.add(new Row(Row.Kind.SUM, sum.cells()));
     return new Table(
