@@ -9,6 +9,7 @@ import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.DoubleStream;
 
 /** What of the network's picture is the same at every finish: boxes, lanes, links and scale. */
 final class NetworkLayout {
@@ -49,12 +50,15 @@ final class NetworkLayout {
     this.least = new double[choice.shown().size()];
     Network network = answer.of().network();
     long longest = answer.states().get(0).finish().duration();
+    this.frames =
+        answer.states().stream().map(state -> NetworkFrame.of(state, choice.shown())).toList();
     double figures = 2 * Face.MEDIUM.width(words.figure(longest), 12);
     for (int b = 0; b < lane.length; b++) {
       int activity = choice.shown().get(b);
       boxOf.put(activity, b);
       Activity one = network.activity(activity);
-      double first = figures + Face.SEMIBOLD.width(Words.shortId(one), 12) + 18;
+      double corners = Math.max(figures, corners(b, words));
+      double first = corners + Face.SEMIBOLD.width(Words.shortId(one), 12) + 18;
       least[b] = Math.max(first, Math.max(LEAST, named(Words.name(one)))) + BEFORE + AFTER;
       for (int l = 0; l < lanes.size(); l++) {
         if (lanes.get(l).contains(activity)) {
@@ -66,8 +70,6 @@ final class NetworkLayout {
         .filter(
             link -> boxOf.containsKey(link.predecessor()) && boxOf.containsKey(link.successor()))
         .forEach(links::add);
-    this.frames =
-        answer.states().stream().map(state -> NetworkFrame.of(state, choice.shown())).toList();
     this.left = gutter();
     this.perTick = scale(Math.max(1, longest));
     this.width =
@@ -76,6 +78,23 @@ final class NetworkLayout {
             left
                 + RIGHT
                 + frames.stream().mapToDouble(frame -> ruler(frame).width()).max().orElse(0));
+  }
+
+  /** What the two figures beside the id need, or those beside the float, at any finish. */
+  private double corners(int b, Words words) {
+    return frames.stream()
+        .flatMapToDouble(
+            frame ->
+                DoubleStream.of(
+                    both(frame.early(b), frame.duration(b), words),
+                    both(frame.late(b), frame.duration(b), words)))
+        .max()
+        .orElse(0);
+  }
+
+  private static double both(long from, long duration, Words words) {
+    return Face.MEDIUM.width(words.figure(from), 12)
+        + Face.MEDIUM.width(words.figure(from + duration), 12);
   }
 
   /** What a name on two lines needs; a very long one is cut. */
