@@ -8,6 +8,7 @@ import dayworth.network.Plan;
 import dayworth.value.Money;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.IntStream;
 import java.util.stream.LongStream;
 
 /**
@@ -48,7 +49,8 @@ final class HeldSections {
   Plan ofBase(Plan plan) {
     int size = base.size();
     return Plan.scheduled(
-        LongStream.range(0, size).map(i -> plan.duration((int) i)).toArray(),
-        LongStream.range(0, size).map(i -> plan.start((int) i)).toArray());
+            LongStream.range(0, size).map(i -> plan.duration((int) i)).toArray(),
+            LongStream.range(0, size).map(i -> plan.start((int) i)).toArray())
+        .using(IntStream.range(0, size).map(plan::measure).toArray());
   }
 }
